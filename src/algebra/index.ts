@@ -1,0 +1,17 @@
+/** Exact numbers: rationals, polynomials, rational functions of parameters, matrices over a field, certified roots. */
+
+export type { Field } from './field.ts';
+export type { Rational } from './rational.ts';
+export {
+  addRationals,
+  compareRationals,
+  divideRationals,
+  multiplyRationals,
+  negateRational,
+  ONE,
+  rational,
+  subtractRationals,
+  ZERO,
+} from './rational.ts';
+export type { SparseMatrix } from './sparse-matrix.ts';
+export { entryAt, fromRows, toRows } from './sparse-matrix.ts';
