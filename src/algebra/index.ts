@@ -1,6 +1,7 @@
 /** Exact numbers: rationals, polynomials, rational functions of parameters, matrices over a field, certified roots. */
 
 export type { Field } from './field.ts';
+export { doubleField, rationalField } from './fields.ts';
 export type { Rational } from './rational.ts';
 export {
   addRationals,
@@ -13,5 +14,7 @@ export {
   subtractRationals,
   ZERO,
 } from './rational.ts';
+export { rationalFromDouble, toDouble } from './rational-double.ts';
+export { parseRational, toFraction } from './rational-text.ts';
 export type { SparseMatrix } from './sparse-matrix.ts';
 export { entryAt, fromRows, toRows } from './sparse-matrix.ts';
