@@ -1,0 +1,32 @@
+/**
+ * The sizes, ports, labels and shapes of blocks on the sheet. The sheet on the screen, the wires' routes, the arranging and the
+ * sheet's SVG all start here. Everything is a pure function of the document.
+ */
+
+export { blockBox, blockOutline, SUMMING_RADIUS, TERMINAL_RADIUS } from './block-box.ts';
+export { blockDrawing, holdsState } from './block-drawing.ts';
+export { SCRIPT_SCALE, SCRIPT_SHIFT, textWidth } from './character-widths.ts';
+export { TYPE } from './content.ts';
+export { inlineSpans, nameSpans } from './inline-spans.ts';
+export { textArea } from './labels.ts';
+export { portCounts } from './ports.ts';
+export { blockRectangle, enclosing, sheetBounds, snap } from './sheet-bounds.ts';
+export { sheetGeometry } from './sheet-geometry.ts';
+export type {
+  Anchor,
+  BlockGeometry,
+  Box,
+  Face,
+  Ink,
+  Label,
+  Outline,
+  PortPlace,
+  Rectangle,
+  Shape,
+  SheetGeometry,
+  Side,
+  Span,
+  TextRole,
+  TextShape,
+} from './types.ts';
+export { GRID, HALF_GRID } from './types.ts';
