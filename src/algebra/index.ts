@@ -2,6 +2,21 @@
 
 export type { Field } from './field.ts';
 export { doubleField, rationalField } from './fields.ts';
+export type { Polynomial } from './polynomial.ts';
+export {
+  addPolynomials,
+  arePolynomialsEqual,
+  derivative,
+  dividePolynomials,
+  evaluatePolynomialAt,
+  monic,
+  multiplyPolynomials,
+  polynomial,
+  reflectPolynomial,
+  scalePolynomial,
+  subtractPolynomials,
+} from './polynomial.ts';
+export { greatestCommonDivisorOfPolynomials } from './polynomial-gcd.ts';
 export type { Rational } from './rational.ts';
 export {
   addRationals,
@@ -18,3 +33,5 @@ export { rationalFromDouble, toDouble } from './rational-double.ts';
 export { parseRational, toFraction } from './rational-text.ts';
 export type { SparseMatrix } from './sparse-matrix.ts';
 export { entryAt, fromRows, toRows } from './sparse-matrix.ts';
+export type { SquareFreeFactor } from './square-free.ts';
+export { squareFreeFactors } from './square-free.ts';
