@@ -1,0 +1,78 @@
+/** One block on the sheet: its drawing, its ports for the hand, what is open or wrong about it, its fields when they are edited. */
+
+import { memo } from 'react';
+import { Handle, type NodeProps } from 'reactflow';
+import { type BlockGeometry, blockDrawing, type PortPlace } from '../../diagram/geometry/index.ts';
+import { actions, type State, useStore } from '../store/index.ts';
+import { BlockFields } from './BlockFields.tsx';
+import { ShapeView } from './ShapeView.tsx';
+import { type BlockFlowNode, FLOW_SIDE } from './useSheetNodes.ts';
+import { useBlockMark } from './useBlockMark.ts';
+
+export const BlockNode = memo(function BlockNode({ id, data, selected }: NodeProps<BlockFlowNode>) {
+  const { block, geometry, openPorts } = data;
+  const value = useStore((state: State) => state.results.values.blocks[id]);
+  const isEditing = useStore((state: State) => state.view.editing === id);
+  const mark = useBlockMark(id);
+  const { width, height } = geometry.box;
+  return (
+    <div
+      className={`block${selected ? ' block-selected' : ''}${mark === null ? '' : ` block-${mark}`}`}
+      style={{ width, height }}
+      onDoubleClick={() => actions.editFields(id)}
+    >
+      <svg className="block-drawing" width={width} height={height} aria-hidden="true">
+        <g transform={`translate(${width / 2} ${height / 2})`}>
+          {blockDrawing(block, geometry, value).map((shape, i) => (
+            // biome-ignore lint/suspicious/noArrayIndexKey: a block's shapes have no identity but their place
+            <ShapeView key={i} shape={shape} />
+          ))}
+          {openPorts.map(port => (
+            <OpenPort key={port} place={geometry.inputs[port]} />
+          ))}
+        </g>
+      </svg>
+      <Ports geometry={geometry} />
+      {isEditing && <BlockFields block={block} />}
+    </div>
+  );
+});
+
+/** A ring at an input port that no wire reaches: it reads zero. */
+function OpenPort({ place }: { readonly place: PortPlace | undefined }) {
+  if (place === undefined) return null;
+  return (
+    <circle className="open-port" cx={place.x} cy={place.y} r={5}>
+      <title>Not connected: reads zero.</title>
+    </circle>
+  );
+}
+
+const Ports = memo(function Ports({ geometry }: { readonly geometry: BlockGeometry }) {
+  const { width, height } = geometry.box;
+  const at = (place: PortPlace) => ({ left: width / 2 + place.x, top: height / 2 + place.y });
+  return (
+    <>
+      {geometry.inputs.map((place, port) => (
+        <Handle
+          key={`in:${port}`}
+          id={`in:${port}`}
+          type="target"
+          position={FLOW_SIDE[place.side]}
+          className="port"
+          style={at(place)}
+        />
+      ))}
+      {geometry.outputs.map((place, port) => (
+        <Handle
+          key={`out:${port}`}
+          id={`out:${port}`}
+          type="source"
+          position={FLOW_SIDE[place.side]}
+          className="port"
+          style={at(place)}
+        />
+      ))}
+    </>
+  );
+});

@@ -1,0 +1,68 @@
+/**
+ * The drawing surface. The diagram is the truth; React Flow is handed nodes and edges made from it and only reports what
+ * the hand does. A drag is shown live and becomes one edit when it ends.
+ */
+
+import 'reactflow/dist/base.css';
+import { Background, BackgroundVariant, ConnectionMode, ReactFlow } from 'reactflow';
+import { GRID } from '../../diagram/geometry/index.ts';
+import { BlockNode } from './BlockNode.tsx';
+import { BranchDots } from './BranchDots.tsx';
+import { DrawnWire } from './DrawnWire.tsx';
+import { useDropPart } from './useDropPart.ts';
+import { usePlacedSheet } from './usePlacedSheet.ts';
+import { useSheetEvents } from './useSheetEvents.ts';
+import { useSheetKeys } from './useSheetKeys.ts';
+import { useSheetNodes } from './useSheetNodes.ts';
+import { useSheetWires } from './useSheetWires.ts';
+import { WireEdge } from './WireEdge.tsx';
+
+const NODE_TYPES = { block: BlockNode };
+const EDGE_TYPES = { wire: WireEdge };
+const SNAP: [number, number] = [GRID, GRID];
+const CENTRE: [number, number] = [0.5, 0.5];
+const FIT = { padding: 0.12, maxZoom: 1.4 };
+
+/** Above this many blocks only those in view are kept in the page (dependencies: measured at some 300). */
+const ALL_IN_PAGE = 300;
+
+export function Sheet() {
+  const placed = usePlacedSheet();
+  const nodes = useSheetNodes(placed);
+  const edges = useSheetWires(placed);
+  const events = useSheetEvents(placed);
+  const drop = useDropPart();
+  const onKeyDown = useSheetKeys();
+  return (
+    <div className="sheet" onKeyDown={onKeyDown} {...drop}>
+      <ReactFlow
+        nodes={nodes}
+        edges={edges}
+        nodeTypes={NODE_TYPES}
+        edgeTypes={EDGE_TYPES}
+        nodeOrigin={CENTRE}
+        snapToGrid
+        snapGrid={SNAP}
+        minZoom={0.1}
+        maxZoom={4}
+        fitView
+        fitViewOptions={FIT}
+        connectionMode={ConnectionMode.Strict}
+        connectionLineComponent={DrawnWire}
+        connectionRadius={22}
+        deleteKeyCode={null}
+        selectionKeyCode="Shift"
+        multiSelectionKeyCode={['Control', 'Meta', 'Shift']}
+        zoomOnDoubleClick={false}
+        disableKeyboardA11y
+        edgesFocusable={false}
+        elevateNodesOnSelect={false}
+        onlyRenderVisibleElements={nodes.length > ALL_IN_PAGE}
+        {...events}
+      >
+        <Background variant={BackgroundVariant.Lines} gap={GRID} lineWidth={1} color="var(--square)" />
+        <BranchDots dots={placed.dots} />
+      </ReactFlow>
+    </div>
+  );
+}

@@ -1,0 +1,22 @@
+/** Removes the selected blocks with their wires, and the selected wires, as one step; focus goes to the sheet. */
+
+import { blockTitle, type Edit } from '../../diagram/index.ts';
+import { actions, store, wireKey } from '../store/index.ts';
+import { focusedBlock } from './focus-block.ts';
+
+export function removeSelected(): boolean {
+  const { selection, document: slice } = store.getState();
+  const { blocks, wires } = slice.diagram;
+  const focused = focusedBlock();
+  const gone = selection.blocks.size + selection.wires.size > 0 || focused === null ? selection.blocks : new Set([focused]);
+  const cut = wires.filter(wire => selection.wires.has(wireKey(wire)) && !gone.has(wire.from[0]) && !gone.has(wire.to[0]));
+  if (gone.size + cut.length === 0) return false;
+  const edits: Edit[] = cut.map(({ to }) => ({ kind: 'disconnect', to }));
+  if (gone.size > 0) edits.push({ kind: 'removeBlocks', ids: [...gone] });
+  const titles = blocks.filter(({ id }) => gone.has(id)).map(blockTitle);
+  if (cut.length > 0) titles.push(cut.length === 1 ? 'a wire' : `${cut.length} wires`);
+  actions.editTogether(edits, `Removed ${titles.join(', ')}.`);
+  const pane = document.querySelector('.sheet .react-flow');
+  if (pane instanceof HTMLElement) pane.focus({ preventScroll: true });
+  return true;
+}

@@ -1,0 +1,43 @@
+/** React Flow's edges, made from the placed sheet; a wire whose route did not change keeps its edge. */
+
+import { useMemo, useRef } from 'react';
+import type { Edge } from 'reactflow';
+import type { Point } from '../../diagram/index.ts';
+import { type State, useStore, wireKey } from '../store/index.ts';
+import type { PlacedSheet } from './usePlacedSheet.ts';
+
+export interface WireData extends Record<string, unknown> {
+  readonly points: readonly Point[];
+}
+
+export type WireFlowEdge = Edge<WireData, 'wire'>;
+
+const selected = (state: State) => state.selection.wires;
+
+export function useSheetWires({ sheet, routes }: PlacedSheet): WireFlowEdge[] {
+  const selection = useStore(selected);
+  const before = useRef(new Map<string, WireFlowEdge>());
+  return useMemo(() => {
+    const edges = sheet.wires.map((wire, index): WireFlowEdge => {
+      const id = wireKey(wire);
+      const points = routes.wires[index]?.points ?? [];
+      const isSelected = selection.has(id);
+      const former = before.current.get(id);
+      if (former?.data?.points === points && former.selected === isSelected && former.source === wire.from[0]) {
+        return former;
+      }
+      return {
+        id,
+        type: 'wire',
+        source: wire.from[0],
+        sourceHandle: `out:${wire.from[1]}`,
+        target: wire.to[0],
+        targetHandle: `in:${wire.to[1]}`,
+        data: { points },
+        selected: isSelected,
+      };
+    });
+    before.current = new Map(edges.map(edge => [edge.id, edge]));
+    return edges;
+  }, [sheet, routes, selection]);
+}

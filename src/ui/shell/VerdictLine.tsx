@@ -1,0 +1,73 @@
+/** The line at the bottom: stability, sizes, algebraic loops, the self-check, and the standing caution. */
+
+import type { Derivation } from '../../compile/index.ts';
+import { actions, type State, useStore } from '../store/index.ts';
+import { selfCheckText, sizesText, stabilityText } from './verdict-texts.ts';
+
+const results = (state: State) => state.results;
+
+export function VerdictLine() {
+  const { status, derivation, poles, problems, stopped } = useStore(results);
+  return (
+    <footer className="verdict" aria-label="Verdict">
+      {stopped !== null && <span className="verdict-stability verdict-wrong">{stopped}</span>}
+      {stopped === null && status === 'pending' && <span className="verdict-stability">Deriving…</span>}
+      {stopped === null && status === 'failed' && (
+        <span className="verdict-stability verdict-wrong">No model: {problems[0]?.message}</span>
+      )}
+      {stopped === null && derivation !== null && (
+        <>
+          <StabilityWord answer={poles} />
+          <span>{sizesText(derivation.model)}</span>
+          <LoopCount derivation={derivation} />
+          <WarningCount derivation={derivation} />
+          <CheckFigure derivation={derivation} />
+        </>
+      )}
+      <span className="verdict-caution">linear model: verify on the machine before use</span>
+    </footer>
+  );
+}
+
+function StabilityWord({ answer }: { readonly answer: State['results']['poles'] }) {
+  if (answer === null) return <span className="verdict-stability">…</span>;
+  const tone = answer.stability.verdict === 'stable' ? 'verdict-proved' : 'verdict-wrong';
+  return <span className={`verdict-stability ${tone}`}>{stabilityText(answer.stability)}</span>;
+}
+
+function LoopCount({ derivation }: { readonly derivation: Derivation }) {
+  const { loops } = derivation;
+  if (loops.length === 0) return <span>no algebraic loop</span>;
+  const text = loops.length === 1 ? '1 algebraic loop, solved' : `${loops.length} algebraic loops, solved`;
+  return (
+    <button
+      type="button"
+      className="quiet verdict-loop"
+      onClick={() => actions.selectBlocks(loops.flatMap(({ blocks }) => blocks))}
+    >
+      {text}
+    </button>
+  );
+}
+
+function WarningCount({ derivation }: { readonly derivation: Derivation }) {
+  const { warnings } = derivation;
+  if (warnings.length === 0) return null;
+  return (
+    <button
+      type="button"
+      className="quiet"
+      title={warnings.map(({ message }) => message).join('\n')}
+      onClick={() => actions.selectBlocks(warnings.flatMap(({ blocks }) => blocks))}
+    >
+      {warnings.length === 1 ? '1 warning' : `${warnings.length} warnings`}
+    </button>
+  );
+}
+
+function CheckFigure({ derivation }: { readonly derivation: Derivation }) {
+  const { selfCheck } = derivation;
+  return (
+    <span className={`verdict-check ${selfCheck.passed ? '' : 'verdict-wrong'}`}>{selfCheckText(selfCheck)}</span>
+  );
+}

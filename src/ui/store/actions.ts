@@ -1,0 +1,142 @@
+/**
+ * Everything a hand can do to the page, by name. An action writes its own slice; a refused edit changes nothing and says
+ * why in the notice.
+ */
+
+import type { Diagram, Edit, Point } from '../../diagram/index.ts';
+import type { Problem } from '../../problem/index.ts';
+import type { Answer, Notation } from '../../worker/index.ts';
+import { type DocumentSlice, edited, opened, redone, undone } from './document.ts';
+import { answered } from './results.ts';
+import { NOTHING_SELECTED, type SelectionSlice, stillThere } from './selection.ts';
+import { store } from './store.ts';
+import type { ViewSlice } from './view.ts';
+
+/** Makes one edit, one undo step. Returns the problems where it is refused, none where it is done. */
+export function edit(change: Edit, said?: string): readonly Problem[] {
+  const outcome = edited(store.getState().document, change);
+  if (!outcome.ok) {
+    notify(outcome.problems[0]?.message ?? 'That edit is not possible.', 'refused');
+    return outcome.problems;
+  }
+  replaceDocument(outcome.slice);
+  if (said !== undefined) notify(said);
+  return [];
+}
+
+/** Makes several edits as one undo step, or none of them. */
+export function editTogether(changes: readonly Edit[], said?: string): readonly Problem[] {
+  const start = store.getState().document;
+  let slice = start;
+  for (const change of changes) {
+    const outcome = edited(slice, change);
+    if (!outcome.ok) {
+      notify(outcome.problems[0]?.message ?? 'That edit is not possible.', 'refused');
+      return outcome.problems;
+    }
+    slice = outcome.slice;
+  }
+  if (slice !== start) {
+    replaceDocument({ ...slice, past: [...start.past, start.diagram], revision: start.revision + 1 });
+  }
+  if (said !== undefined) notify(said);
+  return [];
+}
+
+export function undo(): void {
+  const { document } = store.getState();
+  if (document.past.length === 0) return notify('Nothing to undo.');
+  replaceDocument(undone(document));
+  notify('Undone.');
+}
+
+export function redo(): void {
+  const { document } = store.getState();
+  if (document.future.length === 0) return notify('Nothing to redo.');
+  replaceDocument(redone(document));
+  notify('Redone.');
+}
+
+/** Puts another drawing on the sheet; what was open stays kept under its own key. */
+export function openDrawing(diagram: Diagram, key: string, said: string): void {
+  store.setState(state => ({
+    document: opened(state.document, diagram, key),
+    selection: NOTHING_SELECTED,
+    view: { ...state.view, editing: null, input: null, output: null, kept: null },
+  }));
+  notify(said);
+}
+
+export function select(selection: SelectionSlice): void {
+  store.setState({ selection });
+}
+
+export function selectBlocks(ids: Iterable<string>): void {
+  store.setState({ selection: { blocks: new Set(ids), wires: new Set() } });
+}
+
+/** Shows blocks where the hand has them while a drag lasts. */
+export function hold(held: ReadonlyMap<string, Point> | null): void {
+  store.setState({ held });
+}
+
+/** Opens the fields of a block on the sheet, or closes them. */
+export function editFields(editing: string | null): void {
+  changeView({ editing });
+}
+
+/** Begins a wire by key from a block, or lets go of it. */
+export function beginWire(wiringFrom: string | null): void {
+  changeView({ wiringFrom });
+}
+
+export function setNotation(notation: Notation): void {
+  changeView({ notation });
+}
+
+export function setTheme(theme: ViewSlice['theme']): void {
+  changeView({ theme });
+}
+
+export function chooseChannel(input: string, output: string): void {
+  changeView({ input, output });
+}
+
+export function foldTitleBlock(folded: boolean): void {
+  changeView({ folded });
+}
+
+export function openDialog(dialog: ViewSlice['dialog']): void {
+  changeView({ dialog });
+}
+
+export function setKept(kept: ViewSlice['kept']): void {
+  changeView({ kept });
+}
+
+/** Says what was done or refused. */
+export function notify(text: string, tone: 'said' | 'refused' = 'said'): void {
+  store.setState(({ view }) => ({ view: { ...view, notice: { text, tone, serial: (view.notice?.serial ?? 0) + 1 } } }));
+}
+
+/** Takes an answer of the worker in. */
+export function takeAnswer(answer: Exclude<Answer, { kind: 'file' }>): void {
+  store.setState(({ results }) => ({ results: answered(results, answer) }));
+}
+
+/** Says that no answer can be had. */
+export function stopResults(stopped: string): void {
+  store.setState(({ results }) => ({ results: { ...results, stopped } }));
+}
+
+function changeView(change: Partial<ViewSlice>): void {
+  store.setState(({ view }) => ({ view: { ...view, ...change } }));
+}
+
+function replaceDocument(document: DocumentSlice): void {
+  store.setState(({ selection, view }) => ({
+    document,
+    selection: stillThere(selection, document.diagram),
+    view: document.diagram.blocks.some(({ id }) => id === view.editing) ? view : { ...view, editing: null },
+  }));
+}

@@ -1,0 +1,67 @@
+/**
+ * The results slice: the worker's newest answers. What was derived last stays on screen until a newer derivation arrives,
+ * so that nothing flickers while the hand moves; `answered` says for which revision it holds.
+ */
+
+import type { Derivation } from '../../compile/index.ts';
+import type { Problem } from '../../problem/index.ts';
+import type { Answer, ChannelAnswer, PolesAnswer, QuantityValues } from '../../worker/index.ts';
+
+export interface ResultsSlice {
+  readonly status: 'pending' | 'failed' | 'derived';
+  /** Revision of the document that `derivation` or `problems` belong to; −1 before the first answer. */
+  readonly answered: number;
+  readonly derivation: Derivation | null;
+  readonly problems: readonly Problem[];
+  readonly values: QuantityValues;
+  readonly poles: PolesAnswer | null;
+  readonly channel: ChannelAnswer | null;
+  /** Why there is no answer at all: the worker died twice on the same question. */
+  readonly stopped: string | null;
+}
+
+export const NO_RESULTS: ResultsSlice = {
+  status: 'pending',
+  answered: -1,
+  derivation: null,
+  problems: [],
+  values: { parameters: {}, blocks: {} },
+  poles: null,
+  channel: null,
+  stopped: null,
+};
+
+/** The slice with an answer taken in; an answer for an older revision than the newest one is dropped. */
+export function answered(slice: ResultsSlice, answer: Exclude<Answer, { kind: 'file' }>): ResultsSlice {
+  if (answer.revision < slice.answered) return slice;
+  switch (answer.kind) {
+    case 'model':
+      return answer.outcome.ok
+        ? {
+            ...slice,
+            status: 'derived',
+            answered: answer.revision,
+            derivation: answer.outcome.value,
+            problems: [],
+            values: answer.values,
+            stopped: null,
+          }
+        : {
+            ...NO_RESULTS,
+            status: 'failed',
+            answered: answer.revision,
+            problems: answer.outcome.problems,
+            values: answer.values,
+          };
+    case 'poles':
+      return { ...slice, poles: answer };
+    case 'channel':
+      return { ...slice, channel: answer };
+    default:
+      return unreachable(answer);
+  }
+}
+
+function unreachable(answer: never): never {
+  throw new Error(`an answer of no known kind: ${JSON.stringify(answer)}`);
+}

@@ -1,0 +1,25 @@
+/** The selection slice: blocks by id, wires by the input port they end at (an input port takes one wire). */
+
+import type { Sheet, Wire } from '../../diagram/index.ts';
+
+export interface SelectionSlice {
+  readonly blocks: ReadonlySet<string>;
+  readonly wires: ReadonlySet<string>;
+}
+
+export const NOTHING_SELECTED: SelectionSlice = { blocks: new Set(), wires: new Set() };
+
+/** A wire's key on its sheet: the port it ends at. */
+export function wireKey(wire: Wire): string {
+  return `${wire.to[0]}:${wire.to[1]}`;
+}
+
+/** The selection without what is no longer on the sheet; the same object where nothing went. */
+export function stillThere(selection: SelectionSlice, sheet: Sheet): SelectionSlice {
+  const ids = new Set(sheet.blocks.map(({ id }) => id));
+  const keys = new Set(sheet.wires.map(wireKey));
+  const blocks = [...selection.blocks].filter(id => ids.has(id));
+  const wires = [...selection.wires].filter(key => keys.has(key));
+  const same = blocks.length === selection.blocks.size && wires.length === selection.wires.size;
+  return same ? selection : { blocks: new Set(blocks), wires: new Set(wires) };
+}

@@ -1,0 +1,43 @@
+/** The view slice: what is shown and how, nothing of it part of the document. */
+
+import type { Notation } from '../../worker/index.ts';
+
+export interface ViewSlice {
+  readonly notation: Notation;
+  /** Names of the input and output whose transfer function and step response are shown; null: the first there is. */
+  readonly input: string | null;
+  readonly output: string | null;
+  /** Follows the system where null. */
+  readonly theme: 'light' | 'dark' | null;
+  /** The block whose fields are open on the sheet. */
+  readonly editing: string | null;
+  /** The block that a wire was begun from by key. */
+  readonly wiringFrom: string | null;
+  /** A title block folded to its heading. */
+  readonly folded: boolean;
+  readonly dialog: 'export' | 'drawings' | 'keys' | null;
+  /** The last thing that was done or refused, for the eye and the screen reader. */
+  readonly notice: Notice | null;
+  /** When the drawing was last kept on the device, or why it could not be. */
+  readonly kept: { readonly at: string } | { readonly refused: string } | null;
+}
+
+export interface Notice {
+  readonly text: string;
+  readonly tone: 'said' | 'refused';
+  /** Two equal texts in a row are still two notices. */
+  readonly serial: number;
+}
+
+export const FIRST_VIEW: ViewSlice = {
+  notation: 'fractions',
+  input: null,
+  output: null,
+  theme: null,
+  editing: null,
+  wiringFrom: null,
+  folded: false,
+  dialog: null,
+  notice: null,
+  kept: null,
+};

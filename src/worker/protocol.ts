@@ -1,0 +1,69 @@
+/**
+ * The messages between the tab and the worker: plain data, each with the revision of the document it is about. A newer
+ * `derive` makes every older question void; an answer for an older revision is dropped by whoever receives it.
+ */
+
+import type { PoleSet, Stability, StepMetrics, StepResponse, TransferFunction, ZeroSet } from '../analysis/index.ts';
+import type { Derivation } from '../compile/index.ts';
+import type { Diagram } from '../diagram/index.ts';
+import type { Result } from '../problem/index.ts';
+
+/** Position of an input and an output in the model's lists. */
+export interface Channel {
+  readonly input: number;
+  readonly output: number;
+}
+
+/** How matrix entries are written in a file. */
+export type Notation = 'fractions' | 'decimals';
+
+export type Question =
+  | { readonly kind: 'derive'; readonly revision: number; readonly diagram: Diagram; readonly channel: Channel }
+  | { readonly kind: 'channel'; readonly revision: number; readonly channel: Channel }
+  | {
+      readonly kind: 'file';
+      readonly id: number;
+      readonly diagram: Diagram;
+      readonly format: string;
+      readonly notation: Notation;
+    };
+
+/** Values of quantities for the screen, by parameter name and by block id (of the top sheet, `outer.inner.id` inside groups). */
+export interface QuantityValues {
+  readonly parameters: Readonly<Record<string, number>>;
+  readonly blocks: Readonly<Record<string, number>>;
+}
+
+export interface ModelAnswer {
+  readonly kind: 'model';
+  readonly revision: number;
+  readonly outcome: Result<Derivation>;
+  readonly values: QuantityValues;
+  /** Milliseconds the derivation took in the worker. */
+  readonly elapsed: number;
+}
+
+export interface PolesAnswer {
+  readonly kind: 'poles';
+  readonly revision: number;
+  readonly poles: PoleSet;
+  readonly zeros: ZeroSet;
+  readonly stability: Stability;
+}
+
+export interface ChannelAnswer {
+  readonly kind: 'channel';
+  readonly revision: number;
+  readonly channel: Channel;
+  readonly transferFunction: TransferFunction;
+  readonly step: StepResponse;
+  readonly metrics: StepMetrics;
+}
+
+export interface FileAnswer {
+  readonly kind: 'file';
+  readonly id: number;
+  readonly outcome: Result<{ readonly content: string | Uint8Array; readonly mime: string; readonly extension: string }>;
+}
+
+export type Answer = ModelAnswer | PolesAnswer | ChannelAnswer | FileAnswer;
