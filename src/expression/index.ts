@@ -1,0 +1,15 @@
+/**
+ * Text to value: quantities, polynomials in s, and their notation on the screen (format.md, Expressions). Problems from here
+ * name no block; whoever asked puts it in front. Stands above algebra, below the diagram.
+ */
+
+export { evaluateExpression, evaluateQuantity, type Scope } from './evaluate.ts';
+export { evaluateIn, evaluatePolynomialIn, type Lookup } from './evaluate-in.ts';
+export { evaluatePolynomial, polynomialAsWritten } from './evaluate-polynomial.ts';
+export type { BinaryOperator, Expression, Value } from './expression.ts';
+export { FUNCTION_NAMES, type FunctionName, isFunctionName } from './functions.ts';
+export { hasLaplaceVariable, namesIn, parameterNameFault, renameIn } from './names.ts';
+export { evaluateParameters, type ParameterText } from './parameters.ts';
+export { parseExpression } from './parse.ts';
+export { print } from './print.ts';
+export { nearestName } from './spelling.ts';
