@@ -1,5 +1,6 @@
 /** Exact numbers: rationals, polynomials, rational functions of parameters, matrices over a field, certified roots. */
 
+export { characteristicFactors, characteristicPolynomial } from './characteristic-polynomial.ts';
 export type { Field } from './field.ts';
 export { doubleField, rationalField } from './fields.ts';
 export type { Polynomial } from './polynomial.ts';
@@ -35,3 +36,4 @@ export type { SparseMatrix } from './sparse-matrix.ts';
 export { entryAt, fromRows, toRows } from './sparse-matrix.ts';
 export type { SquareFreeFactor } from './square-free.ts';
 export { squareFreeFactors } from './square-free.ts';
+export { principalSubmatrix, strongComponents } from './strong-components.ts';

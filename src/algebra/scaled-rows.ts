@@ -1,0 +1,114 @@
+/**
+ * Rational matrices brought to whole numbers row by row, and their images modulo a prime: the door between exact matrices
+ * and everything that is computed modulo primes.
+ */
+
+import { absolute, bitLength, greatestCommonDivisor } from './integer.ts';
+import { inverseModulo, reduce, residue } from './primes.ts';
+import type { Rational } from './rational.ts';
+import type { SparseMatrix } from './sparse-matrix.ts';
+
+/** Row i holds the whole numbers `numerators[k]` over the one denominator `denominators[i]`, in the pattern of a SparseMatrix. */
+export interface ScaledRows {
+  readonly rows: number;
+  readonly columns: number;
+  readonly rowStart: Int32Array;
+  readonly column: Int32Array;
+  readonly numerators: readonly bigint[];
+  /** rows long, positive. */
+  readonly denominators: readonly bigint[];
+}
+
+/** A matrix modulo a prime, by compressed rows, entries in 0 … p − 1. */
+export interface ModularRows {
+  readonly rows: number;
+  readonly rowStart: Int32Array;
+  readonly column: Int32Array;
+  readonly values: Float64Array;
+}
+
+/** The rows of the matrix over their least common denominators. */
+export function scaledRows(matrix: SparseMatrix<Rational>): ScaledRows {
+  const { rows, columns, rowStart, column, values } = matrix;
+  const numerators: bigint[] = [];
+  const denominators: bigint[] = [];
+  for (let i = 0; i < rows; i++) {
+    let denominator = 1n;
+    for (let k = rowStart[i]!; k < rowStart[i + 1]!; k++) {
+      const { d } = values[k]!;
+      if (d !== 1n && denominator % d !== 0n) denominator *= d / greatestCommonDivisor(denominator, d);
+    }
+    for (let k = rowStart[i]!; k < rowStart[i + 1]!; k++) {
+      const { n, d } = values[k]!;
+      numerators.push(d === denominator ? n : n * (denominator / d));
+    }
+    denominators.push(denominator);
+  }
+  return { rows, columns, rowStart, column, numerators, denominators };
+}
+
+/** The image of the matrix modulo p, or null where p divides a denominator. */
+export function rowsModulo(matrix: ScaledRows, p: number): ModularRows | null {
+  const { rows, rowStart, column, numerators, denominators } = matrix;
+  const values = new Float64Array(numerators.length);
+  const inverse = 1 / p;
+  for (let i = 0; i < rows; i++) {
+    const denominator = denominators[i] === 1n ? 1 : residue(denominators[i]!, p);
+    if (denominator === 0) return null;
+    const factor = denominator === 1 ? 1 : inverseModulo(denominator, p);
+    for (let k = rowStart[i]!; k < rowStart[i + 1]!; k++) {
+      const value = residue(numerators[k]!, p);
+      values[k] = factor === 1 ? value : reduce(value * factor, p, inverse);
+    }
+  }
+  return { rows, rowStart, column, values };
+}
+
+/** A sum that has reached this is reduced before the next product below 2⁵⁰ is added, so that it stays exact below 2⁵³. */
+const FULL = 2 ** 52;
+
+/** target = M x modulo p. */
+export function multiplyModulo(M: ModularRows, x: Float64Array, target: Float64Array, p: number): void {
+  const { rows, rowStart, column, values } = M;
+  const inverse = 1 / p;
+  for (let i = 0; i < rows; i++) {
+    let sum = 0;
+    const end = rowStart[i + 1]!;
+    for (let k = rowStart[i]!; k < end; k++) {
+      sum += values[k]! * x[column[k]!]!;
+      if (sum >= FULL) sum = reduce(sum, p, inverse);
+    }
+    target[i] = reduce(sum, p, inverse);
+  }
+}
+
+/** x · y modulo p. */
+export function innerProductModulo(x: Float64Array, y: Float64Array, p: number): number {
+  const inverse = 1 / p;
+  let sum = 0;
+  for (let i = 0; i < x.length; i++) {
+    sum += x[i]! * y[i]!;
+    if (sum >= FULL) sum = reduce(sum, p, inverse);
+  }
+  return reduce(sum, p, inverse);
+}
+
+/**
+ * Bits of a bound on the coefficients of det(s diag(δ) − N), N the whole numbers of the rows, δ their denominators on the
+ * diagonal (0 below `states`): the product of the rows' lengths on |s| = 1 (Hadamard 1893) bounds the determinant there, and
+ * so each coefficient (Cauchy's estimate).
+ */
+export function coefficientBits(matrix: ScaledRows, states: number): number {
+  let bits = 0;
+  for (let i = 0; i < matrix.rows; i++) {
+    let onDiagonal = i < states ? matrix.denominators[i]! : 0n;
+    let squares = 0n;
+    for (let k = matrix.rowStart[i]!; k < matrix.rowStart[i + 1]!; k++) {
+      const magnitude = absolute(matrix.numerators[k]!);
+      if (matrix.column[k] === i) onDiagonal += magnitude;
+      else squares += magnitude * magnitude;
+    }
+    bits += bitLength(squares + onDiagonal * onDiagonal) / 2;
+  }
+  return Math.ceil(bits);
+}
