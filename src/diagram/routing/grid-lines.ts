@@ -1,0 +1,67 @@
+/**
+ * The lines on which wires may run: multiples of 10 around every block, and the lines of ports, bend points and routes that
+ * stay, wherever those lie. Where nothing stands there are no lines, so empty paper costs nothing.
+ */
+
+import { HALF_GRID } from '../geometry/index.ts';
+
+/** How far around a block lines are laid, in steps: the first that keeps the grid within `MOST_NODES` is taken. */
+const REACHES = [80, 30] as const;
+
+/** Most crossings of lines that are searched: some 60 MB of bookkeeping. */
+const MOST_NODES = 1_500_000;
+
+/** A lattice line gives way to a port's line that is closer than this. */
+const TOO_CLOSE = 6;
+
+/** What lines are laid for along one axis: extents of blocks, and coordinates that must have a line. */
+export interface AxisNeeds {
+  readonly extents: readonly (readonly [low: number, high: number])[];
+  readonly fixed: readonly number[];
+}
+
+/** Coordinates of the vertical and horizontal lines, ascending; null where there would be too many of them. */
+export function gridLines(
+  horizontal: AxisNeeds,
+  vertical: AxisNeeds,
+): { readonly xs: Float64Array; readonly ys: Float64Array } | null {
+  for (const reach of REACHES) {
+    const xs = axisLines(horizontal, reach);
+    const ys = axisLines(vertical, reach);
+    if (xs.length * ys.length <= MOST_NODES) return { xs, ys };
+  }
+  return null;
+}
+
+function axisLines({ extents, fixed }: AxisNeeds, reach: number): Float64Array {
+  const lattice = new Set<number>();
+  for (const [low, high] of extents) {
+    const last = Math.ceil((high + reach) / HALF_GRID);
+    for (let step = Math.floor((low - reach) / HALF_GRID); step <= last; step += 1) lattice.add(step * HALF_GRID);
+  }
+  for (const line of new Set(fixed)) {
+    if (Number.isInteger(line / HALF_GRID)) continue;
+    const near = Math.round(line / HALF_GRID) * HALF_GRID;
+    if (Math.abs(near - line) < TOO_CLOSE) lattice.delete(near);
+  }
+  for (const line of fixed) lattice.add(line);
+  return Float64Array.from(lattice).sort();
+}
+
+/** Index of the first line at or above `value`; the number of lines where there is none. */
+export function lineFrom(lines: Float64Array, value: number): number {
+  let low = 0;
+  let high = lines.length;
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if (lines[middle]! < value) low = middle + 1;
+    else high = middle;
+  }
+  return low;
+}
+
+/** Index of the line at exactly `value`; −1 where there is none. */
+export function lineAt(lines: Float64Array, value: number): number {
+  const index = lineFrom(lines, value);
+  return index < lines.length && lines[index] === value ? index : -1;
+}

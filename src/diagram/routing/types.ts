@@ -1,0 +1,45 @@
+/** What the router takes and gives. All coordinates are those of the sheet. */
+
+import type { PortPlace, Side } from '../geometry/index.ts';
+import type { Point, Wire } from '../types.ts';
+
+/** One end of a wire: where the port lies on the sheet and which way it looks. */
+export type PortEnd = PortPlace;
+
+/** Bend points from the output port to the input port, both included; every piece is horizontal or vertical. */
+export type Route = readonly Point[];
+
+export interface Routes {
+  /** By `wireKey`. A wire whose block or port is missing has none. */
+  readonly routes: ReadonlyMap<string, Route>;
+  /** Branching points: where wires of one output part. Lines that cross without one are not joined. */
+  readonly dots: readonly Point[];
+  /** Keys of the wires for which no free way was found, drawn as plain elbows. */
+  readonly forced: readonly string[];
+}
+
+/** A wire's key among those of its sheet: an input port takes one wire at most. */
+export function wireKey(wire: Wire): string {
+  return `${wire.to[0]}:${wire.to[1]}`;
+}
+
+/** Whether a port on this side is left or entered horizontally. */
+export function isHorizontal(side: Side): boolean {
+  return side === 'left' || side === 'right';
+}
+
+/** The unit step that leads away from a port. */
+export function outward(side: Side): Point {
+  switch (side) {
+    case 'left':
+      return [-1, 0];
+    case 'right':
+      return [1, 0];
+    case 'top':
+      return [0, -1];
+    case 'bottom':
+      return [0, 1];
+    default:
+      return side satisfies never;
+  }
+}
