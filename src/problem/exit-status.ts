@@ -5,6 +5,7 @@ import type { ErrorCode, Problem } from './problem.ts';
 /** 2: the input cannot be used. 3: the diagram is read but has no state-space model. */
 export const EXIT_STATUS: Readonly<Record<ErrorCode, 2 | 3>> = {
   'not-readable': 2,
+  'not-writable': 2,
   'too-large': 2,
   'not-a-diagram': 2,
   'wrong-version': 2,

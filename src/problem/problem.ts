@@ -5,6 +5,7 @@
 /** Codes that refuse the input or the model. */
 export type ErrorCode =
   | 'not-readable'
+  | 'not-writable'
   | 'too-large'
   | 'not-a-diagram'
   | 'wrong-version'
