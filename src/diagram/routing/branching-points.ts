@@ -7,11 +7,13 @@ import type { EndedWire } from './wire-ends.ts';
 /**
  * Branching points of all nets, each once, nets in the order of their first wire. Two routes from one port part at the end of what
  * they have in common from there.
+ *
+ * @param routes  by the wire's place among the sheet's wires.
  */
-export function branchingPoints(wires: readonly EndedWire[], routes: ReadonlyMap<string, Route>): readonly Point[] {
+export function branchingPoints(wires: readonly EndedWire[], routes: readonly (Route | undefined)[]): readonly Point[] {
   const nets = new Map<number, Route[]>();
-  for (const { key, net } of wires) {
-    const route = routes.get(key);
+  for (const { index, net } of wires) {
+    const route = routes[index];
     if (route === undefined) continue;
     const list = nets.get(net);
     if (list === undefined) nets.set(net, [route]);

@@ -6,5 +6,5 @@
 export { elbowRoute } from './elbow-route.ts';
 export { routeLength } from './polyline.ts';
 export { rerouteMoved, routeWires } from './route-wires.ts';
-export type { PortEnd, Route, Routes } from './types.ts';
+export type { PortEnd, Route, Routes, WireRoute } from './types.ts';
 export { wireKey } from './types.ts';

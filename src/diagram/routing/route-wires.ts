@@ -9,7 +9,7 @@ import { branchingPoints } from './branching-points.ts';
 import { elbowRoute } from './elbow-route.ts';
 import { simplified } from './polyline.ts';
 import { keepRoute, routeWire, sheetRouter } from './sheet-router.ts';
-import type { PortEnd, Route, Routes } from './types.ts';
+import { type PortEnd, type Route, type Routes, type WireRoute, wireKey } from './types.ts';
 import { type EndedWire, endedWires, routingOrder } from './wire-ends.ts';
 
 /**
@@ -22,61 +22,58 @@ export function routeWires(sheet: Sheet, geometry: SheetGeometry = sheetGeometry
 }
 
 /**
- * Routes again what a move touches: wires at the blocks that moved, wires whose ports have turned or that are new, and wires
- * that a moved block now stands on. All other routes stay the same arrays.
+ * Routes again what an edit touches: wires at blocks that moved or changed, new wires, wires whose ports have turned, and wires that a
+ * changed block now stands on. All other routes stay the same objects.
  *
- * @param previous  the routes before the move.
- * @param moved     ids of the blocks that moved or changed.
+ * @param previous  the routes of the sheet `before`.
  */
 export function rerouteMoved(
   previous: Routes,
+  before: Sheet,
   sheet: Sheet,
-  moved: ReadonlySet<string>,
   geometry: SheetGeometry = sheetGeometry(sheet),
 ): Routes {
-  const wires = endedWires(sheet, geometry);
-  const obstacles = sheet.blocks.flatMap(block => {
-    const placed = moved.has(block.id) ? geometry.get(block.id) : undefined;
+  const former = new Set(before.blocks);
+  const changed = sheet.blocks.filter(block => !former.has(block));
+  const changedIds = new Set(changed.map(({ id }) => id));
+  const obstacles = changed.flatMap(block => {
+    const placed = geometry.get(block.id);
     return placed === undefined ? [] : [blockRectangle(block, placed)];
   });
-  const forced = new Set(previous.forced);
-  const kept = new Map<string, Route>();
-  for (const { key, from, to, wire } of wires) {
-    const route = previous.routes.get(key);
-    if (route === undefined || forced.has(key)) continue;
-    if (moved.has(wire.from[0]) || moved.has(wire.to[0])) continue;
-    if (!joins(route, from, to) || (wire.via ?? []).some(point => !passes(route, point))) continue;
-    if (!obstacles.some(obstacle => runsInto(route, obstacle))) kept.set(key, route);
+  const formerRoutes = new Map(before.wires.map((wire, index) => [wireKey(wire), previous.wires[index]]));
+  const wires = endedWires(sheet, geometry);
+  const kept = new Map<number, WireRoute>();
+  for (const { index, from, to, wire } of wires) {
+    const route = formerRoutes.get(wireKey(wire));
+    if (route === undefined || route.forced) continue;
+    if (changedIds.has(wire.from[0]) || changedIds.has(wire.to[0])) continue;
+    if (!joins(route.points, from, to) || (wire.via ?? []).some(point => !passes(route.points, point))) continue;
+    if (!obstacles.some(obstacle => runsInto(route.points, obstacle))) kept.set(index, route);
   }
   return complete(sheet, geometry, wires, kept);
 }
+
+const NO_ROUTE: WireRoute = { points: [], forced: false };
 
 function complete(
   sheet: Sheet,
   geometry: SheetGeometry,
   wires: readonly EndedWire[],
-  kept: ReadonlyMap<string, Route>,
+  kept: ReadonlyMap<number, WireRoute>,
 ): Routes {
-  const router = sheetRouter(sheet, geometry, wires, [...kept.values()]);
-  const found = new Map(kept);
-  const forced = new Set<string>();
-  if (router !== null) {
-    for (const wire of wires) {
-      const route = kept.get(wire.key);
-      if (route !== undefined) keepRoute(router, wire, route);
-    }
+  const keptPoints = [...kept.values()].map(({ points }) => points);
+  const router = sheetRouter(sheet, geometry, wires, keptPoints);
+  const found: WireRoute[] = sheet.wires.map((_, index) => kept.get(index) ?? NO_ROUTE);
+  for (const wire of wires) {
+    const route = kept.get(wire.index);
+    if (router !== null && route !== undefined) keepRoute(router, wire, route.points);
   }
-  for (const wire of routingOrder(wires.filter(({ key }) => !kept.has(key)))) {
-    const route = router === null ? null : routeWire(router, wire);
-    if (route === null) forced.add(wire.key);
-    found.set(wire.key, route ?? plainRoute(wire));
+  for (const wire of routingOrder(wires.filter(({ index }) => !kept.has(index)))) {
+    const points = router === null ? null : routeWire(router, wire);
+    found[wire.index] = points === null ? { points: plainRoute(wire), forced: true } : { points, forced: false };
   }
-  const routes = new Map<string, Route>();
-  for (const { key } of wires) {
-    const route = found.get(key);
-    if (route !== undefined) routes.set(key, route);
-  }
-  return { routes, dots: branchingPoints(wires, routes), forced: [...routes.keys()].filter(key => forced.has(key)) };
+  const points = found.map(route => route.points);
+  return { wires: found, dots: branchingPoints(wires, points) };
 }
 
 /** Elbows through the wire's own bend points, whatever stands there. */

@@ -9,13 +9,18 @@ export type PortEnd = PortPlace;
 /** Bend points from the output port to the input port, both included; every piece is horizontal or vertical. */
 export type Route = readonly Point[];
 
+export interface WireRoute {
+  /** Empty where the wire's block or port is missing. */
+  readonly points: Route;
+  /** No free way was found: a plain elbow, whatever it runs over. */
+  readonly forced: boolean;
+}
+
 export interface Routes {
-  /** By `wireKey`. A wire whose block or port is missing has none. */
-  readonly routes: ReadonlyMap<string, Route>;
+  /** In the order of the sheet's wires. */
+  readonly wires: readonly WireRoute[];
   /** Branching points: where wires of one output part. Lines that cross without one are not joined. */
   readonly dots: readonly Point[];
-  /** Keys of the wires for which no free way was found, drawn as plain elbows. */
-  readonly forced: readonly string[];
 }
 
 /** A wire's key among those of its sheet: an input port takes one wire at most. */

@@ -2,11 +2,12 @@
 
 import type { PortPlace, SheetGeometry } from '../geometry/index.ts';
 import type { Block, Sheet, Wire } from '../types.ts';
-import { outward, type PortEnd, wireKey } from './types.ts';
+import { outward, type PortEnd } from './types.ts';
 
 /** A wire with both ends on the sheet. */
 export interface EndedWire {
-  readonly key: string;
+  /** Place among the sheet's wires. */
+  readonly index: number;
   readonly wire: Wire;
   readonly from: PortEnd;
   readonly to: PortEnd;
@@ -19,14 +20,14 @@ export function endedWires(sheet: Sheet, geometry: SheetGeometry): readonly Ende
   const blocks = new Map(sheet.blocks.map(block => [block.id, block]));
   const nets = new Map<string, number>();
   const ended: EndedWire[] = [];
-  for (const wire of sheet.wires) {
+  for (const [index, wire] of sheet.wires.entries()) {
     const from = portEnd(blocks.get(wire.from[0]), geometry.get(wire.from[0])?.outputs[wire.from[1]]);
     const to = portEnd(blocks.get(wire.to[0]), geometry.get(wire.to[0])?.inputs[wire.to[1]]);
     if (from === null || to === null) continue;
     const source = `${wire.from[0]}:${wire.from[1]}`;
     const net = nets.get(source) ?? nets.size + 1;
     nets.set(source, net);
-    ended.push({ key: wireKey(wire), wire, from, to, net });
+    ended.push({ index, wire, from, to, net });
   }
   return ended;
 }
@@ -45,8 +46,8 @@ const BEND = 40;
  * round goes outside. Equal ones in document order.
  */
 export function routingOrder(wires: readonly EndedWire[]): readonly EndedWire[] {
-  const ranked = wires.map((wire, index) => ({ wire, index, rank: rank(wire) }));
-  ranked.sort((a, b) => a.rank - b.rank || a.index - b.index);
+  const ranked = wires.map(wire => ({ wire, rank: rank(wire) }));
+  ranked.sort((a, b) => a.rank - b.rank || a.wire.index - b.wire.index);
   return ranked.map(({ wire }) => wire);
 }
 
