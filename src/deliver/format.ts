@@ -1,0 +1,39 @@
+/** What an export format is, and what it is given to write. */
+
+import type { Derivation } from '../compile/index.ts';
+import type { Diagram } from '../diagram/index.ts';
+
+/** How matrix entries are written: as reduced fractions where the model is exact, or as the nearest doubles. */
+export type Notation = 'fractions' | 'decimals';
+
+/** What a format of scope `model` writes from. */
+export interface ModelContext {
+  readonly derivation: Derivation;
+  readonly notation: Notation;
+}
+
+interface FormatBase {
+  /** As the command line names it. */
+  readonly id: string;
+  /** As the screen names it. */
+  readonly label: string;
+  /** Of its files, without the first point: `csv`, `model.json`. */
+  readonly extension: string;
+  readonly mime: string;
+  /** Whether it writes bytes that are no text. */
+  readonly isBinary: boolean;
+}
+
+/** A file about the model; there is none without a model. */
+export interface ModelFormat extends FormatBase {
+  readonly scope: 'model';
+  readonly write: (context: ModelContext) => string | Uint8Array<ArrayBuffer>;
+}
+
+/** A file about the drawing; there is one whether the drawing has a model or not. */
+export interface DrawingFormat extends FormatBase {
+  readonly scope: 'drawing';
+  readonly write: (diagram: Diagram) => string | Uint8Array<ArrayBuffer>;
+}
+
+export type Format = ModelFormat | DrawingFormat;
