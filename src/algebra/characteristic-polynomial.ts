@@ -5,9 +5,9 @@
  */
 
 import { integersFromResidues } from './chinese-remainder.ts';
-import { characteristicByHessenberg, characteristicByRecurrence } from './modular-characteristic.ts';
-import { multiplyPolynomials, type Polynomial } from './polynomial.ts';
-import { primeAt, reduce, residue } from './primes.ts';
+import { characteristicByHessenberg, minimalByRecurrence } from './modular-characteristic.ts';
+import { type Polynomial, productOfPolynomials } from './polynomial.ts';
+import { inverseModulo, primeAt, reduce, residue } from './primes.ts';
 import {
   addRationals,
   multiplyRationals,
@@ -18,16 +18,17 @@ import {
   subtractRationals,
   ZERO,
 } from './rational.ts';
-import { coefficientBits, rowsModulo, type ScaledRows, scaledRows } from './scaled-rows.ts';
+import { coefficientBits, type ModularRows, rowsModulo, scaledRows } from './scaled-rows.ts';
 import { entryAt, type SparseMatrix } from './sparse-matrix.ts';
 import { principalSubmatrix, strongComponents } from './strong-components.ts';
+import { type RepeatedEigenvalue, repeatedEigenvalues } from './structural-rank.ts';
 
 /** Up to this size Hessenberg's form modulo p takes less time than the recurrence (measured on three entries a row). */
 const SMALL = 5;
 
 /** det(sI − A), monic, for the n × n matrix A; 1 where n = 0. */
 export function characteristicPolynomial(A: SparseMatrix<Rational>): Polynomial {
-  return characteristicFactors(A).reduce(multiplyPolynomials, [ONE]);
+  return productOfPolynomials(characteristicFactors(A));
 }
 
 /**
@@ -47,28 +48,56 @@ function connectedCharacteristic(A: SparseMatrix<Rational>): Polynomial {
     const diagonal = multiplyRationals(at(0, 0), at(1, 1));
     return [ONE, negateRational(trace), subtractRationals(diagonal, multiplyRationals(at(0, 1), at(1, 0)))];
   }
-  return characteristicByPrimes(scaledRows(A));
+  return characteristicByPrimes(A);
 }
 
-function characteristicByPrimes(A: ScaledRows): Polynomial {
-  const scale = A.denominators.reduce((product, d) => product * d, 1n);
+function characteristicByPrimes(A: SparseMatrix<Rational>): Polynomial {
+  const rows = scaledRows(A);
+  const scale = rows.denominators.reduce((product, d) => product * d, 1n);
+  const repeated = rows.rows <= SMALL ? [] : repeatedEigenvalues(A);
   const images: Float64Array[] = [];
   const primes: number[] = [];
   // One bit for the sign, one for the rounding of the logarithms.
-  let missingBits = coefficientBits(A, A.rows) + 2;
-  let isRecurrenceShort = A.rows <= SMALL;
+  let missingBits = coefficientBits(rows, rows.rows) + 2;
+  let isRecurrenceShort = rows.rows <= SMALL;
   for (let i = 0; missingBits > 0; i++) {
     const p = primeAt(i);
-    const image = rowsModulo(A, p);
+    const image = rowsModulo(rows, p);
     if (image === null) continue;
-    const recurrence = isRecurrenceShort ? null : characteristicByRecurrence(image, p);
+    const fast = isRecurrenceShort ? null : characteristicByRecurrence(image, repeated, p);
     // About one prime in a million fails without a cause in A; where it is the first one, the rest only takes longer.
-    if (recurrence === null && images.length === 0) isRecurrenceShort = true;
-    images.push(scaledBy(recurrence ?? characteristicByHessenberg(image, p), residue(scale, p), p));
+    if (fast === null && images.length === 0) isRecurrenceShort = true;
+    images.push(scaledBy(fast ?? characteristicByHessenberg(image, p), residue(scale, p), p));
     primes.push(p);
     missingBits -= Math.log2(p);
   }
   return integersFromResidues(images, primes).map(coefficient => rational(coefficient, scale));
+}
+
+/**
+ * det(sI − A) modulo p by the recurrence, or null where that is too short to prove it. An eigenvalue with k independent
+ * eigenvectors is a root of at least k − 1 invariant factors besides the minimal polynomial, which therefore has degree
+ * n − Σ(k − 1) at most; a recurrence of this length is the minimal polynomial, and the rest is known.
+ */
+function characteristicByRecurrence(
+  A: ModularRows,
+  repeated: readonly RepeatedEigenvalue[],
+  p: number,
+): Float64Array | null {
+  const rest = repeated.flatMap(({ value, nullity }) => {
+    const root = reduce(residue(value.n, p) * inverseModulo(residue(value.d, p), p), p, 1 / p);
+    return new Array<number>(nullity - 1).fill(root);
+  });
+  const minimal = minimalByRecurrence(A, p);
+  return minimal.length + rest.length === A.rows + 1 ? rest.reduce((f, root) => timesRoot(f, root, p), minimal) : null;
+}
+
+/** f · (s − root) modulo p. */
+function timesRoot(f: Float64Array, root: number, p: number): Float64Array {
+  const minus = p - root;
+  const product = new Float64Array(f.length + 1);
+  for (let i = 0; i <= f.length; i++) product[i] = reduce((f[i] ?? 0) + minus * (f[i - 1] ?? 0), p, 1 / p);
+  return product;
 }
 
 function scaledBy(coefficients: Float64Array, factor: number, p: number): Float64Array {

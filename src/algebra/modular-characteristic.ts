@@ -1,17 +1,17 @@
 /**
- * The characteristic polynomial of a matrix modulo a prime. Sparse matrices go by the linear recurrence of u·Aᵏv, dense and
- * derogatory ones by Hessenberg's form. The exact polynomial is put together from these images.
+ * The characteristic polynomial of a matrix modulo a prime: by the linear recurrence of u·Aᵏv where that reaches far enough,
+ * by Hessenberg's form otherwise. The exact polynomial is put together from these images.
  */
 
 import { inverseModulo, reduce } from './primes.ts';
 import { innerProductModulo, type ModularRows, multiplyModulo } from './scaled-rows.ts';
 
 /**
- * det(sI − A) modulo p, n + 1 coefficients in descending powers, or null where the recurrence of u·Aᵏv is shorter than n:
- * for a derogatory A always, else for about n of p vectors (Wiedemann 1986, IEEE Trans. Inf. Theory 32). A recurrence of
- * length n is the characteristic polynomial, whatever u and v are. O(n · entries + n²).
+ * A monic factor of A's minimal polynomial modulo p, descending powers: the recurrence of u·Aᵏv, which for all but about n
+ * of p vectors is the minimal polynomial itself (Wiedemann 1986, IEEE Trans. Inf. Theory 32). Where its degree is the largest
+ * that the minimal polynomial can have, it is that polynomial, whatever u and v are. O(n · entries + n²).
  */
-export function characteristicByRecurrence(A: ModularRows, p: number): Float64Array | null {
+export function minimalByRecurrence(A: ModularRows, p: number): Float64Array {
   const n = A.rows;
   const left = scatteredVector(n, p, 1);
   let right = scatteredVector(n, p, 2);
@@ -23,8 +23,7 @@ export function characteristicByRecurrence(A: ModularRows, p: number): Float64Ar
     multiplyModulo(A, right, next, p);
     [right, next] = [next, right];
   }
-  const recurrence = shortestRecurrence(sequence, p);
-  return recurrence.length === n + 1 ? recurrence : null;
+  return shortestRecurrence(sequence, p);
 }
 
 /** n residues without a pattern, the same in every run: a linear congruential sequence (Lewis, Goodman & Miller 1969). */
@@ -102,7 +101,6 @@ export function characteristicByHessenberg(A: ModularRows, p: number): Float64Ar
 /** Brings the square H to upper Hessenberg form by similarity, in place. */
 function toHessenberg(H: Float64Array[], p: number): void {
   const n = H.length;
-  const inverse = 1 / p;
   for (let m = 1; m < n - 1; m++) {
     let pivot = m;
     while (pivot < n && H[pivot]![m - 1] === 0) pivot++;
@@ -111,16 +109,32 @@ function toHessenberg(H: Float64Array[], p: number): void {
       [H[m], H[pivot]] = [H[pivot]!, H[m]!];
       for (const row of H) [row[m], row[pivot]] = [row[pivot]!, row[m]!];
     }
-    const pivotRow = H[m]!;
-    const scale = inverseModulo(pivotRow[m - 1]!, p);
+    clearBelow(H, m, p);
+  }
+}
+
+/** Clears column m − 1 below row m by rows, and undoes it by columns. */
+function clearBelow(H: readonly Float64Array[], m: number, p: number): void {
+  const n = H.length;
+  const inverse = 1 / p;
+  const pivotRow = H[m]!;
+  const scale = inverseModulo(pivotRow[m - 1]!, p);
+  const factors = new Float64Array(n);
+  for (let i = m + 1; i < n; i++) {
+    const row = H[i]!;
+    if (row[m - 1] === 0) continue;
+    const factor = reduce(row[m - 1]! * scale, p, inverse);
+    const minus = p - factor;
+    for (let j = m - 1; j < n; j++) row[j] = reduce(row[j]! + minus * pivotRow[j]!, p, inverse);
+    factors[i] = factor;
+  }
+  for (const row of H) {
+    let sum = row[m]!;
     for (let i = m + 1; i < n; i++) {
-      const row = H[i]!;
-      if (row[m - 1] === 0) continue;
-      const factor = reduce(row[m - 1]! * scale, p, inverse);
-      const minus = p - factor;
-      for (let j = m - 1; j < n; j++) row[j] = reduce(row[j]! + minus * pivotRow[j]!, p, inverse);
-      for (const each of H) each[m] = reduce(each[m]! + factor * each[i]!, p, inverse);
+      sum += factors[i]! * row[i]!;
+      if ((i & 3) === 0) sum = reduce(sum, p, inverse);
     }
+    row[m] = reduce(sum, p, inverse);
   }
 }
 

@@ -49,18 +49,30 @@ export function scalePolynomial(c: Rational, p: Polynomial): Polynomial {
 
 /** p · q. O(deg p · deg q). */
 export function multiplyPolynomials(p: Polynomial, q: Polynomial): Polynomial {
-  if (p.length === 0 || q.length === 0) return [];
-  const left = overOneDenominator(p);
-  const right = overOneDenominator(q);
-  const sums = new Array<bigint>(p.length + q.length - 1).fill(0n);
-  left.numerators.forEach((a, i) => {
+  return productOfPolynomials([p, q]);
+}
+
+/** The product of all factors, 1 for none; brought to lowest terms once, at the end. O(degree²). */
+export function productOfPolynomials(factors: readonly Polynomial[]): Polynomial {
+  if (factors.some(factor => factor.length === 0)) return [];
+  if (factors.length === 1) return factors[0]!;
+  let product: readonly bigint[] = [1n];
+  let scale = 1n;
+  for (const factor of factors) {
+    const { numerators, denominator } = overOneDenominator(factor);
+    product = multiplyIntegers(product, numerators);
+    scale *= denominator;
+  }
+  return product.map(coefficient => rational(coefficient, scale));
+}
+
+function multiplyIntegers(f: readonly bigint[], g: readonly bigint[]): bigint[] {
+  const sums = new Array<bigint>(f.length + g.length - 1).fill(0n);
+  f.forEach((a, i) => {
     if (a === 0n) return;
-    right.numerators.forEach((b, j) => {
-      sums[i + j] = (sums[i + j] ?? 0n) + a * b;
-    });
+    for (let j = 0; j < g.length; j++) if (g[j] !== 0n) sums[i + j] = sums[i + j]! + a * g[j]!;
   });
-  const denominator = left.denominator * right.denominator;
-  return sums.map(sum => rational(sum, denominator));
+  return sums;
 }
 
 /** Numerators of the coefficients over their least common denominator, which is positive. */

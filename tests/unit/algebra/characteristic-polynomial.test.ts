@@ -11,11 +11,13 @@ import {
   rational,
   type SparseMatrix,
   strongComponents,
+  subtractPolynomials,
   toFraction,
   ZERO,
 } from '../../../src/algebra/index.ts';
 import { shortestRecurrence } from '../../../src/algebra/modular-characteristic.ts';
 import { primeAt } from '../../../src/algebra/primes.ts';
+import { repeatedEigenvalues } from '../../../src/algebra/structural-rank.ts';
 
 function matrix(rows: readonly (readonly (number | string)[])[]): SparseMatrix<Rational> {
   const exact = rows.map(row => row.map(entry => parseRational(String(entry)) ?? ZERO));
@@ -161,5 +163,51 @@ describe('steps modulo a prime', () => {
     const numbers = [0n, 1n, -1n, half, -half, 123456789012345n, -98765432109876543n];
     const images = primes.map(p => Float64Array.from(numbers, x => Number(((x % BigInt(p)) + BigInt(p)) % BigInt(p))));
     expect(integersFromResidues(images, primes)).toEqual(numbers);
+  });
+});
+
+describe('repeated eigenvalues by pattern', () => {
+  /** n lags at −1 fed from one summing point that their weighted sum and a further lag feed back to. */
+  function parallelLags(n: number): SparseMatrix<Rational> {
+    return matrix(
+      Array.from({ length: n + 1 }, (_, i) =>
+        Array.from({ length: n + 1 }, (_, j) => {
+          if (i === n) return j === n ? -3 : j + 1;
+          return j === n ? 1 : i === j ? -1 : 0;
+        }),
+      ),
+    );
+  }
+
+  test('n equal lags fed from one point have n − 1 independent eigenvectors at their pole', () => {
+    expect(repeatedEigenvalues(parallelLags(7))).toEqual([{ value: rational(-1n), nullity: 6 }]);
+    expect(
+      repeatedEigenvalues(
+        matrix([
+          [0, 1],
+          [2, 0],
+        ]),
+      ),
+    ).toEqual([]);
+  });
+
+  test('their characteristic polynomial is (s + 1)ⁿ⁻¹ ((s + 1)(s + 3) − Σ gains)', () => {
+    const expected = [...Array.from({ length: 6 }, () => poly(1, 1)), poly(1, 4, 3 - 28)].reduce(multiplyPolynomials);
+    expect(written(characteristicPolynomial(parallelLags(7)))).toBe(written(expected));
+  });
+
+  test('two equal oscillators in parallel, whose pole the pattern does not show, take the longer way to the same end', () => {
+    const A = matrix([
+      [0, 1, 0, 0, 0, 0],
+      [-2, -1, 0, 0, 1, 0],
+      [0, 0, 0, 1, 0, 0],
+      [0, 0, -2, -1, 1, 0],
+      [1, 0, 1, 0, -5, 1],
+      [0, 0, 0, 0, 1, -7],
+    ]);
+    // (s² + s + 2) ((s² + s + 2)((s + 5)(s + 7) − 1) − 2 (s + 7)), by hand from the block diagram.
+    const oscillator = poly(1, 1, 2);
+    const inner = subtractPolynomials(multiplyPolynomials(oscillator, poly(1, 12, 34)), poly(2, 14));
+    expect(written(characteristicPolynomial(A))).toBe(written(multiplyPolynomials(oscillator, inner)));
   });
 });

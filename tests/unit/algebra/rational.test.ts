@@ -11,7 +11,7 @@ import {
   toFraction,
   ZERO,
 } from '../../../src/algebra/index.ts';
-import { bitLength } from '../../../src/algebra/integer.ts';
+import { bitLength, greatestCommonDivisor } from '../../../src/algebra/integer.ts';
 
 describe('reading', () => {
   test.each([
@@ -143,5 +143,23 @@ describe('fields', () => {
   test('a rational enters the doubles as its nearest one', () => {
     expect(doubleField.fromRational(rational(1n, 10n))).toBe(0.1);
     expect(rationalField.fromRational(rational(1n, 10n))).toEqual({ n: 1n, d: 10n });
+  });
+});
+
+describe('greatest common divisor of long numbers', () => {
+  test('neighbouring Fibonacci numbers are coprime, and gcd(F₃₀₀, F₄₅₀) is F₁₅₀ (Lucas 1876)', () => {
+    const fibonacci = [0n, 1n];
+    for (let k = 2; k <= 500; k++) fibonacci.push((fibonacci[k - 1] ?? 0n) + (fibonacci[k - 2] ?? 0n));
+    const term = (k: number): bigint => fibonacci[k] ?? 0n;
+    expect(greatestCommonDivisor(term(500), term(499))).toBe(1n);
+    expect(greatestCommonDivisor(term(300), term(450))).toBe(term(150));
+    expect(greatestCommonDivisor(term(450), term(300))).toBe(term(150));
+    expect(greatestCommonDivisor(term(450), 0n)).toBe(term(450));
+  });
+
+  test('powers of two next to one another in length share the smaller', () => {
+    expect(greatestCommonDivisor(2n ** 300n, 2n ** 299n)).toBe(2n ** 299n);
+    expect(greatestCommonDivisor(2n ** 300n - 1n, 2n ** 299n)).toBe(1n);
+    expect(greatestCommonDivisor(2n ** 300n, 2n ** 300n)).toBe(2n ** 300n);
   });
 });
