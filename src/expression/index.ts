@@ -13,3 +13,4 @@ export { evaluateParameters, type ParameterText } from './parameters.ts';
 export { parseExpression } from './parse.ts';
 export { print } from './print.ts';
 export { nearestName } from './spelling.ts';
+export { onOneLine, quote } from './wording.ts';

@@ -8,10 +8,15 @@ const LONGEST_QUOTE = 60;
 // biome-ignore lint/suspicious/noControlCharactersInRegex: they are what is taken out
 const CONTROL_CHARACTERS = /[\u0000-\u001f\u007f-\u009f\u2028\u2029]/g;
 
-/** The text in quotation marks, on one line, cut off where it is long. */
-export function quote(text: string): string {
+/** The text on one line, cut off where it is long; control characters become spaces. */
+export function onOneLine(text: string): string {
   const line = text.slice(0, LONGEST_QUOTE + 1).replace(CONTROL_CHARACTERS, ' ');
-  return line.length <= LONGEST_QUOTE ? `"${line}"` : `"${line.slice(0, LONGEST_QUOTE - 1)}…"`;
+  return line.length <= LONGEST_QUOTE ? line : `${line.slice(0, LONGEST_QUOTE - 1)}…`;
+}
+
+/** `onOneLine` in quotation marks. */
+export function quote(text: string): string {
+  return `"${onOneLine(text)}"`;
 }
 
 /** Whether `quote` shows all of it. */

@@ -9,7 +9,6 @@ export { SCRIPT_SCALE, SCRIPT_SHIFT, textWidth } from './character-widths.ts';
 export { TYPE } from './content.ts';
 export { inlineSpans, nameSpans } from './inline-spans.ts';
 export { textArea } from './labels.ts';
-export { portCounts } from './ports.ts';
 export { blockRectangle, enclosing, sheetBounds, snap } from './sheet-bounds.ts';
 export { sheetGeometry } from './sheet-geometry.ts';
 export type {

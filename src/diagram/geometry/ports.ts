@@ -1,33 +1,11 @@
 /** Where ports lie on a frame that stands alone. Summing points and terminals, which look at their wires, build on this. */
 
+import { portCounts } from '../port-counts.ts';
 import type { Block } from '../types.ts';
 import { type Box, GRID, type PortPlace } from './types.ts';
 
 /** Up to this many ports stand two squares apart, more of them one square. */
 const ROOMY = 4;
-
-/** Numbers of input and output ports of a block. */
-export function portCounts(block: Block): { readonly inputs: number; readonly outputs: number } {
-  switch (block.kind) {
-    case 'input':
-      return { inputs: 0, outputs: 1 };
-    case 'output':
-      return { inputs: 1, outputs: 0 };
-    case 'summer':
-      return { inputs: block.signs.length, outputs: 1 };
-    case 'state-model':
-      return {
-        inputs: Math.max(block.B[0]?.length ?? 0, block.D[0]?.length ?? 0),
-        outputs: Math.max(block.C.length, block.D.length),
-      };
-    case 'group': {
-      const count = (kind: Block['kind']): number => block.sheet.blocks.filter(inner => inner.kind === kind).length;
-      return { inputs: count('input'), outputs: count('output') };
-    }
-    default:
-      return { inputs: 1, outputs: 1 };
-  }
-}
 
 /**
  * Heights of `count` ports on an upright side, from the top, relative to the centre. All are whole grid squares and

@@ -1,0 +1,36 @@
+/**
+ * The document: its types, reading and writing, and every edit. Plain immutable data; nothing here knows the screen. Where
+ * blocks lie and wires run is in the folders geometry, routing and arranging.
+ */
+
+export { emptyDiagram } from './empty-diagram.ts';
+export { MAXIMUM_BYTES } from './limits.ts';
+export { portCounts } from './port-counts.ts';
+export { mapQuantities, type QuantityField, quantityFields } from './quantities.ts';
+export { readDiagram } from './reading/index.ts';
+export { isSameModel } from './same-model.ts';
+export { startingDrawing } from './starting-drawings/index.ts';
+export { blockTitle, blockTitleAtStart, displayName, KIND_WORDS } from './titles.ts';
+export type {
+  Block,
+  BlockKind,
+  DelayBlock,
+  Diagram,
+  DifferentiatorBlock,
+  GainBlock,
+  GroupBlock,
+  InputBlock,
+  IntegratorBlock,
+  LimiterBlock,
+  OutputBlock,
+  Parameter,
+  Point,
+  PortReference,
+  Quantity,
+  Sheet,
+  StateModelBlock,
+  SummerBlock,
+  TransferFunctionBlock,
+  Wire,
+} from './types.ts';
+export { minifyDiagram, writeDiagram } from './write-diagram.ts';
