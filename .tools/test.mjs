@@ -1,7 +1,7 @@
 /**
  * `npm test [-- FILTER]`: every test there is. Installs what is missing, makes sure of a Chromium, runs the tests in Node,
  * builds, weighs the first load, runs the tests in the browser. Ends in one line, `N passed, N failed`, over both; the exit
- * status is not 0 where a test failed, a runner broke off, or nothing ran. FILTER goes to both runners.
+ * status is not 0 where a test failed, a runner broke off, or nothing ran. FILTER is part of the path of a test file.
  */
 
 import { mkdirSync, readFileSync, rmSync } from 'node:fs';
