@@ -3,6 +3,16 @@
  * blocks lie and wires run is in the folders geometry, routing and arranging.
  */
 
+export { checkExpressions } from './check-expressions.ts';
+export {
+  type DrawingEdit,
+  type Edit,
+  editDiagram,
+  freshId,
+  freshName,
+  type SheetEdit,
+  type SheetPath,
+} from './edits/index.ts';
 export { emptyDiagram } from './empty-diagram.ts';
 export { MAXIMUM_BYTES } from './limits.ts';
 export { portCounts } from './port-counts.ts';
