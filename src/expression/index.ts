@@ -9,6 +9,19 @@ export { evaluatePolynomial, polynomialAsWritten } from './evaluate-polynomial.t
 export type { BinaryOperator, Expression, Value } from './expression.ts';
 export { FUNCTION_NAMES, type FunctionName, isFunctionName } from './functions.ts';
 export { hasLaplaceVariable, namesIn, parameterNameFault, renameIn } from './names.ts';
+export {
+  escapeLatex,
+  escapeXml,
+  inlineMath,
+  mathElement,
+  nameSpans,
+  nameToLatex,
+  nameToMathML,
+  plainName,
+  type Span,
+  toLatex,
+  toMathML,
+} from './notation/index.ts';
 export { evaluateParameters, type ParameterText } from './parameters.ts';
 export { parseExpression } from './parse.ts';
 export { print } from './print.ts';
