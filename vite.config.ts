@@ -3,6 +3,7 @@
  * dist and the second into dist/cli. The same sources give the same bytes and names.
  */
 
+import { resolve } from 'node:path';
 import react from '@vitejs/plugin-react';
 import type { Plugin } from 'vite';
 import { defineConfig } from 'vitest/config';
@@ -34,6 +35,24 @@ function securityPolicy(): Plugin {
   };
 }
 
+/**
+ * The worker as a chunk of the page's own build, so that both share what both use and a visitor loads it once. A worker built
+ * by itself would bring a second copy of the parser and the document.
+ */
+function sharedWorker(): Plugin {
+  const name = 'virtual:derivation-worker';
+  return {
+    name: 'shared-worker',
+    resolveId: source => (source === name ? `\0${name}` : null),
+    load(id) {
+      if (id !== `\0${name}`) return null;
+      if (this.environment.mode === 'dev') return "export { default } from '/src/worker/worker.ts?worker&url';";
+      const chunk = this.emitFile({ type: 'chunk', id: resolve('src/worker/worker.ts'), name: 'worker' });
+      return `export default import.meta.ROLLUP_FILE_URL_${chunk};`;
+    },
+  };
+}
+
 const page = {
   target: 'es2022',
   /** A font or an image inlined as a data address would be refused by the policy. */
@@ -51,7 +70,7 @@ const commandLine = {
 
 export default defineConfig(({ mode }) => ({
   base: './',
-  plugins: [react(), securityPolicy()],
+  plugins: [react(), securityPolicy(), sharedWorker()],
   build: mode === 'cli' ? commandLine : page,
   ...(mode === 'cli' ? { ssr: { noExternal: true as const } } : {}),
   worker: { format: 'es' as const },

@@ -6,7 +6,7 @@
 import type { PoleSet, Stability, StepMetrics, StepResponse, TransferFunction, ZeroSet } from '../analysis/index.ts';
 import type { Derivation } from '../compile/index.ts';
 import type { Diagram } from '../diagram/index.ts';
-import type { Result } from '../problem/index.ts';
+import type { Result, Warning } from '../problem/index.ts';
 
 /** Position of an input and an output in the model's lists. */
 export interface Channel {
@@ -49,6 +49,8 @@ export interface PolesAnswer {
   readonly poles: PoleSet;
   readonly zeros: ZeroSet;
   readonly stability: Stability;
+  /** Poles that no transfer function shows. */
+  readonly warnings: readonly Warning[];
 }
 
 export interface ChannelAnswer {
@@ -63,7 +65,7 @@ export interface ChannelAnswer {
 export interface FileAnswer {
   readonly kind: 'file';
   readonly id: number;
-  readonly outcome: Result<{ readonly content: string | Uint8Array; readonly mime: string; readonly extension: string }>;
+  readonly outcome: Result<string | Uint8Array<ArrayBuffer>>;
 }
 
 export type Answer = ModelAnswer | PolesAnswer | ChannelAnswer | FileAnswer;

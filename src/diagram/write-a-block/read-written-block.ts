@@ -3,7 +3,7 @@
  * with its state's name, `+-` a summing point, `(s+2)/(s+5)` a transfer function, `r>` an input, `>y` an output.
  */
 
-import { isLegalParameterName, namesIn, parseExpression } from '../../expression/index.ts';
+import { hasLaplaceVariable, namesIn, parameterNameFault, parseExpression, print } from '../../expression/index.ts';
 import { fail, ok, problem, type Result } from '../../problem/index.ts';
 import type {
   GainBlock,
@@ -13,6 +13,7 @@ import type {
   SummerBlock,
   TransferFunctionBlock,
 } from '../types.ts';
+import { quotientOf } from './quotient.ts';
 
 /** A block with no id and no place yet. */
 export type WrittenBlock =
@@ -60,41 +61,18 @@ function integratorNamed(name: string | undefined): Result<ReadBlock> {
 function gainOrTransferFunction(text: string): Result<ReadBlock> {
   const parsed = parseExpression(text);
   if (!parsed.ok) return parsed;
-  const names = namesIn(parsed.value);
-  const parameters = names.filter(name => name !== 's');
-  if (parameters.some(name => !isLegalParameterName(name))) {
-    return refuse(`"${text}" uses a name that cannot be a parameter.`);
-  }
-  if (parameters.length === names.length) return ok({ block: { kind: 'gain', gain: text }, names: parameters });
-  const { numerator, denominator } = quotientOf(text);
-  return ok({ block: { kind: 'transfer-function', numerator, denominator }, names: parameters });
-}
-
-/** Splits at the last division outside parentheses whose right-hand side holds s; without one the denominator is 1. */
-function quotientOf(text: string): { readonly numerator: string; readonly denominator: string } {
-  let depth = 0;
-  for (let i = text.length - 1; i >= 0; i--) {
-    const character = text[i];
-    if (character === ')') depth += 1;
-    else if (character === '(') depth -= 1;
-    else if (character === '/' && depth === 0 && /(^|[^A-Za-z0-9_])s([^A-Za-z0-9_]|$)/.test(text.slice(i + 1))) {
-      return { numerator: bare(text.slice(0, i)), denominator: bare(text.slice(i + 1)) };
-    }
-  }
-  return { numerator: bare(text), denominator: '1' };
-}
-
-/** The text without one pair of parentheses that encloses all of it. */
-function bare(text: string): string {
-  const trimmed = text.trim();
-  if (!trimmed.startsWith('(') || !trimmed.endsWith(')')) return trimmed;
-  let depth = 0;
-  for (let i = 0; i < trimmed.length - 1; i++) {
-    if (trimmed[i] === '(') depth += 1;
-    else if (trimmed[i] === ')') depth -= 1;
-    if (depth === 0) return trimmed;
-  }
-  return trimmed.slice(1, -1).trim();
+  const names = namesIn(parsed.value).filter(name => name !== 's');
+  const fault = names.map(parameterNameFault).find(found => found !== null);
+  if (fault !== undefined) return refuse(fault);
+  if (!hasLaplaceVariable(parsed.value)) return ok({ block: { kind: 'gain', gain: text }, names });
+  const quotient = quotientOf(parsed.value);
+  if (quotient === null)
+    return refuse(`"${text}" is no quotient of polynomials in s. Use + - * / and whole powers of s.`);
+  const { numerator, denominator } = quotient;
+  return ok({
+    block: { kind: 'transfer-function', numerator: print(numerator), denominator: print(denominator) },
+    names,
+  });
 }
 
 function refuse(message: string): Result<never> {

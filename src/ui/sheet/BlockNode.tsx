@@ -3,29 +3,29 @@
 import { memo } from 'react';
 import { Handle, type NodeProps } from 'reactflow';
 import { type BlockGeometry, blockDrawing, type PortPlace } from '../../diagram/geometry/index.ts';
-import { actions, type State, useStore } from '../store/index.ts';
+import { type State, useStore } from '../store/index.ts';
+import { formatValue } from '../title-block/format-value.ts';
 import { BlockFields } from './BlockFields.tsx';
 import { ShapeView } from './ShapeView.tsx';
-import { type BlockFlowNode, FLOW_SIDE } from './useSheetNodes.ts';
 import { useBlockMark } from './useBlockMark.ts';
+import { type BlockFlowNode, FLOW_SIDE } from './useSheetNodes.ts';
 
 export const BlockNode = memo(function BlockNode({ id, data, selected }: NodeProps<BlockFlowNode>) {
   const { block, geometry, openPorts } = data;
   const value = useStore((state: State) => state.results.values.blocks[id]);
   const isEditing = useStore((state: State) => state.view.editing === id);
   const mark = useBlockMark(id);
+  const shownValue = value === undefined ? undefined : formatValue(value);
   const { width, height } = geometry.box;
   return (
     <div
       className={`block${selected ? ' block-selected' : ''}${mark === null ? '' : ` block-${mark}`}`}
       style={{ width, height }}
-      onDoubleClick={() => actions.editFields(id)}
     >
       <svg className="block-drawing" width={width} height={height} aria-hidden="true">
         <g transform={`translate(${width / 2} ${height / 2})`}>
-          {blockDrawing(block, geometry, value).map((shape, i) => (
-            // biome-ignore lint/suspicious/noArrayIndexKey: a block's shapes have no identity but their place
-            <ShapeView key={i} shape={shape} />
+          {Array.from(blockDrawing(block, geometry, shownValue).entries(), ([place, shape]) => (
+            <ShapeView key={place} shape={shape} />
           ))}
           {openPorts.map(port => (
             <OpenPort key={port} place={geometry.inputs[port]} />
@@ -53,7 +53,7 @@ const Ports = memo(function Ports({ geometry }: { readonly geometry: BlockGeomet
   const at = (place: PortPlace) => ({ left: width / 2 + place.x, top: height / 2 + place.y });
   return (
     <>
-      {geometry.inputs.map((place, port) => (
+      {Array.from(geometry.inputs.entries(), ([port, place]) => (
         <Handle
           key={`in:${port}`}
           id={`in:${port}`}
@@ -63,7 +63,7 @@ const Ports = memo(function Ports({ geometry }: { readonly geometry: BlockGeomet
           style={at(place)}
         />
       ))}
-      {geometry.outputs.map((place, port) => (
+      {Array.from(geometry.outputs.entries(), ([port, place]) => (
         <Handle
           key={`out:${port}`}
           id={`out:${port}`}

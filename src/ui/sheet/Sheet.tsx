@@ -9,9 +9,9 @@ import { GRID } from '../../diagram/geometry/index.ts';
 import { BlockNode } from './BlockNode.tsx';
 import { BranchDots } from './BranchDots.tsx';
 import { DrawnWire } from './DrawnWire.tsx';
+import { SHEET_EVENTS } from './sheet-events.ts';
 import { useDropPart } from './useDropPart.ts';
 import { usePlacedSheet } from './usePlacedSheet.ts';
-import { useSheetEvents } from './useSheetEvents.ts';
 import { useSheetKeys } from './useSheetKeys.ts';
 import { useSheetNodes } from './useSheetNodes.ts';
 import { useSheetWires } from './useSheetWires.ts';
@@ -30,11 +30,16 @@ export function Sheet() {
   const placed = usePlacedSheet();
   const nodes = useSheetNodes(placed);
   const edges = useSheetWires(placed);
-  const events = useSheetEvents(placed);
   const drop = useDropPart();
   const onKeyDown = useSheetKeys();
   return (
-    <div className="sheet" onKeyDown={onKeyDown} {...drop}>
+    <div
+      className="sheet"
+      role="application"
+      aria-label="Block diagram. Press ? for all keys."
+      onKeyDown={onKeyDown}
+      {...drop}
+    >
       <ReactFlow
         nodes={nodes}
         edges={edges}
@@ -58,10 +63,10 @@ export function Sheet() {
         edgesFocusable={false}
         elevateNodesOnSelect={false}
         onlyRenderVisibleElements={nodes.length > ALL_IN_PAGE}
-        {...events}
+        {...SHEET_EVENTS}
       >
         <Background variant={BackgroundVariant.Lines} gap={GRID} lineWidth={1} color="var(--square)" />
-        <BranchDots dots={placed.dots} />
+        <BranchDots dots={placed.routes.dots} />
       </ReactFlow>
     </div>
   );

@@ -2,8 +2,8 @@
 
 import { memo } from 'react';
 import { BaseEdge, type EdgeProps } from 'reactflow';
-import { arrowHead, wirePath } from './wire-path.ts';
 import type { WireFlowEdge } from './useSheetWires.ts';
+import { arrowHead, wirePath } from './wire-path.ts';
 
 export const WireEdge = memo(function WireEdge({ id, data, selected }: EdgeProps<WireFlowEdge>) {
   const points = data?.points ?? [];

@@ -1,15 +1,19 @@
 /** Removes the selected blocks with their wires, and the selected wires, as one step; focus goes to the sheet. */
 
 import { blockTitle, type Edit } from '../../diagram/index.ts';
-import { actions, store, wireKey } from '../store/index.ts';
+import { wireKey } from '../../diagram/routing/index.ts';
+import { actions, store } from '../store/index.ts';
 import { focusedBlock } from './focus-block.ts';
 
 export function removeSelected(): boolean {
   const { selection, document: slice } = store.getState();
   const { blocks, wires } = slice.diagram;
   const focused = focusedBlock();
-  const gone = selection.blocks.size + selection.wires.size > 0 || focused === null ? selection.blocks : new Set([focused]);
-  const cut = wires.filter(wire => selection.wires.has(wireKey(wire)) && !gone.has(wire.from[0]) && !gone.has(wire.to[0]));
+  const gone =
+    selection.blocks.size + selection.wires.size > 0 || focused === null ? selection.blocks : new Set([focused]);
+  const cut = wires.filter(
+    wire => selection.wires.has(wireKey(wire)) && !gone.has(wire.from[0]) && !gone.has(wire.to[0]),
+  );
   if (gone.size + cut.length === 0) return false;
   const edits: Edit[] = cut.map(({ to }) => ({ kind: 'disconnect', to }));
   if (gone.size > 0) edits.push({ kind: 'removeBlocks', ids: [...gone] });

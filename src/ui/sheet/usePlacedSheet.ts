@@ -13,7 +13,6 @@ export interface PlacedSheet {
   readonly sheet: Sheet;
   readonly geometry: SheetGeometry;
   readonly routes: Routes;
-  readonly dots: readonly Point[];
 }
 
 const diagram = (state: State) => state.document.diagram;
@@ -27,9 +26,9 @@ export function usePlacedSheet(): PlacedSheet {
     const sheet = moved === null ? document : withHeld(document, moved);
     const geometry = sheetGeometry(sheet);
     const former = before.current;
-    const routed =
+    const routes =
       former === null ? routeWires(sheet, geometry) : rerouteMoved(former.routes, former.sheet, sheet, geometry);
-    const placed = { sheet, geometry, routes: routed, dots: routed.dots };
+    const placed = { sheet, geometry, routes };
     before.current = placed;
     return placed;
   }, [document, moved]);

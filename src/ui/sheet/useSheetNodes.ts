@@ -4,7 +4,8 @@ import { useMemo, useRef } from 'react';
 import { type Node, Position } from 'reactflow';
 import type { BlockGeometry, PortPlace, Side } from '../../diagram/geometry/index.ts';
 import type { Block } from '../../diagram/index.ts';
-import { type State, useStore, wireKey } from '../store/index.ts';
+import { wireKey } from '../../diagram/routing/index.ts';
+import { type State, useStore } from '../store/index.ts';
 import { blockSentence } from './block-sentence.ts';
 import type { PlacedSheet } from './usePlacedSheet.ts';
 

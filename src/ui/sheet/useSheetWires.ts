@@ -3,7 +3,8 @@
 import { useMemo, useRef } from 'react';
 import type { Edge } from 'reactflow';
 import type { Point } from '../../diagram/index.ts';
-import { type State, useStore, wireKey } from '../store/index.ts';
+import { wireKey } from '../../diagram/routing/index.ts';
+import { type State, useStore } from '../store/index.ts';
 import type { PlacedSheet } from './usePlacedSheet.ts';
 
 export interface WireData extends Record<string, unknown> {

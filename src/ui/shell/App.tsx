@@ -2,10 +2,10 @@
 
 import './shell.css';
 import { DialogHost } from '../dialogs/DialogHost.tsx';
-import { ResultsColumn } from './ResultsColumn.tsx';
 import { SheetArea } from '../sheet/SheetArea.tsx';
 import { Heading } from './Heading.tsx';
 import { NoticeLine } from './NoticeLine.tsx';
+import { ResultsColumn } from './ResultsColumn.tsx';
 import { useFileDrop } from './useFileDrop.ts';
 import { useThemeAttribute } from './useThemeAttribute.ts';
 import { useUndoKeys } from './useUndoKeys.ts';

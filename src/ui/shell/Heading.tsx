@@ -51,7 +51,8 @@ function TitleField() {
         if (event.key === 'Escape') event.currentTarget.value = text;
       }}
       onBlur={event => {
-        if (event.currentTarget.value !== text) actions.edit({ kind: 'setTitleFields', title: event.currentTarget.value });
+        if (event.currentTarget.value !== text)
+          actions.edit({ kind: 'setTitleFields', title: event.currentTarget.value });
       }}
     />
   );

@@ -9,7 +9,7 @@ const results = (state: State) => state.results;
 export function VerdictLine() {
   const { status, derivation, poles, problems, stopped } = useStore(results);
   return (
-    <footer className="verdict" aria-label="Verdict">
+    <footer className="verdict">
       {stopped !== null && <span className="verdict-stability verdict-wrong">{stopped}</span>}
       {stopped === null && status === 'pending' && <span className="verdict-stability">Deriving…</span>}
       {stopped === null && status === 'failed' && (
@@ -67,7 +67,5 @@ function WarningCount({ derivation }: { readonly derivation: Derivation }) {
 
 function CheckFigure({ derivation }: { readonly derivation: Derivation }) {
   const { selfCheck } = derivation;
-  return (
-    <span className={`verdict-check ${selfCheck.passed ? '' : 'verdict-wrong'}`}>{selfCheckText(selfCheck)}</span>
-  );
+  return <span className={`verdict-check ${selfCheck.passed ? '' : 'verdict-wrong'}`}>{selfCheckText(selfCheck)}</span>;
 }

@@ -3,6 +3,7 @@
  * block or writing a note asks nothing.
  */
 
+import workerAddress from 'virtual:derivation-worker';
 import type { Diagram } from '../../diagram/index.ts';
 import { isSameModel } from '../../diagram/index.ts';
 import { openLine } from '../../worker/index.ts';
@@ -10,7 +11,7 @@ import { actions, type State, store } from '../store/index.ts';
 import { chosenChannel } from './chosen-channel.ts';
 
 const line = openLine(
-  () => new Worker(new URL('../../worker/worker.ts', import.meta.url), { type: 'module', name: 'derivation' }),
+  () => new Worker(workerAddress, { type: 'module', name: 'derivation' }),
   { answer: actions.takeAnswer, dead: actions.stopResults },
 );
 

@@ -24,7 +24,9 @@ const HISTORY_LIMIT = 500;
 export function edited(
   slice: DocumentSlice,
   edit: Edit,
-): { readonly ok: true; readonly slice: DocumentSlice } | { readonly ok: false; readonly problems: readonly Problem[] } {
+):
+  | { readonly ok: true; readonly slice: DocumentSlice }
+  | { readonly ok: false; readonly problems: readonly Problem[] } {
   const result = editDiagram(slice.diagram, edit);
   if (!result.ok) return result;
   return { ok: true, slice: result.value === slice.diagram ? slice : advanced(slice, result.value) };

@@ -4,7 +4,7 @@ import * as actions from './actions.ts';
 
 export type { DocumentSlice } from './document.ts';
 export type { ResultsSlice } from './results.ts';
-export { type SelectionSlice, wireKey } from './selection.ts';
+export type { SelectionSlice } from './selection.ts';
 export { type State, store, useStore } from './store.ts';
 export type { Notice, ViewSlice } from './view.ts';
 export { actions };

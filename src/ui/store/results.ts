@@ -58,10 +58,6 @@ export function answered(slice: ResultsSlice, answer: Exclude<Answer, { kind: 'f
     case 'channel':
       return { ...slice, channel: answer };
     default:
-      return unreachable(answer);
+      return answer satisfies never;
   }
-}
-
-function unreachable(answer: never): never {
-  throw new Error(`an answer of no known kind: ${JSON.stringify(answer)}`);
 }

@@ -1,6 +1,7 @@
 /** The selection slice: blocks by id, wires by the input port they end at (an input port takes one wire). */
 
-import type { Sheet, Wire } from '../../diagram/index.ts';
+import type { Sheet } from '../../diagram/index.ts';
+import { wireKey } from '../../diagram/routing/index.ts';
 
 export interface SelectionSlice {
   readonly blocks: ReadonlySet<string>;
@@ -8,11 +9,6 @@ export interface SelectionSlice {
 }
 
 export const NOTHING_SELECTED: SelectionSlice = { blocks: new Set(), wires: new Set() };
-
-/** A wire's key on its sheet: the port it ends at. */
-export function wireKey(wire: Wire): string {
-  return `${wire.to[0]}:${wire.to[1]}`;
-}
 
 /** The selection without what is no longer on the sheet; the same object where nothing went. */
 export function stillThere(selection: SelectionSlice, sheet: Sheet): SelectionSlice {

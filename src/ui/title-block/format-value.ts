@@ -3,8 +3,7 @@
 export function formatValue(value: number): string {
   if (value === 0) return '0';
   const magnitude = Math.abs(value);
-  const text =
-    magnitude >= 1e-3 && magnitude < 1e6 ? String(Number(value.toPrecision(4))) : shortExponential(value);
+  const text = magnitude >= 1e-3 && magnitude < 1e6 ? String(Number(value.toPrecision(4))) : shortExponential(value);
   return text.replaceAll('-', '−');
 }
 

@@ -36,7 +36,8 @@ export function placeBlock(written: WrittenBlock, names: readonly string[], at: 
   if (isChained) edits.push({ kind: 'connect', from: [source.id, 0], to: [id, 0] });
   const said = [`Placed ${blockTitle(block)}`];
   if (isChained) said.push(`wired from ${blockTitle(source)}`);
-  if (unknown.length > 0) said.push(`${unknown.join(', ')} added as ${unknown.length === 1 ? 'a parameter' : 'parameters'} with value 1`);
+  if (unknown.length > 0)
+    said.push(`${unknown.join(', ')} added as ${unknown.length === 1 ? 'a parameter' : 'parameters'} with value 1`);
   if (actions.editTogether(edits, `${said.join(', ')}.`).length > 0) return null;
   actions.selectBlocks([id]);
   return id;

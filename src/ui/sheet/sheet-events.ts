@@ -1,11 +1,9 @@
 /** What React Flow reports of the hand, turned into selection, a live drag, and edits when it ends. */
 
-import { useMemo } from 'react';
 import type { Connection, Edge, EdgeChange, FinalConnectionState, Node, NodeChange, ReactFlowProps } from 'reactflow';
 import type { PortReference } from '../../diagram/index.ts';
 import { actions, store } from '../store/index.ts';
 import { connectBlocks } from './connect-blocks.ts';
-import type { PlacedSheet } from './usePlacedSheet.ts';
 import type { BlockFlowNode } from './useSheetNodes.ts';
 import type { WireFlowEdge } from './useSheetWires.ts';
 
@@ -18,10 +16,12 @@ type Events = Pick<
   | 'onConnect'
   | 'onConnectEnd'
   | 'onReconnect'
+  | 'onNodeDoubleClick'
   | 'onPaneClick'
 >;
 
-const EVENTS: Events = {
+/** Stable: React Flow draws everything again when a callback is a new one. */
+export const SHEET_EVENTS: Events = {
   onNodesChange: changes => {
     takeSelection(changes, 'blocks');
     takeDrag(changes);
@@ -32,12 +32,9 @@ const EVENTS: Events = {
   onConnect: connection => connect(connection),
   onConnectEnd: (_, state) => connectToBody(state),
   onReconnect: (edge, connection) => moveEnd(edge, connection),
+  onNodeDoubleClick: (_, node) => actions.editFields(node.id),
   onPaneClick: () => actions.editFields(null),
 };
-
-export function useSheetEvents(_placed: PlacedSheet): Events {
-  return useMemo(() => EVENTS, []);
-}
 
 function takeSelection(
   changes: readonly (NodeChange<BlockFlowNode> | EdgeChange<WireFlowEdge>)[],

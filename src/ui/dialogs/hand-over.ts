@@ -1,0 +1,31 @@
+/** One format of the table, made by the worker, then copied or saved; what went wrong is said, never swallowed. */
+
+import type { Format } from '../../deliver/index.ts';
+import type { Notation } from '../../worker/index.ts';
+import { copyText } from '../shell/copy-text.ts';
+import { makeFile } from '../shell/derive-on-change.ts';
+import { actions, store } from '../store/index.ts';
+import { fileName, saveFile } from './save-file.ts';
+
+export async function saveFormat(format: Format, notation: Notation): Promise<void> {
+  const content = await contentOf(format, notation);
+  if (content === null) return;
+  const name = fileName(store.getState().document.diagram.title, format.extension);
+  saveFile(name, new Blob([content], { type: format.mime }));
+  actions.notify(`Saved ${name}.`);
+}
+
+export async function copyFormat(format: Format, notation: Notation): Promise<void> {
+  const content = await contentOf(format, notation);
+  if (typeof content !== 'string') return;
+  const isCopied = await copyText(content);
+  if (isCopied) actions.notify(`Copied as ${format.label}.`);
+  else actions.notify('This browser does not let the page copy. Save the file instead.', 'refused');
+}
+
+async function contentOf(format: Format, notation: Notation): Promise<string | Uint8Array<ArrayBuffer> | null> {
+  const { outcome } = await makeFile(store.getState().document.diagram, format.id, notation);
+  if (outcome.ok) return outcome.value;
+  actions.notify(outcome.problems[0]?.message ?? 'The file could not be made.', 'refused');
+  return null;
+}
