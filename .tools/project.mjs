@@ -8,6 +8,7 @@ import { createHash } from 'node:crypto';
 import { mkdirSync, readdirSync, readFileSync, realpathSync, statSync, writeFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import { stripVTControlCharacters } from 'node:util';
 
 /** The project's folder. */
 export const root = dirname(dirname(fileURLToPath(import.meta.url)));
@@ -45,7 +46,7 @@ export function run(command, commandArguments, { show = true, environment = {} }
       });
     }
     child.on('error', reject);
-    child.on('close', status => resolve({ status, printed }));
+    child.on('close', status => resolve({ status, printed: stripVTControlCharacters(printed) }));
   });
 }
 

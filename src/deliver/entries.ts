@@ -45,7 +45,8 @@ export function printedRows<T>(model: StateSpace, notation: Notation, printer: P
     : mapMatrices(exact, rows => rows.map(row => row.map(printer.fraction)));
 }
 
-function mapMatrices<S, T>(
+/** The same done to each of the four. */
+export function mapMatrices<S, T>(
   { A, B, C, D }: { readonly A: S; readonly B: S; readonly C: S; readonly D: S },
   turn: (matrix: S) => T,
 ): { readonly A: T; readonly B: T; readonly C: T; readonly D: T } {

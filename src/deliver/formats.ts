@@ -1,13 +1,26 @@
 /** The table of export formats: the screen's list, and what the command line's `--as` takes. One file here for each. */
 
+import { writeDiagram } from '../diagram/index.ts';
 import { writeCsv } from './csv.ts';
 import type { Format } from './format.ts';
+import { writeLatex } from './latex.ts';
+import { writeMathml } from './mathml.ts';
 import { writeMatrixMarket } from './matrix-market.ts';
+import { writeModelFile } from './model-file.ts';
 import { writeNpz } from './npz.ts';
 import { writePlainText } from './plain-text.ts';
 
 /** In the order in which they are offered. */
 export const FORMATS: readonly Format[] = [
+  {
+    id: 'model',
+    label: 'Model file',
+    extension: 'model.json',
+    mime: 'application/json',
+    isBinary: false,
+    scope: 'model',
+    write: writeModelFile,
+  },
   {
     id: 'csv',
     label: 'Comma-separated values',
@@ -36,6 +49,24 @@ export const FORMATS: readonly Format[] = [
     write: writeNpz,
   },
   {
+    id: 'latex',
+    label: 'LaTeX',
+    extension: 'tex',
+    mime: 'application/x-tex',
+    isBinary: false,
+    scope: 'model',
+    write: writeLatex,
+  },
+  {
+    id: 'mathml',
+    label: 'MathML',
+    extension: 'mml',
+    mime: 'application/mathml+xml',
+    isBinary: false,
+    scope: 'model',
+    write: writeMathml,
+  },
+  {
     id: 'text',
     label: 'Plain text table',
     extension: 'txt',
@@ -43,5 +74,14 @@ export const FORMATS: readonly Format[] = [
     isBinary: false,
     scope: 'model',
     write: writePlainText,
+  },
+  {
+    id: 'diagram',
+    label: 'Diagram file',
+    extension: 'poleward.json',
+    mime: 'application/json',
+    isBinary: false,
+    scope: 'drawing',
+    write: writeDiagram,
   },
 ];

@@ -54,7 +54,7 @@ export function derivationOf(model: HandModel): Derivation {
     },
     loops: [],
     warnings: [],
-    selfCheck: { error: 0, limit: 1e-12, passed: true, frequencies: 3 },
+    selfCheck: { error: 0, limit: 1e-12, passed: true, frequencies: 3, vectors: 1 },
     route: 'rational',
   };
 }

@@ -1,0 +1,4 @@
+/** The sheet as a standalone SVG file. */
+
+export { type SheetSvgOptions, sheetSvg } from './sheet-svg.ts';
+export type { Theme } from './themes.ts';

@@ -1,0 +1,153 @@
+/**
+ * A whole sheet as one SVG file: squared paper, wires, blocks, title block, drawn of the same geometry as the sheet on the screen.
+ * Nothing in it refers outside, and the same diagram gives the same bytes.
+ */
+
+import {
+  blockDrawing,
+  blockRectangle,
+  enclosing,
+  GRID,
+  type Rectangle,
+  type SheetGeometry,
+  sheetBounds,
+  sheetGeometry,
+} from '../../diagram/geometry/index.ts';
+import { type Routes, routeWires } from '../../diagram/routing/index.ts';
+import type { Diagram, Sheet } from '../../diagram/types.ts';
+import { oneLine } from '../one-line.ts';
+import { coordinate, element, escaped } from './markup.ts';
+import { dotMarkup, shapeMarkup, wireMarkup } from './shape-markup.ts';
+import { INKS, styleRules, type Theme } from './themes.ts';
+import { type TitleBlock, titleBlock } from './title-block.ts';
+import { wireNameMarkup } from './wire-names.ts';
+
+export interface SheetSvgOptions {
+  readonly theme?: Theme;
+  /** Squared paper behind the drawing. */
+  readonly grid?: boolean;
+  readonly titleBlock?: boolean;
+  /** Ids of the blocks that are drawn, with the wires between them; all where left out. */
+  readonly selection?: ReadonlySet<string>;
+  /** The number behind a symbol, by block id, as it is shown under the block. */
+  readonly values?: ReadonlyMap<string, string>;
+}
+
+/** Paper around the drawing. */
+const MARGIN = 2 * GRID;
+
+/** Paper between the drawing and the title block. */
+const CLEARANCE = GRID;
+
+/** What a sheet with nothing on it measures. */
+const EMPTY: Rectangle = { left: 0, top: 0, right: 20 * GRID, bottom: 10 * GRID };
+
+/**
+ * The sheet of a diagram as a standalone SVG document, one sheet unit a pixel, light theme on plain paper with the title block unless
+ * asked otherwise. Blocks without a place are drawn at the origin: arrange the sheet first.
+ */
+export function sheetSvg(diagram: Diagram, options: SheetSvgOptions = {}): string {
+  const sheet = selectedSheet(diagram, options.selection);
+  const geometry = sheetGeometry(sheet);
+  const routes = routeWires(sheet, geometry);
+  const content = enclosing([sheetBounds(sheet, geometry) ?? EMPTY, ...wirePieces(routes)]) ?? EMPTY;
+  const block = options.titleBlock === false ? null : titleBlock(diagram);
+  const corner = block === null ? null : titleBlockCorner(block, content, obstacles(sheet, geometry, routes));
+  const paper = paperAround(content, block, corner);
+  const inks = INKS[options.theme ?? 'light'];
+  const parts = [
+    element('title', {}, escaped(oneLine(diagram.title) || 'untitled')),
+    element('style', {}, styleRules(inks)),
+    element('rect', { fill: inks.paper, ...box(paper) }),
+    options.grid === true ? squares(paper) : '',
+    ...routes.wires.map(({ points }) => wireMarkup(points)),
+    ...routes.dots.map(dotMarkup),
+    ...blocksMarkup(sheet, geometry, options.values),
+    ...sheet.wires.map((wire, index) => wireNameMarkup(wire, routes.wires[index]?.points ?? [])),
+  ];
+  if (block !== null && corner !== null) {
+    parts.push(
+      element('g', { transform: `translate(${coordinate(corner.left)} ${coordinate(corner.top)})` }, block.markup),
+    );
+  }
+  const { x, y, width, height } = box(paper);
+  const viewBox = [x, y, width, height].map(coordinate).join(' ');
+  const root = { xmlns: 'http://www.w3.org/2000/svg', viewBox, width, height, role: 'img' };
+  return `<?xml version="1.0" encoding="UTF-8"?>\n${element('svg', root, parts.filter(part => part !== '').join('\n'))}\n`;
+}
+
+function selectedSheet({ blocks, wires }: Diagram, selection: ReadonlySet<string> | undefined): Sheet {
+  if (selection === undefined) return { blocks, wires };
+  return {
+    blocks: blocks.filter(({ id }) => selection.has(id)),
+    wires: wires.filter(({ from, to }) => selection.has(from[0]) && selection.has(to[0])),
+  };
+}
+
+function wirePieces({ wires }: Routes): readonly Rectangle[] {
+  return wires.flatMap(({ points }) =>
+    points.slice(1).map(([x1, y1], index) => {
+      const [x0, y0] = points[index] ?? [x1, y1];
+      return { left: Math.min(x0, x1), right: Math.max(x0, x1), top: Math.min(y0, y1), bottom: Math.max(y0, y1) };
+    }),
+  );
+}
+
+function obstacles(sheet: Sheet, geometry: SheetGeometry, routes: Routes): readonly Rectangle[] {
+  const blocks = sheet.blocks.flatMap(block => {
+    const placed = geometry.get(block.id);
+    if (placed === undefined) return [];
+    const [x, y] = block.at ?? [0, 0];
+    const labels = placed.labels.map(({ area }) => ({
+      left: x + area.left,
+      right: x + area.right,
+      top: y + area.top,
+      bottom: y + area.bottom,
+    }));
+    return [blockRectangle(block, placed), ...labels];
+  });
+  return [...blocks, ...wirePieces(routes)];
+}
+
+/** Lower right: as high beside the drawing as it hides nothing, under it otherwise. */
+function titleBlockCorner(block: TitleBlock, content: Rectangle, taken: readonly Rectangle[]): Rectangle {
+  const right = Math.max(content.right, content.left + block.width);
+  const left = right - block.width;
+  const highest = Math.max(content.top, content.bottom - block.height);
+  const blocking = taken.filter(area => area.right > left - CLEARANCE);
+  const lowest = Math.max(content.top - CLEARANCE, ...blocking.map(({ bottom }) => bottom)) + CLEARANCE;
+  const top = Math.max(highest, lowest);
+  return { left, right, top, bottom: top + block.height };
+}
+
+function paperAround(content: Rectangle, block: TitleBlock | null, corner: Rectangle | null): Rectangle {
+  const all = enclosing(block === null || corner === null ? [content] : [content, corner]) ?? content;
+  const down = (value: number): number => Math.floor((value - MARGIN) / GRID) * GRID;
+  const up = (value: number): number => Math.ceil((value + MARGIN) / GRID) * GRID;
+  return { left: down(all.left), top: down(all.top), right: up(all.right), bottom: up(all.bottom) };
+}
+
+function box({ left, top, right, bottom }: Rectangle) {
+  return { x: left, y: top, width: right - left, height: bottom - top };
+}
+
+function squares({ left, top, right, bottom }: Rectangle): string {
+  const lines: string[] = [];
+  for (let x = left; x <= right; x += GRID) lines.push(`M${x} ${top}V${bottom}`);
+  for (let y = top; y <= bottom; y += GRID) lines.push(`M${left} ${y}H${right}`);
+  return element('path', { class: 'squares', d: lines.join('') });
+}
+
+function blocksMarkup(
+  sheet: Sheet,
+  geometry: SheetGeometry,
+  values: ReadonlyMap<string, string> | undefined,
+): string[] {
+  return sheet.blocks.flatMap(block => {
+    const placed = geometry.get(block.id);
+    if (placed === undefined) return [];
+    const [x, y] = block.at ?? [0, 0];
+    const shapes = blockDrawing(block, placed, values?.get(block.id)).map(shapeMarkup).join('');
+    return [element('g', { transform: `translate(${coordinate(x)} ${coordinate(y)})` }, shapes)];
+  });
+}
