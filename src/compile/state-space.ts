@@ -57,6 +57,8 @@ export interface SelfCheck {
   readonly passed: boolean;
   /** Complex frequencies at which the two were compared; 0 where there was nothing to compare (no input or no output and no state). */
   readonly frequencies: number;
+  /** Random vectors of states and inputs that were compared in place of frequencies, where the drawing is large for those. */
+  readonly vectors: number;
 }
 
 /** What compile hands on. */

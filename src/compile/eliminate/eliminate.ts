@@ -1,0 +1,178 @@
+/**
+ * Fourth pass: eliminates the signals, so that what states, differentiated signals and outputs are fed stands in knowns
+ * alone. A signal outside loops is substituted, a loop solved as one linear system. Runs over whatever field it is given.
+ */
+
+import { type Equations, RowAccumulator, RowStore } from '../equations/index.ts';
+import {
+  factorLoop,
+  inDoubles,
+  type LoopFactors,
+  loopSystem,
+  relativeDistanceToSingular,
+  type SignalOrder,
+  solveFactored,
+} from '../loops/index.ts';
+
+/** An algebraic loop as elimination found it. */
+export interface SolvedLoop {
+  /** Its signals, ascending. */
+  readonly signals: Int32Array;
+  /** Over an exact field whether det(I − M) is zero; in doubles whether it could be, within rounding. */
+  readonly isSingular: boolean;
+  /** `relativeDistanceToSingular`; null where it was not asked for. */
+  readonly distance: number | null;
+}
+
+export interface Elimination<T> {
+  /** The loops in the order of their first signal. */
+  readonly loops: readonly SolvedLoop[];
+  /**
+   * Rows over the knowns: state derivatives, differentiated signals, outputs, in this order. Null where a loop is singular
+   * or, with `budget`, the work was given up.
+   */
+  readonly reduced: RowStore<T> | null;
+}
+
+export interface EliminationOptions {
+  /** Whether the distance of each loop to a singular one is measured. */
+  readonly measureLoops: boolean;
+}
+
+/**
+ * Eliminates all signals that something needs; loops among the others are only looked at. Costs the terms of the rows
+ * that come out, and for each loop what its elimination fills in; nothing is as large as signals × knowns.
+ */
+export function eliminate<T>(
+  equations: Equations<T>,
+  order: SignalOrder,
+  { measureLoops }: EliminationOptions,
+): Elimination<T> {
+  const work = newWork(equations);
+  const loops: SolvedLoop[] = [];
+  let anySingular = false;
+  const { components, isLoop, isNeeded } = order;
+  for (let c = 0; c < components.count; c++) {
+    const members = components.member.subarray(components.start[c], components.start[c + 1]);
+    const wanted = isNeeded[c] === 1 && !anySingular;
+    if (isLoop[c] === 1) {
+      const { loop, factors } = examineLoop(work, members, measureLoops);
+      loops.push(loop);
+      if (loop.isSingular || factors === null) anySingular = true;
+      else if (wanted) resolveLoop(work, members, factors);
+    } else if (wanted) resolveSignal(work, members[0]!);
+  }
+  loops.sort((a, b) => a.signals[0]! - b.signals[0]!);
+  return { loops, reduced: anySingular ? null : reducedRows(work) };
+}
+
+interface Work<T> {
+  readonly equations: Equations<T>;
+  /** Signals over the knowns. */
+  readonly resolved: RowStore<T>;
+  /** For each signal its row in `resolved`. */
+  readonly rowOf: Int32Array;
+  readonly row: RowAccumulator<T>;
+  /** For each signal its place in the loop in hand, −1 outside it. */
+  readonly place: Int32Array;
+}
+
+function newWork<T>(equations: Equations<T>): Work<T> {
+  const { arithmetic, signals, known } = equations;
+  return {
+    equations,
+    resolved: new RowStore(arithmetic, signals, 4 * signals + 16),
+    rowOf: new Int32Array(signals).fill(-1),
+    row: new RowAccumulator(arithmetic, known),
+    place: new Int32Array(signals).fill(-1),
+  };
+}
+
+/** Adds the equation's terms up with every signal outside the loop in hand replaced by what it is in knowns. */
+function addResolved<T>({ equations, resolved, rowOf, row, place }: Work<T>, equation: number): void {
+  const { rows, known } = equations;
+  for (let k = rows.start[equation]!; k < rows.start[equation + 1]!; k++) {
+    const signal = rows.column[k]! - known;
+    if (signal < 0) row.add(rows.column[k]!, rows.values[k]!);
+    else if (place[signal] === -1) row.addRow(resolved, rowOf[signal]!, rows.values[k]!);
+  }
+}
+
+function resolveSignal<T>(work: Work<T>, signal: number): void {
+  addResolved(work, signal);
+  work.rowOf[signal] = work.row.finishRow(work.resolved);
+}
+
+function examineLoop<T>(work: Work<T>, members: Int32Array, measure: boolean) {
+  const { arithmetic } = work.equations;
+  members.forEach((signal, i) => {
+    work.place[signal] = i;
+  });
+  const system = loopSystem(work.equations, members, work.place);
+  members.forEach(signal => {
+    work.place[signal] = -1;
+  });
+  const factors = factorLoop(arithmetic, system.matrix);
+  const isRounded = arithmetic.field.name === 'double';
+  const distance =
+    factors !== null && (measure || isRounded)
+      ? relativeDistanceToSingular(inDoubles(system, arithmetic.toDouble))
+      : null;
+  const isSingular = factors === null || (isRounded && distance !== null && distance <= withinRounding(members.length));
+  const loop: SolvedLoop = { signals: members, isSingular, distance };
+  return { loop, factors };
+}
+
+/** In doubles a loop nearer to a singular one than its n coefficients are rounded cannot be told from it. */
+function withinRounding(n: number): number {
+  return n * Number.EPSILON;
+}
+
+/** Gives each signal of a loop its row over the knowns: (I − M)⁻¹ applied to what comes from outside. */
+function resolveLoop<T>(work: Work<T>, members: Int32Array, factors: LoopFactors<T>): void {
+  const { arithmetic } = work.equations;
+  members.forEach((signal, i) => {
+    work.place[signal] = i;
+  });
+  const outside = new RowStore(arithmetic, members.length, 4 * members.length);
+  for (const signal of members) {
+    addResolved(work, signal);
+    work.row.finishRow(outside);
+  }
+  members.forEach(signal => {
+    work.place[signal] = -1;
+  });
+  const columns = usedColumns(outside);
+  const width = columns.length;
+  const solution = solveFactored(arithmetic, factors, writtenOut(work, outside, columns), width);
+  members.forEach((signal, i) => {
+    for (let c = 0; c < width; c++) work.row.add(columns[c]!, solution[i * width + c]!);
+    work.rowOf[signal] = work.row.finishRow(work.resolved);
+  });
+}
+
+function usedColumns<T>(rows: RowStore<T>): Int32Array {
+  return Int32Array.from(new Set(rows.column.subarray(0, rows.length)));
+}
+
+function writtenOut<T>({ equations }: Work<T>, rows: RowStore<T>, columns: Int32Array) {
+  const at = new Map(Array.from(columns, (column, c) => [column, c]));
+  const dense = equations.arithmetic.allocate(rows.rows * columns.length);
+  for (let i = 0; i < rows.rows; i++) {
+    for (let k = rows.start[i]!; k < rows.start[i + 1]!; k++) {
+      dense[i * columns.length + at.get(rows.column[k]!)!] = rows.values[k]!;
+    }
+  }
+  return dense;
+}
+
+/** The rows behind the signals, over the knowns. */
+function reducedRows<T>(work: Work<T>): RowStore<T> {
+  const { arithmetic, rows, signals } = work.equations;
+  const reduced = new RowStore(arithmetic, rows.rows - signals + 1, work.resolved.length + 16);
+  for (let equation = signals; equation < rows.rows; equation++) {
+    addResolved(work, equation);
+    work.row.finishRow(reduced);
+  }
+  return reduced;
+}

@@ -1,0 +1,3 @@
+/** Fourth pass: what states and outputs are fed, in states and inputs alone. */
+
+export { type Elimination, eliminate, type SolvedLoop } from './eliminate.ts';

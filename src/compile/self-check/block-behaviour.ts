@@ -1,0 +1,181 @@
+/**
+ * What one block's law gives in the two settings of the self-check: at a complex frequency s, where states answer to the
+ * inputs and to their initial values; and with the states held at given values, where only the outputs answer.
+ */
+
+import { add, type Complex, divide, modulus, multiply, ONE, real, subtract, ZERO } from './complex.ts';
+import type { RawLaw } from './raw-laws.ts';
+import { type ComplexRow, factorComplex, solveComplex } from './sparse-complex-lu.ts';
+
+/** The complex frequency, or `held` for states held at given values. */
+export type Setting = Complex | 'held';
+
+/** States of a block and what their derivatives come to; `size` is that of the terms that made the derivative. */
+export interface StateReading {
+  readonly x: readonly Complex[];
+  readonly derivative: readonly Complex[];
+  readonly size: readonly number[];
+}
+
+/**
+ * y = gains u + fromStates(values), with `values` the initial or the held values of the block's states. Vectors are as long
+ * as the block has ports and states.
+ */
+export interface BlockBehaviour {
+  readonly gains: readonly (readonly Complex[])[];
+  fromStates(values: readonly number[]): readonly Complex[];
+  /** The states for inputs u. */
+  readStates(values: readonly number[], u: readonly Complex[]): StateReading;
+}
+
+const NO_STATES: StateReading = { x: [], derivative: [], size: [] };
+
+/** The behaviour of a law; null where s is a pole of the block. */
+export function behaviour(law: RawLaw, setting: Setting): BlockBehaviour | null {
+  switch (law.kind) {
+    case 'static': {
+      const gains = law.gains.map(row => row.map(real));
+      const rest = gains.map(() => ZERO);
+      return { gains, fromStates: () => rest, readStates: () => NO_STATES };
+    }
+    case 'rational':
+      return setting === 'held' ? rationalHeld(law) : rationalAt(law, setting);
+    case 'matrices':
+      return setting === 'held' ? matricesHeld(law) : matricesAt(law, setting);
+    default:
+      return law satisfies never;
+  }
+}
+
+type Rational = Extract<RawLaw, { kind: 'rational' }>;
+type Matrices = Extract<RawLaw, { kind: 'matrices' }>;
+
+/** Row of C and D of the controller companion form, for a proper law: c_i = b_i − b_n a_i, d = b_n. */
+function outputRow({ numerator, denominator }: Rational) {
+  const n = denominator.length - 1;
+  const d = numerator[n] ?? 0;
+  const c = Array.from({ length: n }, (_, i) => (numerator[i] ?? 0) - d * denominator[i]!);
+  return { n, c, d };
+}
+
+/**
+ * y = N(s)/D(s) u. With s X_i = X_{i+1} + x_i(0) along the chain, X_i = s^{i−1} X_1 − g_i, g_1 = 0, g_{i+1} = s g_i + x_i(0),
+ * and its last link gives D(s) X_1 = u + x_n(0) + s g_n + Σ a_i g_{i+1}.
+ */
+function rationalAt(law: Rational, s: Complex): BlockBehaviour | null {
+  const { n, c } = outputRow(law);
+  const powers = powersOver(law.denominator, Math.max(n, law.numerator.length), s);
+  if (powers === null) return null;
+  const gain = law.numerator.reduce((sum, b, i) => add(sum, multiply(real(b), powers[i]!)), ZERO);
+  const chain = (values: readonly number[], u: Complex) => {
+    const g: Complex[] = [ZERO];
+    for (let i = 0; i < n; i++) g.push(add(multiply(s, g[i]!), real(values[i]!)));
+    let drive = add(u, g[n]!);
+    for (let i = 0; i < n; i++) drive = add(drive, multiply(real(law.denominator[i]!), g[i]!));
+    return Array.from({ length: n }, (_, i) => subtract(multiply(powers[i]!, drive), g[i]!));
+  };
+  return {
+    gains: [[gain]],
+    fromStates: values => [n === 0 ? ZERO : timesComplex(c, chain(values, ZERO), ZERO)],
+    readStates: (values, [u = ZERO]) => (n === 0 ? NO_STATES : readingAt(s, chain(values, u), values)),
+  };
+}
+
+/** Derivatives s X − x(0). */
+function readingAt(s: Complex, x: readonly Complex[], initial: readonly number[]): StateReading {
+  return {
+    x,
+    derivative: x.map((value, i) => subtract(multiply(s, value), real(initial[i]!))),
+    size: x.map((value, i) => modulus(s) * modulus(value) + Math.abs(initial[i]!)),
+  };
+}
+
+function readingHeld(values: readonly number[], derivative: readonly Complex[]): StateReading {
+  return { x: values.map(real), derivative, size: derivative.map(modulus) };
+}
+
+/** s^i / D(s) for i from 0 to highest, in powers of 1/s where those are the smaller ones; null where D(s) = 0. */
+function powersOver(denominator: readonly number[], highest: number, s: Complex): Complex[] | null {
+  const n = denominator.length - 1;
+  const isLarge = Math.hypot(s.re, s.im) > 1;
+  const base = isLarge ? divide(ONE, s) : s;
+  const ordered = isLarge ? [...denominator].reverse() : denominator;
+  const value = ordered.reduceRight((sum, a) => add(multiply(sum, base), real(a)), ZERO);
+  if (value.re === 0 && value.im === 0) return null;
+  const powers: Complex[] = [];
+  for (let i = 0; i <= highest; i++) {
+    const scaled = isLarge ? power(i > n ? s : base, Math.abs(n - i)) : power(s, i);
+    powers.push(divide(scaled, value));
+  }
+  return powers;
+}
+
+function power(base: Complex, exponent: number): Complex {
+  let result = ONE;
+  for (let i = 0; i < exponent; i++) result = multiply(result, base);
+  return result;
+}
+
+function rationalHeld(law: Rational): BlockBehaviour {
+  const { c, d } = outputRow(law);
+  return {
+    gains: [[real(d)]],
+    fromStates: values => [real(c.reduce((sum, factor, i) => sum + factor * values[i]!, 0))],
+    readStates: (values, [u = ZERO]) => {
+      const last = add(u, real(-values.reduce((sum, value, k) => sum + law.denominator[k]! * value, 0)));
+      return readingHeld(values, [...values.slice(1).map(real), last]);
+    },
+  };
+}
+
+function matricesHeld({ A, B, C, D }: Matrices): BlockBehaviour {
+  const times = (row: readonly number[], values: readonly number[]) =>
+    real(row.reduce((sum, factor, i) => sum + factor * values[i]!, 0));
+  return {
+    gains: D.map(row => row.map(real)),
+    fromStates: values => C.map(row => times(row, values)),
+    readStates: (values, u) =>
+      readingHeld(
+        values,
+        A.map((row, i) => timesComplex(B[i]!, u, times(row, values))),
+      ),
+  };
+}
+
+/** X = (sI − A)⁻¹ (x(0) + B u), Y = C X + D u. */
+function matricesAt({ A, B, C, D }: Matrices, s: Complex): BlockBehaviour | null {
+  const resolvent = factorComplex(
+    A.map((row, i): ComplexRow => {
+      const column = row.flatMap((a, j) => (a !== 0 || i === j ? [j] : []));
+      return {
+        column,
+        re: column.map(j => (i === j ? s.re : 0) - row[j]!),
+        im: column.map(j => (i === j ? s.im : 0)),
+      };
+    }),
+  );
+  if (resolvent === null) return null;
+  const states = (drive: readonly Complex[]): Complex[] => {
+    const { re, im } = solveComplex(
+      resolvent,
+      Float64Array.from(drive, ({ re }) => re),
+      Float64Array.from(drive, ({ im }) => im),
+    );
+    return Array.from(re, (value, i) => ({ re: value, im: im[i]! }));
+  };
+  const inputs = D[0]?.length ?? B[0]?.length ?? 0;
+  const answers = Array.from({ length: inputs }, (_, j) => states(B.map(row => real(row[j]!))));
+  return {
+    gains: C.map((row, o) => answers.map((x, j) => timesComplex(row, x, real(D[o]![j]!)))),
+    fromStates: values => {
+      const x = states(values.map(real));
+      return C.map(row => timesComplex(row, x, ZERO));
+    },
+    readStates: (values, u) =>
+      readingAt(s, states(values.map((value, i) => timesComplex(B[i]!, u, real(value)))), values),
+  };
+}
+
+function timesComplex(row: readonly number[], values: readonly Complex[], start: Complex): Complex {
+  return row.reduce((sum, factor, i) => add(sum, multiply(real(factor), values[i]!)), start);
+}
