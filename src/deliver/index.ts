@@ -3,5 +3,5 @@
 export { CAUTION } from './caution.ts';
 export type { DrawingFormat, Format, ModelContext, ModelFormat, Notation } from './format.ts';
 export { FORMATS } from './formats.ts';
-export { type ModelFile, modelFile, type TransferFunctionEntry } from './model-file.ts';
+export { type ModelFile, modelFile, modelWarnings, type TransferFunctionEntry } from './model-file.ts';
 export { oneLine } from './one-line.ts';

@@ -66,8 +66,14 @@ export interface TransferFunctionEntry {
 /** A file may take longer than an answer while drawing: exact answers up to 128 states. */
 const EFFORT = 'high';
 
+/** Everything worth knowing about the model: what the derivation met, then the poles that no transfer function shows. */
+export function modelWarnings({ model, warnings }: Derivation): readonly Warning[] {
+  return [...warnings, ...hiddenModeWarnings(model, EFFORT)];
+}
+
 /** The content of the model file. */
-export function modelFile({ model, warnings, selfCheck }: Derivation): ModelFile {
+export function modelFile(derivation: Derivation): ModelFile {
+  const { model, selfCheck } = derivation;
   const { title, states, inputs, outputs, initialState, shiftedStates } = model;
   const poleSet = poles(model, EFFORT);
   const zeroSet = zeros(model, EFFORT);
@@ -90,7 +96,7 @@ export function modelFile({ model, warnings, selfCheck }: Derivation): ModelFile
     controllable: isControllable(model, EFFORT).holds,
     observable: isObservable(model, EFFORT).holds,
     shiftedStates,
-    warnings: [...warnings, ...hiddenModeWarnings(model, EFFORT)],
+    warnings: modelWarnings(derivation),
     selfCheck,
   };
 }

@@ -1,0 +1,138 @@
+/**
+ * The arguments of the command line, read into one request. First of the stages: nothing is opened here. Every refusal is a
+ * `bad-option` that names the argument and what would do.
+ */
+
+import { FORMATS, type Format, type Notation } from '../deliver/index.ts';
+import { nearestName } from '../expression/index.ts';
+import { fail, ok, problem, type Result } from '../problem/index.ts';
+import { isLink } from '../share/index.ts';
+
+export type Request =
+  | { readonly command: 'help' }
+  | { readonly command: 'version' }
+  | { readonly command: 'check'; readonly source: string }
+  | { readonly command: 'link'; readonly source: string }
+  | {
+      readonly command: 'derive';
+      readonly source: string;
+      readonly format: Format;
+      readonly notation: Notation;
+      /** A path; null for standard output. */
+      readonly out: string | null;
+      /** Parameters to replace, in the order given; the last one of a name holds. */
+      readonly settings: readonly Setting[];
+    };
+
+export interface Setting {
+  readonly name: string;
+  readonly value: string;
+}
+
+const COMMANDS = ['derive', 'check', 'link'] as const;
+const OPTIONS_WITH_VALUE = ['--as', '--out', '--notation', '--set'] as const;
+const OPTIONS = [...OPTIONS_WITH_VALUE, '--help', '--version'] as const;
+const NOTATIONS: readonly Notation[] = ['fractions', 'decimals'];
+
+/** Options in the order given, and what is no option. */
+interface Split {
+  readonly options: readonly { readonly name: (typeof OPTIONS)[number]; readonly value: string }[];
+  readonly operands: readonly string[];
+}
+
+/** The request that the arguments (without the program's own name) make. */
+export function readRequest(argv: readonly string[]): Result<Request> {
+  const split = splitArguments(argv);
+  if (!split.ok) return split;
+  const { options, operands } = split.value;
+  if (options.some(({ name }) => name === '--help')) return ok({ command: 'help' });
+  if (options.some(({ name }) => name === '--version')) return ok({ command: 'version' });
+  const [name, source, ...more] = operands;
+  if (name === undefined) return refuse('No command is given. Write derive, check or link; --help tells more.');
+  const command = COMMANDS.find(known => known === name);
+  if (command === undefined) return refuse(`There is no command "${name}". ${suggestion(name, COMMANDS)}`);
+  if (source === undefined) return refuse(`${command} needs a drawing. Write a file, a share link or - after it.`);
+  if (more.length > 0) return refuse(`${command} takes one drawing, and "${more[0]}" is one too many. Leave it out.`);
+  if (command === 'derive') return deriveRequest(source, options);
+  const [option] = options;
+  if (option !== undefined) return refuse(`${command} takes no ${option.name}. Only derive does.`);
+  if (command === 'link' && isLink(source))
+    return refuse('link makes a link of a file or of -, and this is one already.');
+  return ok({ command, source });
+}
+
+function splitArguments(argv: readonly string[]): Result<Split> {
+  const options: Split['options'][number][] = [];
+  const operands: string[] = [];
+  for (let i = 0; i < argv.length; i++) {
+    const argument = argv[i] ?? '';
+    if (argument === '--') {
+      operands.push(...argv.slice(i + 1));
+      break;
+    }
+    if (argument === '-' || !argument.startsWith('-')) {
+      operands.push(argument);
+      continue;
+    }
+    const [written = '', ...rest] = argument.split('=');
+    const name = OPTIONS.find(known => known === written);
+    if (name === undefined) return refuse(`There is no option ${written}. ${suggestion(written, OPTIONS)}`);
+    const attached = rest.length > 0 ? rest.join('=') : null;
+    const takesValue = OPTIONS_WITH_VALUE.some(known => known === name);
+    if (!takesValue && attached !== null) return refuse(`${name} takes no value. Leave out "=${attached}".`);
+    const value = !takesValue ? '' : (attached ?? argv[++i]);
+    if (value === undefined) return refuse(`${name} needs a value after it. ${VALUES_OF[name] ?? ''}`.trim());
+    options.push({ name, value });
+  }
+  return ok({ options, operands });
+}
+
+const VALUES_OF: Readonly<Partial<Record<string, string>>> = {
+  '--as': `Write one of ${alternatives(FORMATS.map(({ id }) => id))}.`,
+  '--out': 'Write the path of the file to write.',
+  '--notation': 'Write fractions or decimals.',
+  '--set': 'Write NAME=EXPR, for instance Kp=2/3.',
+};
+
+function deriveRequest(source: string, options: Split['options']): Result<Request> {
+  const last = (name: string) => options.findLast(option => option.name === name)?.value;
+  const id = last('--as') ?? 'model';
+  const format = FORMATS.find(known => known.id === id);
+  if (format === undefined) {
+    const ids = FORMATS.map(known => known.id);
+    return refuse(`There is no format "${id}". ${suggestion(id, ids)}`);
+  }
+  const written = last('--notation') ?? 'fractions';
+  const notation = NOTATIONS.find(known => known === written);
+  if (notation === undefined) return refuse(`There is no notation "${written}". ${suggestion(written, NOTATIONS)}`);
+  const settings: Setting[] = [];
+  for (const { value } of options.filter(({ name }) => name === '--set')) {
+    const [name, expression] = halves(value);
+    if (name === '' || expression === '') {
+      return refuse(`--set "${value}" sets nothing. Write NAME=EXPR, for instance Kp=2/3.`);
+    }
+    settings.push({ name, value: expression });
+  }
+  return ok({ command: 'derive', source, format, notation, out: last('--out') ?? null, settings });
+}
+
+/** What stands before and after the first equals sign; the second is empty where there is none. */
+function halves(text: string): readonly [string, string] {
+  const at = text.indexOf('=');
+  return at < 0 ? [text.trim(), ''] : [text.slice(0, at).trim(), text.slice(at + 1).trim()];
+}
+
+/** `Did you mean derive?`, or where nothing is near all there is: `Write derive, check or link.` */
+function suggestion(word: string, known: readonly string[]): string {
+  const nearest = nearestName(word, known);
+  if (nearest !== null) return `Did you mean ${nearest}?`;
+  return `Write ${alternatives(known)}.`;
+}
+
+function alternatives(words: readonly string[]): string {
+  return `${words.slice(0, -1).join(', ')} or ${words.at(-1) ?? ''}`;
+}
+
+function refuse(message: string): Result<never> {
+  return fail(problem('bad-option', message));
+}

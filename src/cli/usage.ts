@@ -1,0 +1,31 @@
+/** What `--help` prints. */
+
+import { CAUTION, FORMATS } from '../deliver/index.ts';
+
+/** The text, ended by a line break. */
+export function usage(): string {
+  const width = Math.max(...FORMATS.map(({ id }) => id.length)) + 2;
+  const formats = FORMATS.map(({ id, label }) => `    ${id.padEnd(width)}${label}`);
+  return `${HEAD}\n${formats.join('\n')}\n\n${TAIL}\n\n${CAUTION}\n`;
+}
+
+const HEAD = `Usage:
+  poleward derive FILE|LINK|-   [--as FORMAT] [--out PATH] [--notation fractions|decimals] [--set NAME=EXPR]...
+  poleward check  FILE|LINK|-
+  poleward link   FILE|-
+
+derive prints the model of a drawing: A, B, C, D with names, poles, zeros, transfer functions.
+check  prints the drawing's warnings and errors, one a line, and nothing where all is well.
+link   prints the fragment of a share link; the page's address goes before it.
+
+FILE is a drawing (*.poleward.json), LINK a share link or its #d1=... part, - standard input.
+
+  --as FORMAT              one of the following, model where none is given:`;
+
+const TAIL = `  --out PATH               writes a file instead of standard output
+  --notation fractions     matrix entries as fractions where the model is exact (as it is without this option)
+  --notation decimals      or as decimals
+  --set NAME=EXPR          gives a parameter another value; may be repeated
+  --help, --version
+
+Exit status: 0 done; 2 the input cannot be used; 3 the drawing has no state-space model.`;
