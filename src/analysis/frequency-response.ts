@@ -1,0 +1,122 @@
+/**
+ * The response of one output to a sinusoid on one input: G(jω) from the exact zeros, poles and gain where the model's size
+ * allows, else from the balanced Hessenberg form. Of the state-space model: dead time counts as its Padé approximation.
+ */
+
+import { toDouble } from '../algebra/index.ts';
+import type { StateSpace } from '../compile/index.ts';
+import { balanceSystem, hessenbergSystem, type ResponseSystem, responseAt } from '../numeric/index.ts';
+import { channelSystem } from './channel-system.ts';
+import { characteristicOf, type Effort, type ExactModel, exactModel, remembered } from './exact-model.ts';
+import { exactPoles, type Root, rootsOf } from './poles.ts';
+import { reducedFraction } from './transfer-functions.ts';
+
+export interface FrequencyResponse {
+  /** rad/s, as asked. */
+  readonly omega: Float64Array;
+  /** Real and imaginary part; both NaN at a pole on the imaginary axis, where the response does not exist. */
+  readonly re: Float64Array;
+  readonly im: Float64Array;
+  readonly route: 'certified' | 'floating';
+}
+
+/** Zeros, poles and gain of a transfer function: gain · ∏(s − zero) / ∏(s − pole). */
+export interface ZeroPoleGain {
+  readonly zeros: readonly Root[];
+  readonly poles: readonly Root[];
+  /** 0 for the zero channel. */
+  readonly gain: number;
+}
+
+/** G(jω) of a channel, by positions, at angular frequencies in rad/s (finite, of either sign). O(n) or O(n²) a point. */
+export function frequencyResponse(
+  model: StateSpace,
+  { input, output }: { readonly input: number; readonly output: number },
+  omega: ArrayLike<number>,
+  effort: Effort = 'ordinary',
+): FrequencyResponse {
+  const result = {
+    omega: Float64Array.from(omega),
+    re: new Float64Array(omega.length),
+    im: new Float64Array(omega.length),
+  };
+  const exact = exactModel(model, effort);
+  const factors = exact === null ? null : zeroPoleGain(exact, output, input);
+  const valueAt = factors === null ? byHessenberg(model, output, input) : byFactors(factors);
+  result.omega.forEach((w, k) => {
+    const value = valueAt(w);
+    result.re[k] = value?.[0] ?? Number.NaN;
+    result.im[k] = value?.[1] ?? Number.NaN;
+  });
+  return { ...result, route: factors === null ? 'floating' : 'certified' };
+}
+
+type Response = (omega: number) => readonly [number, number] | null;
+
+/** The certified factors of the reduced transfer function; null where they could not be separated. */
+export function zeroPoleGain(exact: ExactModel, output: number, input: number): ZeroPoleGain | null {
+  const kept = remembered(known, exact, () => new Map<string, ZeroPoleGain | null>());
+  const key = `${output} ${input}`;
+  const found = kept.get(key);
+  if (found !== undefined) return found;
+  const { numerator, denominator } = reducedFraction(exact, output, input);
+  const isWhole = denominator.length === characteristicOf(exact).length;
+  const [leading] = numerator;
+  const zeros = rootsOf(numerator);
+  const poles = isWhole ? exactPoles(exact) : rootsOf(denominator);
+  const gain = leading === undefined ? 0 : toDouble(leading);
+  const factors = zeros === null || poles === null ? null : { zeros, poles, gain };
+  kept.set(key, factors);
+  return factors;
+}
+
+const known = new WeakMap<ExactModel, Map<string, ZeroPoleGain | null>>();
+
+/**
+ * Factors are multiplied in turns of zero and pole, and the product's power of two is kept apart, so that high orders neither
+ * overflow nor underflow on the way.
+ */
+function byFactors({ zeros, poles, gain }: ZeroPoleGain): Response {
+  const over = zeros.flatMap(root => new Array<Root>(root.multiplicity).fill(root));
+  const under = poles.flatMap(root => new Array<Root>(root.multiplicity).fill(root));
+  return omega => {
+    let [re, im, exponent] = [gain, 0, 0];
+    for (let k = 0; k < Math.max(over.length, under.length); k++) {
+      const zero = over[k];
+      if (zero !== undefined) {
+        const [a, b] = [-zero.re, omega - zero.im];
+        [re, im] = [re * a - im * b, re * b + im * a];
+      }
+      const pole = under[k];
+      if (pole !== undefined) {
+        const [a, b] = [-pole.re, omega - pole.im];
+        const size = a * a + b * b;
+        if (size === 0) return null;
+        [re, im] = [(re * a + im * b) / size, (im * a - re * b) / size];
+      }
+      const scale = Math.max(Math.abs(re), Math.abs(im));
+      if (scale === 0) return [0, 0];
+      const power = Math.floor(Math.log2(scale));
+      re *= 2 ** -power;
+      im *= 2 ** -power;
+      exponent += power;
+    }
+    return [scaleByPower(re, exponent), scaleByPower(im, exponent)];
+  };
+}
+
+/** x · 2^exponent, in two steps so that the power itself stays finite. */
+function scaleByPower(x: number, exponent: number): number {
+  const half = Math.trunc(exponent / 2);
+  return x * 2 ** half * 2 ** (exponent - half);
+}
+
+function byHessenberg(model: StateSpace, output: number, input: number): Response {
+  const { A, B, C, D } = channelSystem(model.numeric, input, [output]);
+  const balanced = balanceSystem(A, B, C);
+  const system: ResponseSystem = { ...hessenbergSystem(balanced.A, balanced.B, balanced.C), D };
+  return omega => {
+    const value = responseAt(system, 0, omega);
+    return value === null ? null : [value.re[0] ?? 0, value.im[0] ?? 0];
+  };
+}

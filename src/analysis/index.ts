@@ -1,0 +1,28 @@
+/**
+ * What a model does: poles, zeros, transfer functions, stability, structure, responses in time and frequency. Pure functions
+ * of a StateSpace; each answer says whether it is proved or computed in doubles. Start at exact-model.ts for the exact
+ * answers, at free-response.ts for those in time.
+ */
+
+export type { Effort } from './exact-model.ts';
+export { EXACT_LIMIT } from './exact-model.ts';
+export type { Excitation } from './excitation.ts';
+export type { FrequencyResponse } from './frequency-response.ts';
+export { frequencyResponse } from './frequency-response.ts';
+export { hiddenModeWarnings } from './hidden-mode-warnings.ts';
+export type { Horizon, HorizonReason } from './horizon.ts';
+export { dampingRatio, naturalFrequency, timeConstant } from './pole-figures.ts';
+export type { PoleSet, Root } from './poles.ts';
+export { poles } from './poles.ts';
+export type { Stability } from './stability.ts';
+export { stability } from './stability.ts';
+export type { StepMetrics } from './step-metrics.ts';
+export { stepMetrics } from './step-metrics.ts';
+export type { HiddenMode, Structural } from './structure.ts';
+export { hiddenModes, isControllable, isObservable, kalmanRanks } from './structure.ts';
+export type { ResponseRequest, StepResponse, TimeResponse } from './time-response.ts';
+export { initialStateResponse, stepResponse, stepValuesAt, timeResponse } from './time-response.ts';
+export type { ReducedFraction, TransferFunction } from './transfer-functions.ts';
+export { allTransferFunctions, transferFunction } from './transfer-functions.ts';
+export type { ZeroSet } from './zeros.ts';
+export { zeros } from './zeros.ts';
