@@ -48,7 +48,7 @@ function printTable(rows) {
   }
 }
 
-async function runBenchmark({ title, note, families }) {
+async function runBenchmark({ title, note, families, remarks }) {
   process.stdout.write(`\n## ${title}\n${note === undefined ? '' : `${note}\n`}\n`);
   const rows = [['family', 'size', 'least ms', 'median ms', 'most ms', 'runs']];
   for (const { name, sizes, prepare } of families) {
@@ -59,6 +59,8 @@ async function runBenchmark({ title, note, families }) {
     }
   }
   printTable(rows);
+  const lines = (await remarks?.()) ?? [];
+  process.stdout.write(lines.map(line => `\n${line}\n`).join(''));
 }
 
 installMissing();
@@ -70,7 +72,10 @@ if (names.length === 0) {
   process.stderr.write('No benchmark of that name in tests/performance.\n');
   process.exitCode = 1;
 }
-process.stdout.write(`Node ${process.version}, ${cpus()[0]?.model ?? 'unknown processor'}, ${cpus().length} cores\n`);
+const date = new Date().toISOString().slice(0, 10);
+process.stdout.write(
+  `${date}, Node ${process.version}, ${cpus()[0]?.model ?? 'unknown processor'}, ${cpus().length} cores\n`,
+);
 mkdirSync(bundles, { recursive: true });
 for (const name of names) {
   const out = join(bundles, name.replace('.bench.ts', ''));

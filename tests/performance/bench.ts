@@ -17,4 +17,6 @@ export interface Benchmark {
   readonly note?: string;
   /** One of them degenerate: everything in one loop, all poles equal, or the like. */
   readonly families: readonly Family[];
+  /** Lines below the table: what was measured beside time, digits that are right for instance. */
+  readonly remarks?: () => readonly string[] | Promise<readonly string[]>;
 }
