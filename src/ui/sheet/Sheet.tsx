@@ -11,6 +11,7 @@ import { BranchDots } from './BranchDots.tsx';
 import { DrawnWire } from './DrawnWire.tsx';
 import { SHEET_EVENTS } from './sheet-events.ts';
 import { useDropPart } from './useDropPart.ts';
+import { useFitOnOpening } from './useFitOnOpening.ts';
 import { usePlacedSheet } from './usePlacedSheet.ts';
 import { useSheetKeys } from './useSheetKeys.ts';
 import { useSheetNodes } from './useSheetNodes.ts';
@@ -21,7 +22,6 @@ const NODE_TYPES = { block: BlockNode };
 const EDGE_TYPES = { wire: WireEdge };
 const SNAP: [number, number] = [GRID, GRID];
 const CENTRE: [number, number] = [0.5, 0.5];
-const FIT = { padding: 0.12, maxZoom: 1.4 };
 
 /** Above this many blocks only those in view are kept in the page (dependencies: measured at some 300). */
 const ALL_IN_PAGE = 300;
@@ -32,6 +32,7 @@ export function Sheet() {
   const edges = useSheetWires(placed);
   const drop = useDropPart();
   const onKeyDown = useSheetKeys();
+  useFitOnOpening();
   return (
     <div
       className="sheet"
@@ -50,8 +51,6 @@ export function Sheet() {
         snapGrid={SNAP}
         minZoom={0.1}
         maxZoom={4}
-        fitView
-        fitViewOptions={FIT}
         connectionMode={ConnectionMode.Strict}
         connectionLineComponent={DrawnWire}
         connectionRadius={22}

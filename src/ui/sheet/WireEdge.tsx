@@ -11,7 +11,13 @@ export const WireEdge = memo(function WireEdge({ id, data, selected }: EdgeProps
   const state = selected === true ? ' wire-selected' : '';
   return (
     <>
-      <BaseEdge id={id} path={wirePath(points)} className={`wire${state}`} interactionWidth={14} />
+      <BaseEdge
+        id={id}
+        path={wirePath(selected === true ? points : (data?.own ?? points))}
+        className={`wire${state}`}
+        interactionWidth={0}
+      />
+      <path className="wire-reach react-flow__edge-interaction" d={wirePath(points)} />
       <path className={`wire-head${state}`} d={arrowHead(points)} />
     </>
   );

@@ -13,6 +13,7 @@ import { setViewCentre } from '../write-line/view-centre.ts';
 import { connectBlocks } from './connect-blocks.ts';
 import { focusedBlock } from './focus-block.ts';
 import { removeSelected } from './remove-selected.ts';
+import { useFit } from './useFit.ts';
 
 const MOVES: Readonly<Record<string, readonly [number, number]>> = {
   ArrowLeft: [-GRID, 0],
@@ -26,6 +27,7 @@ const LONG_MOVE = 5;
 
 export function useSheetKeys(): (event: KeyboardEvent) => void {
   const flow = useReactFlow();
+  const fitDrawing = useFit();
   useEffect(() => {
     setViewCentre(() => {
       const box = document.querySelector('.sheet')?.getBoundingClientRect();
@@ -40,7 +42,7 @@ export function useSheetKeys(): (event: KeyboardEvent) => void {
       if (event.key.toLowerCase() !== 'a') return;
       actions.selectBlocks(store.getState().document.diagram.blocks.map(({ id }) => id));
       event.preventDefault();
-    } else if (!event.altKey && (plainKey(event) || writingKey(event.key) || viewKey(event.key, flow))) {
+    } else if (!event.altKey && (plainKey(event) || writingKey(event.key) || viewKey(event.key, fitDrawing))) {
       event.preventDefault();
     }
   };
@@ -139,8 +141,8 @@ function writingKey(key: string): boolean {
   return true;
 }
 
-function viewKey(key: string, flow: ReturnType<typeof useReactFlow>): boolean {
-  if (key === 'z') void flow.fitView({ padding: 0.12, maxZoom: 1.4 });
+function viewKey(key: string, fitDrawing: (glide: boolean) => void): boolean {
+  if (key === 'z') fitDrawing(true);
   else if (key === '?') actions.openDialog('keys');
   else return false;
   return true;

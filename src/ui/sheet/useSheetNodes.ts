@@ -75,6 +75,7 @@ function nodeOf(data: BlockData, isSelected: boolean, sentence: string): BlockFl
     position: { x, y },
     width,
     height,
+    measured: { width, height },
     data,
     selected: isSelected,
     ariaLabel: sentence,

@@ -10,10 +10,10 @@ import { openLine } from '../../worker/index.ts';
 import { actions, type State, store } from '../store/index.ts';
 import { chosenChannel } from './chosen-channel.ts';
 
-const line = openLine(
-  () => new Worker(workerAddress, { type: 'module', name: 'derivation' }),
-  { answer: actions.takeAnswer, dead: actions.stopResults },
-);
+const line = openLine(() => new Worker(workerAddress, { type: 'module', name: 'derivation' }), {
+  answer: actions.takeAnswer,
+  dead: actions.stopResults,
+});
 
 /** Makes a file of the drawing on screen, in the worker. */
 export const makeFile = line.file;

@@ -1,5 +1,6 @@
 /** One parameter: its name (renamed wherever it is used), value or expression of others, unit and note. */
 
+import { MathName } from '../figures/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
 import { formatValue } from './format-value.ts';
 import { TextField } from './TextField.tsx';
@@ -12,13 +13,16 @@ export function ParameterRow({ name }: { readonly name: string }) {
     actions.edit({ kind: 'setParameter', name, [field]: text });
   return (
     <tr>
-      <th scope="row">
+      <th scope="row" className="title-block-named">
         <TextField
           label={`Name of parameter ${name}`}
           text={name}
           className="title-block-field title-block-name"
           onCommit={to => actions.edit({ kind: 'renameParameter', from: name, to }, `${name} is now ${to} everywhere.`)}
         />
+        <span className="title-block-shown" aria-hidden="true">
+          <MathName name={name} />
+        </span>
       </th>
       <td className="title-block-value">
         <TextField label={`Value of ${name}`} text={parameter.value} onCommit={set('value')} />
@@ -28,7 +32,12 @@ export function ParameterRow({ name }: { readonly name: string }) {
         <TextField label={`Unit of ${name}`} text={parameter.unit ?? ''} onCommit={set('unit')} />
       </td>
       <td>
-        <TextField label={`Note on ${name}`} text={parameter.note ?? ''} onCommit={set('note')} />
+        <TextField
+          label={`Note on ${name}`}
+          text={parameter.note ?? ''}
+          className="title-block-field title-block-note"
+          onCommit={set('note')}
+        />
       </td>
       <td>
         <button
