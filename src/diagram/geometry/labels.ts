@@ -4,7 +4,7 @@
  */
 
 import type { Block } from '../types.ts';
-import { groupTitle } from './block-box.ts';
+import { CIRCLE_INPUTS, groupTitle } from './block-box.ts';
 import { textWidth } from './character-widths.ts';
 import { TYPE } from './content.ts';
 import { nameSpans } from './inline-spans.ts';
@@ -104,15 +104,16 @@ function terminalLabels(name: string, unit: string | undefined, port: PortPlace 
   return labels;
 }
 
-/** Above the wire that enters from a side; right of the wire that enters from above or below. */
+/** Above the wire that enters from a side, right of the wire that enters from above or below, inside a stadium. */
 function signLabels(signs: string, inputs: readonly PortPlace[]): readonly Label[] {
-  const close = inputs.length > 3;
+  const inside = inputs.length > CIRCLE_INPUTS;
   return inputs.map((port, index) => {
     const spans = plainSpan(signs[index] === '-' ? '−' : '+');
-    const out = close ? 7 : 10;
-    if (port.side === 'left') return label(spans, SETTINGS.sign, port.x - out, port.y - (close ? 3 : 5), 'middle');
-    if (port.side === 'right') return label(spans, SETTINGS.sign, port.x + out, port.y - (close ? 3 : 5), 'middle');
-    return label(spans, SETTINGS.sign, port.x + 11, port.side === 'top' ? port.y - 4 : port.y + 13, 'middle');
+    const out = port.side === 'left' ? -1 : 1;
+    if (port.side === 'top') return label(spans, SETTINGS.sign, port.x + 11, port.y - 4, 'middle');
+    if (port.side === 'bottom') return label(spans, SETTINGS.sign, port.x + 11, port.y + 13, 'middle');
+    if (inside) return label(spans, SETTINGS.sign, port.x - 8 * out, port.y + 5, 'middle');
+    return label(spans, SETTINGS.sign, port.x + 10 * out, port.y - 5, 'middle');
   });
 }
 

@@ -110,9 +110,16 @@ function summingInputs(block: SummerBlock, around: Neighbours): readonly PortPla
   return sides.map(side => placeOn(side, SUMMING_RADIUS));
 }
 
-/** Top or bottom by where the source stands; null where nothing is joined. */
+/**
+ * Top or bottom by where the source stands; null where nothing is joined. From its own height the way back of a feedback is
+ * drawn underneath, the way ahead of a feedforward on top.
+ */
 function wantedSide(block: SummerBlock, port: number, around: Neighbours): 'top' | 'bottom' | null {
   const source = around.sources.get(`${block.id}:${port}`);
   if (source === undefined) return null;
-  return (source.at?.[1] ?? 0) < (block.at?.[1] ?? 0) ? 'top' : 'bottom';
+  const [x, y] = block.at ?? [0, 0];
+  const [sourceX, sourceY] = source.at ?? [0, 0];
+  if (sourceY !== y) return sourceY < y ? 'top' : 'bottom';
+  const isBehind = block.mirrored ? sourceX > x : sourceX < x;
+  return isBehind ? 'top' : 'bottom';
 }

@@ -34,18 +34,36 @@ export function gridLines(
 }
 
 function axisLines({ extents, fixed }: AxisNeeds, reach: number): Float64Array {
-  const lattice = new Set<number>();
-  for (const [low, high] of extents) {
+  const lines: number[] = latticeAround(extents, reach);
+  const own = [...new Set(fixed)].sort((a, b) => a - b);
+  return merged(lines, own);
+}
+
+/** Ascending multiples of the lattice within `reach` of an extent. */
+function latticeAround(extents: AxisNeeds['extents'], reach: number): number[] {
+  const lines: number[] = [];
+  let next = Number.NEGATIVE_INFINITY;
+  for (const [low, high] of extents.toSorted((a, b) => a[0] - b[0])) {
     const last = Math.ceil((high + reach) / HALF_GRID);
-    for (let step = Math.floor((low - reach) / HALF_GRID); step <= last; step += 1) lattice.add(step * HALF_GRID);
+    next = Math.max(next, Math.floor((low - reach) / HALF_GRID));
+    for (; next <= last; next += 1) lines.push(next * HALF_GRID);
   }
-  for (const line of new Set(fixed)) {
-    if (Number.isInteger(line / HALF_GRID)) continue;
-    const near = Math.round(line / HALF_GRID) * HALF_GRID;
-    if (Math.abs(near - line) < TOO_CLOSE) lattice.delete(near);
+  return lines;
+}
+
+/** Both, ascending, without the lattice lines that are too close to a line of the sheet's own. */
+function merged(lattice: readonly number[], own: readonly number[]): Float64Array {
+  const lines: number[] = [];
+  let at = 0;
+  for (const line of lattice) {
+    while (at < own.length && own[at]! < line) lines.push(own[at++]!);
+    const after = own[at] ?? Number.POSITIVE_INFINITY;
+    const before = own[at - 1] ?? Number.NEGATIVE_INFINITY;
+    const crowded = (value: number): boolean =>
+      Math.abs(value - line) < TOO_CLOSE && !Number.isInteger(value / HALF_GRID);
+    if (after !== line && !crowded(after) && !crowded(before)) lines.push(line);
   }
-  for (const line of fixed) lattice.add(line);
-  return Float64Array.from(lattice).sort();
+  return Float64Array.from([...lines, ...own.slice(at)]);
 }
 
 /** Index of the first line at or above `value`; the number of lines where there is none. */

@@ -1,7 +1,7 @@
 /**
  * The cheapest way on the grid from a net's tree to a port: A* (Hart, Nilsson & Raphael 1968) over (node, direction of
  * travel), so that bends have a price. Lengths are dearer close to blocks, labels and parallel wires; a wire of another net
- * may only be crossed straight. Promises the same way for the same grid, and never more than `MOST_STEPS` steps.
+ * may only be crossed straight. Promises the same way for the same grid.
  */
 
 import { CheapestFirst } from './cheapest-first.ts';
@@ -18,8 +18,6 @@ export const PRICES = {
   offGrid: 1.02,
   offMiddle: 0.0004,
 } as const;
-
-const MOST_STEPS = 60_000;
 
 /** Direction of travel. */
 export type Axis = 'horizontal' | 'vertical';
@@ -44,6 +42,10 @@ export interface SearchQuestion {
   readonly window: { readonly left: number; readonly right: number; readonly top: number; readonly bottom: number };
   /** Where vertical pieces rather lie, where it makes no other difference; null for anywhere. */
   readonly middle: number | null;
+  /** What the remaining length counts for over itself: 1 finds the cheapest way, more of it finds a good one sooner (Pohl 1970). */
+  readonly haste: number;
+  /** Steps after which the search is given up. */
+  readonly patience: number;
 }
 
 /** Room for searches on one grid; its arrays are used again and again. */
@@ -78,8 +80,8 @@ export function searcher(grid: SheetGrid): Searcher {
   };
 }
 
-/** Nodes of the cheapest way from a beginning to the goal, both included; null where there is none in the window. */
-export function cheapestWay(space: Searcher, question: SearchQuestion): readonly number[] | null {
+/** Nodes of the cheapest way from a beginning to the goal, both included; `none` where the window holds no way. */
+export function cheapestWay(space: Searcher, question: SearchQuestion): readonly number[] | 'none' | 'given-up' {
   const search = new Search(space, question);
   return search.run();
 }
@@ -102,13 +104,13 @@ class Search {
     this.goalY = space.grid.ys[Math.floor(question.goal / space.grid.columns)]!;
   }
 
-  run(): readonly number[] | null {
+  run(): readonly number[] | 'none' | 'given-up' {
     const { queue, marks } = this.space;
-    const { beginnings, goal, goalAxis } = this.question;
+    const { beginnings, goal, goalAxis, patience } = this.question;
     for (const { node, axis, cost } of beginnings) this.reach(2 * node + (axis === 'vertical' ? 1 : 0), cost, -1);
-    for (let steps = 0; steps < MOST_STEPS; steps += 1) {
+    for (let steps = 0; steps < patience; steps += 1) {
       const state = queue.pop();
-      if (state < 0) return null;
+      if (state < 0) return 'none';
       if (marks[state] === -this.mark) continue;
       marks[state] = -this.mark;
       const axis = state & 1;
@@ -116,7 +118,7 @@ class Search {
         return this.way(state);
       this.expand(state);
     }
-    return null;
+    return 'given-up';
   }
 
   private way(last: number): readonly number[] {
@@ -189,6 +191,6 @@ class Search {
     const aside = axis === 'vertical' ? dx : dy;
     let bends = aside > 0 ? 1 : 0;
     if (goalAxis !== null) bends = goalAxis === axis ? 2 * bends : 1;
-    return dx + dy + PRICES.bend * bends;
+    return this.question.haste * (dx + dy) + PRICES.bend * bends;
   }
 }

@@ -17,10 +17,10 @@ export const LABEL = 4;
 
 /** Clearances around a block's frame: closer than the first a wire only goes where it must, closer than the second it rather not. */
 const TIGHT_CLEARANCE = 10;
-const NEAR_CLEARANCE = 20;
+const NEAR_CLEARANCE = 30;
 
 /** Room between a label and a wire. */
-const LABEL_CLEARANCE = 2;
+const LABEL_CLEARANCE = 4;
 
 /** Parallel lines closer than this crowd each other. */
 const CROWDED = 15;
@@ -133,33 +133,34 @@ export function nodesAlong(grid: SheetGrid, route: Route): readonly number[] {
   return nodes;
 }
 
-/** Gives the pieces between successive nodes to a net and marks the lines beside them as crowded. */
-export function occupy(grid: SheetGrid, nodes: readonly number[], net: number): void {
-  for (let index = 1; index < nodes.length; index += 1) {
-    const a = nodes[index - 1]!;
-    const b = nodes[index]!;
-    const isHorizontal = Math.abs(a - b) === 1;
-    const owners = isHorizontal ? grid.horizontalNet : grid.verticalNet;
-    for (const node of [a, b]) {
-      if (owners[node] === 0) owners[node] = net;
-      crowd(grid, node, isHorizontal);
-    }
+/** Gives the lines under a route to a net and marks the lines beside it as crowded. Points that lie on no line end the marking. */
+export function occupy(grid: SheetGrid, route: Route, net: number): void {
+  for (let index = 1; index < route.length; index += 1) {
+    const from = nodeAt(grid, route[index - 1]!);
+    const to = nodeAt(grid, route[index]!);
+    if (from < 0 || to < 0) return;
+    const first = Math.min(from, to);
+    const last = Math.max(from, to);
+    if (last - first < grid.columns) occupyPiece(grid, first, last, 1, net);
+    else occupyPiece(grid, first, last, grid.columns, net);
   }
 }
 
-function crowd(grid: SheetGrid, node: number, isHorizontal: boolean): void {
+/** One straight piece from node `first` to node `last` in steps of 1 along a row, of `columns` along a column. */
+function occupyPiece(grid: SheetGrid, first: number, last: number, step: number, net: number): void {
+  const isHorizontal = step === 1;
+  const owners = isHorizontal ? grid.horizontalNet : grid.verticalNet;
+  for (let node = first; node <= last; node += step) if (owners[node] === 0) owners[node] = net;
   const lines = isHorizontal ? grid.ys : grid.xs;
-  const index = isHorizontal ? Math.floor(node / grid.columns) : node % grid.columns;
   const marks = isHorizontal ? grid.horizontalCrowd : grid.verticalCrowd;
-  const step = isHorizontal ? grid.columns : 1;
-  const own = lines[index]!;
-  for (let other = index - 1, at = node - step; other >= 0 && own - lines[other]! < CROWDED; other -= 1, at -= step)
-    marks[at] = 1;
-  for (
-    let other = index + 1, at = node + step;
-    other < lines.length && lines[other]! - own < CROWDED;
-    other += 1, at += step
-  ) {
-    marks[at] = 1;
+  const aside = isHorizontal ? grid.columns : 1;
+  const own = isHorizontal ? Math.floor(first / grid.columns) : first % grid.columns;
+  for (const direction of [-1, 1]) {
+    let line = own + direction;
+    while (line >= 0 && line < lines.length && Math.abs(lines[line]! - lines[own]!) < CROWDED) {
+      const shift = (line - own) * aside;
+      for (let node = first; node <= last; node += step) marks[node + shift] = 1;
+      line += direction;
+    }
   }
 }

@@ -10,23 +10,50 @@ import { lineFrom } from './grid-lines.ts';
 import { branchings, NetTree } from './net-trees.ts';
 import { type Axis, type Beginning, cheapestWay, type Searcher, searcher } from './path-search.ts';
 import { simplified } from './polyline.ts';
-import { BLOCKED, LABEL, NEAR, nodeAt, nodesAlong, occupy, pointAt, type SheetGrid, sheetGrid } from './sheet-grid.ts';
+import {
+  BLOCKED,
+  LABEL,
+  NEAR,
+  nodeAt,
+  nodesAlong,
+  occupy,
+  pointAt,
+  type SheetGrid,
+  sheetGrid,
+  TIGHT,
+} from './sheet-grid.ts';
 import { isHorizontal, outward, type PortEnd, type Route } from './types.ts';
 import type { EndedWire } from './wire-ends.ts';
 
 /** How far around its ends a wire's way is sought, in turn. */
 const WINDOWS = [120, 500, Number.POSITIVE_INFINITY] as const;
 
-/** How far a wire leads straight out of a port and straight into one. */
-const STUB = 10;
+/** How far a wire leads straight out of a port and straight into one: room for an arrowhead, and where there is not so much. */
+const STUB = 16;
+const SHORT_STUB = 10;
 
-/** Prices of a branch close to a port, under a name, and close to a frame. */
-const BRANCH_PRICES = { atPort: 16, underLabel: 24, near: 4 } as const;
-const CLOSE_TO_PORT = 20;
+/** Prices of a branch for each unit that it is closer to a port than `FROM_PORT`, under a name, and close to a frame. */
+const BRANCH_PRICES = { eachUnit: 0.4, underLabel: 24, near: 4 } as const;
+const FROM_PORT = 40;
+
+/**
+ * Steps that all wires together may take to find their cheapest ways: some 0.3 s. A wire whose share is used up takes a good way,
+ * with the remaining length counted twice, since what is not yet known costs about as much again.
+ */
+const STEPS = 900_000;
+const MOST_PATIENCE = 20_000;
+const HASTE = 2;
+const LAST_PATIENCE = 60_000;
 
 export interface SheetRouter {
+  /** Steps that a wire may take to find its cheapest way. */
+  readonly patience: number;
   readonly space: Searcher;
   readonly trees: Map<number, NetTree>;
+  /** Routes that stay, by net. */
+  readonly kept: Map<number, Route[]>;
+  /** Every port of a net. */
+  readonly ends: ReadonlyMap<number, readonly PortEnd[]>;
 }
 
 /** A router for a sheet; null where the sheet is too large for a grid, which leaves elbows. */
@@ -51,9 +78,19 @@ export function sheetRouter(
   const points = [...fixed, ...kept.flat()];
   const grid = sheetGrid(blocks, labels, { xs: points.map(([x]) => x), ys: points.map(([, y]) => y) });
   if (grid === null) return null;
-  const router: SheetRouter = { space: searcher(grid), trees: new Map() };
   for (const wire of wires) reserve(grid, wire);
-  return router;
+  const patience = Math.min(MOST_PATIENCE, Math.ceil(STEPS / Math.max(1, wires.length)));
+  return { patience, space: searcher(grid), trees: new Map(), kept: new Map(), ends: netEnds(wires) };
+}
+
+function netEnds(wires: readonly EndedWire[]): ReadonlyMap<number, readonly PortEnd[]> {
+  const ends = new Map<number, PortEnd[]>();
+  for (const { from, to, net } of wires) {
+    const list = ends.get(net);
+    if (list === undefined) ends.set(net, [from, to]);
+    else list.push(to);
+  }
+  return ends;
 }
 
 /** Keeps the way straight out of each port free for its own net. */
@@ -68,14 +105,20 @@ function reserve(grid: SheetGrid, { from, to, net }: EndedWire): void {
 
 /** Where the straight piece at a port ends; −1 where the port lies on no line. */
 function stubNode(grid: SheetGrid, end: PortEnd): number {
+  const roomy = nodeAhead(grid, end, STUB);
+  if (roomy >= 0 && (grid.surroundings[roomy]! & 3) < TIGHT) return roomy;
+  return nodeAhead(grid, end, SHORT_STUB);
+}
+
+/** The first node straight out of a port that is at least `distance` away. */
+function nodeAhead(grid: SheetGrid, end: PortEnd, distance: number): number {
   const [x, y] = outward(end.side);
   const port = nodeAt(grid, [end.x, end.y]);
   if (port < 0) return -1;
   const lines = x !== 0 ? grid.xs : grid.ys;
-  const start = x !== 0 ? end.x : end.y;
-  const sign = x + y;
-  const ahead = lineFrom(lines, start + sign * STUB);
-  const index = sign > 0 || lines[ahead] === start + sign * STUB ? ahead : ahead - 1;
+  const wanted = (x !== 0 ? end.x : end.y) + (x + y) * distance;
+  const above = lineFrom(lines, wanted);
+  const index = x + y > 0 || lines[above] === wanted ? above : above - 1;
   if (index < 0 || index >= lines.length) return -1;
   const column = port % grid.columns;
   const row = (port - column) / grid.columns;
@@ -83,14 +126,19 @@ function stubNode(grid: SheetGrid, end: PortEnd): number {
 }
 
 /** Takes a route that stays as it is into the grid. */
-export function keepRoute({ space, trees }: SheetRouter, { net }: EndedWire, route: Route): void {
-  const nodes = nodesAlong(space.grid, route);
-  occupy(space.grid, nodes, net);
-  treeOf(trees, net).add(nodes);
+export function keepRoute({ space, kept }: SheetRouter, { net }: EndedWire, route: Route): void {
+  occupy(space.grid, route, net);
+  const routes = kept.get(net);
+  if (routes === undefined) kept.set(net, [route]);
+  else routes.push(route);
 }
 
-function treeOf(trees: Map<number, NetTree>, net: number): NetTree {
-  const tree = trees.get(net) ?? new NetTree();
+/** The tree of a net; that of a net whose wires stay is made when one more is to join it. */
+function treeOf({ space, trees, kept }: SheetRouter, net: number): NetTree {
+  const known = trees.get(net);
+  if (known !== undefined) return known;
+  const tree = new NetTree();
+  for (const route of kept.get(net) ?? []) tree.add(nodesAlong(space.grid, route));
   trees.set(net, tree);
   return tree;
 }
@@ -98,16 +146,17 @@ function treeOf(trees: Map<number, NetTree>, net: number): NetTree {
 /** Routes a wire and takes its nodes; null where no way was found. */
 export function routeWire(router: SheetRouter, wire: EndedWire): Route | null {
   const { grid } = router.space;
-  const tree = treeOf(router.trees, wire.net);
+  const tree = treeOf(router, wire.net);
   const from = nodeAt(grid, [wire.from.x, wire.from.y]);
   const to = nodeAt(grid, [wire.to.x, wire.to.y]);
   const way = straightWay(grid, wire, tree) ?? wayThrough(router, wire, tree);
   if (way === null) return null;
   const before = tree.isEmpty ? nodesBetween(grid, from, way[0] ?? from) : [];
   const whole = [...before, ...way, ...nodesBetween(grid, to, way.at(-1) ?? to).toReversed()];
-  occupy(grid, whole, wire.net);
   tree.add(whole);
-  return simplified(tree.wayTo(to).map(node => pointAt(grid, node)));
+  const route = simplified(tree.wayTo(to).map(node => pointAt(grid, node)));
+  occupy(grid, route, wire.net);
+  return route;
 }
 
 /** Nodes on a line from one node to another, the first included and the last not. */
@@ -145,7 +194,7 @@ function wayThrough(router: SheetRouter, wire: EndedWire, tree: NetTree): readon
   let way: readonly number[] = [];
   let beginnings = tree.isEmpty
     ? [{ node: source, axis: axisOf(wire.from), cost: 0 }]
-    : branchings(tree, node => branchPrice(grid, wire, node));
+    : branchings(tree, node => branchPrice(router, wire.net, node));
   for (const [index, stop] of stops.entries()) {
     const goalAxis = index === stops.length - 1 ? axisOf(wire.to) : null;
     const piece = wayInWindows(router, wire, { beginnings, goal: stop, goalAxis, own });
@@ -167,17 +216,16 @@ function arrivalAxis(way: readonly number[], otherwise: Axis): Axis {
 }
 
 /** What it costs to branch at a node; infinite where a dot would stand on a port's stub or on a crossing. */
-function branchPrice(grid: SheetGrid, { from, to, net }: EndedWire, node: number): number {
+function branchPrice({ space, ends }: SheetRouter, net: number, node: number): number {
+  const { grid } = space;
   const owners = [grid.horizontalNet[node]!, grid.verticalNet[node]!];
   if (owners.some(owner => owner !== 0 && owner !== net)) return Number.POSITIVE_INFINITY;
   const [x, y] = pointAt(grid, node);
-  let price = 0;
-  for (const end of [from, to]) {
-    const distance = Math.abs(x - end.x) + Math.abs(y - end.y);
-    if (distance < STUB) return Number.POSITIVE_INFINITY;
-    if (distance < CLOSE_TO_PORT) price += BRANCH_PRICES.atPort;
-  }
+  let closest = FROM_PORT;
+  for (const end of ends.get(net) ?? []) closest = Math.min(closest, Math.abs(x - end.x) + Math.abs(y - end.y));
+  if (closest < SHORT_STUB) return Number.POSITIVE_INFINITY;
   const there = grid.surroundings[node]!;
+  let price = (FROM_PORT - closest) * BRANCH_PRICES.eachUnit;
   if (there & LABEL) price += BRANCH_PRICES.underLabel;
   if ((there & 3) >= NEAR) price += BRANCH_PRICES.near;
   return price;
@@ -191,21 +239,22 @@ interface Piece {
 }
 
 function wayInWindows(router: SheetRouter, { from, to, net }: EndedWire, piece: Piece): readonly number[] | null {
-  const { grid } = router.space;
-  const { beginnings, goal, goalAxis, own } = piece;
-  const [goalX, goalY] = pointAt(grid, goal);
-  const [x, y] = [from.x, from.y];
+  const { space, patience } = router;
+  const { xs, ys } = space.grid;
+  const [goalX, goalY] = pointAt(space.grid, piece.goal);
   const leadsOn = from.side === 'right' && to.side === 'left' && to.x > from.x;
   const middle = leadsOn ? (from.x + to.x) / 2 : null;
   for (const margin of WINDOWS) {
     const window = {
-      left: lineFrom(grid.xs, Math.min(x, goalX) - margin),
-      right: Math.min(grid.xs.length, lineFrom(grid.xs, Math.max(x, goalX) + margin)) - 1,
-      top: lineFrom(grid.ys, Math.min(y, goalY) - margin),
-      bottom: Math.min(grid.ys.length, lineFrom(grid.ys, Math.max(y, goalY) + margin)) - 1,
+      left: lineFrom(xs, Math.min(from.x, goalX) - margin),
+      right: Math.min(xs.length, lineFrom(xs, Math.max(from.x, goalX) + margin)) - 1,
+      top: lineFrom(ys, Math.min(from.y, goalY) - margin),
+      bottom: Math.min(ys.length, lineFrom(ys, Math.max(from.y, goalY) + margin)) - 1,
     };
-    const way = cheapestWay(router.space, { beginnings, goal, goalAxis, net, own, window, middle });
-    if (way !== null) return way;
+    const question = { ...piece, net, window, middle };
+    let way = cheapestWay(space, { ...question, haste: 1, patience });
+    if (way === 'given-up') way = cheapestWay(space, { ...question, haste: HASTE, patience: LAST_PATIENCE });
+    if (typeof way !== 'string') return way;
   }
   return null;
 }
