@@ -15,6 +15,7 @@ import { useFitOnOpening } from './useFitOnOpening.ts';
 import { usePlacedSheet } from './usePlacedSheet.ts';
 import { useSheetKeys } from './useSheetKeys.ts';
 import { useSheetNodes } from './useSheetNodes.ts';
+import { useSheetView } from './useSheetView.ts';
 import { useSheetWires } from './useSheetWires.ts';
 import { WireEdge } from './WireEdge.tsx';
 
@@ -33,6 +34,7 @@ export function Sheet() {
   const drop = useDropPart();
   const onKeyDown = useSheetKeys();
   useFitOnOpening();
+  useSheetView();
   return (
     <div
       className="sheet"

@@ -1,7 +1,6 @@
 /** Keys on the sheet: parts by their letter, moving by squares, wiring, mirroring, removing, and the write-a-block line. */
 
-import { type KeyboardEvent, useEffect } from 'react';
-import { useReactFlow } from 'reactflow';
+import type { KeyboardEvent } from 'react';
 import { GRID } from '../../diagram/geometry/index.ts';
 import { blockTitle } from '../../diagram/index.ts';
 import { isTextField } from '../shell/useUndoKeys.ts';
@@ -9,7 +8,6 @@ import { actions, store } from '../store/index.ts';
 import { beginWriting } from '../write-line/begin-writing.ts';
 import { partOf } from '../write-line/parts.ts';
 import { placePart } from '../write-line/place-block.ts';
-import { setViewCentre } from '../write-line/view-centre.ts';
 import { connectBlocks } from './connect-blocks.ts';
 import { focusedBlock } from './focus-block.ts';
 import { removeSelected } from './remove-selected.ts';
@@ -26,16 +24,7 @@ const MOVES: Readonly<Record<string, readonly [number, number]>> = {
 const LONG_MOVE = 5;
 
 export function useSheetKeys(): (event: KeyboardEvent) => void {
-  const flow = useReactFlow();
   const fitDrawing = useFit();
-  useEffect(() => {
-    setViewCentre(() => {
-      const box = document.querySelector('.sheet')?.getBoundingClientRect();
-      if (box === undefined) return [0, 0];
-      const { x, y } = flow.screenToFlowPosition({ x: box.left + box.width / 2, y: box.top + box.height / 2 });
-      return [x, y];
-    });
-  }, [flow]);
   return event => {
     if (isTextField(event.target) || event.defaultPrevented) return;
     if (event.ctrlKey || event.metaKey) {

@@ -45,6 +45,7 @@ function TitleField() {
       className="heading-title"
       aria-label="Title of the drawing"
       defaultValue={text}
+      placeholder="untitled"
       maxLength={200}
       onKeyDown={event => {
         if (event.key === 'Enter') event.currentTarget.blur();

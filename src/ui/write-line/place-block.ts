@@ -8,7 +8,7 @@ import { type Block, blockTitle, type Edit, freshId, type Point, portCounts, typ
 import type { WrittenBlock } from '../../diagram/write-a-block/index.ts';
 import { actions, store } from '../store/index.ts';
 import { partOf } from './parts.ts';
-import { viewCentre } from './view-centre.ts';
+import { sheetView } from './sheet-view.ts';
 
 /** Columns of blocks stand this far apart, centre to centre. */
 const COLUMN = 6 * GRID;
@@ -27,7 +27,7 @@ export function placeBlock(written: WrittenBlock, names: readonly string[], at: 
   const sheet = document.diagram;
   const source = at === null && selection.blocks.size === 1 ? leadingBlock(sheet, [...selection.blocks][0]) : null;
   const id = freshId(sheet, stemOf(written));
-  const wanted = at ?? (source?.at === undefined ? viewCentre() : besides(source));
+  const wanted = at ?? (source?.at === undefined ? openPlace(sheet) : besides(source));
   const block: Block = { ...written, id, at: freePlace(sheet, { ...written, id }, snap(wanted)) };
   const unknown = names.filter(name => !document.diagram.parameters.some(parameter => parameter.name === name));
   const edits: Edit[] = unknown.map(name => ({ kind: 'addParameter', parameter: { name, value: '1' } }));
@@ -40,7 +40,12 @@ export function placeBlock(written: WrittenBlock, names: readonly string[], at: 
     said.push(`${unknown.join(', ')} added as ${unknown.length === 1 ? 'a parameter' : 'parameters'} with value 1`);
   if (actions.editTogether(edits, `${said.join(', ')}.`).length > 0) return null;
   actions.selectBlocks([id]);
+  sheetView().reveal(block.at ?? wanted);
   return id;
+}
+
+function openPlace({ blocks }: Sheet): Point {
+  return blocks.length === 0 ? sheetView().start() : sheetView().centre();
 }
 
 function leadingBlock(sheet: Sheet, id: string | undefined): Block | null {

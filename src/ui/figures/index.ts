@@ -1,0 +1,33 @@
+/**
+ * Numbers and mathematics for the screen: figures that show only right digits, names, polynomials and transfer functions as
+ * MathML, and the tree of elements that formulas and plots are made of.
+ */
+
+import './figures.css';
+
+export type { Figure } from './figure.ts';
+export { figureOf, rightDigits, USUAL_DIGITS } from './figure.ts';
+export type { TextRun } from './format.ts';
+export {
+  figureText,
+  formatFraction,
+  formatNumber,
+  formatPadded,
+  formatUnit,
+  MINUS,
+  raised,
+  raisedRuns,
+} from './format.ts';
+export { MarkupView } from './MarkupView.tsx';
+export { MathName, singleLetter } from './MathName.tsx';
+export type { Markup } from './markup.ts';
+export { element, markupText } from './markup.ts';
+export { Polynomial } from './Polynomial.tsx';
+export type { Notation } from './polynomial-terms.ts';
+export { isWritableFraction } from './polynomial-terms.ts';
+export { RaisedText } from './RaisedText.tsx';
+export type { Motion, Root, RootRow } from './roots.ts';
+export { motionOf, rootRows, rootText, singleRootText } from './roots.ts';
+export type { Real } from './rounded-digits.ts';
+export { TransferFunction } from './TransferFunction.tsx';
+export { useContainerWidth } from './useContainerWidth.ts';

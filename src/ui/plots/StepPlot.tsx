@@ -1,0 +1,96 @@
+import { type KeyboardEvent, type PointerEvent, useId, useMemo, useState } from 'react';
+import { MathName, RaisedText, useContainerWidth } from '../figures/index.ts';
+import { plotFileName, type Size, svgFile } from './drawing.ts';
+import { PlotMarks } from './PlotMarks.tsx';
+import { FILE, SCREEN } from './palette.ts';
+import { StepTable } from './StepTable.tsx';
+import { peakOf, type StepContent, stepSummary, stepTitle } from './step-content.ts';
+import { stepDrawing } from './step-drawing.ts';
+import { stepFrame, stepSize } from './step-frame.ts';
+import { momentAfter, readOutLines, readOutMarks } from './step-read-out.ts';
+
+/** A drawing to keep. */
+export interface SavedPlot {
+  /** A file name that every system takes. */
+  readonly name: string;
+  /** The text of an SVG file. */
+  readonly svg: string;
+}
+
+/** Before the container is measured; nothing is drawn then. */
+const ANY_WIDTH = 480;
+
+interface StepPlotProps {
+  readonly content: StepContent;
+  readonly onSave?: (plot: SavedPlot) => void;
+}
+
+/** The response to a unit step: the curve, its figures in words, a read-out and a table. */
+export function StepPlot({ content, onSave }: StepPlotProps) {
+  const summaryId = useId();
+  const { ref, width } = useContainerWidth<HTMLDivElement>();
+  const [moment, setMoment] = useState<number | null>(null);
+  const size = useMemo(() => stepSize(width || ANY_WIDTH), [width]);
+  const frame = useMemo(() => stepFrame(content, size), [content, size]);
+  const drawing = useMemo(() => stepDrawing(content, size, SCREEN), [content, size]);
+  const time = moment === null ? null : Math.min(moment, frame.horizon);
+  const start = peakOf(content.metrics)?.time ?? frame.horizon;
+
+  const follow = (event: PointerEvent<HTMLDivElement>) =>
+    setMoment(frame.timeAt(event.clientX - event.currentTarget.getBoundingClientRect().left));
+  const step = (event: KeyboardEvent) => {
+    const next = momentAfter(event.key, time ?? start, frame.horizon);
+    if (next === null) return;
+    event.preventDefault();
+    setMoment(next);
+  };
+  return (
+    <div className="step-plot">
+      <div className="plot-measure" ref={ref}>
+        <div
+          className="plot-frame"
+          role="slider"
+          tabIndex={0}
+          aria-label={stepTitle(content)}
+          aria-describedby={summaryId}
+          aria-valuemin={0}
+          aria-valuemax={frame.horizon}
+          aria-valuenow={time ?? start}
+          aria-valuetext={readOutLines(content, time ?? start).join(', ')}
+          onPointerMove={follow}
+          onPointerDown={follow}
+          onPointerLeave={() => setMoment(null)}
+          onFocus={event => event.currentTarget.matches(':focus-visible') && setMoment(start)}
+          onBlur={() => setMoment(null)}
+          onKeyDown={step}
+        >
+          {width > 0 && (
+            <svg className="plot-svg" width={size.width} height={size.height} aria-hidden="true">
+              <PlotMarks marks={drawing.marks} />
+              {time !== null && <PlotMarks marks={readOutMarks(content, frame, time, SCREEN)} />}
+            </svg>
+          )}
+        </div>
+      </div>
+      <p className="step-plot-summary" id={summaryId}>
+        step in <MathName name={content.input} /> → <MathName name={content.output} />:{' '}
+        <RaisedText text={stepSummary(content.metrics)} />
+      </p>
+      <div className="plot-more">
+        <StepTable content={content} horizon={frame.horizon} />
+        {onSave !== undefined && (
+          <button type="button" className="plot-save" onClick={() => onSave(savedPlot(content, size))}>
+            Save as SVG
+          </button>
+        )}
+      </div>
+    </div>
+  );
+}
+
+function savedPlot(content: StepContent, size: Size): SavedPlot {
+  return {
+    name: plotFileName('step', content.input, content.output),
+    svg: svgFile(stepDrawing(content, size, FILE)),
+  };
+}

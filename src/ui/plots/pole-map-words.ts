@@ -1,0 +1,47 @@
+/** What a pole map says in words: its summary, and the read-out of a root or of a point of the plane. */
+
+import { formatNumber, motionOf, type Root, singleRootText } from '../figures/index.ts';
+import type { PlacedRoot } from './pole-map-marks.ts';
+
+/** `4 poles, 1 zero; 1 beyond the frame`. Multiple roots count as often as they are. */
+export function mapSummary(placed: readonly PlacedRoot[]): string {
+  const poles = placed.filter(({ kind }) => kind === 'pole');
+  const zeros = placed.filter(({ kind }) => kind === 'zero');
+  const beyond = placed.filter(({ isBeyond }) => isBeyond);
+  const sizes = `${counted(poles, 'pole')}, ${counted(zeros, 'zero')}`;
+  return beyond.length === 0 ? sizes : `${sizes}; ${order(beyond)} beyond the frame`;
+}
+
+function counted(roots: readonly PlacedRoot[], thing: string): string {
+  const number = order(roots);
+  if (number === 1) return `1 ${thing}`;
+  return `${number === 0 ? 'no' : number} ${thing}s`;
+}
+
+function order(roots: readonly PlacedRoot[]): number {
+  return roots.reduce((sum, { root }) => sum + root.multiplicity, 0);
+}
+
+/** `pole −0.3543 + 0.5861j · ζ 0.517 · ω₀ 0.685 rad/s`. */
+export function rootWords({ root, kind }: PlacedRoot): string {
+  const times = root.multiplicity > 1 ? [`multiplicity ${root.multiplicity}`] : [];
+  const motion = kind === 'pole' ? motionWords(root) : [];
+  return [`${kind} ${singleRootText(root)}`, ...times, ...motion].join(' · ');
+}
+
+function motionWords(root: Root): readonly string[] {
+  const { damping, frequency, timeConstant } = motionOf(root);
+  if (damping === null || frequency === null) return [`τ ${timeConstant} s`];
+  return [`ζ ${damping}`, `ω₀ ${frequency} rad/s`];
+}
+
+/** Digits of a point under the pointer: no more than the screen resolves. */
+const POINT_DIGITS = 3;
+
+/** `−1.2 + 3.4j · ζ 0.33 · ω₀ 3.61 rad/s`, of a point in the plane. */
+export function pointWords(re: number, im: number): string {
+  const place = singleRootText({ re, im, multiplicity: 1 }, POINT_DIGITS);
+  const size = Math.hypot(re, im);
+  if (size === 0) return place;
+  return `${place} · ζ ${formatNumber(-re / size + 0, POINT_DIGITS)} · ω₀ ${formatNumber(size, POINT_DIGITS)} rad/s`;
+}

@@ -1,0 +1,119 @@
+import { type Motion, motionOf, RaisedText, type Root, type RootRow, rootRows, rootText } from '../figures/index.ts';
+
+interface PoleTableProps {
+  /** Both of each conjugate pair, as the model file lists them. */
+  readonly poles: readonly Root[];
+  readonly zeros: readonly Root[];
+  /** How the poles are known. */
+  readonly route: 'certified' | 'floating' | 'not-converged';
+  /** What is proved holds for doubles that stand in for irrational values. */
+  readonly standsIn?: boolean;
+  /** Why there are no zeros to list, where they were not computed. */
+  readonly zerosMissing?: string;
+  /** For `aria-details` of the pole map beside it. */
+  readonly id?: string;
+}
+
+const KNOWN_BY: Readonly<Record<PoleTableProps['route'], string>> = {
+  certified: 'every digit proved',
+  floating: 'by QR, not certified',
+  'not-converged': 'QR did not converge: poles not known',
+};
+
+const FOR_STAND_INS = ', with doubles in place of irrational values';
+
+/** Poles with damping, frequency and time constant, zeros below them. */
+export function PoleTable({ poles, zeros, route, standsIn = false, zerosMissing, id }: PoleTableProps) {
+  const hasMultiple = [...poles, ...zeros].some(({ multiplicity }) => multiplicity > 1);
+  const noPoles = route === 'not-converged' ? 'poles not known' : 'no poles';
+  return (
+    // biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls has to be reached by key
+    <section className="pole-table-scroller" aria-label="Table of poles and zeros" tabIndex={0}>
+      <table className="pole-table" id={id}>
+        <caption className="pole-table-caption">
+          {KNOWN_BY[route]}
+          {standsIn && FOR_STAND_INS}
+        </caption>
+        <PoleHead hasMultiple={hasMultiple} />
+        <tbody>
+          {rootRows(poles).map(row => (
+            <RootLine key={`${row.re} ${row.im}`} row={row} motion={motionOf(row)} hasMultiple={hasMultiple} />
+          ))}
+          {poles.length === 0 && <NoneLine what={noPoles} />}
+        </tbody>
+        <tbody className="pole-table-zeros">
+          {rootRows(zeros).map(row => (
+            <RootLine key={`${row.re} ${row.im}`} row={row} motion={null} hasMultiple={hasMultiple} />
+          ))}
+          {zeros.length === 0 && <NoneLine what={zerosMissing ?? 'no zeros'} />}
+        </tbody>
+      </table>
+    </section>
+  );
+}
+
+function PoleHead({ hasMultiple }: { readonly hasMultiple: boolean }) {
+  return (
+    <thead className="pole-table-head">
+      <tr>
+        <th scope="col">
+          pole / <RaisedText text="s⁻¹" />
+        </th>
+        <th scope="col" title="damping ratio" aria-label="damping ratio">
+          <i className="pole-table-symbol">ζ</i>
+        </th>
+        <th scope="col" title="undamped natural frequency, rad/s" aria-label="natural frequency in radians per second">
+          <i className="pole-table-symbol">
+            ω<sub>0</sub>
+          </i>
+        </th>
+        <th scope="col" title="time constant, seconds" aria-label="time constant in seconds">
+          <i className="pole-table-symbol">τ</i> / s
+        </th>
+        {hasMultiple && (
+          <th scope="col" title="multiplicity" aria-label="multiplicity">
+            mult.
+          </th>
+        )}
+      </tr>
+    </thead>
+  );
+}
+
+interface RootLineProps {
+  readonly row: RootRow;
+  readonly motion: Motion | null;
+  readonly hasMultiple: boolean;
+}
+
+/** One root; a zero has no motion of its own. */
+function RootLine({ row, motion, hasMultiple }: RootLineProps) {
+  const whole = row.isPair ? `${row.re} ± ${row.im}j` : `${row.re}`;
+  return (
+    <tr className={motion !== null && row.re > 0 ? 'pole-table-growing' : undefined}>
+      <th scope="row" title={whole}>
+        {motion === null && 'zero '}
+        <RaisedText text={rootText(row)} />
+      </th>
+      <td>{motion?.damping}</td>
+      <td>
+        <RaisedText text={motion?.frequency ?? ''} />
+      </td>
+      <td>
+        <RaisedText text={motion?.timeConstant ?? ''} />
+      </td>
+      {hasMultiple && <td>{row.multiplicity > 1 ? row.multiplicity : ''}</td>}
+    </tr>
+  );
+}
+
+function NoneLine({ what }: { readonly what: string }) {
+  return (
+    <tr>
+      <th scope="row" className="pole-table-none">
+        {what}
+      </th>
+      <td colSpan={3} />
+    </tr>
+  );
+}

@@ -1,0 +1,22 @@
+/** What placing a block has to know of the visible sheet, and ask of it; the sheet hands its own functions in. */
+
+import type { Point } from '../../diagram/index.ts';
+
+export interface SheetView {
+  /** Where the first block of an empty sheet goes: at the left, since signals run to the right. Sheet units. */
+  readonly start: () => Point;
+  /** The middle of what is seen. */
+  readonly centre: () => Point;
+  /** Pans as far as is needed to see the point. */
+  readonly reveal: (point: Point) => void;
+}
+
+let current: SheetView = { start: () => [0, 0], centre: () => [0, 0], reveal: () => undefined };
+
+export function sheetView(): SheetView {
+  return current;
+}
+
+export function setSheetView(view: SheetView): void {
+  current = view;
+}
