@@ -1,8 +1,12 @@
 /** Exact numbers: rationals, polynomials, rational functions of parameters, matrices over a field, certified roots. */
 
+export type { CertifiedRoot } from './certified-roots.ts';
+export { certifiedRoots, certifiedRootsOfProduct, findCertifiedRoots } from './certified-roots.ts';
 export { characteristicFactors, characteristicPolynomial } from './characteristic-polynomial.ts';
 export type { Field } from './field.ts';
 export { doubleField, rationalField } from './fields.ts';
+export type { EchelonBasis } from './invariant-subspace.ts';
+export { invariantSubspace, multiplyByMatrix } from './invariant-subspace.ts';
 export type { Polynomial } from './polynomial.ts';
 export {
   addPolynomials,
@@ -13,6 +17,7 @@ export {
   monic,
   multiplyPolynomials,
   polynomial,
+  productOfPolynomials,
   reflectPolynomial,
   scalePolynomial,
   subtractPolynomials,

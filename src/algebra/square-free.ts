@@ -62,3 +62,39 @@ function difference(f: IntegerPolynomial, g: IntegerPolynomial): IntegerPolynomi
   const first = all.findIndex(coefficient => coefficient !== 0n);
   return first < 0 ? [] : all.slice(first);
 }
+
+/**
+ * The same product of square-free factors with powers, as pairwise coprime factors: what two factors have in common becomes
+ * a factor of its own with the sum of their multiplicities.
+ */
+export function coprimeFactors(
+  factors: readonly SquareFreeFactor<IntegerPolynomial>[],
+): SquareFreeFactor<IntegerPolynomial>[] {
+  return mergedEqual(factors).reduce<SquareFreeFactor<IntegerPolynomial>[]>((base, next) => {
+    let rest = next.factor;
+    const refined = base.flatMap(kept => {
+      const common = areDistinctLines(kept.factor, rest) ? [1n] : integerGcd(kept.factor, rest);
+      if (common.length === 1) return [kept];
+      rest = divided(rest, common);
+      const shared = { factor: common, multiplicity: kept.multiplicity + next.multiplicity };
+      const own = divided(kept.factor, common);
+      return own.length > 1 ? [{ factor: own, multiplicity: kept.multiplicity }, shared] : [shared];
+    });
+    return rest.length > 1 ? [...refined, { factor: rest, multiplicity: next.multiplicity }] : refined;
+  }, []);
+}
+
+/** Equal factors put together, in the order of their first appearance. */
+function mergedEqual(factors: readonly SquareFreeFactor<IntegerPolynomial>[]): SquareFreeFactor<IntegerPolynomial>[] {
+  const merged = new Map<string, SquareFreeFactor<IntegerPolynomial>>();
+  for (const { factor, multiplicity } of factors) {
+    const key = factor.join(' ');
+    merged.set(key, { factor, multiplicity: multiplicity + (merged.get(key)?.multiplicity ?? 0) });
+  }
+  return [...merged.values()];
+}
+
+/** Whether both are of degree one; equal ones are no longer there. */
+function areDistinctLines(f: IntegerPolynomial, g: IntegerPolynomial): boolean {
+  return f.length === 2 && g.length === 2;
+}
