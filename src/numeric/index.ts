@@ -9,7 +9,15 @@ export type { ComplexMatrix } from './complex-lu.ts';
 export { quotient, solveComplex, zeroComplexMatrix } from './complex-lu.ts';
 export { irreducibleBlocks, submatrix } from './components.ts';
 export type { DenseMatrix } from './dense-matrix.ts';
-export { copyMatrix, denseFromRows, multiplyMatrices, oneNorm, transposed, zeroMatrix } from './dense-matrix.ts';
+export {
+  copyMatrix,
+  denseFromRows,
+  multiplyMatrices,
+  multiplyVector,
+  oneNorm,
+  transposed,
+  zeroMatrix,
+} from './dense-matrix.ts';
 export type { Eigenvalues } from './eigenvalues.ts';
 export { eigenvalues, hessenbergEigenvalues } from './eigenvalues.ts';
 export type { ExponentialChain } from './exponential.ts';
