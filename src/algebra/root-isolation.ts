@@ -5,7 +5,7 @@
  */
 
 import type { ApproximateRoot } from './approximate-roots.ts';
-import { normalised, type Site, toFixed, type View, views, withBits } from './root-sites.ts';
+import { normalised, type Site, toFixed, views, withBits } from './root-sites.ts';
 import { discRadius, type Newton, newtonAt, type Subject, stepped } from './root-steps.ts';
 
 /** Relative accuracy that the first evaluation in fixed point aims at, beyond what conditioning costs. */
@@ -73,8 +73,8 @@ function roundedBits(bits: number): number {
 }
 
 /**
- * Steps the sites until all discs are apart, then takes the step that goes with the proof. A site whose disc is apart from
- * all others stays where it is meanwhile. Null where that does not come about within `rounds`.
+ * Steps the sites until all discs are apart and near enough to their roots for the step that goes with the proof to be bounded,
+ * then takes it. A site of which that is true stays where it is meanwhile. Null where that does not come about in `rounds`.
  */
 function separated(subject: Subject, start: readonly Site[], rounds: number): Site[] | null {
   const sites = start.map(normalised);
@@ -87,10 +87,12 @@ function separated(subject: Subject, start: readonly Site[], rounds: number): Si
       sites[i] = { ...site, radius: discRadius(newton, subject.degree) };
     });
     const seen = views(sites);
-    if (seen.every(view => view.isApart)) return sites.map((site, i) => afterProof(site, newtons[i]!, seen[i]!));
-    sites.forEach((site, i) => {
-      if (seen[i]!.isApart) return;
-      sites[i] = moveOn(site, newtons[i]!, seen[i]!);
+    const next = sites.map((site, i) => stepped(site, newtons[i]!, seen[i]!));
+    const isSettled = next.map((site, i) => seen[i]!.isApart && Number.isFinite(site.radius));
+    if (isSettled.every(Boolean)) return sites.map((site, i) => smaller(site, next[i]!));
+    next.forEach((site, i) => {
+      if (isSettled[i]) return;
+      sites[i] = movedOn(site, newtons[i]!.isHidden);
       newtons[i] = null;
     });
     if (sites.some(site => site.bits > MOST_BITS)) return null;
@@ -98,17 +100,15 @@ function separated(subject: Subject, start: readonly Site[], rounds: number): Si
   return null;
 }
 
-/** The step that goes with the proof; where the bound on it is worse than the disc's own reach, the disc moves as it is. */
-export function afterProof(site: Site, newton: Newton, view: View): Site {
-  const next = stepped(site, newton, view);
-  return next.radius < site.radius ? normalised(next) : site;
+/** The site with the smaller disc: before a step, or after it and brought to scale. */
+export function smaller(before: Site, after: Site): Site {
+  return after.radius < before.radius ? normalised(after) : before;
 }
 
-/** The next place of a site that is not apart yet: a step, and twice the bits where rounding hides the value. */
-function moveOn(site: Site, newton: Newton, view: View): Site {
-  const next = newton.error === Number.POSITIVE_INFINITY ? site : stepped(site, newton, view);
-  const moved = normalised({ ...next, radius: Number.POSITIVE_INFINITY });
-  return newton.isHidden ? withBits(moved, roundedBits(2 * moved.bits)) : moved;
+/** A site that is on its way: nothing is known about its disc, and it has twice the bits where rounding hid the value. */
+function movedOn(site: Site, isHidden: boolean): Site {
+  const moved = normalised({ ...site, radius: Number.POSITIVE_INFINITY });
+  return isHidden ? withBits(moved, roundedBits(2 * moved.bits)) : moved;
 }
 
 /**

@@ -1,8 +1,8 @@
 /** From isolated roots to answers: steps with more bits, each with its bound, until a reading of the disc is decided. */
 
-import { afterProof, MOST_BITS } from './root-isolation.ts';
+import { MOST_BITS, smaller } from './root-isolation.ts';
 import { type Site, views, withBits } from './root-sites.ts';
-import { newtonAt, type Subject } from './root-steps.ts';
+import { newtonAt, type Subject, stepped } from './root-steps.ts';
 
 /** Bits that a disc gains at least, on average, when it was too large to be read. */
 const MORE_BITS = 64;
@@ -25,7 +25,7 @@ export function sharpenedUntil<T>(
     const seen = views(sites);
     for (const i of unread) {
       const site = sites[i]!;
-      sites[i] = afterProof(site, newtonAt(subject, site), seen[i]!);
+      sites[i] = smaller(site, stepped(site, newtonAt(subject, site), seen[i]!));
       readings[i] = read(sites[i]!);
     }
   }
