@@ -7,14 +7,14 @@ import { crossHair, pointedMarks, poleMapDrawing } from './pole-map-drawing.ts';
 import { type MapView, mapFrame, mapSize } from './pole-map-frame.ts';
 import { placeRoots } from './pole-map-marks.ts';
 import { type MapPointer, pointerAfter, pointerAt, pointerWords, rootsPointedAt, steps } from './pole-map-pointer.ts';
-import { mapSummary } from './pole-map-words.ts';
 import { RootList } from './RootList.tsx';
 import type { SavedPlot } from './StepPlot.tsx';
 
 interface PoleMapProps {
   /** Both of each conjugate pair. */
   readonly poles: readonly Root[];
-  readonly zeros: readonly Root[];
+  /** null: not computed. */
+  readonly zeros: readonly Root[] | null;
   readonly onSave?: (plot: SavedPlot) => void;
   /** Id of a table with the same values beside the map; without one the map brings its own. */
   readonly tableId?: string;
@@ -27,11 +27,11 @@ export function PoleMap({ poles, zeros, onSave, tableId }: PoleMapProps) {
   const [pointer, setPointer] = useState<MapPointer | null>(null);
   const size = useMemo(() => mapSize(width || ANY_WIDTH), [width]);
   const drawing = useMemo(() => poleMapDrawing(poles, zeros, view, size, SCREEN), [poles, zeros, view, size]);
-  const frame = useMemo(() => mapFrame(poles, zeros, view, size), [poles, zeros, view, size]);
-  const placed = useMemo(() => placeRoots(frame, poles, zeros), [frame, poles, zeros]);
+  const frame = useMemo(() => mapFrame(poles, zeros ?? NONE, view, size), [poles, zeros, view, size]);
+  const placed = useMemo(() => placeRoots(frame, poles, zeros ?? NONE), [frame, poles, zeros]);
   const stops = useMemo(() => steps(placed), [placed]);
   const pointed = pointer === null ? [] : rootsPointedAt(pointer, placed, stops);
-  const words = pointer === null ? mapSummary(placed) : pointerWords(pointer, frame, stops);
+  const words = pointer === null ? drawing.description : pointerWords(pointer, frame, stops);
   const hair = pointer?.kind === 'point' ? crossHair(frame, pointer.x, pointer.y, SCREEN) : [];
 
   const follow = (event: PointerEvent<HTMLDivElement>) => {
@@ -105,6 +105,8 @@ export function PoleMap({ poles, zeros, onSave, tableId }: PoleMapProps) {
     </div>
   );
 }
+
+const NONE: readonly Root[] = [];
 
 /** Before the container is measured; nothing is drawn then. */
 const ANY_WIDTH = 320;

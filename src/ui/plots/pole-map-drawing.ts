@@ -12,20 +12,23 @@ import { gridMarks } from './pole-map-grid.ts';
 import { type BorderGroup, borderGroups, type PlacedRoot, placeRoots } from './pole-map-marks.ts';
 import { mapSummary } from './pole-map-words.ts';
 
-/** The drawing of `poles` and `zeros` (both of each pair) at `size`, in the inks of `palette`. */
+/**
+ * The drawing of `poles` and `zeros` (both of each pair; null zeros were not computed) at `size`, in the inks of `palette`.
+ */
 export function poleMapDrawing(
   poles: readonly Root[],
-  zeros: readonly Root[],
+  knownZeros: readonly Root[] | null,
   view: MapView,
   size: Size,
   palette: Palette,
 ): Drawing {
+  const zeros = knownZeros ?? [];
   const frame = mapFrame(poles, zeros, view, size);
   const placed = placeRoots(frame, poles, zeros);
   return {
     ...size,
     title: 'poles and zeros in the s-plane',
-    description: mapSummary(placed),
+    description: mapSummary(placed, knownZeros !== null),
     paper: palette.paper,
     marks: [
       ...gridMarks(frame, palette),

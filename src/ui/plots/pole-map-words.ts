@@ -3,12 +3,16 @@
 import { formatNumber, motionOf, type Root, singleRootText } from '../figures/index.ts';
 import type { PlacedRoot } from './pole-map-marks.ts';
 
-/** `4 poles, 1 zero; 1 beyond the frame`. Multiple roots count as often as they are. */
-export function mapSummary(placed: readonly PlacedRoot[]): string {
+/**
+ * `4 poles, 1 zero; 1 beyond the frame`. Multiple roots count as often as they are.
+ *
+ * @param hasZeros false where the zeros were not computed.
+ */
+export function mapSummary(placed: readonly PlacedRoot[], hasZeros: boolean): string {
   const poles = placed.filter(({ kind }) => kind === 'pole');
   const zeros = placed.filter(({ kind }) => kind === 'zero');
   const beyond = placed.filter(({ isBeyond }) => isBeyond);
-  const sizes = `${counted(poles, 'pole')}, ${counted(zeros, 'zero')}`;
+  const sizes = `${counted(poles, 'pole')}, ${hasZeros ? counted(zeros, 'zero') : 'zeros not computed'}`;
   return beyond.length === 0 ? sizes : `${sizes}; ${order(beyond)} beyond the frame`;
 }
 

@@ -3,13 +3,12 @@ import { type Motion, motionOf, RaisedText, type Root, type RootRow, rootRows, r
 interface PoleTableProps {
   /** Both of each conjugate pair, as the model file lists them. */
   readonly poles: readonly Root[];
-  readonly zeros: readonly Root[];
+  /** null: not computed. */
+  readonly zeros: readonly Root[] | null;
   /** How the poles are known. */
-  readonly route: 'certified' | 'floating' | 'not-converged';
+  readonly route: 'certified' | 'floating';
   /** What is proved holds for doubles that stand in for irrational values. */
   readonly standsIn?: boolean;
-  /** Why there are no zeros to list, where they were not computed. */
-  readonly zerosMissing?: string;
   /** For `aria-details` of the pole map beside it. */
   readonly id?: string;
 }
@@ -17,15 +16,13 @@ interface PoleTableProps {
 const KNOWN_BY: Readonly<Record<PoleTableProps['route'], string>> = {
   certified: 'every digit proved',
   floating: 'by QR, not certified',
-  'not-converged': 'QR did not converge: poles not known',
 };
 
 const FOR_STAND_INS = ', with doubles in place of irrational values';
 
 /** Poles with damping, frequency and time constant, zeros below them. */
-export function PoleTable({ poles, zeros, route, standsIn = false, zerosMissing, id }: PoleTableProps) {
-  const hasMultiple = [...poles, ...zeros].some(({ multiplicity }) => multiplicity > 1);
-  const noPoles = route === 'not-converged' ? 'poles not known' : 'no poles';
+export function PoleTable({ poles, zeros, route, standsIn = false, id }: PoleTableProps) {
+  const hasMultiple = [...poles, ...(zeros ?? [])].some(({ multiplicity }) => multiplicity > 1);
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls has to be reached by key
     <section className="pole-table-scroller" aria-label="Table of poles and zeros" tabIndex={0}>
@@ -39,13 +36,14 @@ export function PoleTable({ poles, zeros, route, standsIn = false, zerosMissing,
           {rootRows(poles).map(row => (
             <RootLine key={`${row.re} ${row.im}`} row={row} motion={motionOf(row)} hasMultiple={hasMultiple} />
           ))}
-          {poles.length === 0 && <NoneLine what={noPoles} />}
+          {poles.length === 0 && <NoneLine what="no poles" />}
         </tbody>
         <tbody className="pole-table-zeros">
-          {rootRows(zeros).map(row => (
+          {rootRows(zeros ?? []).map(row => (
             <RootLine key={`${row.re} ${row.im}`} row={row} motion={null} hasMultiple={hasMultiple} />
           ))}
-          {zeros.length === 0 && <NoneLine what={zerosMissing ?? 'no zeros'} />}
+          {zeros === null && <NoneLine what="zeros not computed" />}
+          {zeros?.length === 0 && <NoneLine what="no zeros" />}
         </tbody>
       </table>
     </section>
