@@ -1,8 +1,9 @@
 /** The shapes of the sheet's geometry, routes and lines of text as SVG elements. */
 
-import { SCRIPT_SCALE, SCRIPT_SHIFT, type Shape, type Span, type TextShape } from '../../diagram/geometry/index.ts';
+import { SCRIPT_SCALE, SCRIPT_SHIFT, type Shape, type TextShape } from '../../diagram/geometry/index.ts';
 import type { Route } from '../../diagram/routing/index.ts';
 import type { Point } from '../../diagram/types.ts';
+import type { Span } from '../../expression/index.ts';
 import { coordinate, element, escaped } from './markup.ts';
 
 /** One shape, in the coordinates of its block. */

@@ -1,7 +1,8 @@
 /** The title block with the parameter table, as an engineering drawing has it in its lower right corner. */
 
-import { type Face, nameSpans, type Span, textWidth } from '../../diagram/geometry/index.ts';
+import { type Face, textWidth } from '../../diagram/geometry/index.ts';
 import type { Diagram, Parameter } from '../../diagram/types.ts';
+import { nameSpans, type Span } from '../../expression/index.ts';
 import { oneLine } from '../one-line.ts';
 import { element } from './markup.ts';
 import { textMarkup } from './shape-markup.ts';

@@ -1,12 +1,13 @@
 /** How large a block is, from its kind and its text alone: where it stands and what it is joined to do not matter. */
 
+import type { Span } from '../../expression/index.ts';
 import { portCounts } from '../port-counts.ts';
 import type { Block, GroupBlock } from '../types.ts';
 import { textWidth } from './character-widths.ts';
 import { blockContent, cutToWidth, TYPE } from './content.ts';
 import { portNames } from './port-names.ts';
 import { portOffsets } from './ports.ts';
-import { type Box, GRID, type Outline, type Span } from './types.ts';
+import { type Box, GRID, type Outline } from './types.ts';
 
 export const SUMMING_RADIUS = 14;
 export const TERMINAL_RADIUS = 4;

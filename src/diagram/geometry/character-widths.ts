@@ -5,7 +5,8 @@
  * listed takes the face's usual width.
  */
 
-import type { Face, Span } from './types.ts';
+import type { Span } from '../../expression/index.ts';
+import type { Face } from './types.ts';
 
 /** Width, then the characters that have it. */
 type WidthTable = readonly (readonly [width: number, characters: string])[];

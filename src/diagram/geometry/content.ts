@@ -3,10 +3,10 @@
  * characteristic. A content knows its size; the frame is fitted around it.
  */
 
+import { inlineMath, type Span } from '../../expression/index.ts';
 import type { Block, Point, Quantity } from '../types.ts';
 import { textWidth } from './character-widths.ts';
-import { inlineSpans } from './inline-spans.ts';
-import type { Face, Shape, Span } from './types.ts';
+import type { Face, Shape } from './types.ts';
 
 /** Type sizes in sheet units. */
 export const TYPE = { symbol: 17, dense: 13, small: 12, port: 11, sign: 15 } as const;
@@ -90,7 +90,7 @@ const italic = (text: string, script: Span['script'] = 'normal'): Span => ({ tex
 
 /** e raised to −s T, or to −0.5 s where the time is a number. */
 function deadTime(time: Quantity): Content {
-  const spans = inlineSpans(time).map(span => ({ ...span, script: 'sup' as const }));
+  const spans = inlineMath(time).map(span => ({ ...span, script: 'sup' as const }));
   const isNumber = /^[\d.]/.test(time.trim());
   const isSum = /[-+/]/.test(time.slice(1));
   const factor = isSum && !isNumber ? [upright('(', 'sup'), ...spans, upright(')', 'sup')] : spans;
@@ -142,15 +142,15 @@ function limiterCharacteristic(): Content {
 const NOTHING: Content = { width: 0, height: 0, shapes: [] };
 
 function transferFunction(numerator: Quantity, denominator: Quantity): Content {
-  if (denominator.trim() === '1') return oneLine(inlineSpans(numerator));
-  return fraction(inlineSpans(numerator), inlineSpans(denominator), true);
+  if (denominator.trim() === '1') return oneLine(inlineMath(numerator));
+  return fraction(inlineMath(numerator), inlineMath(denominator), true);
 }
 
 /** What stands in the frame of a block; a terminal, a summing point and a group have nothing there. */
 export function blockContent(block: Block): Content {
   switch (block.kind) {
     case 'gain':
-      return oneLine(inlineSpans(block.gain));
+      return oneLine(inlineMath(block.gain));
     case 'integrator':
       return fraction([upright('1')], [italic('s')], false);
     case 'transfer-function':

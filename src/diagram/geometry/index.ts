@@ -7,7 +7,6 @@ export { blockBox, blockOutline, SUMMING_RADIUS, TERMINAL_RADIUS } from './block
 export { blockDrawing, holdsState } from './block-drawing.ts';
 export { SCRIPT_SCALE, SCRIPT_SHIFT, textWidth } from './character-widths.ts';
 export { TYPE } from './content.ts';
-export { inlineSpans, nameSpans } from './inline-spans.ts';
 export { textArea } from './labels.ts';
 export { blockRectangle, enclosing, sheetBounds, snap } from './sheet-bounds.ts';
 export { sheetGeometry } from './sheet-geometry.ts';
@@ -24,7 +23,6 @@ export type {
   Shape,
   SheetGeometry,
   Side,
-  Span,
   TextRole,
   TextShape,
 } from './types.ts';

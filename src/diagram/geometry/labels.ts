@@ -3,13 +3,13 @@
  * a terminal's name and unit, the room for the number under a symbol.
  */
 
+import { nameSpans, type Span } from '../../expression/index.ts';
 import type { Block } from '../types.ts';
 import { CIRCLE_INPUTS, groupTitle } from './block-box.ts';
 import { textWidth } from './character-widths.ts';
 import { TYPE } from './content.ts';
-import { nameSpans } from './inline-spans.ts';
 import { portNames } from './port-names.ts';
-import type { Anchor, Box, Face, Label, PortPlace, Rectangle, Span, TextRole } from './types.ts';
+import type { Anchor, Box, Face, Label, PortPlace, Rectangle, TextRole } from './types.ts';
 
 interface Ports {
   readonly inputs: readonly PortPlace[];

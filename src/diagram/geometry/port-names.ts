@@ -1,9 +1,8 @@
 /** The names at a group's ports: those of the inputs and outputs of its own sheet, in block order, as format.md has it. */
 
+import { nameSpans, type Span } from '../../expression/index.ts';
 import type { Block, GroupBlock } from '../types.ts';
 import { cutToWidth, TYPE } from './content.ts';
-import { nameSpans } from './inline-spans.ts';
-import type { Span } from './types.ts';
 
 const WIDEST = 70;
 

@@ -3,6 +3,7 @@
  * Everything is relative to the block's centre unless it says otherwise. Colours are not here: a drawing carries roles.
  */
 
+import type { Span } from '../../expression/index.ts';
 import type { Point } from '../types.ts';
 
 /** Grid squares of the sheet, and what block centres snap to. */
@@ -31,13 +32,6 @@ export interface PortPlace {
   readonly x: number;
   readonly y: number;
   readonly side: Side;
-}
-
-/** A piece of typeset mathematics: italic or upright, on the line, lowered or raised. */
-export interface Span {
-  readonly text: string;
-  readonly italic: boolean;
-  readonly script: 'normal' | 'sub' | 'sup';
 }
 
 /** `math` the mathematics face, `figures` the fixed-width one, `plain` that of the interface. */

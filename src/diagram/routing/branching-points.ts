@@ -1,7 +1,7 @@
 /** Where the wires of one output part: the filled dots that tell a branch from two lines that only cross. */
 
 import type { Point } from '../types.ts';
-import type { Route } from './types.ts';
+import type { Route, WireRoute } from './types.ts';
 import type { EndedWire } from './wire-ends.ts';
 
 /**
@@ -10,10 +10,10 @@ import type { EndedWire } from './wire-ends.ts';
  *
  * @param routes  by the wire's place among the sheet's wires.
  */
-export function branchingPoints(wires: readonly EndedWire[], routes: readonly (Route | undefined)[]): readonly Point[] {
+export function branchingPoints(wires: readonly EndedWire[], routes: readonly WireRoute[]): readonly Point[] {
   const nets = new Map<number, Route[]>();
   for (const { index, net } of wires) {
-    const route = routes[index];
+    const route = routes[index]?.points;
     if (route === undefined) continue;
     const list = nets.get(net);
     if (list === undefined) nets.set(net, [route]);

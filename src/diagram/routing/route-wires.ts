@@ -3,12 +3,14 @@
  * one line. After a move only what the move touches is routed again.
  */
 
-import { blockRectangle, type Rectangle, type SheetGeometry, sheetGeometry } from '../geometry/index.ts';
+import { blockRectangle, type SheetGeometry, sheetGeometry } from '../geometry/index.ts';
 import type { Point, Sheet } from '../types.ts';
 import { branchingPoints } from './branching-points.ts';
 import { elbowRoute } from './elbow-route.ts';
 import { simplified } from './polyline.ts';
-import { keepRoute, routeWire, sheetRouter } from './sheet-router.ts';
+import { EVERYWHERE, holds, overlap, pieces, regionAround } from './region.ts';
+import { routeWire } from './route-wire.ts';
+import { sheetRouter } from './sheet-router.ts';
 import { type PortEnd, type Route, type Routes, type WireRoute, wireKey } from './types.ts';
 import { type EndedWire, endedWires, routingOrder } from './wire-ends.ts';
 
@@ -45,15 +47,19 @@ export function rerouteMoved(
   const kept = new Map<number, WireRoute>();
   for (const { index, from, to, wire } of wires) {
     const route = formerRoutes.get(wireKey(wire));
-    if (route === undefined || route.forced) continue;
+    if (route === undefined) continue;
     if (changedIds.has(wire.from[0]) || changedIds.has(wire.to[0])) continue;
     if (!joins(route.points, from, to) || (wire.via ?? []).some(point => !passes(route.points, point))) continue;
-    if (!obstacles.some(obstacle => runsInto(route.points, obstacle))) kept.set(index, route);
+    if (!pieces(route.points).some(piece => obstacles.some(obstacle => overlap(piece, obstacle))))
+      kept.set(index, route);
   }
   return complete(sheet, geometry, wires, kept);
 }
 
 const NO_ROUTE: WireRoute = { points: [], forced: false };
+
+/** How often wires that found no way are put in front and everything is routed again. */
+const RETRIES = 2;
 
 function complete(
   sheet: Sheet,
@@ -61,19 +67,45 @@ function complete(
   wires: readonly EndedWire[],
   kept: ReadonlyMap<number, WireRoute>,
 ): Routes {
-  const keptPoints = [...kept.values()].map(({ points }) => points);
-  const router = sheetRouter(sheet, geometry, wires, keptPoints);
-  const found: WireRoute[] = sheet.wires.map((_, index) => kept.get(index) ?? NO_ROUTE);
-  for (const wire of wires) {
-    const route = kept.get(wire.index);
-    if (router !== null && route !== undefined) keepRoute(router, wire, route.points);
+  const open = routingOrder(wires.filter(({ index }) => !kept.has(index)));
+  let found = routed(sheet, geometry, wires, kept, open);
+  for (let retry = 0; kept.size === 0 && retry < RETRIES; retry += 1) {
+    const isForced = ({ index }: EndedWire): boolean => found.get(index)?.forced === true;
+    const forced = open.filter(isForced);
+    if (forced.length === 0) break;
+    const again = routed(sheet, geometry, wires, kept, [...forced, ...open.filter(wire => !isForced(wire))]);
+    if (open.filter(({ index }) => again.get(index)?.forced === true).length < forced.length) found = again;
   }
-  for (const wire of routingOrder(wires.filter(({ index }) => !kept.has(index)))) {
-    const points = router === null ? null : routeWire(router, wire);
-    found[wire.index] = points === null ? { points: plainRoute(wire), forced: true } : { points, forced: false };
+  const all = sheet.wires.map((_, index) => kept.get(index) ?? found.get(index) ?? NO_ROUTE);
+  return { wires: all, dots: branchingPoints(wires, all) };
+}
+
+/** Routes of the wires `open`, found in their order, by place among the sheet's wires. */
+function routed(
+  sheet: Sheet,
+  geometry: SheetGeometry,
+  wires: readonly EndedWire[],
+  kept: ReadonlyMap<number, WireRoute>,
+  open: readonly EndedWire[],
+): ReadonlyMap<number, WireRoute> {
+  const nets = new Set(open.map(({ net }) => net));
+  const staying = wires.flatMap(({ index, net }) => {
+    const route = kept.get(index);
+    return route === undefined || route.forced ? [] : [{ net, route: route.points }];
+  });
+  const trunks = staying.filter(({ net }) => nets.has(net)).map(({ route }) => route);
+  const ends = open.flatMap(({ from, to }) => [from, to]);
+  const regions = kept.size === 0 ? [EVERYWHERE] : [regionAround(ends, trunks), EVERYWHERE];
+  const found = new Map<number, WireRoute>();
+  for (const region of open.length === 0 ? [] : regions) {
+    const router = sheetRouter(sheet, geometry, wires, staying, { region, open: nets });
+    for (const wire of open) {
+      const points = router === null ? null : routeWire(router, wire);
+      found.set(wire.index, points === null ? { points: plainRoute(wire), forced: true } : { points, forced: false });
+    }
+    if (open.every(({ index }) => found.get(index)?.forced === false)) break;
   }
-  const points = found.map(route => route.points);
-  return { wires: found, dots: branchingPoints(wires, points) };
+  return found;
 }
 
 /** Elbows through the wire's own bend points, whatever stands there. */
@@ -94,20 +126,6 @@ function joins(route: Route, from: PortEnd, to: PortEnd): boolean {
   return first?.[0] === from.x && first[1] === from.y && last?.[0] === to.x && last[1] === to.y;
 }
 
-function pieces(route: Route): readonly Rectangle[] {
-  return route.slice(1).map(([x1, y1], index) => {
-    const [x0, y0] = route[index] ?? [x1, y1];
-    return { left: Math.min(x0, x1), right: Math.max(x0, x1), top: Math.min(y0, y1), bottom: Math.max(y0, y1) };
-  });
-}
-
-function passes(route: Route, [x, y]: Point): boolean {
-  return pieces(route).some(({ left, right, top, bottom }) => left <= x && x <= right && top <= y && y <= bottom);
-}
-
-function runsInto(route: Route, obstacle: Rectangle): boolean {
-  return pieces(route).some(
-    ({ left, right, top, bottom }) =>
-      left <= obstacle.right && right >= obstacle.left && top <= obstacle.bottom && bottom >= obstacle.top,
-  );
+function passes(route: Route, point: Point): boolean {
+  return pieces(route).some(piece => holds(piece, point));
 }

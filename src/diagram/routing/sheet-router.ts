@@ -1,49 +1,25 @@
 /**
- * Routes wires one after the other on one grid. Each finds the cheapest way from its net's tree to its port, then its own nodes are
- * taken, so later wires of other nets keep off them. Where the near surroundings hold no way the window is widened, and where there is none at
- * all the wire becomes a plain elbow.
+ * What the wires of a sheet are routed on: one grid, with what stays as it is already in it, and the trees that the nets grow.
  */
 
 import { blockRectangle, type Rectangle, type SheetGeometry } from '../geometry/index.ts';
 import type { Point, Sheet } from '../types.ts';
-import { lineFrom } from './grid-lines.ts';
-import { branchings, NetTree } from './net-trees.ts';
-import { type Axis, type Beginning, cheapestWay, type Searcher, searcher } from './path-search.ts';
-import { simplified } from './polyline.ts';
-import {
-  BLOCKED,
-  LABEL,
-  NEAR,
-  nodeAt,
-  nodesAlong,
-  occupy,
-  pointAt,
-  type SheetGrid,
-  sheetGrid,
-  TIGHT,
-} from './sheet-grid.ts';
-import { isHorizontal, outward, type PortEnd, type Route } from './types.ts';
+import { NetTree } from './net-trees.ts';
+import { type Searcher, searcher } from './path-search.ts';
+import { clipped, holds, overlap } from './region.ts';
+import { nodesAlong, occupy, sheetGrid } from './sheet-grid.ts';
+import { reserveStub } from './stubs.ts';
+import type { PortEnd, Route } from './types.ts';
 import type { EndedWire } from './wire-ends.ts';
 
-/** How far around its ends a wire's way is sought, in turn. */
-const WINDOWS = [120, 500, Number.POSITIVE_INFINITY] as const;
-
-/** How far a wire leads straight out of a port and straight into one: room for an arrowhead, and where there is not so much. */
-const STUB = 16;
-const SHORT_STUB = 10;
-
-/** Prices of a branch for each unit that it is closer to a port than `FROM_PORT`, under a name, and close to a frame. */
-const BRANCH_PRICES = { eachUnit: 0.4, underLabel: 24, near: 4 } as const;
-const FROM_PORT = 40;
-
-/**
- * Steps that all wires together may take to find their cheapest ways: some 0.3 s. A wire whose share is used up takes a good way,
- * with the remaining length counted twice, since what is not yet known costs about as much again.
- */
+/** Steps that all wires together may take to find their cheapest ways: some 0.3 s. */
 const STEPS = 900_000;
 const MOST_PATIENCE = 20_000;
-const HASTE = 2;
-const LAST_PATIENCE = 60_000;
+
+export interface KeptRoute {
+  readonly net: number;
+  readonly route: Route;
+}
 
 export interface SheetRouter {
   /** Steps that a wire may take to find its cheapest way. */
@@ -51,36 +27,61 @@ export interface SheetRouter {
   readonly space: Searcher;
   readonly trees: Map<number, NetTree>;
   /** Routes that stay, by net. */
-  readonly kept: Map<number, Route[]>;
+  readonly kept: ReadonlyMap<number, readonly Route[]>;
   /** Every port of a net. */
   readonly ends: ReadonlyMap<number, readonly PortEnd[]>;
 }
 
-/** A router for a sheet; null where the sheet is too large for a grid, which leaves elbows. */
+/**
+ * A router for the part of a sheet within `region`; null where there is too much for a grid, which leaves elbows.
+ *
+ * @param kept  routes that stay, with the number of their net.
+ * @param open  nets of which a wire is to be routed; the region holds all of their kept routes.
+ */
 export function sheetRouter(
   sheet: Sheet,
   geometry: SheetGeometry,
   wires: readonly EndedWire[],
-  kept: readonly Route[],
+  kept: readonly KeptRoute[],
+  { region, open }: { readonly region: Rectangle; readonly open: ReadonlySet<number> },
 ): SheetRouter | null {
+  const { blocks, labels } = standingWithin(sheet, geometry, region);
+  const near = wires.filter(({ from, to }) => holds(region, [from.x, from.y]) || holds(region, [to.x, to.y]));
+  const whole = kept.filter(({ net }) => open.has(net));
+  const pieces = kept.flatMap(({ net, route }) => clipped(route, region).map(piece => ({ net, route: piece })));
+  const points: Point[] = [...whole, ...pieces].flatMap(({ route }) => route);
+  for (const { from, to, wire, net } of near) {
+    points.push([from.x, from.y], [to.x, to.y]);
+    if (open.has(net)) points.push(...(wire.via ?? []));
+  }
+  const grid = sheetGrid(blocks, labels, { xs: points.map(([x]) => x), ys: points.map(([, y]) => y) });
+  if (grid === null) return null;
+  for (const { from, to, net } of near) {
+    reserveStub(grid, from, net);
+    reserveStub(grid, to, net);
+  }
+  for (const { net, route } of pieces) occupy(grid, route, net);
+  const patience = Math.min(MOST_PATIENCE, Math.ceil(STEPS / Math.max(1, wires.length)));
+  const keptByNet = new Map<number, Route[]>();
+  for (const { net, route } of whole) keptByNet.set(net, [...(keptByNet.get(net) ?? []), route]);
+  return { patience, space: searcher(grid), trees: new Map(), kept: keptByNet, ends: netEnds(wires) };
+}
+
+function standingWithin(sheet: Sheet, geometry: SheetGeometry, region: Rectangle) {
   const blocks: Rectangle[] = [];
   const labels: Rectangle[] = [];
   for (const block of sheet.blocks) {
     const placed = geometry.get(block.id);
     if (placed === undefined) continue;
     const [x, y] = block.at ?? [0, 0];
-    blocks.push(blockRectangle(block, placed));
+    const frame = blockRectangle(block, placed);
+    if (overlap(frame, region)) blocks.push(frame);
     for (const { area } of placed.labels) {
-      labels.push({ left: x + area.left, right: x + area.right, top: y + area.top, bottom: y + area.bottom });
+      const label = { left: x + area.left, right: x + area.right, top: y + area.top, bottom: y + area.bottom };
+      if (overlap(label, region)) labels.push(label);
     }
   }
-  const fixed = wires.flatMap(({ from, to, wire }): Point[] => [[from.x, from.y], [to.x, to.y], ...(wire.via ?? [])]);
-  const points = [...fixed, ...kept.flat()];
-  const grid = sheetGrid(blocks, labels, { xs: points.map(([x]) => x), ys: points.map(([, y]) => y) });
-  if (grid === null) return null;
-  for (const wire of wires) reserve(grid, wire);
-  const patience = Math.min(MOST_PATIENCE, Math.ceil(STEPS / Math.max(1, wires.length)));
-  return { patience, space: searcher(grid), trees: new Map(), kept: new Map(), ends: netEnds(wires) };
+  return { blocks, labels };
 }
 
 function netEnds(wires: readonly EndedWire[]): ReadonlyMap<number, readonly PortEnd[]> {
@@ -93,168 +94,12 @@ function netEnds(wires: readonly EndedWire[]): ReadonlyMap<number, readonly Port
   return ends;
 }
 
-/** Keeps the way straight out of each port free for its own net. */
-function reserve(grid: SheetGrid, { from, to, net }: EndedWire): void {
-  for (const end of [from, to]) {
-    const node = stubNode(grid, end);
-    if (node < 0) continue;
-    const owners = isHorizontal(end.side) ? grid.horizontalNet : grid.verticalNet;
-    if (owners[node] === 0) owners[node] = net;
-  }
-}
-
-/** Where the straight piece at a port ends; −1 where the port lies on no line. */
-function stubNode(grid: SheetGrid, end: PortEnd): number {
-  const roomy = nodeAhead(grid, end, STUB);
-  if (roomy >= 0 && (grid.surroundings[roomy]! & 3) < TIGHT) return roomy;
-  return nodeAhead(grid, end, SHORT_STUB);
-}
-
-/** The first node straight out of a port that is at least `distance` away. */
-function nodeAhead(grid: SheetGrid, end: PortEnd, distance: number): number {
-  const [x, y] = outward(end.side);
-  const port = nodeAt(grid, [end.x, end.y]);
-  if (port < 0) return -1;
-  const lines = x !== 0 ? grid.xs : grid.ys;
-  const wanted = (x !== 0 ? end.x : end.y) + (x + y) * distance;
-  const above = lineFrom(lines, wanted);
-  const index = x + y > 0 || lines[above] === wanted ? above : above - 1;
-  if (index < 0 || index >= lines.length) return -1;
-  const column = port % grid.columns;
-  const row = (port - column) / grid.columns;
-  return x !== 0 ? row * grid.columns + index : index * grid.columns + column;
-}
-
-/** Takes a route that stays as it is into the grid. */
-export function keepRoute({ space, kept }: SheetRouter, { net }: EndedWire, route: Route): void {
-  occupy(space.grid, route, net);
-  const routes = kept.get(net);
-  if (routes === undefined) kept.set(net, [route]);
-  else routes.push(route);
-}
-
 /** The tree of a net; that of a net whose wires stay is made when one more is to join it. */
-function treeOf({ space, trees, kept }: SheetRouter, net: number): NetTree {
+export function treeOf({ space, trees, kept }: SheetRouter, net: number): NetTree {
   const known = trees.get(net);
   if (known !== undefined) return known;
   const tree = new NetTree();
   for (const route of kept.get(net) ?? []) tree.add(nodesAlong(space.grid, route));
   trees.set(net, tree);
   return tree;
-}
-
-/** Routes a wire and takes its nodes; null where no way was found. */
-export function routeWire(router: SheetRouter, wire: EndedWire): Route | null {
-  const { grid } = router.space;
-  const tree = treeOf(router, wire.net);
-  const from = nodeAt(grid, [wire.from.x, wire.from.y]);
-  const to = nodeAt(grid, [wire.to.x, wire.to.y]);
-  const way = straightWay(grid, wire, tree) ?? wayThrough(router, wire, tree);
-  if (way === null) return null;
-  const before = tree.isEmpty ? nodesBetween(grid, from, way[0] ?? from) : [];
-  const whole = [...before, ...way, ...nodesBetween(grid, to, way.at(-1) ?? to).toReversed()];
-  tree.add(whole);
-  const route = simplified(tree.wayTo(to).map(node => pointAt(grid, node)));
-  occupy(grid, route, wire.net);
-  return route;
-}
-
-/** Nodes on a line from one node to another, the first included and the last not. */
-function nodesBetween(grid: SheetGrid, from: number, to: number): readonly number[] {
-  return from === to ? [] : nodesAlong(grid, [pointAt(grid, from), pointAt(grid, to)]).slice(0, -1);
-}
-
-/** The straight line from port to port, where the net has no tree yet and nothing is in the way. */
-function straightWay(grid: SheetGrid, { from, to, wire, net }: EndedWire, tree: NetTree): readonly number[] | null {
-  const [x, y] = outward(from.side);
-  const [backX, backY] = outward(to.side);
-  const facing = x === -backX && y === -backY && (to.x - from.x) * x + (to.y - from.y) * y > 0;
-  const aligned = x !== 0 ? from.y === to.y : from.x === to.x;
-  if (!tree.isEmpty || (wire.via?.length ?? 0) > 0 || !facing || !aligned) return null;
-  const nodes = nodesAlong(grid, [
-    [from.x, from.y],
-    [to.x, to.y],
-  ]);
-  const owners = x !== 0 ? grid.horizontalNet : grid.verticalNet;
-  const isFree = nodes.every((node, index) => {
-    const atPort = index === 0 || index === nodes.length - 1;
-    return (owners[node] === 0 || owners[node] === net) && (atPort || (grid.surroundings[node]! & 3) !== BLOCKED);
-  });
-  return isFree ? nodes : null;
-}
-
-/** The cheapest way from the net's tree through the wire's own bend points to where its port is entered. */
-function wayThrough(router: SheetRouter, wire: EndedWire, tree: NetTree): readonly number[] | null {
-  const { grid } = router.space;
-  const source = stubNode(grid, wire.from);
-  const target = stubNode(grid, wire.to);
-  if (source < 0 || target < 0) return null;
-  const stops = [...(wire.wire.via ?? []).map(point => nodeAt(grid, point)), target];
-  const own = new Set(tree.nodes);
-  let way: readonly number[] = [];
-  let beginnings = tree.isEmpty
-    ? [{ node: source, axis: axisOf(wire.from), cost: 0 }]
-    : branchings(tree, node => branchPrice(router, wire.net, node));
-  for (const [index, stop] of stops.entries()) {
-    const goalAxis = index === stops.length - 1 ? axisOf(wire.to) : null;
-    const piece = wayInWindows(router, wire, { beginnings, goal: stop, goalAxis, own });
-    if (piece === null) return null;
-    for (const node of piece) own.add(node);
-    way = [...way, ...(way.length > 0 ? piece.slice(1) : piece)];
-    beginnings = [{ node: stop, axis: arrivalAxis(way, axisOf(wire.from)), cost: 0 }];
-  }
-  return way;
-}
-
-const axisOf = (end: PortEnd): Axis => (isHorizontal(end.side) ? 'horizontal' : 'vertical');
-
-function arrivalAxis(way: readonly number[], otherwise: Axis): Axis {
-  const last = way.at(-1);
-  const before = way.at(-2);
-  if (last === undefined || before === undefined) return otherwise;
-  return Math.abs(last - before) === 1 ? 'horizontal' : 'vertical';
-}
-
-/** What it costs to branch at a node; infinite where a dot would stand on a port's stub or on a crossing. */
-function branchPrice({ space, ends }: SheetRouter, net: number, node: number): number {
-  const { grid } = space;
-  const owners = [grid.horizontalNet[node]!, grid.verticalNet[node]!];
-  if (owners.some(owner => owner !== 0 && owner !== net)) return Number.POSITIVE_INFINITY;
-  const [x, y] = pointAt(grid, node);
-  let closest = FROM_PORT;
-  for (const end of ends.get(net) ?? []) closest = Math.min(closest, Math.abs(x - end.x) + Math.abs(y - end.y));
-  if (closest < SHORT_STUB) return Number.POSITIVE_INFINITY;
-  const there = grid.surroundings[node]!;
-  let price = (FROM_PORT - closest) * BRANCH_PRICES.eachUnit;
-  if (there & LABEL) price += BRANCH_PRICES.underLabel;
-  if ((there & 3) >= NEAR) price += BRANCH_PRICES.near;
-  return price;
-}
-
-interface Piece {
-  readonly beginnings: readonly Beginning[];
-  readonly goal: number;
-  readonly goalAxis: Axis | null;
-  readonly own: ReadonlySet<number>;
-}
-
-function wayInWindows(router: SheetRouter, { from, to, net }: EndedWire, piece: Piece): readonly number[] | null {
-  const { space, patience } = router;
-  const { xs, ys } = space.grid;
-  const [goalX, goalY] = pointAt(space.grid, piece.goal);
-  const leadsOn = from.side === 'right' && to.side === 'left' && to.x > from.x;
-  const middle = leadsOn ? (from.x + to.x) / 2 : null;
-  for (const margin of WINDOWS) {
-    const window = {
-      left: lineFrom(xs, Math.min(from.x, goalX) - margin),
-      right: Math.min(xs.length, lineFrom(xs, Math.max(from.x, goalX) + margin)) - 1,
-      top: lineFrom(ys, Math.min(from.y, goalY) - margin),
-      bottom: Math.min(ys.length, lineFrom(ys, Math.max(from.y, goalY) + margin)) - 1,
-    };
-    const question = { ...piece, net, window, middle };
-    let way = cheapestWay(space, { ...question, haste: 1, patience });
-    if (way === 'given-up') way = cheapestWay(space, { ...question, haste: HASTE, patience: LAST_PATIENCE });
-    if (typeof way !== 'string') return way;
-  }
-  return null;
 }
