@@ -1,27 +1,14 @@
 /**
- * The one place that knows mathjs. It gets only what grammar.ts has passed, with every number and name replaced by a
+ * Tokens to the tree. The parser gets only what grammar.ts has passed, with every number and name replaced by a
  * placeholder, so that its own reading of literals, its reserved words and its implied products never come into play; what
  * is taken from it is the order of operations. Its types stay in here.
  */
 
-import { create, parseDependencies } from 'mathjs/number';
 import { parseRational, type Rational } from '../algebra/index.ts';
 import type { BinaryOperator, Expression } from './expression.ts';
 import { isFunctionName } from './functions.ts';
+import { type ParsedNode, parseTree } from './parse-tree.ts';
 import type { Token } from './tokens.ts';
-
-/** The parser alone: 43 kB compressed, where all of mathjs is 188 kB. */
-const { parse } = create({ ...parseDependencies }, {});
-
-/** The kinds of node that a checked text leads to. */
-interface ParsedNode {
-  readonly type: string;
-  readonly name?: string;
-  readonly op?: string;
-  readonly content?: ParsedNode;
-  readonly fn?: { readonly name: string };
-  readonly args?: readonly ParsedNode[];
-}
 
 /** The tree of tokens that form an expression; the first literal that is beyond what can be kept exactly, where one is. */
 export function buildTree(
@@ -35,7 +22,7 @@ export function buildTree(
     literals.set(token, value);
   }
   const canonical = tokens.map((token, i) => (token.kind === 'number' || token.kind === 'name' ? `x${i}` : token.text));
-  const root = parse(canonical.join('')) as ParsedNode;
+  const root = parseTree(canonical.join(''));
   return translate(root, placeholder => {
     const token = tokens[Number(placeholder.slice(1))];
     if (token === undefined) throw new Error(`no token stands behind ${placeholder}`);
@@ -49,14 +36,17 @@ type Leaf = (placeholder: string) => Extract<Expression, { kind: 'number' | 'nam
 /** The parsed tree in our own nodes, each made after its parts; an explicit stack, as long sums are deep. */
 function translate(root: ParsedNode, leaf: Leaf): Expression {
   const open = [root];
-  const order: ParsedNode[] = [];
+  const order: Inner[] = [];
   for (let node = open.pop(); node !== undefined; node = open.pop()) {
-    if (node.content === undefined) order.push(node);
-    open.push(...(node.content === undefined ? (node.args ?? []) : [node.content]));
+    if (node.type === 'parenthesis') open.push(node.content);
+    else {
+      order.push(node);
+      open.push(...partsOf(node));
+    }
   }
   const made: Expression[] = [];
   for (const node of order.reverse()) {
-    const count = node.args?.length ?? 0;
+    const count = partsOf(node).length;
     made.push(translateNode(node, made.splice(made.length - count, count), leaf));
   }
   const [expression] = made;
@@ -67,19 +57,33 @@ function translate(root: ParsedNode, leaf: Leaf): Expression {
 const OPERATORS: readonly string[] = ['+', '-', '*', '/', '^'] satisfies readonly BinaryOperator[];
 const isBinaryOperator = (op: string): op is BinaryOperator => OPERATORS.includes(op);
 
-function translateNode(node: ParsedNode, parts: readonly Expression[], leaf: Leaf): Expression {
+type Inner = Exclude<ParsedNode, { type: 'parenthesis' }>;
+
+function partsOf(node: Inner): readonly ParsedNode[] {
+  return node.type === 'symbol' ? [] : node.args;
+}
+
+function translateNode(node: Inner, parts: readonly Expression[], leaf: Leaf): Expression {
   const [first, second] = parts;
-  if (node.type === 'SymbolNode' && node.name !== undefined) return leaf(node.name);
-  if (node.type === 'FunctionNode' && node.fn !== undefined) {
-    const { kind, ...named } = leaf(node.fn.name);
-    const name = kind === 'name' && 'name' in named ? named.name : '';
-    if (isFunctionName(name)) return { kind: 'call', function: name, arguments: parts };
-  }
-  if (node.type === 'OperatorNode' && node.op !== undefined && first !== undefined) {
-    if (second === undefined && node.op === '-') return { kind: 'unary', operator: '-', operand: first };
-    if (second !== undefined && isBinaryOperator(node.op)) {
-      return { kind: 'binary', operator: node.op, left: first, right: second };
+  switch (node.type) {
+    case 'symbol':
+      return leaf(node.name);
+    case 'function': {
+      const called = leaf(node.fn.name);
+      if (called.kind === 'name' && isFunctionName(called.name)) {
+        return { kind: 'call', function: called.name, arguments: parts };
+      }
+      break;
     }
+    case 'operator':
+      if (first === undefined) break;
+      if (second === undefined && node.op === '-') return { kind: 'unary', operator: '-', operand: first };
+      if (second !== undefined && isBinaryOperator(node.op)) {
+        return { kind: 'binary', operator: node.op, left: first, right: second };
+      }
+      break;
+    default:
+      node satisfies never;
   }
   throw new Error(`the parser returned an unexpected ${node.type}`);
 }
