@@ -16,7 +16,7 @@ export function matrixShapeFault(block: Pick<StateModelBlock, 'A' | 'B' | 'C' | 
     sizeFault('C', C, p, n) ??
     sizeFault('D', D, p, m) ??
     (initial !== undefined && initial.length !== n
-      ? `"initial" has ${initial.length} values, the model has ${n} states.`
+      ? `"initial" has ${counted(initial.length, 'value')}, the model has ${counted(n, 'state')}.`
       : null)
   );
 }
@@ -31,7 +31,8 @@ function sizeFault(name: string, matrix: Matrix, rows: number, columns: number):
   return `"${name}" has ${counted(matrix[odd]?.length ?? 0, 'entry')} in row ${odd + 1} where the others ask for ${columns}. ${wanted}`;
 }
 
-function counted(count: number, word: 'row' | 'entry'): string {
-  const plural = word === 'row' ? 'rows' : 'entries';
-  return `${count} ${count === 1 ? word : plural}`;
+const PLURALS = { row: 'rows', entry: 'entries', value: 'values', state: 'states' } as const;
+
+function counted(count: number, word: keyof typeof PLURALS): string {
+  return `${count} ${count === 1 ? word : PLURALS[word]}`;
 }
