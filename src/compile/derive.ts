@@ -3,7 +3,8 @@
  * with numbers and the symbolic view with rational functions.
  */
 
-import { type Problem, problem, type Result, type Warning } from '../problem/index.ts';
+import type { Result, Warning } from '../problem/index.ts';
+import { type ReducedModel, reduceDerivatives } from './derivatives/index.ts';
 import { eliminate, type SolvedLoop } from './eliminate/index.ts';
 import { cutMatrix, type Equations, type ModelState, type RowStore, writeEquations } from './equations/index.ts';
 import { blockOfSignals, type FlatDrawing } from './flatten/index.ts';
@@ -41,8 +42,6 @@ export function derive<T>(
   if (!readings.ok) return readings;
   const { contributions, warnings, irrational } = readings.value;
   const equations = writeEquations(reader.arithmetic, drawing, contributions);
-  const misnamed = nameProblems(equations);
-  if (misnamed.length > 0) return { ok: false, problems: misnamed };
   const measureLoops = reader.arithmetic.field.name !== 'symbolic';
   const { loops, reduced } = eliminate(equations, orderSignals(equations), { measureLoops });
   const located = locateLoops(drawing, loops);
@@ -50,15 +49,20 @@ export function derive<T>(
     .filter(({ loop }) => loop.isSingular)
     .map(({ blocks }) => loopWithoutSolution(drawing, blocks));
   if (reduced === null) return { ok: false, problems: refusals };
-  if (equations.differentiated.length > 0) return { ok: false, problems: equations.differentiated.map(notReduced) };
+  const model = withoutDerivatives(drawing, equations, reduced);
+  if (!model.ok) return model;
+  const { states, rows, shiftedStates } = model.value;
+  const { inputs, outputs } = equations;
+  const misnamed = nameProblems({ states, inputs, outputs });
+  if (misnamed.length > 0) return { ok: false, problems: misnamed };
   return {
     ok: true,
     value: {
-      states: equations.states,
-      inputs: equations.inputs,
-      outputs: equations.outputs,
-      matrices: cutMatrices(equations, reduced),
-      shiftedStates: [],
+      states,
+      inputs,
+      outputs,
+      matrices: cutMatrices(rows, states.length, inputs.length, outputs.length),
+      shiftedStates,
       loops: located.map(({ blocks }) => ({ blocks: pathsOf(drawing, blocks) })),
       warnings: [...warnings, ...nearlySingular(drawing, located)],
       irrational,
@@ -66,9 +70,14 @@ export function derive<T>(
   };
 }
 
-function notReduced({ name, block }: SignalName): Problem {
-  const message = `Block ${name} differentiates its input, which derivation does not reduce. Put a lag in its place.`;
-  return problem('not-supported', message, { blocks: [block] });
+/** The rows as they are where nothing is differentiated. */
+function withoutDerivatives<T>(
+  drawing: FlatDrawing,
+  equations: Equations<T>,
+  rows: RowStore<T>,
+): Result<ReducedModel<T>> {
+  if (equations.differentiated.length > 0) return reduceDerivatives(drawing, equations, rows);
+  return { ok: true, value: { states: equations.states, rows, shiftedStates: [] } };
 }
 
 interface LocatedLoop {
@@ -89,15 +98,14 @@ function nearlySingular(drawing: FlatDrawing, loops: readonly LocatedLoop[]): Wa
   );
 }
 
-/** A, B, C and D out of the rows of state derivatives and outputs. */
-function cutMatrices<T>({ states, outputs, known }: Equations<T>, reduced: RowStore<T>): SystemMatrices<T> {
-  const n = states.length;
+/** A, B, C and D out of n rows of state derivatives and p of outputs, over n states and m inputs. */
+function cutMatrices<T>(rows: RowStore<T>, n: number, m: number, p: number): SystemMatrices<T> {
   const derivatives = Int32Array.from({ length: n }, (_, i) => i);
-  const outputRows = Int32Array.from({ length: outputs.length }, (_, i) => reduced.rows - outputs.length + i);
+  const outputs = Int32Array.from({ length: p }, (_, i) => n + i);
   return {
-    A: cutMatrix(reduced, derivatives, 0, n),
-    B: cutMatrix(reduced, derivatives, n, known),
-    C: cutMatrix(reduced, outputRows, 0, n),
-    D: cutMatrix(reduced, outputRows, n, known),
+    A: cutMatrix(rows, derivatives, 0, n),
+    B: cutMatrix(rows, derivatives, n, n + m),
+    C: cutMatrix(rows, outputs, 0, n),
+    D: cutMatrix(rows, outputs, n, n + m),
   };
 }

@@ -14,23 +14,24 @@ const DIRECTIONS = [
 const SPREAD = [Math.SQRT1_2, Math.sqrt(1.3), Math.sqrt(5)];
 
 /**
- * Three frequencies in the right half plane, rad/s: at the slowest, the middle and the fastest rate of the model. Rates
- * are |A_ii| and √|A_ij A_ji|, which do not depend on the units of the states; 1 where there are none.
+ * Three frequencies in the right half plane, rad/s: at the middle, the upper quartile and the fastest of the model's rates.
+ * Rates are |A_ii| and √|A_ij A_ji|, which do not depend on the units of the states; 1 where there are none. Slower ones
+ * would drive long chains of integrators out of the range of doubles.
  */
 export function testFrequencies(A: SparseMatrix<number>): Complex[] {
-  let [slowest, fastest] = [Number.POSITIVE_INFINITY, 0];
+  const rates: number[] = [];
   for (let i = 0; i < A.rows; i++) {
     for (let k = A.rowStart[i]!; k < A.rowStart[i + 1]!; k++) {
       const j = A.column[k]!;
       const rate = Math.sqrt(Math.abs(A.values[k]!)) * Math.sqrt(Math.abs(entryAt(A, j, i, 0)));
-      if (rate === 0 || !Number.isFinite(rate)) continue;
-      slowest = Math.min(slowest, rate);
-      fastest = Math.max(fastest, rate);
+      if (rate !== 0 && Number.isFinite(rate)) rates.push(rate);
     }
   }
-  const rates = fastest === 0 ? [1, 1, 1] : [slowest, Math.sqrt(slowest) * Math.sqrt(fastest), fastest];
+  rates.sort((a, b) => a - b);
+  const quantile = (share: number) => rates[Math.floor(share * (rates.length - 1))] ?? 1;
+  const chosen = [quantile(0.5), quantile(0.75), quantile(1)];
   return DIRECTIONS.map(({ re, im }, k) => {
-    const size = rates[k]! * SPREAD[k]!;
+    const size = chosen[k]! * SPREAD[k]!;
     return { re: re * size, im: im * size };
   });
 }
