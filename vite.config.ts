@@ -57,7 +57,8 @@ const page = {
   target: 'es2022',
   /** A font or an image inlined as a data address would be refused by the policy. */
   assetsInlineLimit: 0,
-  modulePreload: { polyfill: false },
+  /** No preloading of what is imported on demand: the worker does so too, and has no document to put links in. */
+  modulePreload: false as const,
 };
 
 const commandLine = {

@@ -1,47 +1,66 @@
-/** The worker: one switch over pure functions, the newest derivation first, older ones dropped between their stages. */
+/**
+ * The worker: one switch over pure functions. The newest derivation is answered first and in stages, a turn of the event loop
+ * each, so that a newer question is seen in between and the rest of the older one is dropped. Analyses and files are loaded
+ * when they are first needed, after the first matrices.
+ */
 
 import type { StateSpace } from '../compile/index.ts';
-import { channelAnswer, deriveStages, fileAnswer } from './answer.ts';
-import type { Answer, Question } from './protocol.ts';
+import { modelAnswer } from './model-answer.ts';
+import type { Answer, Channel, Question } from './protocol.ts';
 
-/** What is left to do for the newest derivation; a stage a turn, so that a newer question is seen in between. */
-let pending: Generator<Answer> | null = null;
-
-/** The model derived last, for questions about another channel of it. */
+/** The newest question for a derivation, and its model once it is derived. */
+let newest: Extract<Question, { kind: 'derive' }> | null = null;
+/** The channel chosen since that question. */
+let chosen: Channel | null = null;
 let latest: { readonly revision: number; readonly model: StateSpace } | null = null;
 
 self.onmessage = ({ data }: MessageEvent<Question>) => {
   switch (data.kind) {
     case 'derive':
-      pending = deriveStages(data);
-      return takeTurn();
+      newest = data;
+      chosen = null;
+      return void derive(data);
     case 'channel':
-      return send(latest === null ? null : channelAnswer(latest.revision, latest.model, data.channel));
+      return void channel(data);
     case 'file':
-      return send(fileAnswer(data));
+      return void import('./file-answer.ts').then(({ fileAnswer }) => send(fileAnswer(data)));
     default:
       return data satisfies never;
   }
 };
 
-/** A message to itself comes behind those already waiting, without the delay that timers have. */
-const turns = new MessageChannel();
-turns.port1.onmessage = () => {
-  const stage = pending?.next();
-  if (stage === undefined || stage.done === true) {
-    pending = null;
-    return;
-  }
-  const answer = stage.value;
-  if (answer.kind === 'model') {
-    latest = answer.outcome.ok ? { revision: answer.revision, model: answer.outcome.value.model } : null;
-  }
+async function derive(question: Extract<Question, { kind: 'derive' }>): Promise<void> {
+  await turn();
+  if (newest !== question) return;
+  const answer = modelAnswer(question);
+  latest = answer.outcome.ok ? { revision: question.revision, model: answer.outcome.value.model } : null;
   send(answer);
-  takeTurn();
-};
+  if (latest === null) return;
+  const { model } = latest;
+  const { channelAnswer, polesAnswer } = await import('./analysis-answers.ts');
+  await turn();
+  if (newest !== question) return;
+  send(channelAnswer(question.revision, model, chosen ?? question.channel));
+  await turn();
+  if (newest === question) send(polesAnswer(question.revision, model));
+}
 
-function takeTurn(): void {
-  turns.port2.postMessage(null);
+async function channel(question: Extract<Question, { kind: 'channel' }>): Promise<void> {
+  const { channelAnswer } = await import('./analysis-answers.ts');
+  chosen = question.channel;
+  if (latest !== null) send(channelAnswer(latest.revision, latest.model, question.channel));
+}
+
+/** Resolves behind the messages already waiting, without the delay that timers have. */
+function turn(): Promise<void> {
+  return new Promise(resolve => {
+    const { port1, port2 } = new MessageChannel();
+    port1.onmessage = () => {
+      port1.close();
+      resolve();
+    };
+    port2.postMessage(null);
+  });
 }
 
 function send(answer: Answer | null): void {

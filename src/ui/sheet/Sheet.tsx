@@ -32,17 +32,12 @@ export function Sheet() {
   const nodes = useSheetNodes(placed);
   const edges = useSheetWires(placed);
   const drop = useDropPart();
-  const onKeyDown = useSheetKeys();
+  useSheetKeys();
   useFitOnOpening();
   useSheetView();
   return (
-    <div
-      className="sheet"
-      role="application"
-      aria-label="Block diagram. Press ? for all keys."
-      onKeyDown={onKeyDown}
-      {...drop}
-    >
+    // biome-ignore lint/a11y/noNoninteractiveTabindex: the sheet takes keys, and an empty one holds nothing to focus
+    <div className="sheet" role="application" tabIndex={0} aria-label="Block diagram. Press ? for all keys." {...drop}>
       <ReactFlow
         nodes={nodes}
         edges={edges}

@@ -12,3 +12,8 @@ export function focusedBlock(): string | null {
   const node = document.activeElement?.closest('.react-flow__node');
   return node instanceof HTMLElement ? (node.dataset['id'] ?? null) : null;
 }
+
+/** Keyboard focus on the sheet itself. */
+export function focusSheet(): void {
+  document.querySelector<HTMLElement>('.sheet')?.focus({ preventScroll: true });
+}

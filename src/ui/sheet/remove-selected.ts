@@ -3,7 +3,7 @@
 import { blockTitle, type Edit } from '../../diagram/index.ts';
 import { wireKey } from '../../diagram/routing/index.ts';
 import { actions, store } from '../store/index.ts';
-import { focusedBlock } from './focus-block.ts';
+import { focusedBlock, focusSheet } from './focus-block.ts';
 
 export function removeSelected(): boolean {
   const { selection, document: slice } = store.getState();
@@ -20,7 +20,6 @@ export function removeSelected(): boolean {
   const titles = blocks.filter(({ id }) => gone.has(id)).map(blockTitle);
   if (cut.length > 0) titles.push(cut.length === 1 ? 'a wire' : `${cut.length} wires`);
   actions.editTogether(edits, `Removed ${titles.join(', ')}.`);
-  const pane = document.querySelector('.sheet .react-flow');
-  if (pane instanceof HTMLElement) pane.focus({ preventScroll: true });
+  focusSheet();
   return true;
 }

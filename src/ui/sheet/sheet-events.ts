@@ -4,6 +4,7 @@ import type { Connection, Edge, EdgeChange, FinalConnectionState, Node, NodeChan
 import type { PortReference } from '../../diagram/index.ts';
 import { actions, store } from '../store/index.ts';
 import { connectBlocks } from './connect-blocks.ts';
+import { focusSheet } from './focus-block.ts';
 import type { BlockFlowNode } from './useSheetNodes.ts';
 import type { WireFlowEdge } from './useSheetWires.ts';
 
@@ -33,7 +34,10 @@ export const SHEET_EVENTS: Events = {
   onConnectEnd: (_, state) => connectToBody(state),
   onReconnect: (edge, connection) => moveEnd(edge, connection),
   onNodeDoubleClick: (_, node) => actions.editFields(node.id),
-  onPaneClick: () => actions.editFields(null),
+  onPaneClick: () => {
+    actions.editFields(null);
+    focusSheet();
+  },
 };
 
 function takeSelection(

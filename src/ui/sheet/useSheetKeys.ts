@@ -1,9 +1,9 @@
 /** Keys on the sheet: parts by their letter, moving by squares, wiring, mirroring, removing, and the write-a-block line. */
 
-import type { KeyboardEvent } from 'react';
+import { useEffect } from 'react';
 import { GRID } from '../../diagram/geometry/index.ts';
 import { blockTitle } from '../../diagram/index.ts';
-import { isTextField } from '../shell/useUndoKeys.ts';
+import { isTextField } from '../shell/usePageKeys.ts';
 import { actions, store } from '../store/index.ts';
 import { beginWriting } from '../write-line/begin-writing.ts';
 import { partOf } from '../write-line/parts.ts';
@@ -23,18 +23,32 @@ const MOVES: Readonly<Record<string, readonly [number, number]>> = {
 /** Squares that an arrow key moves with Shift held. */
 const LONG_MOVE = 5;
 
-export function useSheetKeys(): (event: KeyboardEvent) => void {
+/** Listens while the focus is on the sheet, or nowhere in particular. */
+export function useSheetKeys(): void {
   const fitDrawing = useFit();
-  return event => {
-    if (isTextField(event.target) || event.defaultPrevented) return;
-    if (event.ctrlKey || event.metaKey) {
-      if (event.key.toLowerCase() !== 'a') return;
-      actions.selectBlocks(store.getState().document.diagram.blocks.map(({ id }) => id));
-      event.preventDefault();
-    } else if (!event.altKey && (plainKey(event) || writingKey(event.key) || viewKey(event.key, fitDrawing))) {
-      event.preventDefault();
-    }
-  };
+  useEffect(() => {
+    const onKey = (event: KeyboardEvent) => {
+      if (event.defaultPrevented || event.altKey || isTextField(event.target) || !isOnSheet(event.target)) return;
+      const isDone =
+        event.ctrlKey || event.metaKey
+          ? selectAll(event.key)
+          : plainKey(event) || writingKey(event.key) || viewKey(event.key, fitDrawing);
+      if (isDone) event.preventDefault();
+    };
+    window.addEventListener('keydown', onKey);
+    return () => window.removeEventListener('keydown', onKey);
+  }, [fitDrawing]);
+}
+
+function isOnSheet(target: EventTarget | null): boolean {
+  if (document.querySelector('dialog[open]') !== null) return false;
+  return target === document.body || (target instanceof Element && target.closest('.sheet') !== null);
+}
+
+function selectAll(key: string): boolean {
+  if (key.toLowerCase() !== 'a') return false;
+  actions.selectBlocks(store.getState().document.diagram.blocks.map(({ id }) => id));
+  return true;
 }
 
 /** Whether the key did something to blocks. */

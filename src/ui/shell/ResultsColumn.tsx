@@ -1,16 +1,14 @@
 /** The results beside the sheet: the system matrix always in view, then time response, poles and zeros, transfer function. */
 
-import { lazy, Suspense } from 'react';
 import { Panel, PanelPending, ProblemList, ShortChoice, SystemMatrix } from '../results/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
+import { AnswerPanels } from './AnswerPanels.tsx';
 import { goTo } from './go-to.ts';
 
 const derivation = (state: State) => state.results.derivation;
 const problems = (state: State) => state.results.problems;
 const status = (state: State) => state.results.status;
 const notation = (state: State) => state.view.notation;
-
-const AnswerPanels = lazy(() => import('./AnswerPanels.tsx').then(({ AnswerPanels }) => ({ default: AnswerPanels })));
 
 const NOTATIONS = [
   { id: 'fractions', label: 'exact' },
@@ -31,9 +29,7 @@ export function ResultsColumn() {
         <>
           <MatrixPanel />
           <WarningPanel />
-          <Suspense fallback={<PanelPending label="Responses" />}>
-            <AnswerPanels />
-          </Suspense>
+          <AnswerPanels />
         </>
       )}
     </section>

@@ -12,7 +12,7 @@ import { newKey } from './new-key.ts';
 import { openLinkInAddress, watchAddress } from './open-link.ts';
 
 export async function begin(): Promise<void> {
-  if (!openLinkInAddress()) await reopen();
+  if (!(await openLinkInAddress())) await reopen();
   followDocument();
   keepOnChange();
   watchAddress();

@@ -1,6 +1,5 @@
 /** The share link of the drawing on screen, copied with its length stated. */
 
-import { encodeLink } from '../../share/index.ts';
 import { actions, store } from '../store/index.ts';
 import { copyText } from './copy-text.ts';
 
@@ -8,6 +7,7 @@ import { copyText } from './copy-text.ts';
 const LONG_LINK = 8000;
 
 export async function shareLink(): Promise<void> {
+  const { encodeLink } = await import('../../share/index.ts');
   const address = new URL(window.location.href);
   address.hash = encodeLink(store.getState().document.diagram);
   const link = address.href;

@@ -1,15 +1,17 @@
-/** Undo and redo by the platform's usual keys, wherever the focus is but in a field that has its own. */
+/** Keys that count wherever the focus is, but in a field that has its own: undo, redo, export. */
 
 import { useEffect } from 'react';
 import { actions } from '../store/index.ts';
 
-export function useUndoKeys(): void {
+export function usePageKeys(): void {
   useEffect(() => {
     const onKey = (event: KeyboardEvent) => {
-      if (!(event.ctrlKey || event.metaKey) || event.altKey || isTextField(event.target)) return;
+      if (!(event.ctrlKey || event.metaKey) || event.altKey || isTextField(event.target) || isInDialog(event.target))
+        return;
       const key = event.key.toLowerCase();
       if (key === 'z' && !event.shiftKey) actions.undo();
       else if (key === 'y' || (key === 'z' && event.shiftKey)) actions.redo();
+      else if (key === 'e') actions.openDialog('export');
       else return;
       event.preventDefault();
     };
@@ -24,4 +26,9 @@ export function isTextField(target: EventTarget | null): boolean {
     target instanceof HTMLElement &&
     (target.isContentEditable || ['INPUT', 'TEXTAREA', 'SELECT'].includes(target.tagName))
   );
+}
+
+/** Whether a dialog is over the page: its own keys count then. */
+export function isInDialog(target: EventTarget | null): boolean {
+  return target instanceof Element && target.closest('dialog') !== null;
 }

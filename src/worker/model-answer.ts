@@ -1,0 +1,12 @@
+/** The first answer: the model itself, since the matrices are what is waited for. */
+
+import { compile } from '../compile/index.ts';
+import type { ModelAnswer, Question } from './protocol.ts';
+import { quantityValues } from './quantity-values.ts';
+
+/** Derives the drawing of the question; runs without a worker too. */
+export function modelAnswer({ revision, diagram }: Extract<Question, { kind: 'derive' }>): ModelAnswer {
+  const start = performance.now();
+  const outcome = compile(diagram);
+  return { kind: 'model', revision, outcome, values: quantityValues(diagram), elapsed: performance.now() - start };
+}

@@ -1,0 +1,60 @@
+/** axe-core on every screen and dialog, in both themes and in a narrow window. */
+
+import { readFileSync } from 'node:fs';
+import { createRequire } from 'node:module';
+import type AxeCore from 'axe-core';
+import { expect, type Page, test } from 'playwright/test';
+import { openWorkedDrawing } from './sheet-page.ts';
+
+const AXE = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
+
+declare global {
+  interface Window {
+    axe: typeof AxeCore;
+  }
+}
+
+/** Serious and critical findings as `rule: element`. */
+async function findings(page: Page): Promise<string[]> {
+  await page.evaluate(AXE);
+  return page.evaluate(async () => {
+    const { violations } = await window.axe.run(document, { resultTypes: ['violations'] });
+    return violations
+      .filter(({ impact }) => impact === 'serious' || impact === 'critical')
+      .flatMap(({ id, nodes }) => nodes.map(node => `${id}: ${node.html.slice(0, 120)}`));
+  });
+}
+
+for (const colorScheme of ['light', 'dark'] as const) {
+  for (const [width, height] of [
+    [1440, 900],
+    [480, 900],
+  ] as const) {
+    test(`the worked drawing, ${colorScheme}, ${width} wide`, async ({ page }) => {
+      await page.emulateMedia({ colorScheme });
+      await page.setViewportSize({ width, height });
+      await openWorkedDrawing(page);
+      await expect(page.getByText('every digit proved')).toBeVisible();
+      expect(await findings(page)).toEqual([]);
+    });
+  }
+}
+
+for (const [button, dialog] of [
+  ['Export…', 'Export'],
+  ['Drawings', 'Drawings'],
+] as const) {
+  test(`the dialog ${dialog}`, async ({ page }) => {
+    await openWorkedDrawing(page);
+    await page.getByRole('button', { name: button }).click();
+    await expect(page.getByRole('dialog', { name: dialog })).toBeVisible();
+    expect(await findings(page)).toEqual([]);
+  });
+}
+
+test('a sheet with a refused model', async ({ page }) => {
+  await openWorkedDrawing(page);
+  await page.getByRole('button', { name: 'Remove parameter J' }).click();
+  await expect(page.getByRole('list', { name: 'Problems' })).toBeVisible();
+  expect(await findings(page)).toEqual([]);
+});
