@@ -3,7 +3,7 @@
  * allows, else from the balanced Hessenberg form. Of the state-space model: dead time counts as its Padé approximation.
  */
 
-import { toDouble } from '../algebra/index.ts';
+import { type Rational, rational, toDouble, ZERO } from '../algebra/index.ts';
 import type { StateSpace } from '../compile/index.ts';
 import { balanceSystem, hessenbergSystem, type ResponseSystem, responseAt } from '../numeric/index.ts';
 import { channelSystem } from './channel-system.ts';
@@ -20,12 +20,13 @@ export interface FrequencyResponse {
   readonly route: 'certified' | 'floating';
 }
 
-/** Zeros, poles and gain of a transfer function: gain · ∏(s − zero) / ∏(s − pole). */
+/** Zeros, poles and gain of a transfer function: gain · 2^gainExponent · ∏(s − zero) / ∏(s − pole). */
 export interface ZeroPoleGain {
   readonly zeros: readonly Root[];
   readonly poles: readonly Root[];
-  /** 0 for the zero channel. */
+  /** gain · 2^gainExponent is the leading coefficient, which alone may overflow a double; 0 for the zero channel. */
   readonly gain: number;
+  readonly gainExponent: number;
 }
 
 /** G(jω) of a channel, by positions, at angular frequencies in rad/s (finite, of either sign). O(n) or O(n²) a point. */
@@ -61,11 +62,9 @@ export function zeroPoleGain(exact: ExactModel, output: number, input: number): 
   if (found !== undefined) return found;
   const { numerator, denominator } = reducedFraction(exact, output, input);
   const isWhole = denominator.length === characteristicOf(exact).length;
-  const [leading] = numerator;
   const zeros = rootsOf(numerator);
   const poles = isWhole ? exactPoles(exact) : rootsOf(denominator);
-  const gain = leading === undefined ? 0 : toDouble(leading);
-  const factors = zeros === null || poles === null ? null : { zeros, poles, gain };
+  const factors = zeros === null || poles === null ? null : { zeros, poles, ...scaledDouble(numerator[0] ?? ZERO) };
   kept.set(key, factors);
   return factors;
 }
@@ -76,11 +75,11 @@ const known = new WeakMap<ExactModel, Map<string, ZeroPoleGain | null>>();
  * Factors are multiplied in turns of zero and pole, and the product's power of two is kept apart, so that high orders neither
  * overflow nor underflow on the way.
  */
-function byFactors({ zeros, poles, gain }: ZeroPoleGain): Response {
+function byFactors({ zeros, poles, gain, gainExponent }: ZeroPoleGain): Response {
   const over = zeros.flatMap(root => new Array<Root>(root.multiplicity).fill(root));
   const under = poles.flatMap(root => new Array<Root>(root.multiplicity).fill(root));
   return omega => {
-    let [re, im, exponent] = [gain, 0, 0];
+    let [re, im, exponent] = [gain, 0, gainExponent];
     for (let k = 0; k < Math.max(over.length, under.length); k++) {
       const zero = over[k];
       if (zero !== undefined) {
@@ -103,6 +102,14 @@ function byFactors({ zeros, poles, gain }: ZeroPoleGain): Response {
     }
     return [scaleByPower(re, exponent), scaleByPower(im, exponent)];
   };
+}
+
+/** The nearest double of x without the range of doubles: x / 2^gainExponent is near 1. */
+function scaledDouble({ n, d }: Rational): Pick<ZeroPoleGain, 'gain' | 'gainExponent'> {
+  const gainExponent = 4 * (n.toString(16).length - d.toString(16).length);
+  const scale = 1n << BigInt(Math.abs(gainExponent));
+  const gain = gainExponent > 0 ? rational(n, d * scale) : rational(n * scale, d);
+  return { gain: toDouble(gain), gainExponent };
 }
 
 /** x · 2^exponent, in two steps so that the power itself stays finite. */

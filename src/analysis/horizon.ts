@@ -101,10 +101,13 @@ function driftDuration(modes: readonly Root[]): number {
   return frequencies.length === 0 ? wanted : Math.min(wanted, (MOST_PERIODS * 2 * Math.PI) / Math.max(...frequencies));
 }
 
+/** What a duration may exceed the short figure by. */
+const SLACK = 0.02;
+
 /** The next of 1, 1.2, 1.5, 2, … times a power of ten. */
 function roundUp(duration: number): number {
   const exponent = Math.floor(Math.log10(duration));
   const unit = Number(`1e${exponent}`);
-  const figure = ROUND_FIGURES.find(candidate => candidate * unit >= duration) ?? 10;
+  const figure = ROUND_FIGURES.find(candidate => candidate * unit * (1 + SLACK) >= duration) ?? 10;
   return Number(`${figure}e${exponent}`);
 }

@@ -39,8 +39,8 @@ const STEP_BY_MODE = 0.5;
 /** A horizon is halved at least this often: 64 steps where no mode asks for more. */
 const FEWEST_HALVINGS = 6;
 
-/** A mode counts as alive while its decaying factor is above this: a tenth of a percent of the 2 % band's half width. */
-const ALIVE = 2e-5;
+/** A mode asks for its steps while its decaying factor is above this. */
+const ALIVE = 1e-7;
 
 /** Modes within this factor in |λ| act together like one multiple pole. */
 const CLUSTER = 1.5;
@@ -69,7 +69,7 @@ export function resolvedResponse(system: FreeSystem, modes: readonly Mode[], hor
 /** The level of each step from 0 to the horizon; null where there are more than any model is worth. */
 function plannedLevels(modes: readonly Mode[], horizon: number, finest: number): number[] | null {
   const limits = modes
-    .map(mode => ({ step: STEP_BY_MODE / Math.hypot(mode.re, mode.im), until: lifetime(mode, modes) }))
+    .map(mode => ({ step: STEP_BY_MODE / Math.hypot(mode.re, mode.im), until: lifetime(mode, modes, ALIVE) }))
     .filter(({ step }) => Number.isFinite(step))
     .sort((a, b) => a.step - b.step);
   const ticks = 2 ** finest;
@@ -95,8 +95,11 @@ function alignedLevel(tick: number, wanted: number, finest: number): number {
   return level;
 }
 
-/** Seconds after which the mode, with those near it, is below `ALIVE` of its largest part: x^(m−1) e^(−x) / (m−1)! there. */
-export function lifetime(mode: Mode, modes: readonly Mode[]): number {
+/**
+ * Seconds after which the mode, together with those near it, is below `share` of its largest part: where
+ * x^(m−1) e^(−x) / (m−1)! is, for x = −Re p t and m of them. Infinite for a mode that does not decay.
+ */
+export function lifetime(mode: Mode, modes: readonly Mode[], share: number): number {
   if (mode.re >= 0) return Number.POSITIVE_INFINITY;
   const size = Math.hypot(mode.re, mode.im);
   let together = 0;
@@ -105,10 +108,11 @@ export function lifetime(mode: Mode, modes: readonly Mode[]): number {
     const isConjugate = re === mode.re && im === -mode.im && im !== 0;
     if (other <= CLUSTER * size && size <= CLUSTER * other && !isConjugate) together += multiplicity;
   }
-  let offset = -Math.log(ALIVE);
+  let offset = -Math.log(share);
   for (let k = 2; k < together; k++) offset -= Math.log(k);
-  let x = Math.max(1, -Math.log(ALIVE) + together);
-  for (let k = 0; k < 50; k++) x = Math.max(together - 1, offset + (together - 1) * Math.log(x)); // a contraction above m − 1
+  let x = Math.max(1, together - Math.log(share));
+  // x ← offset + (m − 1) ln x contracts above m − 1, where the function falls.
+  for (let k = 0; k < 50; k++) x = Math.max(1, together - 1, offset + (together - 1) * Math.log(x));
   return x / -mode.re;
 }
 

@@ -37,7 +37,7 @@ function followedToRest(motion: ChannelMotion): SettledResponse | null {
   const { finalValue, modes } = motion;
   if (!motion.settles || finalValue === null) return null;
   const system = excitedSystem(motion.system, 'step');
-  let horizon = modes.reduce((longest, mode) => Math.max(longest, lifetime(mode, modes)), 0);
+  let horizon = modes.reduce((longest, mode) => Math.max(longest, lifetime(mode, modes, Number.EPSILON)), 0);
   if (horizon === 0) horizon = 1; // a channel without dynamics: any time will do
   for (let tried = 0; tried < MOST_HORIZONS; tried++, horizon *= 2) {
     const response = resolvedResponse(system, modes, horizon);
