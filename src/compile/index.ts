@@ -1,4 +1,5 @@
-/** Diagram to state space: flatten, equations, loops, eliminate, self-check. */
+/** Diagram to state space: flatten, equations, loops, eliminate, derivatives, self-check. */
 
 export { type CompileOptions, compile } from './compile.ts';
 export type { AlgebraicLoop, Derivation, SelfCheck, SignalName, StateSpace, SystemMatrices } from './state-space.ts';
+export { deriveSymbolic, type SymbolicModel } from './symbolic/index.ts';

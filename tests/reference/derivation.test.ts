@@ -2,7 +2,9 @@
 
 import { describe, expect, test } from 'vitest';
 import { type Rational, toFraction, toRows, ZERO } from '../../src/algebra/index.ts';
-import { compile, type Derivation } from '../../src/compile/index.ts';
+import { createSymbolicField } from '../../src/algebra/symbolic/index.ts';
+import { compile, type Derivation, deriveSymbolic } from '../../src/compile/index.ts';
+import { evaluateIn, parseExpression } from '../../src/expression/index.ts';
 import { EXIT_STATUS } from '../../src/problem/index.ts';
 import { isWithin, readSituations, type Situation } from './read-cases.ts';
 
@@ -61,6 +63,26 @@ test.each(asserts('exact'))('$name: the exact matrices are the fractions of the 
   for (const key of MATRICES) {
     const rows = model.rational === null ? null : toRows<Rational>(model.rational[key], ZERO);
     expect(rows?.map(row => row.map(toFraction))).toEqual(wanted[key]);
+  }
+});
+
+test.each(asserts('symbolic'))('$name: the symbolic matrices are the formulas of the source', situation => {
+  const field = createSymbolicField();
+  const wanted = situation.expect.symbolic;
+  const derived = deriveSymbolic(situation.diagram);
+  if (wanted === undefined || !derived.ok || !derived.value.finished) throw new Error('no symbolic model');
+  const { matrices } = derived.value.value;
+  for (const key of MATRICES) {
+    const rows = toRows(matrices[key], field.zero);
+    const isEqual = wanted[key].map((row, i) =>
+      row.map((text, j) => {
+        const parsed = parseExpression(text);
+        const formula = parsed.ok ? evaluateIn(parsed.value, field, name => field.variable(name)) : null;
+        const entry = rows[i]?.[j];
+        return formula !== null && entry !== undefined && field.equals(entry, formula);
+      }),
+    );
+    expect(isEqual, key).toEqual(wanted[key].map(row => row.map(() => true)));
   }
 });
 

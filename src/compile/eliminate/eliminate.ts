@@ -5,13 +5,12 @@
 
 import { type Equations, RowAccumulator, RowStore } from '../equations/index.ts';
 import {
-  factorLoop,
   inDoubles,
-  type LoopFactors,
+  type LoopSolver,
+  loopSolver,
   loopSystem,
   relativeDistanceToSingular,
   type SignalOrder,
-  solveFactored,
 } from '../loops/index.ts';
 
 /** An algebraic loop as elimination found it. */
@@ -56,10 +55,10 @@ export function eliminate<T>(
     const members = components.member.subarray(components.start[c], components.start[c + 1]);
     const wanted = isNeeded[c] === 1 && !anySingular;
     if (isLoop[c] === 1) {
-      const { loop, factors } = examineLoop(work, members, measureLoops);
-      loops.push(loop);
-      if (loop.isSingular || factors === null) anySingular = true;
-      else if (wanted) resolveLoop(work, members, factors);
+      const { distance, solver } = examineLoop(work, members, measureLoops);
+      const isSolved = solver !== null && (!wanted || resolveLoop(work, members, solver));
+      loops.push({ signals: members, isSingular: !isSolved, distance });
+      if (!isSolved) anySingular = true;
     } else if (wanted) resolveSignal(work, members[0]!);
   }
   loops.sort((a, b) => a.signals[0]! - b.signals[0]!);
@@ -103,24 +102,25 @@ function resolveSignal<T>(work: Work<T>, signal: number): void {
   work.rowOf[signal] = work.row.finishRow(work.resolved);
 }
 
+/** The loop's solver, null where it is singular, and how near it is to that. */
 function examineLoop<T>(work: Work<T>, members: Int32Array, measure: boolean) {
   const { arithmetic } = work.equations;
-  members.forEach((signal, i) => {
-    work.place[signal] = i;
-  });
+  placeMembers(work, members);
   const system = loopSystem(work.equations, members, work.place);
-  members.forEach(signal => {
-    work.place[signal] = -1;
-  });
-  const factors = factorLoop(arithmetic, system.matrix);
+  forgetMembers(work, members);
+  const solver = loopSolver(arithmetic, system.matrix);
   const isRounded = arithmetic.field.name === 'double';
-  const distance =
-    factors !== null && (measure || isRounded)
-      ? relativeDistanceToSingular(inDoubles(system, arithmetic.toDouble))
-      : null;
-  const isSingular = factors === null || (isRounded && distance !== null && distance <= withinRounding(members.length));
-  const loop: SolvedLoop = { signals: members, isSingular, distance };
-  return { loop, factors };
+  if (solver === null || !(measure || isRounded)) return { solver, distance: null };
+  const distance = relativeDistanceToSingular(inDoubles(system, arithmetic.toDouble));
+  return { solver: isRounded && distance <= withinRounding(members.length) ? null : solver, distance };
+}
+
+function placeMembers<T>({ place }: Work<T>, members: Int32Array): void {
+  for (let i = 0; i < members.length; i++) place[members[i]!] = i;
+}
+
+function forgetMembers<T>({ place }: Work<T>, members: Int32Array): void {
+  for (let i = 0; i < members.length; i++) place[members[i]!] = -1;
 }
 
 /** In doubles a loop nearer to a singular one than its n coefficients are rounded cannot be told from it. */
@@ -128,27 +128,27 @@ function withinRounding(n: number): number {
   return n * Number.EPSILON;
 }
 
-/** Gives each signal of a loop its row over the knowns: (I − M)⁻¹ applied to what comes from outside. */
-function resolveLoop<T>(work: Work<T>, members: Int32Array, factors: LoopFactors<T>): void {
-  const { arithmetic } = work.equations;
-  members.forEach((signal, i) => {
-    work.place[signal] = i;
-  });
-  const outside = new RowStore(arithmetic, members.length, 4 * members.length);
+/**
+ * Gives each signal of a loop its row over the knowns: (I − M)⁻¹ applied to what comes from outside. False where the loop
+ * turns out to be singular.
+ */
+function resolveLoop<T>(work: Work<T>, members: Int32Array, solver: LoopSolver<T>): boolean {
+  const outside = new RowStore(work.equations.arithmetic, members.length, 4 * members.length);
+  placeMembers(work, members);
   for (const signal of members) {
     addResolved(work, signal);
     work.row.finishRow(outside);
   }
-  members.forEach(signal => {
-    work.place[signal] = -1;
-  });
+  forgetMembers(work, members);
   const columns = usedColumns(outside);
   const width = columns.length;
-  const solution = solveFactored(arithmetic, factors, writtenOut(work, outside, columns), width);
+  const solution = solver(writtenOut(work, outside, columns), width);
+  if (solution === null) return false;
   members.forEach((signal, i) => {
     for (let c = 0; c < width; c++) work.row.add(columns[c]!, solution[i * width + c]!);
     work.rowOf[signal] = work.row.finishRow(work.resolved);
   });
+  return true;
 }
 
 function usedColumns<T>(rows: RowStore<T>): Int32Array {

@@ -31,6 +31,11 @@ export interface Arithmetic<T> {
    * element is as good as another.
    */
   magnitude(value: T): number;
+  /**
+   * A way of its own to solve an n × n system for several right-hand sides, all row-major, where elimination in field
+   * operations is not the best; null where the system is singular.
+   */
+  solveDense?(matrix: Numbers<T>, rightSides: Numbers<T>, n: number, width: number): Numbers<T> | null;
 }
 
 /** An arithmetic whose elements are made from the values of expressions. */

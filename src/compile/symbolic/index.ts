@@ -1,0 +1,3 @@
+/** The symbolic view of a drawing. */
+
+export { deriveSymbolic, type SymbolicModel } from './derive-symbolic.ts';
