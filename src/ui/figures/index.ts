@@ -6,7 +6,7 @@
 import './figures.css';
 
 export type { Figure } from './figure.ts';
-export { figureOf, rightDigits, USUAL_DIGITS } from './figure.ts';
+export { figureOf, rightDigits } from './figure.ts';
 export type { TextRun } from './format.ts';
 export {
   figureText,

@@ -31,8 +31,3 @@ export function markupText(node: Markup | string): string {
   const open = `<${node.tag}${attributes.join('')}`;
   return node.children.length === 0 ? `${open}/>` : `${open}>${node.children.map(markupText).join('')}</${node.tag}>`;
 }
-
-/** What a reader of the tree sees: its text without the elements. */
-export function plainContent(node: Markup | string): string {
-  return typeof node === 'string' ? node : node.children.map(plainContent).join('');
-}

@@ -24,7 +24,7 @@ export interface Term {
 }
 
 /** Digits that a numerator or denominator may have before its fraction is harder to read than its decimal. */
-export const LONGEST_WRITTEN_FRACTION = 9;
+const LONGEST_WRITTEN_FRACTION = 9;
 
 /** Whether `value` fits on the screen as a fraction; one that does not is shown as a decimal, rounded. */
 export function isWritableFraction({ n, d }: Rational): boolean {

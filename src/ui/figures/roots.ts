@@ -22,8 +22,8 @@ export interface RootRow extends Root {
 }
 
 /** Significant digits of a real root, and of either part of a complex one, which stand side by side. */
-export const REAL_DIGITS = 6;
-export const PAIR_DIGITS = 4;
+const REAL_DIGITS = 6;
+const PAIR_DIGITS = 4;
 
 /** Digits of damping ratio, natural frequency and time constant. */
 const MOTION_DIGITS = 3;

@@ -39,10 +39,13 @@ const REACH = 8;
  */
 const AT_ORIGIN = 2 ** -40;
 
+/** 1/s; for anything smaller the pixels for 1/s would leave the range of doubles (2¹⁰²⁴), with room for the ticks. */
+const LEAST_REACH = 2 ** -960;
+
 /** Distance from the origin that the frame has to take in, 1/s; 1 where every root is at the origin. */
 export function mapReach(poles: readonly Root[], zeros: readonly Root[], view: MapView): number {
   const largest = Math.max(0, ...[...poles, ...zeros].map(distance));
-  if (largest === 0) return 1;
+  if (largest < LEAST_REACH) return 1;
   const away = [...poles, ...zeros].filter(root => distance(root) > AT_ORIGIN * largest);
   if (view === 'all') return largest;
   const candidates = poles.filter(root => distance(root) > AT_ORIGIN * largest);

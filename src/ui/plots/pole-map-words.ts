@@ -1,6 +1,7 @@
 /** What a pole map says in words: its summary, and the read-out of a root or of a point of the plane. */
 
-import { formatNumber, motionOf, type Root, singleRootText } from '../figures/index.ts';
+import { dampingRatio, naturalFrequency } from '../../analysis/index.ts';
+import { formatPadded, MINUS, motionOf, type Root, singleRootText } from '../figures/index.ts';
 import type { PlacedRoot } from './pole-map-marks.ts';
 
 /**
@@ -42,10 +43,11 @@ function motionWords(root: Root): readonly string[] {
 /** Digits of a point under the pointer: no more than the screen resolves. */
 const POINT_DIGITS = 3;
 
-/** `−1.2 + 3.4j · ζ 0.33 · ω₀ 3.61 rad/s`, of a point in the plane. */
+/** `−1.20 + 3.40j · ζ 0.333 · ω₀ 3.61 rad/s`, of a point in the plane; always as many digits, so that nothing jumps. */
 export function pointWords(re: number, im: number): string {
-  const place = singleRootText({ re, im, multiplicity: 1 }, POINT_DIGITS);
-  const size = Math.hypot(re, im);
-  if (size === 0) return place;
-  return `${place} · ζ ${formatNumber(-re / size + 0, POINT_DIGITS)} · ω₀ ${formatNumber(size, POINT_DIGITS)} rad/s`;
+  const padded = (value: number) => formatPadded(value, POINT_DIGITS);
+  const place = `${padded(re)} ${im < 0 ? MINUS : '+'} ${padded(Math.abs(im))}j`;
+  const damping = dampingRatio({ re, im });
+  if (damping === null) return place;
+  return `${place} · ζ ${padded(damping)} · ω₀ ${padded(naturalFrequency({ re, im }))} rad/s`;
 }

@@ -55,7 +55,7 @@ export function TabStrip<Id extends string>({ name, label, tabs, selected, onSel
 interface TabPanelProps {
   readonly name: string;
   readonly id: string;
-  readonly children: ReactNode;
+  readonly children?: ReactNode;
 }
 
 /** What the selected tab of the strip with the same name shows. */

@@ -30,7 +30,7 @@ export function matrixLabel({ states, inputs, outputs }: StateSpace): string {
 }
 
 /** `1 state`, `no states`, `4 states`. */
-export function count(number: number, thing: string): string {
+function count(number: number, thing: string): string {
   if (number === 1) return `1 ${thing}`;
   return `${number === 0 ? 'no' : number} ${thing}s`;
 }
