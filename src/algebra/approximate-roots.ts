@@ -17,7 +17,7 @@ export interface ApproximateRoot extends ScaledPoint {
 /** Rounds over all roots after which doubles give up and the refinement takes over with what there is. */
 const MOST_ROUNDS = 60;
 
-/** A step that is smaller than this, relative to the root, leaves an error far below it (the iteration is of third order). */
+/** A Newton correction below this share of the root's modulus leaves an error far below it (the iteration is of third order). */
 const SMALL_STEP = 2 ** -26;
 
 /** Unit roundoff of doubles. */
@@ -47,7 +47,7 @@ export function approximateRoots(f: IntegerPolynomial, starts: readonly ScaledPo
     moving = moving.filter(i => {
       const result = advance(i, points, scaled);
       results[i] = result;
-      return result.error > SMALL_STEP * Math.hypot(result.re, result.im) && !result.isHidden;
+      return !result.isDone;
     });
   }
   return results.map(result => result!);
@@ -72,12 +72,12 @@ function scaledCoefficients(f: IntegerPolynomial): (exponent: number) => Float64
   };
 }
 
-/** One step of root i, in place; what is known about it afterwards, and whether rounding hides anything finer. */
+/** One step of root i, in place; what is known about it afterwards, and whether doubles lead any further. */
 function advance(
   i: number,
   points: Points,
   scaled: (exponent: number) => Float64Array,
-): ApproximateRoot & { readonly isHidden: boolean } {
+): ApproximateRoot & { readonly isDone: boolean } {
   normalise(i, points);
   const x = points.re[i]!;
   const y = points.im[i]!;
@@ -106,13 +106,15 @@ function advance(
   const square = er * er + ei * ei;
   const stepRe = square === 0 ? modulus / 16 : (pr * er + pi * ei) / square;
   const stepIm = square === 0 ? modulus / 16 : (pi * er - pr * ei) / square;
-  const isFinite = Number.isFinite(stepRe) && Number.isFinite(stepIm);
-  if (isFinite) {
+  if (Number.isFinite(stepRe) && Number.isFinite(stepIm)) {
     points.re[i] = x - stepRe;
     points.im[i] = y - stepIm;
   }
-  const error = isFinite ? Math.hypot(stepRe, stepIm) + noise / slope : Infinity;
-  return { re: points.re[i]!, im: points.im[i]!, exponent, error, slope, isHidden: value <= noise };
+  // Not the step: between two points that repel each other far from any root it is small as well.
+  const newton = value / slope;
+  const isSettled = newton <= SMALL_STEP * modulus;
+  const error = (isSettled ? newton * SMALL_STEP : newton) + noise / slope + ROUNDOFF;
+  return { re: points.re[i]!, im: points.im[i]!, exponent, error, slope, isDone: isSettled || value <= noise };
 }
 
 /** Moves root i to the exponent at which its modulus is in (½, 1]; a root at zero is left alone. */

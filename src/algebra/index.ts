@@ -42,3 +42,4 @@ export { entryAt, fromRows, toRows } from './sparse-matrix.ts';
 export type { SquareFreeFactor } from './square-free.ts';
 export { squareFreeFactors } from './square-free.ts';
 export { principalSubmatrix, strongComponents } from './strong-components.ts';
+export { transferNumerators } from './transfer-numerators.ts';

@@ -5,7 +5,7 @@
  */
 
 import type { ApproximateRoot } from './approximate-roots.ts';
-import { normalised, type Site, toFixed, views, withBits } from './root-sites.ts';
+import { normalised, type Site, SMALL_DISC, toFixed, views, withBits } from './root-sites.ts';
 import { discRadius, type Newton, newtonAt, type Subject, stepped } from './root-steps.ts';
 
 /** Relative accuracy that the first evaluation in fixed point aims at, beyond what conditioning costs. */
@@ -73,8 +73,9 @@ function roundedBits(bits: number): number {
 }
 
 /**
- * Steps the sites until all discs are apart and near enough to their roots for the step that goes with the proof to be bounded,
- * then takes it. A site of which that is true stays where it is meanwhile. Null where that does not come about in `rounds`.
+ * Steps the sites until every disc is small against the distance to the nearest other point, so that no two meet, then takes
+ * the step that goes with the proof. A site whose own disc is small already stays where it is meanwhile. Null where that does
+ * not come about within `rounds`.
  */
 function separated(subject: Subject, start: readonly Site[], rounds: number): Site[] | null {
   const sites = start.map(normalised);
@@ -88,10 +89,10 @@ function separated(subject: Subject, start: readonly Site[], rounds: number): Si
     });
     const seen = views(sites);
     const next = sites.map((site, i) => stepped(site, newtons[i]!, seen[i]!));
-    const isSettled = next.map((site, i) => seen[i]!.isApart && Number.isFinite(site.radius));
-    if (isSettled.every(Boolean)) return sites.map((site, i) => smaller(site, next[i]!));
+    const isWide = sites.map(({ radius }, i) => !(radius < Math.min(seen[i]!.nearest * CLEARANCE, SMALL_DISC)));
+    if (!isWide.includes(true)) return sites.map((site, i) => smaller(site, next[i]!));
     next.forEach((site, i) => {
-      if (isSettled[i]) return;
+      if (!isWide[i]) return;
       sites[i] = movedOn(site, newtons[i]!.isHidden);
       newtons[i] = null;
     });
@@ -99,6 +100,12 @@ function separated(subject: Subject, start: readonly Site[], rounds: number): Si
   }
   return null;
 }
+
+/**
+ * Largest share of the distance to the nearest point that a disc may have. Then N |S| < 1/8, and the errors of S through the
+ * other discs add N/7 of the same at most, which keeps the bound on the step below the 1/4 that it needs.
+ */
+const CLEARANCE = 1 / 8;
 
 /** The site with the smaller disc: before a step, or after it and brought to scale. */
 export function smaller(before: Site, after: Site): Site {

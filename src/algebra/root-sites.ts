@@ -69,17 +69,18 @@ export interface View {
   /** Bound on the distance from that sum to the same sum over the true roots; Infinity where a disc holds the point. */
   readonly error: number;
   /**
-   * Whether the site's disc meets no other disc, conjugates of pairs included. A single site whose disc meets the real axis has
-   * to stay clear of the conjugates of all others as well: then its root is real, since the conjugate root can be no other.
+   * Lower bound on the distance to the nearest other point, the site's own conjugate included. For a single site whose disc
+   * meets the real axis the conjugates of all others count as well: where its disc is far from them, the conjugate of its root
+   * can be no other root, and so the root is real.
    */
-  readonly isApart: boolean;
+  readonly nearest: number;
 }
 
 /** Exponents further apart than this make one of two roots nothing beside the other. */
 const FAR = 60;
 
 /** Discs below this, the scale of their own site being 1, cannot reach from one scale to a far one. */
-const SMALL_DISC = 0.125;
+export const SMALL_DISC = 0.125;
 
 /** Points nearer than this (the scale being 1) are subtracted exactly instead of in doubles. */
 const NEAR = 2 ** -20;
@@ -97,7 +98,7 @@ function viewFrom(i: number, sites: readonly Site[], xs: Float64Array, ys: Float
   // Half a unit in the last place for each operation on a term, and for each addition of a term.
   const unit = 2 ** -53 * (8 + 4 * sites.length);
   let [re, im, error] = [0, 0, 0];
-  let isApart = site.radius < SMALL_DISC;
+  let nearest = Number.POSITIVE_INFINITY;
   // Twice each other site: as it stands, and mirrored where its conjugate is a root too or must be kept clear of.
   for (let k = 0; k < 2 * sites.length; k++) {
     const j = k >> 1;
@@ -107,9 +108,8 @@ function viewFrom(i: number, sites: readonly Site[], xs: Float64Array, ys: Float
     if (!isRoot && !(isMirrored && couldBeReal && j !== i)) continue;
     const shift = other.exponent - site.exponent;
     if (shift > FAR) {
-      // More than 2⁵⁶ away, since its disc is small.
-      if (other.radius >= SMALL_DISC) isApart = false;
-      error += 2 ** -50;
+      // More than 2⁵⁶ away where its disc is small.
+      error += other.radius < SMALL_DISC ? 2 ** -50 : Number.POSITIVE_INFINITY;
       continue;
     }
     const factor = shift < -FAR ? 0 : shift === 0 ? 1 : 2 ** shift;
@@ -123,15 +123,16 @@ function viewFrom(i: number, sites: readonly Site[], xs: Float64Array, ys: Float
       roundoff = unit * distance;
     }
     const reach = factor > 0 ? other.radius * factor : other.radius < SMALL_DISC ? 0 : Number.POSITIVE_INFINITY;
-    const gap = (distance - roundoff) * (1 - 2 ** -40) - reach;
-    if (gap <= site.radius) isApart = false;
+    const clear = (distance - roundoff) * (1 - 2 ** -40);
+    nearest = Math.min(nearest, clear);
     if (!isRoot) continue;
-    error = gap > 0 ? error + (reach + roundoff) / (distance * gap) : Number.POSITIVE_INFINITY;
+    const gap = clear - reach;
+    error = gap > 0 ? error + (reach + roundoff) / distance / gap : Number.POSITIVE_INFINITY;
     if (distance === 0) continue;
     re += dx / distance / distance;
     im -= dy / distance / distance;
   }
-  return { re, im, error: error * (1 + 2 ** -20), isApart };
+  return { re, im, error: error * (1 + 2 ** -20), nearest };
 }
 
 /** w − wⱼ (or its distance to the conjugate) in units of the first site's 2^exponent, right to 2⁻⁵². */

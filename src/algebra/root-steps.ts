@@ -116,7 +116,7 @@ function radiusAfter(newton: Newton, view: View, more: number, bits: number): nu
   const sum = Math.hypot(view.re, view.im) + view.error;
   if (!(length * sum < 0.25)) return Number.POSITIVE_INFINITY;
   const shrink = (1 - length * sum) ** 2;
-  const left = (newton.error + length * length * view.error) / shrink;
+  const left = (newton.error + length * (length * view.error)) / shrink; // length² may underflow
   const roundoff = more * 2 ** -44 + Math.max(4 * 2 ** -bits, LEAST_RADIUS);
   return Math.max((left + roundoff) * UP, LEAST_RADIUS);
 }

@@ -167,6 +167,17 @@ describe('hard neighbourhoods', () => {
     expect(listed(p).map(([re]) => re)).toEqual([-1e-200, -1e-9, -1, -1e9, -1e200]);
   });
 
+  test('a pair 1e160 times nearer to the axis than to zero keeps its imaginary part to the last bit', () => {
+    // (s − 9e80)² + (6.4e-78)²: squares of such distances underflow in doubles.
+    const pair = poly(`1 -18e80 ${81n * 10n ** 160n}`);
+    const p = [...pair.slice(0, 2), addRationals(pair[2] ?? ZERO, parseRational('40.96e-156') ?? ZERO)];
+    expect(listed(p)).toEqual([
+      [9e80, 6.4e-78, 1],
+      [9e80, -6.4e-78, 1],
+    ]);
+    expect(listed(multiplyPolynomials(p, poly('1 3'))).slice(0, 2)).toEqual(listed(p));
+  });
+
   test('what is beyond the doubles becomes infinite or the least double, never zero', () => {
     expect(listed(multiplyPolynomials(poly('1 1e-330'), poly('1 -1e330')))).toEqual([
       [Number.POSITIVE_INFINITY, 0, 1],
