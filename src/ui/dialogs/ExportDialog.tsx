@@ -56,7 +56,7 @@ interface FormatTableProps {
 function FormatTable({ scope, notation, isDisabled }: FormatTableProps) {
   return (
     <table
-      className="dialog-table"
+      className="dialog-table dialog-formats"
       aria-label={scope === 'model' ? 'Formats of the matrices' : 'Formats of the drawing'}
     >
       <tbody>
@@ -95,7 +95,7 @@ function FormatTable({ scope, notation, isDisabled }: FormatTableProps) {
 
 function PictureTable() {
   return (
-    <table className="dialog-table" aria-label="Pictures of the drawing">
+    <table className="dialog-table dialog-formats" aria-label="Pictures of the drawing">
       <tbody>
         <tr>
           <th scope="row">Picture, lines (SVG)</th>
