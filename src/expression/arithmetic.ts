@@ -20,7 +20,7 @@ import { fail, ok, problem, type Result } from '../problem/index.ts';
 import type { BinaryNode, BinaryOperator, CallNode, Value } from './expression.ts';
 import { applyFunction } from './functions.ts';
 import { print } from './print.ts';
-import { quote } from './wording.ts';
+import { onOneLine, quote } from './wording.ts';
 
 /** A fraction, exact, or a double that counts as irrational. */
 export type Quantity = Rational | number;
@@ -116,7 +116,7 @@ function tooLong(node: BinaryNode) {
 
 function divisionByZero(node: BinaryNode) {
   const by = node.operator === '/' ? node.right : node.left;
-  const what = by.kind === 'number' ? '' : `: ${print(by).slice(0, 60)} is 0`;
+  const what = by.kind === 'number' ? '' : `: ${onOneLine(print(by))} is 0`;
   return problem('division-by-zero', `${quote(print(node))} divides by zero${what}. Change a value in it.`);
 }
 

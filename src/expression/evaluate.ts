@@ -9,7 +9,7 @@ import { hasLaplaceVariable, namesIn } from './names.ts';
 import { parseExpression } from './parse.ts';
 import { print } from './print.ts';
 import { nearestName } from './spelling.ts';
-import { quote } from './wording.ts';
+import { quote, word } from './wording.ts';
 
 /** The values of the parameters by name. */
 export type Scope = ReadonlyMap<string, Value>;
@@ -67,10 +67,11 @@ export function unknownNames(expression: Expression, scope: { has(name: string):
 
 function unknownParameter(expression: Expression, name: string, known: Iterable<string>): Problem {
   const nearest = nearestName(name, known);
-  const advice = nearest === null ? `Add ${name} to the parameters.` : `Did you mean ${nearest}?`;
+  const shown = word(name);
+  const advice = nearest === null ? `Add ${shown} to the parameters.` : `Did you mean ${word(nearest)}?`;
   const text = print(expression);
   const message =
-    text === name ? `${name} is not a parameter.` : `${quote(text)} uses ${name}, which is not a parameter.`;
+    text === name ? `${shown} is not a parameter.` : `${quote(text)} uses ${shown}, which is not a parameter.`;
   return problem('unknown-parameter', `${message} ${advice}`);
 }
 

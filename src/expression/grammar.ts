@@ -8,7 +8,7 @@ import { fail, ok, type Problem, type Result } from '../problem/index.ts';
 import { argumentsOf, FUNCTION_NAMES, type FunctionName, isFunctionName } from './functions.ts';
 import { nearestName } from './spelling.ts';
 import type { Token } from './tokens.ts';
-import { isQuotedWhole, notAnExpression } from './wording.ts';
+import { isQuotedWhole, notAnExpression, word } from './wording.ts';
 
 /** Deepest nesting (format.md): open parentheses, and the minus signs and powers waiting for what stands to their right. */
 export const DEEPEST_NESTING = 250;
@@ -97,7 +97,9 @@ function misspeltFunction(reading: Reading, name: string): Problem | null {
     return notAnExpression(reading.text, 'Write ln for the natural logarithm, log10 for the one to base 10.');
   }
   const meant = nearestName(name, FUNCTION_NAMES);
-  return meant === null ? null : notAnExpression(reading.text, `There is no function ${name}. Did you mean ${meant}?`);
+  return meant === null
+    ? null
+    : notAnExpression(reading.text, `There is no function ${word(name)}. Did you mean ${meant}?`);
 }
 
 /** The function whose name token i is; where an operand is awaited, only a function's name can stand in front of a (. */
@@ -131,7 +133,7 @@ function missingOperand(reading: Reading, i: number, token: Token): Problem {
   if (before === null) return notAnExpression(reading.text, `Something is missing before ${token.text}.`);
   if (token.text === '*' && before.text === '*') return notAnExpression(reading.text, 'Write ^ for a power.');
   if (token.text === '+') return notAnExpression(reading.text, `Leave out the + after ${before.text}.`);
-  return notAnExpression(reading.text, `Something is missing between ${before.text} and ${token.text}.`);
+  return notAnExpression(reading.text, `Something is missing between ${word(before.text)} and ${word(token.text)}.`);
 }
 
 function operatorProblem(reading: Reading, i: number): Problem | null {
@@ -168,8 +170,8 @@ function settle(reading: Reading): void {
 }
 
 function twoNumbers(text: string, before: Token, token: Token): Problem {
-  if (before.end === token.start) return notAnExpression(text, `${before.text}${token.text} is not a number.`);
-  return notAnExpression(text, `Write an operator between ${before.text} and ${token.text}.`);
+  if (before.end === token.start) return notAnExpression(text, `${word(before.text + token.text)} is not a number.`);
+  return notAnExpression(text, `Write an operator between ${word(before.text)} and ${word(token.text)}.`);
 }
 
 /** Notes that a `*` is missing and reads on as if it were there. */
@@ -190,7 +192,7 @@ function commaProblem(reading: Reading, i: number, before: Token): Problem | nul
   }
   const after = tokenAt(reading, i + 1);
   if (before.kind === 'number' && after?.kind === 'number') {
-    return notAnExpression(reading.text, `Write a decimal point: ${before.text}.${after.text}.`);
+    return notAnExpression(reading.text, `Write a decimal point: ${word(`${before.text}.${after.text}`)}.`);
   }
   return notAnExpression(reading.text, 'A comma stands only between the arguments of a function.');
 }
@@ -211,7 +213,7 @@ function closeLevel(reading: Reading): Problem | null {
 function endProblem(reading: Reading): Problem | null {
   const last = reading.tokens.at(-1);
   if (reading.expectsOperand && last !== undefined) {
-    return notAnExpression(reading.text, `Something is missing after ${last.text}.`);
+    return notAnExpression(reading.text, `Something is missing after ${word(last.text)}.`);
   }
   const open = reading.levels.length - 1;
   if (open === 0) return null;
@@ -227,9 +229,12 @@ function impliedProductProblem(reading: Reading, isBrokenToo: boolean): Problem 
   const [before, after] = [tokens[first - 1], tokens[first]];
   if (before === undefined || after === undefined) return null;
   if (before.kind === 'name' && after.kind === '(') {
-    return notAnExpression(text, `There is no function ${before.text}; for a product write ${before.text}*(.`);
+    return notAnExpression(
+      text,
+      `There is no function ${word(before.text)}; for a product write ${word(before.text)}*(.`,
+    );
   }
-  return notAnExpression(text, `Write ${before.text}*${after.text} for ${text.slice(before.start, after.end)}.`);
+  return notAnExpression(text, `Write ${word(before.text)}*${word(after.text)}.`);
 }
 
 function withProducts({ text, tokens, impliedProducts }: Reading): string {

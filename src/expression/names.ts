@@ -6,11 +6,15 @@ import { CONSTANTS, isFunctionName, LAPLACE_VARIABLE } from './functions.ts';
 
 const NAME = /^[A-Za-z][A-Za-z0-9_]*$/;
 
+/** Characters of a parameter's name. */
+const LONGEST_NAME = 200;
+
 /** Why a text cannot be a parameter's name, as a sentence; null where it can. */
 export function parameterNameFault(name: string): string | null {
   if (!NAME.test(name)) {
     return 'A parameter’s name begins with a letter and has letters, digits and underscores only.';
   }
+  if (name.length > LONGEST_NAME) return `A parameter’s name has at most ${LONGEST_NAME} characters.`;
   if (name === LAPLACE_VARIABLE) return 's is the Laplace variable. Choose another name.';
   if (CONSTANTS.has(name)) return `${name} is a constant. Choose another name.`;
   return isFunctionName(name) ? `${name} is a function. Choose another name.` : null;

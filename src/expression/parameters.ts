@@ -8,6 +8,7 @@ import { evaluateExpression, type Scope, unknownNames } from './evaluate.ts';
 import type { Expression, Value } from './expression.ts';
 import { namesIn } from './names.ts';
 import { parseExpression } from './parse.ts';
+import { word } from './wording.ts';
 
 /** What is needed of a parameter. */
 export interface ParameterText {
@@ -53,15 +54,17 @@ export function evaluateParameters(parameters: readonly ParameterText[]): Result
 
 /** Puts the parameter's name in front. */
 function concerning(name: string, problems: readonly Problem[]): Problem[] {
-  return problems.map(({ code, message }) => problem(code, `Parameter ${name}: ${message}`, { parameter: name }));
+  return problems.map(({ code, message }) => problem(code, `Parameter ${word(name)}: ${message}`, { parameter: name }));
 }
 
 function cyclic(name: string, cycle: readonly string[]): Problem {
-  const way = [...(cycle.length > LONGEST_WAY ? [...cycle.slice(0, LONGEST_WAY - 1), '…'] : cycle), name].join(' → ');
+  const way = [...(cycle.length > LONGEST_WAY ? [...cycle.slice(0, LONGEST_WAY - 1), '…'] : cycle), name]
+    .map(word)
+    .join(' → ');
   const message =
     cycle.length === 1
-      ? `Parameter ${name}: its value uses ${name} itself. Give it a value of its own.`
-      : `Parameter ${name}: its value leads back to itself, ${way}. Give one of them a value of its own.`;
+      ? `Parameter ${word(name)}: its value uses ${word(name)} itself. Give it a value of its own.`
+      : `Parameter ${word(name)}: its value leads back to itself, ${way}. Give one of them a value of its own.`;
   return problem('cyclic-parameters', message, { parameter: name });
 }
 

@@ -8,6 +8,7 @@ import type { Expression } from './expression.ts';
 import { checkGrammar } from './grammar.ts';
 import { tokens } from './tokens.ts';
 import { buildTree } from './tree-builder.ts';
+import { word } from './wording.ts';
 
 /** Texts remembered with their tree: the quantities of a large drawing, parsed anew at every edit otherwise. */
 const MOST_REMEMBERED = 4096;
@@ -36,8 +37,6 @@ function parseAnew(text: string): Result<Expression> {
   if (!checked.ok) return checked;
   const tree = buildTree(checked.value);
   if (tree.kind !== 'unreadable') return ok(tree);
-  const message = `${shorten(tree.text)} is beyond what is kept exactly: exponents go from -400 to 400.`;
+  const message = `${word(tree.text)} is beyond what is kept exactly: exponents go from -400 to 400.`;
   return fail(problem('bad-expression', message));
 }
-
-const shorten = (literal: string) => (literal.length > 24 ? `${literal.slice(0, 23)}…` : literal);

@@ -24,6 +24,14 @@ export function isQuotedWhole(text: string): boolean {
   return text.length <= LONGEST_QUOTE;
 }
 
+/** Longest name or number that advice repeats. */
+const LONGEST_WORD = 24;
+
+/** A name or number of the text as advice repeats it, cut off where it is long. */
+export function word(text: string): string {
+  return text.length <= LONGEST_WORD ? text : `${text.slice(0, LONGEST_WORD - 1)}…`;
+}
+
 /** `"2 k" is not an expression. Write 2*k.` */
 export function notAnExpression(text: string, advice: string): Problem {
   return problem('bad-expression', `${quote(text)} is not an expression. ${advice}`);

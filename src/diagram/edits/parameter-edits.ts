@@ -1,6 +1,6 @@
 /** Edits of parameters and of the title block. */
 
-import { parameterNameFault, renameIn } from '../../expression/index.ts';
+import { onOneLine, parameterNameFault, renameIn } from '../../expression/index.ts';
 import { fail, ok, type Problem, problem, type Result } from '../../problem/index.ts';
 import { MOST_PARAMETERS } from '../limits.ts';
 import { keepSame, mapQuantities } from '../quantities.ts';
@@ -16,14 +16,16 @@ import type {
 
 function nameFault({ parameters }: Diagram, name: string): Problem | null {
   const fault = parameterNameFault(name);
-  if (fault !== null) return problem('bad-value', `Parameter ${name}: ${fault}`, { parameter: name });
+  if (fault !== null) return problem('bad-value', `Parameter ${onOneLine(name)}: ${fault}`, { parameter: name });
   if (!parameters.some(parameter => parameter.name === name)) return null;
-  const message = `Parameter ${name}: there is one of this name already. Choose another name.`;
+  const message = `Parameter ${onOneLine(name)}: there is one of this name already. Choose another name.`;
   return problem('duplicate-name', message, { parameter: name });
 }
 
 function goneParameter(name: string): Problem {
-  return problem('unknown-parameter', `There is no parameter ${name}. Choose one that is there.`, { parameter: name });
+  return problem('unknown-parameter', `There is no parameter ${onOneLine(name)}. Choose one that is there.`, {
+    parameter: name,
+  });
 }
 
 /** Adds a parameter whose name is legal and new. */

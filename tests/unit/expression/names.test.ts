@@ -25,6 +25,11 @@ describe('a parameter’s name', () => {
     }
   });
 
+  test('is at most 200 characters long', () => {
+    expect(parameterNameFault('k'.repeat(200))).toBeNull();
+    expect(parameterNameFault('k'.repeat(201))).toBe('A parameter’s name has at most 200 characters.');
+  });
+
   test('is not one that means something else', () => {
     expect(parameterNameFault('s')).toBe('s is the Laplace variable. Choose another name.');
     expect(parameterNameFault('pi')).toBe('pi is a constant. Choose another name.');

@@ -104,7 +104,7 @@ describe('text that is no expression is refused and told what to write', () => {
     ['2 sin(x)', 'Write 2*sin(x).'],
     ['0x10', 'Write 0*x10.'],
     ['2e', 'Write 2*e.'],
-    ['2 k + )', 'Write 2*k for 2 k.'],
+    ['2 k + )', 'Write 2*k.'],
     ['f(2, 3)', 'There is no function f; for a product write f*(.'],
     ['1.2.3', '1.2.3 is not a number.'],
     ['1 2', 'Write an operator between 1 and 2.'],
@@ -163,8 +163,22 @@ describe('text that is no expression is refused and told what to write', () => {
     const text = `${'a + '.repeat(20)}2 k`;
     const quoted = 'a + '.repeat(20).slice(0, 59);
     expect(problemsOf(parseExpression(text))).toEqual([
-      `bad-expression: "${quoted}…" is not an expression. Write 2*k for 2 k.`,
+      `bad-expression: "${quoted}…" is not an expression. Write 2*k.`,
     ]);
+  });
+
+  test('long names are repeated in part', () => {
+    const name = 'n'.repeat(500);
+    expect(problemsOf(parseExpression(`2 ${name}`))).toEqual([
+      `bad-expression: "2 ${'n'.repeat(57)}…" is not an expression. Write 2*${'n'.repeat(23)}….`,
+    ]);
+  });
+
+  test('line breaks between two factors do not reach the message', () => {
+    expect(problemsOf(parseExpression('a\nmin'))).toEqual([
+      'bad-expression: "a min" is not an expression. Write a*min.',
+    ]);
+    expect(problemsOf(parseExpression('a\n b'))).toEqual(['bad-expression: "a  b" is not an expression. Write a*b.']);
   });
 
   test('control characters do not reach the message', () => {
