@@ -3,6 +3,8 @@
 import '@fontsource/b612/latin-400.css';
 import '@fontsource/b612/latin-700.css';
 import '@fontsource/b612-mono/latin-400.css';
+import '@fontsource/stix-two-text/greek-400.css';
+import '@fontsource/stix-two-text/greek-400-italic.css';
 import '@fontsource/stix-two-text/latin-400.css';
 import '@fontsource/stix-two-text/latin-400-italic.css';
 import './theme/tokens.css';

@@ -59,7 +59,7 @@ export function SystemMatrix(props: SystemMatrixProps) {
   const inView = rows.slice(window.rows.first, window.rows.end);
   const grid = onPoint === undefined ? {} : { role: 'grid', tabIndex: 0 };
   const active = pointed === null ? {} : { 'aria-activedescendant': cellId(pointed.row, pointed.column) };
-  const region = onPoint === undefined ? { role: 'region', tabIndex: 0, 'aria-label': 'System matrix' } : {};
+  const region = onPoint === undefined ? { role: 'region', tabIndex: 0, 'aria-label': 'Entries of the system matrix' } : {};
   return (
     <div className="system-matrix">
       <div className="system-matrix-scroller" ref={scroller} {...region}>

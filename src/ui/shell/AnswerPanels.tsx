@@ -74,14 +74,21 @@ function PolesPanel() {
     );
   }
   const { poles: found, zeros } = answer;
+  const knownZeros = zeros.route === 'not-computed' ? null : zeros.zeros;
   return (
     <Panel title="Poles and zeros">
       {found.route === 'not-converged' ? (
         <PanelEmpty>The eigenvalue iteration did not converge for this model.</PanelEmpty>
       ) : (
         <div className="results-poles">
-          <PoleMap poles={found.poles} zeros={zeros.zeros} onSave={savePlot} tableId="pole-table" />
-          <PoleTable id="pole-table" poles={found.poles} zeros={zeros.zeros} route={found.route} />
+          <PoleMap poles={found.poles} zeros={knownZeros} onSave={savePlot} tableId="pole-table" />
+          <PoleTable
+            id="pole-table"
+            poles={found.poles}
+            zeros={knownZeros}
+            route={found.route}
+            standsIn={found.route === 'certified' && found.standsIn}
+          />
         </div>
       )}
       {zeros.route === 'not-computed' && <PanelEmpty>{zeros.reason}</PanelEmpty>}
