@@ -1,3 +1,8 @@
+/**
+ * A transfer function on the screen. What it says, in every notation, is made in transfer-function-view.ts; here only the
+ * layout is chosen by the width there is.
+ */
+
 import { useMemo } from 'react';
 import { CopyFormula } from './CopyFormula.tsx';
 import { MarkupView } from './MarkupView.tsx';

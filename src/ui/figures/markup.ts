@@ -3,6 +3,7 @@
  * and saved files take it as text. Attribute names are those of the standards (MathML Core, SVG 2).
  */
 
+/** One element of a drawing or a formula. */
 export interface Markup {
   readonly tag: string;
   readonly attributes: Readonly<Record<string, string | number>>;

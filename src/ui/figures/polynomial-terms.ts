@@ -16,6 +16,7 @@ export type Magnitude =
   | { readonly kind: 'figure'; readonly figure: Figure }
   | { readonly kind: 'fraction'; readonly numerator: string; readonly denominator: string };
 
+/** One term: sign, magnitude, power of the variable. */
 export interface Term {
   readonly isNegative: boolean;
   /** `one` only beside a power of the variable. */

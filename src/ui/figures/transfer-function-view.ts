@@ -8,6 +8,7 @@ import { quotientLatex, quotientWords } from './polynomial-text.ts';
 import { polynomialEms } from './polynomial-width.ts';
 import type { Real } from './rounded-digits.ts';
 
+/** A transfer function ready to be shown or copied. */
 export interface TransferFunctionView {
   readonly numerator: readonly Term[];
   readonly denominator: readonly Term[];

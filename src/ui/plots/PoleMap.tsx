@@ -1,3 +1,8 @@
+/**
+ * The pole map on the screen: pole-map-frame.ts says what part of the plane is shown, pole-map-drawing.ts draws it,
+ * pole-map-pointer.ts says what is pointed at.
+ */
+
 import { type KeyboardEvent, type PointerEvent, useMemo, useState } from 'react';
 import { RaisedText, type Root, useContainerWidth } from '../figures/index.ts';
 import { plotFileName, svgFile } from './drawing.ts';

@@ -1,3 +1,8 @@
+/**
+ * The step response on the screen: step-drawing.ts makes the drawing, step-read-out.ts what follows the pointer, step-content.ts
+ * the words. Promises a summary, a read-out by key and a table to whoever cannot see the curve.
+ */
+
 import { type KeyboardEvent, type PointerEvent, useId, useMemo, useState } from 'react';
 import { MathName, RaisedText, useContainerWidth } from '../figures/index.ts';
 import { plotFileName, type Size, svgFile } from './drawing.ts';

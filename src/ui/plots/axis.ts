@@ -3,11 +3,13 @@
 import { scaleLinear } from 'd3-scale';
 import { MINUS, raised } from '../figures/index.ts';
 
+/** A value of the axis and what is written at it. */
 export interface Tick {
   readonly value: number;
   readonly text: string;
 }
 
+/** What stands along one side of a frame. */
 export interface Axis {
   /** Ascending, all inside the domain. */
   readonly ticks: readonly Tick[];

@@ -10,6 +10,7 @@ export interface Size {
   readonly height: number;
 }
 
+/** All of a plot but the inks of the page it stands on. */
 export interface Drawing extends Size {
   readonly title: string;
   /** What is to be seen, in a sentence or two. */
@@ -42,6 +43,7 @@ export function plotFileName(...words: readonly string[]): string {
   return `${stem}.svg`;
 }
 
+/** How a text is set; size in CSS pixels, TEXT_SIZE where absent. */
 export interface TextStyle {
   readonly anchor?: 'start' | 'middle' | 'end';
   readonly size?: number;

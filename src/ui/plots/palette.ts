@@ -3,6 +3,7 @@
  * sheet, so that it looks the same wherever it is opened.
  */
 
+/** Values of SVG paint and font-family attributes. */
 export interface Palette {
   readonly paper: string;
   readonly ink: string;

@@ -14,8 +14,10 @@ import type { Root } from '../figures/index.ts';
 import { type Axis, axisOver } from './axis.ts';
 import type { Size } from './drawing.ts';
 
+/** How much of the plane is wanted. */
 export type MapView = 'dominant' | 'all';
 
+/** Sides of the frame in CSS pixels from the upper left corner, and how the plane lies in it. */
 export interface MapFrame extends Size {
   readonly left: number;
   readonly right: number;

@@ -3,6 +3,7 @@
 import type { Root } from '../figures/index.ts';
 import { type MapFrame, toPixels } from './pole-map-frame.ts';
 
+/** A root and the pixels of its mark. */
 export interface PlacedRoot {
   readonly root: Root;
   readonly kind: 'pole' | 'zero';

@@ -11,6 +11,7 @@ export interface StepCurve extends Samples {
   readonly label: string;
 }
 
+/** One channel’s answer to a unit step. */
 export interface StepContent {
   /** Names as in the model. */
   readonly input: string;

@@ -4,6 +4,7 @@ import { type Axis, axisOver, steadyDomain } from './axis.ts';
 import type { Size } from './drawing.ts';
 import { peakOf, type StepContent } from './step-content.ts';
 
+/** Sides of the frame in CSS pixels from the upper left corner, and how times and values lie in it. */
 export interface StepFrame extends Size {
   readonly left: number;
   readonly right: number;

@@ -1,3 +1,5 @@
+/** One row of the system matrix. Made anew only when what it shows changes, not when another row is pointed at. */
+
 import { memo } from 'react';
 import { MathName, RaisedText, singleLetter } from '../figures/index.ts';
 import type { EntryAt, MatrixEntry } from './matrix-entries.ts';

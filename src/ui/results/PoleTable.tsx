@@ -1,3 +1,5 @@
+/** Poles and zeros as a table; what stands in it is worded in figures/roots.ts. */
+
 import { type Motion, motionOf, RaisedText, type Root, type RootRow, rootRows, rootText } from '../figures/index.ts';
 
 interface PoleTableProps {

@@ -1,3 +1,5 @@
+/** Problems and warnings as the earlier stages worded them; nothing is added but the way to what they name. */
+
 import type { Problem, Warning } from '../../problem/index.ts';
 
 type Finding = Problem | Warning;

@@ -1,3 +1,8 @@
+/**
+ * The system matrix as one table. Entries come one at a time from matrix-entries.ts, so that any notation fits; beyond
+ * SMALL_MODEL states only what is in view is in the page (matrix-window.ts).
+ */
+
 import { type MouseEvent, useCallback, useId, useMemo, useRef } from 'react';
 import type { StateSpace } from '../../compile/index.ts';
 import type { Notation } from '../figures/index.ts';
@@ -59,7 +64,8 @@ export function SystemMatrix(props: SystemMatrixProps) {
   const inView = rows.slice(window.rows.first, window.rows.end);
   const grid = onPoint === undefined ? {} : { role: 'grid', tabIndex: 0 };
   const active = pointed === null ? {} : { 'aria-activedescendant': cellId(pointed.row, pointed.column) };
-  const region = onPoint === undefined ? { role: 'region', tabIndex: 0, 'aria-label': 'Entries of the system matrix' } : {};
+  const region =
+    onPoint === undefined ? { role: 'region', tabIndex: 0, 'aria-label': 'Entries of the system matrix' } : {};
   return (
     <div className="system-matrix">
       <div className="system-matrix-scroller" ref={scroller} {...region}>

@@ -1,6 +1,9 @@
+/** Tabs and their panel by the tab pattern of the WAI-ARIA Authoring Practices; ids are made from the name of the strip. */
+
 import { type KeyboardEvent, type ReactNode, useRef } from 'react';
 import { tabAfter } from './tab-keys.ts';
 
+/** A tab by its id and what is written on it. */
 export interface Tab<Id extends string> {
   readonly id: Id;
   readonly label: string;

@@ -9,10 +9,13 @@
  */
 export const SMALL_MODEL = 24;
 
-/** CSS pixels of a row, a column and the row heads in a windowed table; results.css holds the same figures. */
+/** CSS pixels of a row; system-matrix.css holds the same figure. */
 export const ROW_HEIGHT = 26;
+/** CSS pixels of a column of a windowed table. */
 export const COLUMN_WIDTH = 92;
+/** CSS pixels of the row heads of a windowed table. */
 export const HEAD_WIDTH = 128;
+/** CSS pixels of the column heads; system-matrix.css holds the same figure. */
 export const HEAD_HEIGHT = 30;
 
 /** Rows or columns made beyond each edge of the view, so that a short scroll shows no gap before the next frame. */

@@ -11,6 +11,7 @@ import {
 } from './matrix-window.ts';
 import { useScrollView } from './useScrollView.ts';
 
+/** The rows and columns that are in the page; `isPartial` where these are not all. */
 export interface MatrixWindow {
   readonly isPartial: boolean;
   readonly rows: Span;
