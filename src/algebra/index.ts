@@ -7,6 +7,7 @@ export type { Field } from './field.ts';
 export { doubleField, rationalField } from './fields.ts';
 export type { EchelonBasis } from './invariant-subspace.ts';
 export { invariantSubspace, multiplyByMatrix } from './invariant-subspace.ts';
+export { invariantZeroPolynomial } from './invariant-zeros.ts';
 export type { Polynomial } from './polynomial.ts';
 export {
   addPolynomials,
@@ -23,6 +24,7 @@ export {
   subtractPolynomials,
 } from './polynomial.ts';
 export { greatestCommonDivisorOfPolynomials } from './polynomial-gcd.ts';
+export { rankOf } from './rank.ts';
 export type { Rational } from './rational.ts';
 export {
   addRationals,

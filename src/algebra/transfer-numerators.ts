@@ -14,7 +14,7 @@ import {
   productOfPolynomials,
 } from './polynomial.ts';
 import { inverseModulo, primeAt, reduce, residue } from './primes.ts';
-import { type Rational, rational, ZERO } from './rational.ts';
+import { ONE, type Rational, rational, ZERO } from './rational.ts';
 import { coefficientBits, multiplyModulo, rowsModulo, type ScaledRows, scaledRows } from './scaled-rows.ts';
 import { entryAt, type SparseMatrix } from './sparse-matrix.ts';
 import { principalSubmatrix } from './strong-components.ts';
@@ -62,7 +62,7 @@ interface Part {
 }
 
 function madePart(A: SparseMatrix<Rational>, states: readonly number[], characteristic: Polynomial): Part {
-  if (states.length === A.rows) return { A, characteristic, rest: [rational(1n)] };
+  if (states.length === A.rows) return { A, characteristic, rest: [ONE] };
   const inner = principalSubmatrix(A, states);
   const own = characteristicPolynomial(inner);
   return { A: inner, characteristic: own, rest: dividePolynomials(characteristic, own).quotient };

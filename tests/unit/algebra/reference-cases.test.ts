@@ -8,6 +8,7 @@ import {
   characteristicFactors,
   characteristicPolynomial,
   fromRows,
+  invariantZeroPolynomial,
   multiplyPolynomials,
   type Polynomial,
   parseRational,
@@ -17,11 +18,18 @@ import {
   transferNumerators,
 } from '../../../src/algebra/index.ts';
 
+interface ExpectedRoot {
+  readonly re: number;
+  readonly im: number;
+  readonly multiplicity: number;
+}
+
 interface Expectation {
   readonly inputs: readonly string[];
   readonly outputs: readonly string[];
   readonly exact?: Readonly<Record<'A' | 'B' | 'C' | 'D', readonly (readonly string[])[]>> | null;
-  readonly poles?: readonly { readonly re: number; readonly im: number; readonly multiplicity: number }[];
+  readonly poles?: readonly ExpectedRoot[];
+  readonly zeros?: readonly ExpectedRoot[];
   readonly transferFunctions?: readonly {
     readonly input: string;
     readonly output: string;
@@ -71,6 +79,7 @@ const models = cases.flatMap(({ name, expect: main, variants = [] }) =>
         inputs: expected.inputs ?? main.inputs,
         outputs: expected.outputs ?? main.outputs,
         poles: expected.poles,
+        zeros: expected.zeros,
         transferFunctions: expected.transferFunctions ?? [],
       },
     ];
@@ -95,6 +104,16 @@ describe('published and recomputed cases', () => {
       expect(roots.map(({ re, im, multiplicity }) => [re, im, multiplicity])).toEqual(expected);
     }
   });
+
+  test.each(models.filter(({ zeros }) => zeros !== undefined))(
+    '$name: every invariant zero is the nearest double',
+    model => {
+      const { A, B, C, D, zeros = [] } = model;
+      const found = certifiedRoots(invariantZeroPolynomial(A, B, C, D));
+      const expected = zeros.map(({ re, im, multiplicity }) => [re, im, multiplicity]);
+      expect(found.map(({ re, im, multiplicity }) => [re, im, multiplicity])).toEqual(expected);
+    },
+  );
 
   test.each(models.filter(({ transferFunctions }) => transferFunctions.length > 0))(
     '$name: every transfer function is the exact one, uncancelled',
