@@ -6,7 +6,7 @@
 import type { ChannelMotion } from './channel-motion.ts';
 import type { Root } from './poles.ts';
 import { lastTimeOutside, type SettledResponse, settledResponse } from './settling.ts';
-import { estimatedTurn } from './turning-points.ts';
+import { estimatedTurns } from './turning-points.ts';
 
 /**
  * `settled`: everything of the step response is in it. `oscillation`: cut while it still swings. `growth`: an unstable
@@ -77,10 +77,9 @@ function settledHorizon(settled: SettledResponse): Horizon {
 function timeOfTurn({ response, finalValue, largestDeviation }: SettledResponse, wanted: number): number | null {
   let turns = 0;
   for (let k = 0; k + 1 < response.t.length; k++) {
-    const turn = estimatedTurn(response, 0, k);
-    if (turn === null || Math.abs(turn - finalValue) < VISIBLE * largestDeviation) continue;
-    turns += 1;
-    if (turns === wanted) return response.t[k + 1]!;
+    const visible = estimatedTurns(response, 0, k).filter(y => Math.abs(y - finalValue) >= VISIBLE * largestDeviation);
+    turns += visible.length;
+    if (turns >= wanted) return response.t[k + 1]!;
   }
   return null;
 }

@@ -7,7 +7,7 @@ import type { ChannelMotion } from './channel-motion.ts';
 import { remembered } from './exact-model.ts';
 import { excitedSystem } from './excitation.ts';
 import { lifetime, type ResolvedResponse, resolvedResponse } from './resolved-response.ts';
-import { crossing, estimatedTurn, turnMargin } from './turning-points.ts';
+import { crossing, estimatedTurns, turnMargin } from './turning-points.ts';
 
 export interface SettledResponse {
   readonly response: ResolvedResponse;
@@ -79,6 +79,6 @@ export function lastTimeOutside({ response, finalValue }: SettledResponse, band:
 }
 
 function mayTurnOutside(response: ResolvedResponse, k: number, finalValue: number, band: number): boolean {
-  const turn = estimatedTurn(response, 0, k);
-  return turn !== null && Math.abs(turn - finalValue) + turnMargin(response, 0, k) > band;
+  const margin = turnMargin(response, 0, k);
+  return estimatedTurns(response, 0, k).some(turn => Math.abs(turn - finalValue) + margin > band);
 }

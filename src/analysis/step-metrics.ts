@@ -7,7 +7,7 @@ import type { StateSpace } from '../compile/index.ts';
 import { channelMotion } from './channel-motion.ts';
 import type { ResolvedResponse } from './resolved-response.ts';
 import { lastTimeOutside, type SettledResponse, settledResponse } from './settling.ts';
-import { type CurvePoint, crossing, estimatedTurn, turningPoint, turnMargin } from './turning-points.ts';
+import { type CurvePoint, crossing, estimatedTurns, turningPoints, turnMargin } from './turning-points.ts';
 
 /** A figure is null where the quantity does not exist; times in s. */
 export interface StepMetrics {
@@ -87,10 +87,9 @@ function highestPoint(response: ResolvedResponse, sign: 1 | -1, floor: number): 
   let best: CurvePoint = { t: 0, y: y[0]! };
   for (let k = 1; k < y.length; k++) if (sign * y[k]! > sign * best.y) best = { t: response.t[k]!, y: y[k]! };
   for (let k = 0; k + 1 < y.length; k++) {
-    const turn = estimatedTurn(response, 0, k);
-    if (turn === null || sign * turn + turnMargin(response, 0, k) <= Math.max(floor, sign * best.y)) continue;
-    const exact = turningPoint(response, 0, k);
-    if (sign * exact.y > sign * best.y) best = exact;
+    const reach = turnMargin(response, 0, k) - Math.max(floor, sign * best.y);
+    if (!estimatedTurns(response, 0, k).some(turn => sign * turn + reach > 0)) continue;
+    for (const turn of turningPoints(response, 0, k)) if (sign * turn.y > sign * best.y) best = turn;
   }
   return best;
 }
@@ -101,8 +100,8 @@ function firstTimeAt(response: ResolvedResponse, level: number): number | null {
   const y = response.y[0]!;
   if (sign * y[0]! >= sign * level) return 0;
   for (let k = 0; k + 1 < y.length; k++) {
-    const turn = estimatedTurn(response, 0, k);
-    const mayTurn = turn !== null && sign * turn + turnMargin(response, 0, k) >= sign * level;
+    const reach = turnMargin(response, 0, k) - sign * level;
+    const mayTurn = estimatedTurns(response, 0, k).some(turn => sign * turn + reach >= 0);
     if (sign * y[k + 1]! < sign * level && !mayTurn) continue;
     const time = crossing(response, 0, k, level, 'first');
     if (time !== null) return time;

@@ -16,40 +16,60 @@ export interface CurvePoint {
 const MOST_STEPS = 64;
 
 /**
- * The turning point's value in interval k (between points k and k + 1) by the cubic through both ends and slopes, null
- * where the slope keeps its sign. Off by some 10⁻³ of what the output moves over the interval's time at its slopes.
+ * The output at its turning points in interval k (between points k and k + 1) by the cubic through both ends and slopes;
+ * none, one or two. Off by `turnMargin` at most where the interval resolves its modes.
  */
-export function estimatedTurn(response: ResolvedResponse, output: number, k: number): number | null {
-  const slope = response.slope[output]!;
-  const y = response.y[output]!;
-  const [left, right] = [slope[k]!, slope[k + 1]!];
-  if (left === 0 || left > 0 === right > 0) return null;
-  const h = response.t[k + 1]! - response.t[k]!;
-  const rise = (y[k + 1]! - y[k]!) / h;
-  // y(k + x h) = y + h (left x + b x² + a x³); the root of its derivative in 0 … 1 by the stable formula.
-  const a = left + right - 2 * rise;
-  const b = 3 * rise - 2 * left - right;
-  const root = Math.sqrt(Math.max(0, b * b - 3 * a * left));
-  const divisor = -b + (left > 0 ? root : -root);
-  const x = divisor === 0 ? 0.5 : Math.min(1, Math.max(0, left / divisor));
-  return y[k]! + h * x * (left + x * (b + x * a));
+export function estimatedTurns(response: ResolvedResponse, output: number, k: number): readonly number[] {
+  const { y, h, left, a, b } = cubicOf(response, output, k);
+  return cubicTurns(left, a, b).map(x => y + h * x * (left + x * (b + x * a)));
 }
 
-/** How far the true turn may lie from its estimate: 1/64 of the movement that the slopes at both ends would make. */
+/** y(k + x h) = y + h (left x + b x² + a x³) for x in 0 … 1. */
+function cubicOf(response: ResolvedResponse, output: number, k: number) {
+  const y = response.y[output]!;
+  const slope = response.slope[output]!;
+  const h = response.t[k + 1]! - response.t[k]!;
+  const [left, right] = [slope[k]!, slope[k + 1]!];
+  const rise = (y[k + 1]! - y[k]!) / h;
+  return { y: y[k]!, h, left, right, a: left + right - 2 * rise, b: 3 * rise - 2 * left - right };
+}
+
+/** The roots of left + 2 b x + 3 a x² between 0 and 1, ascending. */
+function cubicTurns(left: number, a: number, b: number): readonly number[] {
+  const discriminant = b * b - 3 * a * left;
+  if (!(discriminant > 0)) return [];
+  const far = -(b + (b < 0 ? -1 : 1) * Math.sqrt(discriminant)); // no cancellation
+  return [far / (3 * a), left / far].filter(x => x > 0 && x < 1).sort((p, q) => p - q);
+}
+
+/** How far a true turn may lie from its estimate: 1/64 of the movement that the slopes at both ends would make. */
 export function turnMargin(response: ResolvedResponse, output: number, k: number): number {
   const slope = response.slope[output]!;
   const h = response.t[k + 1]! - response.t[k]!;
   return ((Math.abs(slope[k]!) + Math.abs(slope[k + 1]!)) * h) / 64;
 }
 
-/** The turning point in interval k, whose slopes differ in sign. */
-export function turningPoint(response: ResolvedResponse, output: number, k: number): CurvePoint {
+/** The turning points in interval k, in ascending time, each found on the response itself. */
+export function turningPoints(response: ResolvedResponse, output: number, k: number): readonly CurvePoint[] {
+  const { h, left, right, a, b } = cubicOf(response, output, k);
+  const roots = cubicTurns(left, a, b);
   const { M, C } = response.propagator;
-  const t = refinedRoot(response, k, 0, response.t[k + 1]! - response.t[k]!, z => {
+  const rateAt = (z: Float64Array) => {
     const rate = derivative(M, z);
     return { value: outputOf(C, output, rate), slope: outputOf(C, output, derivative(M, rate)) };
+  };
+  const stateAt = (t: number) => stateAfter(response.propagator, stateOf(response, k), t);
+  const found: CurvePoint[] = [];
+  roots.forEach((root, i) => {
+    // Each root between cuts half way to its neighbours; the ends of the interval themselves where the slope is not zero.
+    const low = ((roots[i - 1] ?? (left === 0 ? root / 2 : -root)) + root) / 2;
+    const high = ((roots[i + 1] ?? (right === 0 ? 1 : 2 - root)) + root) / 2;
+    const [before, after] = [rateAt(stateAt(low * h)).value, rateAt(stateAt(high * h)).value];
+    if (before > 0 === after > 0) return;
+    const t = refinedRoot(response, k, low * h, high * h, rateAt);
+    found.push({ t: response.t[k]! + t, y: outputOf(C, output, stateAt(t)) });
   });
-  return { t: response.t[k]! + t, y: outputOf(C, output, stateAfter(response.propagator, stateOf(response, k), t)) };
+  return found;
 }
 
 /** The first (or last) time in interval k at which the output crosses the level, null where it does not. */
@@ -73,7 +93,7 @@ export function crossing(
   return start + t;
 }
 
-/** The interval cut at its turning point where that could matter for the level. */
+/** The interval cut at its turning points where they could matter for the level. */
 function monotonePieces(
   response: ResolvedResponse,
   output: number,
@@ -82,17 +102,14 @@ function monotonePieces(
 ): readonly (readonly [CurvePoint, CurvePoint])[] {
   const left = { t: response.t[k]!, y: response.y[output]![k]! };
   const right = { t: response.t[k + 1]!, y: response.y[output]![k + 1]! };
-  const turn = estimatedTurn(response, output, k);
-  if (turn === null) return [[left, right]];
+  const turns = estimatedTurns(response, output, k);
+  if (turns.length === 0) return [[left, right]];
   const margin = turnMargin(response, output, k);
-  const below = Math.min(left.y, right.y, turn - margin);
-  const above = Math.max(left.y, right.y, turn + margin);
+  const below = Math.min(left.y, right.y, ...turns.map(turn => turn - margin));
+  const above = Math.max(left.y, right.y, ...turns.map(turn => turn + margin));
   if (level < below || level > above) return [];
-  const middle = turningPoint(response, output, k);
-  return [
-    [left, middle],
-    [middle, right],
-  ];
+  const points = [left, ...turningPoints(response, output, k), right];
+  return points.slice(1).map((point, i) => [points[i]!, point] as const);
 }
 
 function stateOf({ z, propagator }: ResolvedResponse, k: number): Float64Array {

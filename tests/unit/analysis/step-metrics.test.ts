@@ -89,6 +89,24 @@ describe('responses with something of their own', () => {
     expectNear(found.settlingTime2percent, 60 * Math.log(5), 1e-9);
   });
 
+  test('a turn soon after a start without slope is found between two points of rising slope', () => {
+    // With P(k) the step response of k lags of 1/1.3 s: y = −0.1 + (−0.001 P(2) + 0.006 P(3)) / 1.69, lowest at 1.3 t = 1/3.
+    const model = rationalModel(
+      [
+        ['-1.3', 0, 0, 0],
+        ['0.1', '-1.3', '-0.2', 0],
+        [0, 0, '-1.3', '0.3'],
+        [0, 0, 0, '-1.3'],
+      ],
+      [['-0.1'], [0], [0], ['-1.3']],
+      [[0, '0.1', 0, 0]],
+      [['-0.1']],
+    );
+    const found = metrics(model);
+    expectNear(found.peakTime, 1 / 3.9);
+    expectNear(found.finalValue, -0.1 + 0.005 / 1.69);
+  });
+
   test('eight equal lags settle without overshoot', () => {
     let denominator = [1];
     for (let k = 0; k < 8; k++) denominator = [...denominator, 0].map((x, i) => x + (denominator[i - 1] ?? 0));
