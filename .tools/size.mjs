@@ -1,6 +1,7 @@
 /**
- * Weighs the first load of the built page: what a browser fetches before the user does anything, compressed as servers send
- * it (gzip), fonts apart since the text is readable before they come. Fails above the limit.
+ * Weighs the first load of the built page: what has to arrive before there is a sheet with its matrices, compressed as
+ * servers send it (gzip). The page, its scripts and styles, the worker and what they import; not what is imported on demand,
+ * nor fonts, without which the text is readable. Fails above the limit.
  */
 
 import { readFileSync } from 'node:fs';

@@ -78,7 +78,7 @@ function written(diagram: Diagram, { format, notation }: Derive, io: Io): Result
   if (format.id !== 'model') {
     for (const line of modelWarnings(derivation.value).map(lineOf)) io.complain(line);
   }
-  return ok(format.write({ derivation: derivation.value, notation }));
+  return ok(format.write({ diagram, derivation: derivation.value, notation }));
 }
 
 async function check(drawing: Result<Diagram>, io: Io): Promise<Result<null>> {

@@ -32,7 +32,7 @@ export interface Setting {
 const COMMANDS = ['derive', 'check', 'link'] as const;
 const OPTIONS_WITH_VALUE = ['--as', '--out', '--notation', '--set'] as const;
 const OPTIONS = [...OPTIONS_WITH_VALUE, '--help', '--version'] as const;
-const NOTATIONS: readonly Notation[] = ['fractions', 'decimals'];
+const NOTATIONS: readonly Notation[] = ['symbols', 'fractions', 'decimals'];
 
 /** Options in the order given, and what is no option. */
 interface Split {
@@ -90,7 +90,7 @@ function splitArguments(argv: readonly string[]): Result<Split> {
 const VALUES_OF: Readonly<Partial<Record<string, string>>> = {
   '--as': `Write one of ${alternatives(FORMATS.map(({ id }) => id))}.`,
   '--out': 'Write the path of the file to write.',
-  '--notation': 'Write fractions or decimals.',
+  '--notation': `Write ${alternatives(NOTATIONS)}.`,
   '--set': 'Write NAME=EXPR, for instance Kp=2/3.',
 };
 

@@ -10,7 +10,7 @@ export function usage(): string {
 }
 
 const HEAD = `Usage:
-  poleward derive FILE|LINK|-   [--as FORMAT] [--out PATH] [--notation fractions|decimals] [--set NAME=EXPR]...
+  poleward derive FILE|LINK|-   [--as FORMAT] [--out PATH] [--notation NOTATION] [--set NAME=EXPR]...
   poleward check  FILE|LINK|-
   poleward link   FILE|-
 
@@ -23,8 +23,8 @@ FILE is a drawing (*.poleward.json), LINK a share link or its #d1=... part, - st
   --as FORMAT              one of the following, model where none is given:`;
 
 const TAIL = `  --out PATH               writes a file instead of standard output
-  --notation fractions     matrix entries as fractions where the model is exact (as it is without this option)
-  --notation decimals      or as decimals
+  --notation NOTATION      matrix entries of text, LaTeX and MathML: symbols (of the parameters), fractions (where none is
+                           given) or decimals
   --set NAME=EXPR          gives a parameter another value; may be repeated
   --help, --version
 

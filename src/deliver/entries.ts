@@ -1,29 +1,25 @@
 /**
- * The entries of A, B, C and D as a format wants them: written-out rows, each entry a fraction or a decimal turned into
- * whatever that format prints. The one place that decides which of the two an entry is.
+ * The entries of A, B, C and D as a format wants them: written-out rows, each entry a formula, a fraction or a decimal turned
+ * into whatever that format prints. The one place that decides which of the three an entry is.
  */
 
 import { type Rational, type SparseMatrix, toRows, ZERO } from '../algebra/index.ts';
+import type { Formula } from '../algebra/symbolic/index.ts';
 import type { StateSpace } from '../compile/index.ts';
-import type { Notation } from './format.ts';
+import type { ModelContext } from './format.ts';
+import { formulaRows } from './formulas.ts';
+import { type MatrixRows, mapMatrices } from './matrix-rows.ts';
 
-/** A n × n, B n × m, C p × n, D p × m, row by row. */
-export interface MatrixRows<T> {
-  readonly A: readonly (readonly T[])[];
-  readonly B: readonly (readonly T[])[];
-  readonly C: readonly (readonly T[])[];
-  readonly D: readonly (readonly T[])[];
-}
-
-/** How a format prints a number. */
+/** How a format prints an entry. */
 export interface Printer<T> {
+  readonly formula: (value: Formula) => T;
   readonly fraction: (value: Rational) => T;
   readonly decimal: (value: number) => T;
 }
 
-/** Whether the entries of `exact` are the model's own: none stands in for an irrational quantity. */
-export function hasExactEntries(model: StateSpace): boolean {
-  return model.rational !== null && model.irrational.length === 0;
+/** Entries as they are printed, and what is to be said where they are not written as was asked. */
+export interface PrintedRows<T> extends MatrixRows<T> {
+  readonly note: string | null;
 }
 
 /** The nearest doubles, row by row. */
@@ -33,24 +29,30 @@ export function numericRows(model: StateSpace): MatrixRows<number> {
 
 /** The exact entries, row by row; null where the model is not exact throughout. */
 export function exactRows(model: StateSpace): MatrixRows<Rational> | null {
-  if (model.rational === null || !hasExactEntries(model)) return null;
+  if (model.rational === null || model.irrational.length > 0) return null;
   return mapMatrices(model.rational, matrix => toRows(matrix, ZERO));
 }
 
-/** Each entry printed, as a fraction where that is asked for and the model is exact, as a decimal otherwise. */
-export function printedRows<T>(model: StateSpace, notation: Notation, printer: Printer<T>): MatrixRows<T> {
-  const exact = notation === 'fractions' ? exactRows(model) : null;
-  return exact === null
-    ? mapMatrices(numericRows(model), rows => rows.map(row => row.map(printer.decimal)))
-    : mapMatrices(exact, rows => rows.map(row => row.map(printer.fraction)));
+/** Each entry in the notation that is asked for, or where the model has none in that, in the next plainer one. */
+export function printedRows<T>(context: ModelContext, printer: Printer<T>): PrintedRows<T> {
+  const { notation, derivation } = context;
+  const formulas = notation === 'symbols' ? formulaRows(context) : null;
+  if (formulas !== null) return { ...printed(formulas, printer.formula), note: null };
+  const exact = notation === 'decimals' ? null : exactRows(derivation.model);
+  if (exact !== null) {
+    const note = notation === 'symbols' ? `Entries are fractions: ${NO_FORMULAS}` : null;
+    return { ...printed(exact, printer.fraction), note };
+  }
+  const note =
+    notation === 'decimals' ? null : `Entries are decimals: ${notation === 'symbols' ? NO_FORMULAS : NOT_EXACT}`;
+  return { ...printed(numericRows(derivation.model), printer.decimal), note };
 }
 
-/** The same done to each of the four. */
-export function mapMatrices<S, T>(
-  { A, B, C, D }: { readonly A: S; readonly B: S; readonly C: S; readonly D: S },
-  turn: (matrix: S) => T,
-): { readonly A: T; readonly B: T; readonly C: T; readonly D: T } {
-  return { A: turn(A), B: turn(B), C: turn(C), D: turn(D) };
+const NO_FORMULAS = 'the formulas are too long to be of use.';
+const NOT_EXACT = 'the model is not exact, see its warnings.';
+
+function printed<S, T>(rows: MatrixRows<S>, print: (value: S) => T): MatrixRows<T> {
+  return mapMatrices(rows, matrix => matrix.map(row => row.map(print)));
 }
 
 /** A sparse matrix entry by entry, column by column from the left, rows from the top, counted from 0. */

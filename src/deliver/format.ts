@@ -3,12 +3,20 @@
 import type { Derivation } from '../compile/index.ts';
 import type { Diagram } from '../diagram/index.ts';
 
-/** How matrix entries are written: as reduced fractions where the model is exact, or as the nearest doubles. */
-export type Notation = 'fractions' | 'decimals';
+/**
+ * How matrix entries are written: in the parameters where the formulas are of a length to be read, as reduced fractions where
+ * the model is exact, or as the nearest doubles.
+ */
+export type Notation = 'symbols' | 'fractions' | 'decimals';
+
+/** A drawing and what `compile` made of it. */
+export interface Derived {
+  readonly diagram: Diagram;
+  readonly derivation: Derivation;
+}
 
 /** What a format of scope `model` writes from. */
-export interface ModelContext {
-  readonly derivation: Derivation;
+export interface ModelContext extends Derived {
   readonly notation: Notation;
 }
 

@@ -4,21 +4,27 @@
  */
 
 import { toFraction } from '../algebra/index.ts';
+import { formulaLatex } from '../algebra/symbolic/index.ts';
 import type { SignalName, StateSpace } from '../compile/index.ts';
 import { nameToLatex, toLatex } from '../expression/index.ts';
 import { CAUTION } from './caution.ts';
-import { type MatrixRows, printedRows } from './entries.ts';
+import { type Printer, printedRows } from './entries.ts';
 import type { ModelContext } from './format.ts';
+import type { MatrixRows } from './matrix-rows.ts';
 import { oneLine, wrapped } from './one-line.ts';
 
 const COMMENT_WIDTH = 100;
 
 /** Two displayed equations and, where it is not zero, the initial state; an equation without a row is left out. */
-export function writeLatex({ derivation: { model }, notation }: ModelContext): string {
-  const rows = printedRows(model, notation, { fraction: value => toLatex(toFraction(value)), decimal: latexDecimal });
-  const comments = [...(oneLine(model.title) === '' ? [] : [oneLine(model.title)]), CAUTION];
+export function writeLatex(context: ModelContext): string {
+  const { model } = context.derivation;
+  const { note, ...rows } = printedRows(context, PRINTER);
+  const comments = [oneLine(model.title), note ?? '', CAUTION];
   return [
-    ...comments.flatMap(comment => wrapped(comment, COMMENT_WIDTH)).map(line => `% ${line}`),
+    ...comments
+      .filter(comment => comment !== '')
+      .flatMap(comment => wrapped(comment, COMMENT_WIDTH))
+      .map(line => `% ${line}`),
     ...equations(model, rows).flatMap(equation => ['\\[', ...equation, '\\]']),
     '',
   ].join('\n');
@@ -62,4 +68,15 @@ function array(rows: MatrixRows<string>['A'], alignment: 'r' | 'c'): string {
 
 function latexDecimal(value: number): string {
   return toLatex(String(value));
+}
+
+const PRINTER: Printer<string> = {
+  formula: formula => formulaLatex(formula, latexSymbol),
+  fraction: value => toLatex(toFraction(value)),
+  decimal: latexDecimal,
+};
+
+/** A parameter, or an irrational part as it was written; parentheses that it came with stay. */
+function latexSymbol(text: string): string {
+  return text.startsWith('(') ? `\\left(${toLatex(text)}\\right)` : toLatex(text);
 }

@@ -4,11 +4,13 @@
  */
 
 import { toFraction } from '../algebra/index.ts';
+import { formulaMathML } from '../algebra/symbolic/index.ts';
 import type { SignalName, StateSpace } from '../compile/index.ts';
 import { mathElement, nameToMathML, toMathML } from '../expression/index.ts';
 import { CAUTION } from './caution.ts';
-import { type MatrixRows, printedRows } from './entries.ts';
+import { type Printer, printedRows } from './entries.ts';
 import type { ModelContext } from './format.ts';
+import type { MatrixRows } from './matrix-rows.ts';
 import { oneLine } from './one-line.ts';
 
 /** The d of a derivative is upright (ISO 80000-2). */
@@ -16,10 +18,11 @@ const UPRIGHT_D = '<mi mathvariant="normal">d</mi>';
 const DERIVATIVE = `<mfrac>${UPRIGHT_D}<mrow>${UPRIGHT_D}<mi>t</mi></mrow></mfrac>`;
 
 /** One `math` element; its equations are the rows of a table, those without an entry left out. */
-export function writeMathml({ derivation: { model }, notation }: ModelContext): string {
-  const rows = printedRows(model, notation, { fraction: value => toMathML(toFraction(value)), decimal: mathmlDecimal });
+export function writeMathml(context: ModelContext): string {
+  const { model } = context.derivation;
+  const { note, ...rows } = printedRows(context, PRINTER);
   const lines = equations(model, rows).map(equation => `<mtr><mtd>${row(...equation)}</mtd></mtr>`);
-  const comment = oneLine(`${model.title} ${CAUTION}`).replace(/-(?=-)/g, '- ');
+  const comment = oneLine(`${model.title} ${note ?? ''} ${CAUTION}`).replace(/-(?=-)/g, '- ');
   return `<!-- ${comment} -->\n${mathElement(`<mtable>\n${lines.join('\n')}\n</mtable>`, 'block')}\n`;
 }
 
@@ -69,4 +72,15 @@ function operator(sign: string): string {
 
 function mathmlDecimal(value: number): string {
   return toMathML(String(value));
+}
+
+const PRINTER: Printer<string> = {
+  formula: formula => formulaMathML(formula, mathmlSymbol),
+  fraction: value => toMathML(toFraction(value)),
+  decimal: mathmlDecimal,
+};
+
+/** A parameter, or an irrational part as it was written; parentheses that it came with stay. */
+function mathmlSymbol(text: string): string {
+  return text.startsWith('(') ? row(operator('('), toMathML(text), operator(')')) : toMathML(text);
 }

@@ -4,6 +4,7 @@
  */
 
 import { type Rational, toFraction } from '../algebra/index.ts';
+import { formulaText } from '../algebra/symbolic/index.ts';
 import {
   allTransferFunctions,
   hiddenModeWarnings,
@@ -18,9 +19,11 @@ import {
 } from '../analysis/index.ts';
 import type { Derivation, SelfCheck, SignalName, StateSpace } from '../compile/index.ts';
 import type { Warning } from '../problem/index.ts';
-import { exactRows, type MatrixRows, mapMatrices, numericRows } from './entries.ts';
-import type { ModelContext } from './format.ts';
+import { exactRows, numericRows } from './entries.ts';
+import type { Derived } from './format.ts';
+import { formulaRows } from './formulas.ts';
 import { layOutJson } from './json-layout.ts';
+import { type MatrixRows, mapMatrices } from './matrix-rows.ts';
 
 export interface ModelFile {
   readonly format: 'poleward-model';
@@ -38,7 +41,7 @@ export interface ModelFile {
   readonly initialState: readonly number[];
   /** Reduced fractions; null where some quantity is irrational or the model was derived in doubles. */
   readonly exact: MatrixRows<string> | null;
-  /** In the parameters; null where it was not derived. */
+  /** In the parameters, as expressions; null where the formulas are too long to be of use. */
   readonly symbolic: MatrixRows<string> | null;
   /** Null where their iteration did not converge. */
   readonly poles: readonly Root[] | null;
@@ -72,7 +75,8 @@ export function modelWarnings({ model, warnings }: Derivation): readonly Warning
 }
 
 /** The content of the model file. */
-export function modelFile(derivation: Derivation): ModelFile {
+export function modelFile(derived: Derived): ModelFile {
+  const { derivation } = derived;
   const { model, selfCheck } = derivation;
   const { title, states, inputs, outputs, initialState, shiftedStates } = model;
   const poleSet = poles(model, EFFORT);
@@ -88,7 +92,7 @@ export function modelFile(derivation: Derivation): ModelFile {
     ...numericRows(model),
     initialState,
     exact: exactFractions(model),
-    symbolic: null,
+    symbolic: symbolicTexts(derived),
     poles: poleSet.route === 'not-converged' ? null : poleSet.poles,
     zeros: zeroSet.route === 'certified' ? zeroSet.zeros : null,
     transferFunctions: transferFunctionEntries(allTransferFunctions(model, EFFORT)),
@@ -102,8 +106,8 @@ export function modelFile(derivation: Derivation): ModelFile {
 }
 
 /** The model file as text. */
-export function writeModelFile({ derivation }: ModelContext): string {
-  return layOutJson(modelFile(derivation));
+export function writeModelFile(derived: Derived): string {
+  return layOutJson(modelFile(derived));
 }
 
 const nameOf = ({ name }: SignalName) => name;
@@ -112,6 +116,11 @@ function exactFractions(model: StateSpace): MatrixRows<string> | null {
   const exact = exactRows(model);
   const fractions = (rows: readonly (readonly Rational[])[]) => rows.map(row => row.map(toFraction));
   return exact === null ? null : mapMatrices(exact, fractions);
+}
+
+function symbolicTexts(derived: Derived): MatrixRows<string> | null {
+  const formulas = formulaRows(derived);
+  return formulas === null ? null : mapMatrices(formulas, rows => rows.map(row => row.map(formulaText)));
 }
 
 function transferFunctionEntries(all: readonly TransferFunction[]): TransferFunctionEntry[] | null {

@@ -4,6 +4,7 @@
  */
 
 import { toFraction } from '../algebra/index.ts';
+import { formulaText } from '../algebra/symbolic/index.ts';
 import { CAUTION } from './caution.ts';
 import { printedRows } from './entries.ts';
 import type { ModelContext } from './format.ts';
@@ -13,8 +14,9 @@ const CAUTION_WIDTH = 100;
 const GAP = '  ';
 
 /** The table; lines end in LF, columns are aligned to the right, a bar parts states from inputs. */
-export function writePlainText({ derivation: { model }, notation }: ModelContext): string {
-  const rows = printedRows(model, notation, { fraction: toFraction, decimal: String });
+export function writePlainText(context: ModelContext): string {
+  const { model } = context.derivation;
+  const rows = printedRows(context, { formula: formulaText, fraction: toFraction, decimal: String });
   const states = model.states.map(({ name }) => oneLine(name));
   const header = ['', ...states, '|', ...model.inputs.map(({ name }) => oneLine(name))];
   const record = (label: string, left: readonly string[] = [], right: readonly string[] = []) =>
@@ -38,6 +40,7 @@ export function writePlainText({ derivation: { model }, notation }: ModelContext
     ...lower.map(line),
     '',
     ...initialStateLines(states, model.initialState),
+    ...(rows.note === null ? [] : [rows.note, '']),
     ...wrapped(CAUTION, CAUTION_WIDTH),
     '',
   ].join('\n');

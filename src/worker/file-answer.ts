@@ -12,6 +12,6 @@ export function fileAnswer({ id, diagram, format, notation }: Extract<Question, 
   }
   if (found.scope === 'drawing') return { kind: 'file', id, outcome: ok(found.write(diagram)) };
   const derived = compile(diagram);
-  const outcome = derived.ok ? ok(found.write({ derivation: derived.value, notation })) : derived;
+  const outcome = derived.ok ? ok(found.write({ diagram, derivation: derived.value, notation })) : derived;
   return { kind: 'file', id, outcome };
 }

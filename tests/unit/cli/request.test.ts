@@ -65,7 +65,7 @@ describe('arguments are refused', () => {
     [['derive', 'a', '--out'], '--out needs a value after it. Write the path of the file to write.'],
     [['derive', 'a', '--as'], `--as needs a value after it. Write one of ${formats} or diagram.`],
     [['derive', 'a', '--set'], '--set needs a value after it. Write NAME=EXPR, for instance Kp=2/3.'],
-    [['derive', 'a', '--notation'], '--notation needs a value after it. Write fractions or decimals.'],
+    [['derive', 'a', '--notation'], '--notation needs a value after it. Write symbols, fractions or decimals.'],
     [['derive', 'a', '--as', 'cvs'], 'There is no format "cvs". Did you mean csv?'],
     [['derive', 'a', '--as', 'word'], `There is no format "word". Write ${formats} or diagram.`],
     [['derive', 'a', '--notation', 'decimal'], 'There is no notation "decimal". Did you mean decimals?'],

@@ -2,6 +2,7 @@
 
 import { describe, expect, test } from 'vitest';
 import { modelFile, modelWarnings } from '../../../src/deliver/index.ts';
+import { emptyDiagram } from '../../../src/diagram/index.ts';
 import motor from '../../reference/cases/dc-motor-symbolic.json';
 import { derivationOf, EMPTY, type HandModel, MOTOR, STATIC } from './derivations.ts';
 import { textIn } from './written.ts';
@@ -46,13 +47,16 @@ function lags(n: number): HandModel {
   };
 }
 
+/** The drawing of a derivation by hand is an empty sheet: only the symbolic entries ask for it. */
+const fileOf = (model: HandModel) => modelFile({ diagram: emptyDiagram(), derivation: derivationOf(model) });
+
 describe('the model file', () => {
   test('has the keys of the format in its order', () => {
     expect(Object.keys(JSON.parse(textIn('model', derivationOf(MOTOR))))).toEqual(KEYS);
   });
 
   test('says of the motor what the reference case says', () => {
-    const file = modelFile(derivationOf(MOTOR));
+    const file = fileOf(MOTOR);
     const { states, inputs, outputs, A, B, C, D, exact, stability, controllable, observable } = motor.expect;
     expect(file).toMatchObject({ states, inputs, outputs, A, B, C, D, exact, stability, controllable, observable });
     expect(file.initialState).toEqual([0, 12.5, 0]);
@@ -63,7 +67,7 @@ describe('the model file', () => {
   });
 
   test('has a transfer function for each output and input, as the reference case orders and reduces them', () => {
-    const found = modelFile(derivationOf(MOTOR)).transferFunctions ?? [];
+    const found = fileOf(MOTOR).transferFunctions ?? [];
     expect(found).toHaveLength(motor.expect.transferFunctions.length);
     found.forEach((entry, i) => {
       const { input, output, numerator, denominator } = Object(motor.expect.transferFunctions[i]);
@@ -74,13 +78,13 @@ describe('the model file', () => {
   });
 
   test('has no exact entries where a quantity is irrational', () => {
-    const file = modelFile(derivationOf({ ...STATIC, irrational: ['k = sqrt(2)'] }));
+    const file = fileOf({ ...STATIC, irrational: ['k = sqrt(2)'] });
     expect(file.exact).toBeNull();
     expect(file.D).toEqual([[0.3125]]);
   });
 
   test('has empty matrices for an empty sheet, controllable and observable', () => {
-    expect(modelFile(derivationOf(EMPTY))).toMatchObject({
+    expect(fileOf(EMPTY)).toMatchObject({
       A: [],
       B: [],
       C: [],
@@ -96,7 +100,7 @@ describe('the model file', () => {
   });
 
   test('says null of what is not computed for so many states, and still has the poles', () => {
-    const file = modelFile(derivationOf(lags(129)));
+    const file = fileOf(lags(129));
     const { zeros, transferFunctions, controllable, observable } = file;
     expect({ zeros, transferFunctions, controllable, observable }).toEqual({
       zeros: null,
@@ -119,7 +123,7 @@ describe('the model file', () => {
     // The input does not reach the first state, so its pole −1 cancels.
     const hidden: HandModel = { ...lags(2), B: [['0'], ['1']] };
     const derivation = { ...derivationOf(hidden), warnings: [open] };
-    expect(modelFile(derivation).warnings).toEqual(modelWarnings(derivation));
+    expect(modelFile({ diagram: emptyDiagram(), derivation }).warnings).toEqual(modelWarnings(derivation));
     expect(modelWarnings(derivation).map(({ code, blocks }) => ({ code, blocks }))).toEqual([
       { code: 'port-not-connected', blocks: ['sum'] },
       { code: 'hidden-mode', blocks: ['x0'] },

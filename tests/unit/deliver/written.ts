@@ -2,18 +2,30 @@
 
 import type { Derivation } from '../../../src/compile/index.ts';
 import { FORMATS, type Notation } from '../../../src/deliver/index.ts';
+import { type Diagram, emptyDiagram } from '../../../src/diagram/index.ts';
 
-function written(id: string, derivation: Derivation, notation: Notation): string | Uint8Array {
+/** A derivation by hand comes without a drawing; the formats ask it for symbols alone, and find none. */
+function written(
+  id: string,
+  derivation: Derivation,
+  notation: Notation,
+  diagram = emptyDiagram(),
+): string | Uint8Array {
   const format = FORMATS.find(each => each.id === id);
   if (format?.scope !== 'model') throw new Error(`no format of the model is called ${id}`);
-  const content = format.write({ derivation, notation });
+  const content = format.write({ diagram, derivation, notation });
   if (format.isBinary === (typeof content === 'string'))
     throw new Error(`${id} says the wrong thing of what it writes`);
   return content;
 }
 
-export function textIn(id: string, derivation: Derivation, notation: Notation = 'fractions'): string {
-  const content = written(id, derivation, notation);
+export function textIn(
+  id: string,
+  derivation: Derivation,
+  notation: Notation = 'fractions',
+  diagram?: Diagram,
+): string {
+  const content = written(id, derivation, notation, diagram);
   if (typeof content !== 'string') throw new Error(`${id} writes no text`);
   return content;
 }
