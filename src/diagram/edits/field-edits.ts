@@ -67,7 +67,9 @@ export function setMatrices(sheet: Sheet, { id, A, B, C, D, initial }: SetMatric
   if (block.kind !== 'state-model') {
     return fail(problem('bad-value', `${blockTitleAtStart(block)} has no matrices.`, { blocks: [id] }));
   }
-  const { initial: _, ...kept } = block;
+  const { initial: former, ...kept } = block;
+  const isSame = JSON.stringify([A, B, C, D, initial]) === JSON.stringify([block.A, block.B, block.C, block.D, former]);
+  if (isSame) return ok(sheet);
   const changed = { ...kept, A, B, C, D, ...(initial === undefined ? {} : { initial }) };
   const fault = matrixShapeFault(changed);
   if (fault === null) return ok(replaceBlock(sheet, block, changed));

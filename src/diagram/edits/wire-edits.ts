@@ -49,7 +49,9 @@ function putWire(sheet: Sheet, wire: Wire, replace: boolean): Result<Sheet> {
   if (fault !== null) return fail(fault);
   const former = sheet.wires.find(({ to }) => isSamePort(to, wire.to));
   if (former === undefined) return ok({ ...sheet, wires: [...sheet.wires, wire] });
-  if (isSamePort(former.from, wire.from) && wire.via === undefined && wire.name === undefined) return ok(sheet);
+  const { name = former.name, via = former.via } = wire;
+  const isThere = isSamePort(former.from, wire.from) && name === former.name;
+  if (isThere && JSON.stringify(via) === JSON.stringify(former.via)) return ok(sheet);
   if (replace) return ok({ ...sheet, wires: sheet.wires.map(other => (other === former ? wire : other)) });
   return fail(portTaken(sheet, wire.to));
 }
@@ -96,7 +98,8 @@ export function setVia(sheet: Sheet, { to, via }: SetVia): Result<Sheet> {
   if (!wire.ok) return wire;
   if (via.some(isTooFar)) return fail(tooFar());
   const { via: former, ...kept } = wire.value;
-  if (via.length === 0) return ok(former === undefined ? sheet : replaceWire(sheet, wire.value, kept));
+  if (JSON.stringify(via) === JSON.stringify(former ?? [])) return ok(sheet);
+  if (via.length === 0) return ok(replaceWire(sheet, wire.value, kept));
   return ok(replaceWire(sheet, wire.value, { ...kept, via }));
 }
 

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { all, create } from 'mathjs';
-import { describe, expect, test } from 'vitest';
+import { describe, expect, test, vi } from 'vitest';
 import {
   addRationals,
   multiplyRationals,
@@ -33,6 +33,8 @@ import {
 } from '../../arbitraries/expressions.ts';
 import { SEED, shortRational } from '../../arbitraries/rationals.ts';
 import { valueOf } from '../../unit/results.ts';
+
+vi.setConfig({ testTimeout: 60_000 }); // many small runs, on a machine that may be busy
 
 const scopeOf = (values: readonly Rational[]): Scope =>
   new Map(NAMES.map((name, i) => [name, toValue(values[i] ?? ZERO)]));

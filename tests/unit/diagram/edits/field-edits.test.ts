@@ -109,6 +109,20 @@ describe('setting matrices', () => {
     expect(after.wires.map(({ to }) => to.join())).toEqual(['e,0', 'e,2', 'M,0']);
   });
 
+  test('to what they are is no change', () => {
+    const same = {
+      A: [['1']],
+      B: [['1', '1']],
+      C: [['1'], ['1']],
+      D: [
+        ['0', '0'],
+        ['0', '0'],
+      ],
+    };
+    expect(changesNothing(DRAWING, { kind: 'setMatrices', id: 'M', ...same })).toBe(true);
+    expect(changesNothing(DRAWING, { kind: 'setMatrices', id: 'M', ...same, initial: ['0'] })).toBe(false);
+  });
+
   test('that do not belong together is refused', () => {
     expect(refusals(DRAWING, { kind: 'setMatrices', id: 'M', A: [['1']], B: [], C: [], D: [] })[0]).toMatch(
       /^bad-value: State model M: "B" has 0 rows where the others ask for 1\./,

@@ -23,6 +23,8 @@ describe('connecting', () => {
 
   test('what is connected already is no change', () => {
     expect(changesNothing(DRAWING, { kind: 'connect', from: ['e', 0], to: ['K', 0] })).toBe(true);
+    expect(changesNothing(DRAWING, { kind: 'connect', from: ['K', 0], to: ['x', 0], replace: true })).toBe(true);
+    expect(refusals(DRAWING, { kind: 'connect', from: ['K', 0], to: ['x', 0], name: 'v' })[0]).toMatch(/^port-taken: /);
   });
 
   test('a port that is not there is refused', () => {
@@ -126,6 +128,7 @@ describe('a wire’s bends and name', () => {
 
   test('as they are are no change', () => {
     expect(changesNothing(DRAWING, { kind: 'setVia', to: ['e', 1], via: [] })).toBe(true);
+    expect(changesNothing(DRAWING, { kind: 'setVia', to: ['x', 0], via: [[250, 10]] })).toBe(true);
     expect(changesNothing(DRAWING, { kind: 'nameWire', to: ['e', 0], name: 'set point' })).toBe(true);
   });
 
