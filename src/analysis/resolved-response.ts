@@ -4,15 +4,8 @@
  * metrics of a step and the choice of a horizon.
  */
 
-import {
-  advance,
-  derivative,
-  type FreeSystem,
-  finePropagator,
-  initialMotion,
-  outputOf,
-  type Propagator,
-} from './free-response.ts';
+import { multiplyMatrices } from '../numeric/index.ts';
+import { advance, type FreeSystem, finePropagator, initialMotion, outputOf, type Propagator } from './free-response.ts';
 
 /** A pole that the response contains. */
 export interface Mode {
@@ -127,15 +120,15 @@ function followed(motionOf: Propagator, levels: readonly number[]): ResolvedResp
     y: Array.from({ length: outputs }, () => new Float64Array(points)),
     slope: Array.from({ length: outputs }, () => new Float64Array(points)),
   };
+  const rates = multiplyMatrices(motionOf.C, motionOf.M); // ẏ = C M z
   const motion = initialMotion(motionOf);
   const ticks = 2 ** (motionOf.levels.length - 1);
   let tick = 0;
   for (let k = 0; k < points; k++) {
     response.z.set(motion.z, k * n);
-    const rate = derivative(motionOf.M, motion.z);
     for (let output = 0; output < outputs; output++) {
       response.y[output]![k] = outputOf(motionOf.C, output, motion.z);
-      response.slope[output]![k] = outputOf(motionOf.C, output, rate);
+      response.slope[output]![k] = outputOf(rates, output, motion.z);
     }
     const level = levels[k];
     if (level === undefined) break;
