@@ -14,11 +14,11 @@ import {
   negateRational,
   ONE,
   type Rational,
-  rational,
+  rationalOver,
   subtractRationals,
   ZERO,
 } from './rational.ts';
-import { coefficientBits, type ModularRows, rowsModulo, scaledRows } from './scaled-rows.ts';
+import { denominatorProduct, type ModularRows, rowBits, rowsModulo, scaledRows } from './scaled-rows.ts';
 import { entryAt, type SparseMatrix } from './sparse-matrix.ts';
 import { principalSubmatrix, strongComponents } from './strong-components.ts';
 import { type RepeatedEigenvalue, repeatedEigenvalues } from './structural-rank.ts';
@@ -53,12 +53,12 @@ function connectedCharacteristic(A: SparseMatrix<Rational>): Polynomial {
 
 function characteristicByPrimes(A: SparseMatrix<Rational>): Polynomial {
   const rows = scaledRows(A);
-  const scale = rows.denominators.reduce((product, d) => product * d, 1n);
+  const { scale, base } = denominatorProduct(rows);
   const repeated = rows.rows <= SMALL ? [] : repeatedEigenvalues(A);
   const images: Float64Array[] = [];
   const primes: number[] = [];
   // One bit for the sign, one for the rounding of the logarithms.
-  let missingBits = coefficientBits(rows, rows.rows) + 2;
+  let missingBits = rowBits(rows, rows.rows).reduce((sum, bits) => sum + bits, 2);
   let isRecurrenceShort = rows.rows <= SMALL;
   for (let i = 0; missingBits > 0; i++) {
     const p = primeAt(i);
@@ -71,7 +71,7 @@ function characteristicByPrimes(A: SparseMatrix<Rational>): Polynomial {
     primes.push(p);
     missingBits -= Math.log2(p);
   }
-  return integersFromResidues(images, primes).map(coefficient => rational(coefficient, scale));
+  return integersFromResidues(images, primes).map(coefficient => rationalOver(coefficient, scale, base));
 }
 
 /**

@@ -39,14 +39,24 @@ function shortenedPair(a: bigint, b: bigint): [bigint, bigint] {
 
 /** The steps of Euclid that x and y decide whatever follows their bits, as one linear map; B = 0 where they decide none. */
 function leadingCofactors(leadingX: number, leadingY: number): [number, number, number, number] {
-  let [x, y] = [leadingX, leadingY];
-  let [A, B, C, D] = [1, 0, 0, 1];
+  let x = leadingX;
+  let y = leadingY;
+  let A = 1;
+  let B = 0;
+  let C = 0;
+  let D = 1;
   while (y + C !== 0 && y + D !== 0) {
     const quotient = Math.floor((x + A) / (y + C));
     if (quotient !== Math.floor((x + B) / (y + D))) break;
-    [A, C] = [C, A - quotient * C];
-    [B, D] = [D, B - quotient * D];
-    [x, y] = [y, x - quotient * y];
+    const nextC = A - quotient * C;
+    const nextD = B - quotient * D;
+    const nextY = x - quotient * y;
+    A = C;
+    B = D;
+    x = y;
+    C = nextC;
+    D = nextD;
+    y = nextY;
   }
   return [A, B, C, D];
 }

@@ -28,11 +28,13 @@ export function minimalByRecurrence(A: ModularRows, p: number): Float64Array {
 
 /** n residues without a pattern, the same in every run: a linear congruential sequence (Lewis, Goodman & Miller 1969). */
 function scatteredVector(n: number, p: number, seed: number): Float64Array {
+  const vector = new Float64Array(n);
   let state = 48271 * seed;
-  return Float64Array.from({ length: n }, () => {
+  for (let i = 0; i < n; i++) {
     state = (state * 16807) % 2147483647;
-    return state % p;
-  });
+    vector[i] = state % p;
+  }
+  return vector;
 }
 
 /**

@@ -55,15 +55,20 @@ export function multiplyPolynomials(p: Polynomial, q: Polynomial): Polynomial {
 /** The product of all factors, 1 for none; brought to lowest terms once, at the end. O(degree²). */
 export function productOfPolynomials(factors: readonly Polynomial[]): Polynomial {
   if (factors.some(factor => factor.length === 0)) return [];
-  if (factors.length === 1) return factors[0]!;
+  const proper = factors.filter(factor => !isOne(factor));
+  if (proper.length === 1) return proper[0]!;
   let product: readonly bigint[] = [1n];
   let scale = 1n;
-  for (const factor of factors) {
+  for (const factor of proper) {
     const { numerators, denominator } = overOneDenominator(factor);
     product = multiplyIntegers(product, numerators);
     scale *= denominator;
   }
   return product.map(coefficient => rational(coefficient, scale));
+}
+
+function isOne(p: Polynomial): boolean {
+  return p.length === 1 && p[0]!.n === 1n && p[0]!.d === 1n;
 }
 
 function multiplyIntegers(f: readonly bigint[], g: readonly bigint[]): bigint[] {

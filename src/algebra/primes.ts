@@ -39,13 +39,20 @@ export function reduce(x: number, p: number, inverse: number): number {
   return rest < 0 ? rest + p : rest >= p ? rest - p : rest;
 }
 
-/** a⁻¹ mod p for 0 < a < p (extended Euclid). */
+/** a⁻¹ mod p for 0 < a < p < 2²⁵ (extended Euclid). */
 export function inverseModulo(a: number, p: number): number {
-  let [r0, r1, t0, t1] = [p, a, 0, 1];
+  let r0 = p;
+  let r1 = a;
+  let t0 = 0;
+  let t1 = 1;
   while (r1 !== 0) {
-    const quotient = Math.floor(r0 / r1);
-    [r0, r1] = [r1, r0 - quotient * r1];
-    [t0, t1] = [t1, t0 - quotient * t1];
+    const quotient = (r0 / r1) | 0;
+    const r2 = r0 - quotient * r1;
+    r0 = r1;
+    r1 = r2;
+    const t2 = t0 - quotient * t1;
+    t0 = t1;
+    t1 = t2;
   }
   return t0 < 0 ? t0 + p : t0;
 }

@@ -23,6 +23,24 @@ export function rational(n: bigint, d: bigint = 1n): Rational {
   return d < 0n ? { n: -n / divisor, d: -d / divisor } : { n: n / divisor, d: d / divisor };
 }
 
+/**
+ * n / d in lowest terms where d is positive, long, and every prime factor of it divides `base`: common factors are taken out by
+ * remainders modulo the short `base`, which is faster than a gcd of two long numbers.
+ */
+export function rationalOver(n: bigint, d: bigint, base: bigint): Rational {
+  if (n === 0n) return ZERO;
+  let [rest, left] = [n, d];
+  while (left !== 1n) {
+    const common = greatestCommonDivisor(base, absolute(rest % base));
+    const shared = common === 1n ? 1n : greatestCommonDivisor(common, left % common);
+    // A prime that divides both divides `base`, and so `shared`.
+    if (shared === 1n) break;
+    rest /= shared;
+    left /= shared;
+  }
+  return { n: rest, d: left };
+}
+
 /** a + b. Common denominators are found first, so that the gcds stay short (Henrici 1956, J. ACM 3). */
 export function addRationals(a: Rational, b: Rational): Rational {
   if (a.n === 0n) return b;

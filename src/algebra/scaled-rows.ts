@@ -47,6 +47,17 @@ export function scaledRows(matrix: SparseMatrix<Rational>): ScaledRows {
   return { rows, columns, rowStart, column, numerators, denominators };
 }
 
+/** Product of the denominators, and a number that all its prime factors divide: their least common multiple. */
+export function denominatorProduct({ denominators }: ScaledRows): { readonly scale: bigint; readonly base: bigint } {
+  let scale = 1n;
+  let base = 1n;
+  for (const d of denominators) {
+    scale *= d;
+    if (base % d !== 0n) base *= d / greatestCommonDivisor(base, d);
+  }
+  return { scale, base };
+}
+
 /** The image of the matrix modulo p, or null where p divides a denominator. */
 export function rowsModulo(matrix: ScaledRows, p: number): ModularRows | null {
   const { rows, rowStart, column, numerators, denominators } = matrix;
@@ -64,8 +75,11 @@ export function rowsModulo(matrix: ScaledRows, p: number): ModularRows | null {
   return { rows, rowStart, column, values };
 }
 
-/** A sum that has reached this is reduced before the next product below 2⁵⁰ is added, so that it stays exact below 2⁵³. */
+/** A sum that has reached this is reduced before the next product below 2⁵⁰ is added, so that it stays exact. */
 const FULL = 2 ** 52;
+
+/** As many products below 2⁵⁰ add up to less than 2⁵³. */
+const SUMMANDS = 8;
 
 /** target = M x modulo p. */
 export function multiplyModulo(M: ModularRows, x: Float64Array, target: Float64Array, p: number): void {
@@ -73,10 +87,13 @@ export function multiplyModulo(M: ModularRows, x: Float64Array, target: Float64A
   const inverse = 1 / p;
   for (let i = 0; i < rows; i++) {
     let sum = 0;
+    let k = rowStart[i]!;
     const end = rowStart[i + 1]!;
-    for (let k = rowStart[i]!; k < end; k++) {
-      sum += values[k]! * x[column[k]!]!;
+    const short = Math.min(end, k + SUMMANDS);
+    for (; k < short; k++) sum += values[k]! * x[column[k]!]!;
+    for (; k < end; k++) {
       if (sum >= FULL) sum = reduce(sum, p, inverse);
+      sum += values[k]! * x[column[k]!]!;
     }
     target[i] = reduce(sum, p, inverse);
   }
@@ -87,28 +104,26 @@ export function innerProductModulo(x: Float64Array, y: Float64Array, p: number):
   const inverse = 1 / p;
   let sum = 0;
   for (let i = 0; i < x.length; i++) {
-    sum += x[i]! * y[i]!;
     if (sum >= FULL) sum = reduce(sum, p, inverse);
+    sum += x[i]! * y[i]!;
   }
   return reduce(sum, p, inverse);
 }
 
 /**
- * Bits of a bound on the coefficients of det(s diag(δ) − N), N the whole numbers of the rows, δ their denominators on the
- * diagonal (0 below `states`): the product of the rows' lengths on |s| = 1 (Hadamard 1893) bounds the determinant there, and
- * so each coefficient (Cauchy's estimate).
+ * For each row the bits of a bound on its length on |s| = 1 in s diag(δ) − N, N the whole numbers of the rows, δ their
+ * denominators on the diagonal of the first `states` rows. The product of the lengths bounds the determinant there (Hadamard
+ * 1893), and so each of its coefficients (Cauchy's estimate).
  */
-export function coefficientBits(matrix: ScaledRows, states: number): number {
-  let bits = 0;
-  for (let i = 0; i < matrix.rows; i++) {
-    let onDiagonal = i < states ? matrix.denominators[i]! : 0n;
+export function rowBits(matrix: ScaledRows, states: number): number[] {
+  return matrix.denominators.map((denominator, i) => {
+    let onDiagonal = i < states ? denominator : 0n;
     let squares = 0n;
     for (let k = matrix.rowStart[i]!; k < matrix.rowStart[i + 1]!; k++) {
       const magnitude = absolute(matrix.numerators[k]!);
       if (matrix.column[k] === i) onDiagonal += magnitude;
       else squares += magnitude * magnitude;
     }
-    bits += bitLength(squares + onDiagonal * onDiagonal) / 2;
-  }
-  return Math.ceil(bits);
+    return bitLength(squares + onDiagonal * onDiagonal) / 2;
+  });
 }

@@ -14,8 +14,8 @@ import {
   productOfPolynomials,
 } from './polynomial.ts';
 import { inverseModulo, primeAt, reduce, residue } from './primes.ts';
-import { ONE, type Rational, rational, ZERO } from './rational.ts';
-import { coefficientBits, multiplyModulo, rowsModulo, type ScaledRows, scaledRows } from './scaled-rows.ts';
+import { ONE, type Rational, rationalOver, ZERO } from './rational.ts';
+import { denominatorProduct, multiplyModulo, rowBits, rowsModulo, type ScaledRows, scaledRows } from './scaled-rows.ts';
 import { entryAt, type SparseMatrix } from './sparse-matrix.ts';
 import { principalSubmatrix } from './strong-components.ts';
 
@@ -33,39 +33,57 @@ export function transferNumerators(
   characteristic: Polynomial,
 ): Polynomial[][] {
   const forward = successors(A);
-  const fromInput = Array.from({ length: B.columns }, (_, j) => reached(forward, rowsInColumn(B, j)));
   const toOutput = Array.from({ length: C.rows }, (_, i) => reached(A, columnsInRow(C, i)));
   const parts = new Map<string, Part>();
-  const partOf = (states: readonly number[]): Part => {
-    const key = states.join(' ');
-    const part = parts.get(key) ?? madePart(A, states, characteristic);
-    parts.set(key, part);
-    return part;
-  };
-  return toOutput.map((ends, i) =>
-    fromInput.map((begins, j) => {
-      const states = Array.from({ length: A.rows }, (_, k) => k).filter(k => begins[k] === 1 && ends[k] === 1);
-      const direct = entryAt(D, i, j, ZERO);
-      const part = partOf(states);
-      const b = states.map(k => entryAt(B, k, j, ZERO));
-      const c = states.map(k => entryAt(C, i, k, ZERO));
-      return productOfPolynomials([channelNumerator(part, b, c, direct), part.rest]);
-    }),
-  );
+  const table = toOutput.map(() => new Array<Polynomial>(B.columns).fill([]));
+  for (let j = 0; j < B.columns; j++) {
+    const begins = reached(forward, rowsInColumn(B, j));
+    for (const { states, outputs } of groupedByStates(begins, toOutput)) {
+      const key = states.join(' ');
+      const part = parts.get(key) ?? madePart(A, states, characteristic);
+      parts.set(key, part);
+      const system = bordered(part.A, states, outputs, { B, C, D, input: j });
+      numeratorsOf(part, system, outputs.length).forEach((numerator, k) => {
+        table[outputs[k]!]![j] = productOfPolynomials([numerator, part.rest]);
+      });
+    }
+  }
+  return table;
 }
 
 /** The states of a channel: their matrix, its characteristic polynomial, and that of the states left out. */
 interface Part {
   readonly A: SparseMatrix<Rational>;
-  readonly characteristic: Polynomial;
+  /** The characteristic polynomial as whole numbers over one denominator. */
+  readonly numerators: readonly bigint[];
+  readonly denominator: bigint;
   readonly rest: Polynomial;
+  /** Its images modulo primes, filled as they are needed. */
+  readonly images: Map<number, Float64Array>;
 }
 
 function madePart(A: SparseMatrix<Rational>, states: readonly number[], characteristic: Polynomial): Part {
-  if (states.length === A.rows) return { A, characteristic, rest: [ONE] };
+  const isWhole = states.length === A.rows;
   const inner = principalSubmatrix(A, states);
-  const own = characteristicPolynomial(inner);
-  return { A: inner, characteristic: own, rest: dividePolynomials(characteristic, own).quotient };
+  const own = isWhole ? characteristic : characteristicPolynomial(inner);
+  const rest = isWhole ? [ONE] : dividePolynomials(characteristic, own).quotient;
+  return { A: inner, ...overOneDenominator(own), rest, images: new Map() };
+}
+
+/** The outputs put together by the states that lie between the input and them. */
+function groupedByStates(
+  begins: Uint8Array,
+  toOutput: readonly Uint8Array[],
+): { readonly states: readonly number[]; readonly outputs: readonly number[] }[] {
+  const groups = new Map<string, { readonly states: readonly number[]; readonly outputs: number[] }>();
+  toOutput.forEach((ends, output) => {
+    const states = Array.from(begins.keys()).filter(k => begins[k] === 1 && ends[k] === 1);
+    const key = states.join(' ');
+    const group = groups.get(key);
+    if (group === undefined) groups.set(key, { states, outputs: [output] });
+    else group.outputs.push(output);
+  });
+  return [...groups.values()];
 }
 
 /** The pattern of Aᵀ: row k lists the states that state k feeds. */
@@ -107,96 +125,125 @@ function columnsInRow(C: SparseMatrix<Rational>, i: number): number[] {
   return Array.from(C.column.subarray(C.rowStart[i]!, C.rowStart[i + 1]!));
 }
 
-/**
- * The numerator of c(sI − A)⁻¹b + d: det [sI − A, −b; c, d], brought to whole numbers row by row, which also bounds its
- * coefficients (Hadamard 1893).
- */
-function channelNumerator(
-  { A, characteristic }: Part,
-  b: readonly Rational[],
-  c: readonly Rational[],
-  d: Rational,
-): Polynomial {
-  const n = A.rows;
-  const system = scaledRows(bordered(A, b, c, d));
-  const scale = system.denominators.reduce((product, denominator) => product * denominator, 1n);
-  const overAll = overOneDenominator(characteristic);
-  const images: Float64Array[] = [];
-  const primes: number[] = [];
-  // One bit for the sign, one for the rounding of the logarithms.
-  let missingBits = coefficientBits(system, n) + 2;
-  for (let i = 0; missingBits > 0; i++) {
-    const p = primeAt(i);
-    const markov = markovParameters(system, p);
-    if (markov === null) continue;
-    const factor = reduce(residue(scale, p) * inverseModulo(residue(overAll.denominator, p), p), p, 1 / p);
-    const image = Float64Array.from(overAll.numerators, coefficient =>
-      reduce(residue(coefficient, p) * factor, p, 1 / p),
-    );
-    images.push(productStart(image, markov, p));
-    primes.push(p);
-    missingBits -= Math.log2(p);
-  }
-  return polynomial(integersFromResidues(images, primes).map(coefficient => rational(coefficient, scale)));
+/** One input with its columns of B and D, and the rows of C and D to choose from. */
+interface Borders {
+  readonly B: SparseMatrix<Rational>;
+  readonly C: SparseMatrix<Rational>;
+  readonly D: SparseMatrix<Rational>;
+  readonly input: number;
 }
 
-/** [A, b; c, d]. */
+/** [A, b; C, d] for the given states, outputs and the one input. */
 function bordered(
   A: SparseMatrix<Rational>,
-  b: readonly Rational[],
-  c: readonly Rational[],
-  d: Rational,
+  states: readonly number[],
+  outputs: readonly number[],
+  { B, C, D, input }: Borders,
 ): SparseMatrix<Rational> {
   const n = A.rows;
   const column: number[] = [];
   const values: Rational[] = [];
-  const rowStart = new Int32Array(n + 2);
+  const rowStart = [0];
   const push = (j: number, value: Rational): void => {
     if (value.n === 0n) return;
     column.push(j);
     values.push(value);
   };
-  for (let i = 0; i < n; i++) {
+  states.forEach((state, i) => {
     for (let k = A.rowStart[i]!; k < A.rowStart[i + 1]!; k++) push(A.column[k]!, A.values[k]!);
-    push(n, b[i] ?? ZERO);
-    rowStart[i + 1] = values.length;
-  }
-  c.forEach((value, j) => {
-    push(j, value);
+    push(n, entryAt(B, state, input, ZERO));
+    rowStart.push(values.length);
   });
-  push(n, d);
-  rowStart[n + 1] = values.length;
-  return { rows: n + 1, columns: n + 1, rowStart, column: Int32Array.from(column), values };
+  for (const output of outputs) {
+    states.forEach((state, j) => {
+      push(j, entryAt(C, output, state, ZERO));
+    });
+    push(n, entryAt(D, output, input, ZERO));
+    rowStart.push(values.length);
+  }
+  const rows = n + outputs.length;
+  return { rows, columns: n + 1, rowStart: Int32Array.from(rowStart), column: Int32Array.from(column), values };
 }
 
-/** d, cb, cAb, … cAⁿ⁻¹b modulo p from [A, b; c, d], or null where p divides a denominator. */
-function markovParameters(system: ScaledRows, p: number): Float64Array | null {
+/**
+ * The numerators of c(sI − A)⁻¹b + d for the outputs' rows [c, d] of the system: each is det [sI − A, −b; c, d], brought to
+ * whole numbers row by row, which also bounds its coefficients.
+ */
+function numeratorsOf(part: Part, matrix: SparseMatrix<Rational>, outputs: number): Polynomial[] {
+  const n = part.A.rows;
+  const system = scaledRows(matrix);
+  const states = denominatorProduct({ ...system, denominators: system.denominators.slice(0, n) });
+  const rows = Array.from({ length: outputs }, (_, k) => system.denominators[n + k]!);
+  const images = rows.map((): Float64Array[] => []);
+  const primes: number[] = [];
+  // One bit for the sign, one for the rounding of the logarithms.
+  let missingBits = numeratorBits(system, n) + 2;
+  for (let i = 0; missingBits > 0; i++) {
+    const p = primeAt(i);
+    const markov = markovParameters(system, n, p);
+    if (markov === null) continue;
+    const characteristic = characteristicImage(part, p);
+    markov.forEach((parameters, k) => {
+      const scale = reduce(residue(states.scale, p) * residue(rows[k]!, p), p, 1 / p);
+      images[k]!.push(productStart(characteristic, parameters, scale, p));
+    });
+    primes.push(p);
+    missingBits -= Math.log2(p);
+  }
+  return images.map((image, k) => {
+    const [scale, base] = [states.scale * rows[k]!, states.base * rows[k]!];
+    return polynomial(integersFromResidues(image, primes).map(x => rationalOver(x, scale, base)));
+  });
+}
+
+/** Bits of the longest numerator: those of the states' rows and of the longest output row. */
+function numeratorBits(system: ScaledRows, n: number): number {
+  const bits = rowBits(system, n);
+  const inRows = (from: number, to: number): number[] => bits.slice(from, to);
+  return inRows(0, n).reduce((sum, x) => sum + x, 0) + Math.max(...inRows(n, system.rows));
+}
+
+/** The characteristic polynomial modulo p, monic; p divides no denominator of the matrix and so none of its own. */
+function characteristicImage({ numerators, denominator, images }: Part, p: number): Float64Array {
+  const kept = images.get(p);
+  if (kept !== undefined) return kept;
+  const factor = inverseModulo(residue(denominator, p), p);
+  const image = Float64Array.from(numerators, x => reduce(residue(x, p) * factor, p, 1 / p));
+  images.set(p, image);
+  return image;
+}
+
+/** d, cb, cAb, … cAⁿ⁻¹b modulo p for each output row [c, d], or null where p divides a denominator. */
+function markovParameters(system: ScaledRows, n: number, p: number): Float64Array[] | null {
   const image = rowsModulo(system, p);
   if (image === null) return null;
-  const n = system.rows - 1;
-  const parameters = new Float64Array(n + 1);
-  // [A, b; c, d] times the unit vector of the input gives [b; d]; times [Aᵏb; 0] it gives [Aᵏ⁺¹b; cAᵏb].
-  let x: Float64Array = new Float64Array(n + 1);
-  let next: Float64Array = new Float64Array(n + 1);
+  const parameters = Array.from({ length: system.rows - n }, () => new Float64Array(n + 1));
+  // [A, b; C, d] times the unit vector of the input gives [b; d]; times [Aᵏb; 0] it gives [Aᵏ⁺¹b; CAᵏb].
+  let x: Float64Array = new Float64Array(system.rows);
+  let next: Float64Array = new Float64Array(system.rows);
   x[n] = 1;
   for (let k = 0; k <= n; k++) {
     multiplyModulo(image, x, next, p);
-    parameters[k] = next[n]!;
+    parameters.forEach((list, i) => {
+      list[k] = next[n + i]!;
+    });
     next[n] = 0;
     [x, next] = [next, x];
   }
   return parameters;
 }
 
-/** The n + 1 coefficients of f(s) · (h₀ + h₁/s + h₂/s² + …) down to the constant one, modulo p; f of degree n. */
-function productStart(f: Float64Array, h: Float64Array, p: number): Float64Array {
+/** The n + 1 coefficients of scale · f(s) · (h₀ + h₁/s + h₂/s² + …) down to the constant one, modulo p; f of degree n. */
+function productStart(f: Float64Array, h: Float64Array, scale: number, p: number): Float64Array {
   const inverse = 1 / p;
-  return f.map((_, power) => {
+  const product = new Float64Array(f.length);
+  for (let power = 0; power < f.length; power++) {
     let sum = 0;
     for (let q = 0; q <= power; q++) {
       sum += f[q]! * h[power - q]!;
       if ((q & 3) === 3) sum = reduce(sum, p, inverse);
     }
-    return reduce(sum, p, inverse);
-  });
+    product[power] = reduce(reduce(sum, p, inverse) * scale, p, inverse);
+  }
+  return product;
 }
