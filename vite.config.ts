@@ -78,5 +78,7 @@ export default defineConfig(({ mode }) => ({
   test: {
     include: ['tests/{architecture,unit,reference,property}/**/*.test.ts'],
     environment: 'node',
+    /** Some tests start processes of their own; two busy cores take their time. */
+    testTimeout: 30_000,
   },
 }));

@@ -1,7 +1,7 @@
 /**
- * Weighs the first load of the built page: what has to arrive before there is a sheet with its matrices, compressed as
- * servers send it (gzip). The page, its scripts and styles, the worker and what they import; not what is imported on demand,
- * nor fonts, without which the text is readable. Fails above the limit.
+ * Weighs the first load of the built page: what has to arrive before the sheet can be drawn on and the derivation run,
+ * compressed as servers send it (gzip). The page, its scripts and styles, the worker and what they import; not what is
+ * imported on demand (results column, dialogs, analyses), nor fonts, without which the text is readable. Fails above the limit.
  */
 
 import { readFileSync } from 'node:fs';

@@ -39,5 +39,7 @@ export const LIBRARY_ROOMS: Readonly<Record<string, readonly string[]>> = {
   'react-dom': ['ui'],
   reactflow: ['ui'],
   valibot: ['diagram'],
+  /** Made by the build: where the worker's file is. */
+  virtual: ['ui'],
   zustand: ['ui'],
 };

@@ -1,8 +1,8 @@
 /** The shapes of the sheet's geometry, routes and lines of text as SVG elements. */
 
 import { SCRIPT_SCALE, SCRIPT_SHIFT, type Shape, type TextShape } from '../../diagram/geometry/index.ts';
+import type { Point } from '../../diagram/index.ts';
 import type { Route } from '../../diagram/routing/index.ts';
-import type { Point } from '../../diagram/types.ts';
 import type { Span } from '../../expression/index.ts';
 import { coordinate, element, escaped } from './markup.ts';
 

@@ -13,8 +13,8 @@ import {
   sheetBounds,
   sheetGeometry,
 } from '../../diagram/geometry/index.ts';
+import type { Diagram, Sheet } from '../../diagram/index.ts';
 import { type Routes, routeWires } from '../../diagram/routing/index.ts';
-import type { Diagram, Sheet } from '../../diagram/types.ts';
 import { oneLine } from '../one-line.ts';
 import { coordinate, element, escaped } from './markup.ts';
 import { dotMarkup, shapeMarkup, wireMarkup } from './shape-markup.ts';

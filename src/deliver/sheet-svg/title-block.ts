@@ -1,7 +1,7 @@
 /** The title block with the parameter table, as an engineering drawing has it in its lower right corner. */
 
 import { type Face, textWidth } from '../../diagram/geometry/index.ts';
-import type { Diagram, Parameter } from '../../diagram/types.ts';
+import type { Diagram, Parameter } from '../../diagram/index.ts';
 import { nameSpans, type Span } from '../../expression/index.ts';
 import { oneLine } from '../one-line.ts';
 import { element } from './markup.ts';

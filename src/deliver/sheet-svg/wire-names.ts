@@ -1,8 +1,8 @@
 /** The name of a signal over its wire. */
 
 import { textWidth } from '../../diagram/geometry/index.ts';
+import type { Point, Wire } from '../../diagram/index.ts';
 import type { Route } from '../../diagram/routing/index.ts';
-import type { Point, Wire } from '../../diagram/types.ts';
 import { nameSpans } from '../../expression/index.ts';
 import { textMarkup } from './shape-markup.ts';
 
