@@ -66,7 +66,7 @@ export function denseOf(matrix: SparseMatrix<number>): DenseMatrix {
 }
 
 /** The rows and columns asked for, written out. */
-export function denseSelection(
+function denseSelection(
   matrix: SparseMatrix<number>,
   rows: readonly number[],
   columns: readonly number[],

@@ -21,7 +21,7 @@ export interface FrequencyResponse {
 }
 
 /** Zeros, poles and gain of a transfer function: gain · 2^gainExponent · ∏(s − zero) / ∏(s − pole). */
-export interface ZeroPoleGain {
+interface ZeroPoleGain {
   readonly zeros: readonly Root[];
   readonly poles: readonly Root[];
   /** gain · 2^gainExponent is the leading coefficient, which alone may overflow a double; 0 for the zero channel. */
@@ -55,7 +55,7 @@ export function frequencyResponse(
 type Response = (omega: number) => readonly [number, number] | null;
 
 /** The certified factors of the reduced transfer function; null where they could not be separated. */
-export function zeroPoleGain(exact: ExactModel, output: number, input: number): ZeroPoleGain | null {
+function zeroPoleGain(exact: ExactModel, output: number, input: number): ZeroPoleGain | null {
   const kept = remembered(known, exact, () => new Map<string, ZeroPoleGain | null>());
   const key = `${output} ${input}`;
   const found = kept.get(key);

@@ -5,7 +5,6 @@
  */
 
 export type { Effort } from './exact-model.ts';
-export { EXACT_LIMIT } from './exact-model.ts';
 export type { Excitation } from './excitation.ts';
 export type { FrequencyResponse } from './frequency-response.ts';
 export { frequencyResponse } from './frequency-response.ts';

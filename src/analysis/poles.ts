@@ -60,6 +60,6 @@ function rootsOfProduct(factors: readonly Polynomial[]): readonly Root[] | null 
 }
 
 /** The model file's order: real part descending, then imaginary part descending. */
-export function byRealThenImaginary(a: Root, b: Root): number {
+function byRealThenImaginary(a: Root, b: Root): number {
   return b.re - a.re || b.im - a.im;
 }

@@ -43,7 +43,7 @@ type Verdict = 'stable' | 'marginal' | 'unstable';
 const verdicts = new WeakMap<ExactModel, { readonly verdict: Verdict | null }>();
 
 /** The verdict by the signs of certified real parts; null where the poles could not be separated. */
-export function exactVerdict(exact: ExactModel): Verdict | null {
+function exactVerdict(exact: ExactModel): Verdict | null {
   return remembered(verdicts, exact, () => {
     const poles = exactPoles(exact);
     if (poles === null) return { verdict: null };

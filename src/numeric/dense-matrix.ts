@@ -30,15 +30,6 @@ export function copyMatrix({ rows, columns, data }: DenseMatrix): DenseMatrix {
   return { rows, columns, data: data.slice() };
 }
 
-/** The transposed matrix, columns × rows. */
-export function transposed({ rows, columns, data }: DenseMatrix): DenseMatrix {
-  const result = zeroMatrix(columns, rows);
-  for (let i = 0; i < rows; i++) {
-    for (let j = 0; j < columns; j++) result.data[j * rows + i] = data[i * columns + j]!;
-  }
-  return result;
-}
-
 /** ‖A‖₁, the largest absolute column sum; 0 for an empty matrix. */
 export function oneNorm({ rows, columns, data }: DenseMatrix): number {
   const sums = new Float64Array(columns);

@@ -38,7 +38,7 @@ export function eigenvalues(A: DenseMatrix): Eigenvalues | null {
 }
 
 /** Eigenvalues of an upper Hessenberg H (n × n), in the order in which they stand on its diagonal; null as above. */
-export function hessenbergEigenvalues(H: DenseMatrix): Eigenvalues | null {
+function hessenbergEigenvalues(H: DenseMatrix): Eigenvalues | null {
   const n = H.rows;
   const h = copyMatrix(H).data;
   const values = { re: new Float64Array(n), im: new Float64Array(n) };

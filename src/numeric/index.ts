@@ -6,20 +6,18 @@
 export type { Balanced } from './balance.ts';
 export { balance, balanceSystem } from './balance.ts';
 export type { ComplexMatrix } from './complex-lu.ts';
-export { quotient, solveComplex, zeroComplexMatrix } from './complex-lu.ts';
+export { quotient, solveComplex } from './complex-lu.ts';
 export { irreducibleBlocks, submatrix } from './components.ts';
 export type { DenseMatrix } from './dense-matrix.ts';
 export {
-  copyMatrix,
   denseFromRows,
   multiplyMatrices,
   multiplyVector,
   oneNorm,
-  transposed,
   zeroMatrix,
 } from './dense-matrix.ts';
 export type { Eigenvalues } from './eigenvalues.ts';
-export { eigenvalues, hessenbergEigenvalues } from './eigenvalues.ts';
+export { eigenvalues } from './eigenvalues.ts';
 export type { ExponentialChain } from './exponential.ts';
 export { exponentialChain, exponentialMinusIdentity } from './exponential.ts';
 export type { HessenbergSystem } from './hessenberg.ts';

@@ -6,7 +6,7 @@ import type { SignalName, StateSpace, SystemMatrices } from '../../../src/compil
 export type Rows = readonly (readonly (string | number)[])[];
 
 /** The sparse matrix with these rows; `columns` is needed where there is no row. */
-export function rationalMatrix(rows: Rows, columns: number): SparseMatrix<Rational> {
+function rationalMatrix(rows: Rows, columns: number): SparseMatrix<Rational> {
   const read = (entry: string | number): Rational => {
     const value = parseRational(String(entry));
     if (value === null) throw new Error(`${entry} is no number`);
