@@ -44,4 +44,34 @@ export { entryAt, fromRows, toRows } from './sparse-matrix.ts';
 export type { SquareFreeFactor } from './square-free.ts';
 export { squareFreeFactors } from './square-free.ts';
 export { principalSubmatrix, strongComponents } from './strong-components.ts';
+export type {
+  EffortLimit,
+  EffortLimits,
+  EffortOutcome,
+  Formula,
+  FormulaOptions,
+  NameSpelling,
+  RationalFunction,
+  SymbolicField,
+  SymbolicPolynomial,
+  SymbolicSolution,
+} from './symbolic/index.ts';
+export {
+  createSymbolicField,
+  DEFAULT_LIMITS,
+  Effort,
+  EffortSpent,
+  evaluateAt,
+  formulaC,
+  formulaLatex,
+  formulaMathML,
+  formulaOf,
+  formulaPython,
+  formulaText,
+  functionLength,
+  rationalFunction,
+  solveSymbolic,
+  substitute,
+  withinEffort,
+} from './symbolic/index.ts';
 export { transferNumerators } from './transfer-numerators.ts';
