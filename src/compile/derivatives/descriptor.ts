@@ -5,6 +5,7 @@
 
 import type { Field } from '../../algebra/index.ts';
 import type { Equations, RowStore } from '../equations/index.ts';
+import type { Arithmetic } from '../quantities/index.ts';
 
 /** Coefficients by column; zeros are not kept. */
 export type Row<T> = Map<number, T>;
@@ -14,7 +15,7 @@ export type Row<T> = Map<number, T>;
  * w, then the m inputs, then their first derivatives, their second, and so on.
  */
 export interface Descriptor<T> {
-  readonly field: Field<T>;
+  readonly arithmetic: Arithmetic<T>;
   readonly states: number;
   readonly differentiated: number;
   readonly inputs: number;
@@ -27,7 +28,8 @@ export interface Descriptor<T> {
 
 /** The equations as reduced to knowns, v̇ = w added, and 0 = (what v is) − v as constraints. */
 export function descriptorOf<T>(equations: Equations<T>, reduced: RowStore<T>): Descriptor<T> {
-  const { field } = equations.arithmetic;
+  const { arithmetic } = equations;
+  const { field } = arithmetic;
   const [n, q, m] = [equations.states.length, equations.differentiated.length, equations.inputs.length];
   const row = (i: number): Row<T> => {
     const entries: Row<T> = new Map();
@@ -45,7 +47,7 @@ export function descriptorOf<T>(equations: Equations<T>, reduced: RowStore<T>): 
     constraints.push(row(n + k).set(n + k, field.negate(field.one)));
   }
   const outputs = equations.outputs.map((_, o) => row(n + q + o));
-  return { field, states: n, differentiated: q, inputs: m, motion, constraints, outputs };
+  return { arithmetic, states: n, differentiated: q, inputs: m, motion, constraints, outputs };
 }
 
 /** First column of the derivatives w. */
@@ -59,31 +61,23 @@ export function firstInput<T>({ states, differentiated }: Descriptor<T>): number
 }
 
 /** Adds factor × other to a row. */
-export function addMultiple<T>(field: Field<T>, row: Row<T>, other: Row<T>, factor: T): void {
+export function addMultiple<T>(arithmetic: Arithmetic<T>, row: Row<T>, other: Row<T>, factor: T): void {
+  const { field } = arithmetic;
   for (const [column, value] of other) {
     const change = field.multiply(factor, value);
     const before = row.get(column);
-    const after = before === undefined ? change : sumOf(field, before, change);
+    const after = before === undefined ? change : arithmetic.sum(before, change);
     if (field.isZero(after)) row.delete(column);
     else row.set(column, after);
   }
 }
 
-/** Digits of a sum in doubles that cancellation has to leave: what is smaller is rounding and counts as zero. */
-const CANCELLED = 16 * Number.EPSILON;
-
-function sumOf<T>(field: Field<T>, a: T, b: T): T {
-  const sum = field.add(a, b);
-  const lost = typeof sum === 'number' && typeof a === 'number' && Math.abs(sum) <= CANCELLED * Math.abs(a);
-  return lost ? field.zero : sum;
-}
-
 /** Puts `replacement` in the place of a column, in one row. */
-export function substitute<T>(field: Field<T>, row: Row<T>, column: number, replacement: Row<T>): void {
+export function substitute<T>(arithmetic: Arithmetic<T>, row: Row<T>, column: number, replacement: Row<T>): void {
   const factor = row.get(column);
   if (factor === undefined) return;
   row.delete(column);
-  addMultiple(field, row, replacement, factor);
+  addMultiple(arithmetic, row, replacement, factor);
 }
 
 /** The row's columns as a function of one of them: −(rest) / coefficient. */

@@ -36,7 +36,7 @@ export function reduceIndex<T>(descriptor: Descriptor<T>): readonly number[] {
 
 /** Solves constraints for derivatives until none holds one; those solved are gone from everything. */
 function solveForDerivatives<T>(descriptor: Descriptor<T>, open: Set<number>): void {
-  const { field } = descriptor;
+  const { field } = descriptor.arithmetic;
   for (;;) {
     const found = bestPivot(descriptor, descriptor.constraints, column => open.has(column));
     if (found === null) return;
@@ -55,7 +55,7 @@ interface Place<T> {
 
 /** The best pivot among the wanted columns of some rows: over an exact field the first of the shortest. */
 function bestPivot<T>(
-  { field }: Descriptor<T>,
+  { arithmetic: { field } }: Descriptor<T>,
   rows: readonly Row<T>[],
   isWanted: (column: number) => boolean,
 ): Place<T> | null {
@@ -77,7 +77,8 @@ function bestPivot<T>(
  * adds the constraint's derivative with respect to time; false where it binds none.
  */
 function removeState<T>(descriptor: Descriptor<T>, constraint: Row<T>, bound: readonly Row<T>[]): boolean {
-  const { field, states, motion } = descriptor;
+  const { arithmetic, states, motion } = descriptor;
+  const { field } = arithmetic;
   const pivot =
     bestPivot(descriptor, [constraint], column => column >= states && motion.has(column)) ??
     bestPivot(descriptor, [constraint], column => motion.has(column));
@@ -86,7 +87,7 @@ function removeState<T>(descriptor: Descriptor<T>, constraint: Row<T>, bound: re
   const solved = solvedFor(field, constraint, column);
   const derivative = new Map(motion.get(column));
   motion.delete(column);
-  addMultiple(field, derivative, timeDerivative(descriptor, solved), field.negate(field.one));
+  addMultiple(arithmetic, derivative, timeDerivative(descriptor, solved), field.negate(field.one));
   descriptor.constraints.push(derivative);
   const others = bound.filter(row => row !== constraint);
   substituteEverywhere(descriptor, [...others, ...descriptor.constraints], column, solved);
@@ -95,23 +96,23 @@ function removeState<T>(descriptor: Descriptor<T>, constraint: Row<T>, bound: re
 
 /** Of a row in states and inputs: each state's motion, each input's next derivative. */
 function timeDerivative<T>(descriptor: Descriptor<T>, row: Row<T>): Row<T> {
-  const { field, motion, inputs } = descriptor;
+  const { arithmetic, motion, inputs } = descriptor;
   const result: Row<T> = new Map();
   for (const [column, value] of row) {
     const own = motion.get(column);
-    if (own !== undefined) addMultiple(field, result, own, value);
-    else addMultiple(field, result, new Map([[column + inputs, field.one]]), value);
+    if (own !== undefined) addMultiple(arithmetic, result, own, value);
+    else addMultiple(arithmetic, result, new Map([[column + inputs, arithmetic.field.one]]), value);
   }
   return result;
 }
 
 function substituteEverywhere<T>(
-  { field, motion, outputs }: Descriptor<T>,
+  { arithmetic, motion, outputs }: Descriptor<T>,
   constraints: readonly Row<T>[],
   column: number,
   replacement: Row<T>,
 ): void {
-  for (const row of motion.values()) substitute(field, row, column, replacement);
-  for (const row of outputs) substitute(field, row, column, replacement);
-  for (const row of constraints) substitute(field, row, column, replacement);
+  for (const row of motion.values()) substitute(arithmetic, row, column, replacement);
+  for (const row of outputs) substitute(arithmetic, row, column, replacement);
+  for (const row of constraints) substitute(arithmetic, row, column, replacement);
 }

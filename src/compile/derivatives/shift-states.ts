@@ -1,6 +1,6 @@
 /** Removes the derivatives of inputs from ξ̇ = A ξ + B u + B₁ u̇ + … by shifting states. */
 
-import type { Field } from '../../algebra/index.ts';
+import type { Arithmetic } from '../quantities/index.ts';
 import { addMultiple, type Descriptor, firstInput, type Row } from './descriptor.ts';
 
 /**
@@ -11,7 +11,7 @@ import { addMultiple, type Descriptor, firstInput, type Row } from './descriptor
  * @returns the columns of the states that were shifted, ascending.
  */
 export function shiftStates<T>(descriptor: Descriptor<T>): readonly number[] {
-  const { field, motion, outputs, inputs } = descriptor;
+  const { arithmetic, motion, outputs, inputs } = descriptor;
   const first = firstInput(descriptor);
   const rows = [...motion.values(), ...outputs];
   const shifted = new Set<number>();
@@ -22,7 +22,7 @@ export function shiftStates<T>(descriptor: Descriptor<T>): readonly number[] {
       const shift = takeColumns(row, from, from + inputs, inputs);
       if (shift.size > 0) shifts.set(state, shift);
     }
-    for (const row of rows) addShifts(field, row, shifts);
+    for (const row of rows) addShifts(arithmetic, row, shifts);
     for (const state of shifts.keys()) shifted.add(state);
   }
   return [...shifted].sort((a, b) => a - b);
@@ -50,9 +50,9 @@ function takeColumns<T>(row: Row<T>, from: number, to: number, inputs: number): 
 }
 
 /** ξ_i = z_i + shift_i in one row. */
-function addShifts<T>(field: Field<T>, row: Row<T>, shifts: ReadonlyMap<number, Row<T>>): void {
+function addShifts<T>(arithmetic: Arithmetic<T>, row: Row<T>, shifts: ReadonlyMap<number, Row<T>>): void {
   for (const [column, value] of [...row]) {
     const shift = shifts.get(column);
-    if (shift !== undefined) addMultiple(field, row, shift, value);
+    if (shift !== undefined) addMultiple(arithmetic, row, shift, value);
   }
 }

@@ -10,6 +10,7 @@ import type { RowStore } from './row-store.ts';
 
 export class RowAccumulator<T> {
   private readonly field: Field<T>;
+  private readonly sumOf: (a: T, b: T) => T;
   private readonly sum: Numbers<T>;
   /** 1 where a column is listed in `touched`. */
   private readonly listed: Uint8Array;
@@ -18,6 +19,7 @@ export class RowAccumulator<T> {
 
   constructor(arithmetic: Arithmetic<T>, columns: number) {
     this.field = arithmetic.field;
+    this.sumOf = arithmetic.sum;
     this.sum = arithmetic.allocate(columns);
     this.listed = new Uint8Array(columns);
     this.touched = new Int32Array(columns);
@@ -26,7 +28,7 @@ export class RowAccumulator<T> {
   /** Adds one term. */
   add(column: number, value: T): void {
     if (this.listed[column] === 1) {
-      this.sum[column] = this.field.add(this.sum[column]!, value);
+      this.sum[column] = this.sumOf(this.sum[column]!, value);
       return;
     }
     this.listed[column] = 1;

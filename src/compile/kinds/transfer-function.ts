@@ -13,7 +13,7 @@ export function transferFunction<T>(block: TransferFunctionBlock, reader: Quanti
   const [numerator, denominator] = polynomials.value;
   if (numerator === undefined || denominator === undefined) throw new Error('two polynomials were read');
   if (denominator.coefficients.length === 0) {
-    return fail(problem('division-by-zero', `its denominator ${block.denominator} is zero. Give it a value.`));
+    return fail(problem('division-by-zero', `its denominator ${block.denominator} is zero. Give it another value.`));
   }
   return ok({
     ...companionForm(reader.arithmetic.field, numerator.coefficients, denominator.coefficients),
@@ -25,5 +25,5 @@ function lowering<T>(which: string, { coefficients, lowered }: PolynomialReading
   if (lowered === 0) return [];
   const order = coefficients.length - 1;
   const left = order < 0 ? 'it is zero' : `its order is ${order}, not ${order + lowered}`;
-  return [`the ${which}'s leading coefficient comes out as zero, so ${left}.`];
+  return [`the ${which}’s leading coefficient comes out as zero, so ${left}.`];
 }

@@ -22,6 +22,8 @@ export interface Numbers<T> {
 
 export interface Arithmetic<T> {
   readonly field: Field<T>;
+  /** a + b, and zero where so little is left of both that it can only be rounding. */
+  sum(a: T, b: T): T;
   /** A buffer of zeros. */
   allocate(length: number): Numbers<T>;
   /** The nearest double. */
@@ -47,15 +49,26 @@ export interface NumericArithmetic<T> extends Arithmetic<T> {
 /** Exact rationals. */
 export const rationalArithmetic: NumericArithmetic<Rational> = {
   field: rationalField,
+  sum: rationalField.add,
   allocate: length => new Array<Rational>(length).fill(ZERO),
   toDouble,
   magnitude: () => 1,
   fromValue: ({ exact, double }) => exact ?? rationalFromDouble(double),
 };
 
+/**
+ * A sum of doubles this small against its terms is their rounding: 0.1 · 3 − 0.3 is to be zero. A few units in the last
+ * place, as terms are products of rounded numbers.
+ */
+const CANCELLED = 16 * Number.EPSILON;
+
 /** Doubles. */
 export const doubleArithmetic: NumericArithmetic<number> = {
   field: doubleField,
+  sum: (a, b) => {
+    const sum = a + b;
+    return Math.abs(sum) <= CANCELLED * Math.abs(a) ? 0 : sum;
+  },
   allocate: length => new Float64Array(length),
   toDouble: value => value,
   magnitude: Math.abs,

@@ -81,7 +81,7 @@ function heldComparison(drawing: RawDrawing, { states, inputs, numeric }: StateS
 }
 
 function frequencyComparisons(drawing: RawDrawing, model: StateSpace): Comparison[] {
-  const drives = frequencyDrives(model, drawing);
+  const drives = frequencyDrives(drawing);
   return testFrequencies(model.numeric.A).map(s => jitter => {
     if (!drawing.isImproper && drawing.states !== model.states.length) return null;
     const answers = solveDrawing(drawing, s, drives, lawsOf(drawing, jitter));
@@ -96,9 +96,10 @@ function lawsOf({ blocks }: RawDrawing, jitter: Jitter | null): readonly RawLaw[
 }
 
 /** Each input by itself from rest, then random initial states without input; with differentiations from rest only. */
-function frequencyDrives({ states, inputs }: StateSpace, drawing: RawDrawing): Drive[] {
+function frequencyDrives(drawing: RawDrawing): Drive[] {
+  const { states, inputs } = drawing;
   const random = randomSigned(2);
-  const rest = new Array<number>(states.length).fill(0);
+  const rest = new Array<number>(states).fill(0);
   const drives = Array.from({ length: Math.min(inputs.length, SEPARATE_DRIVES) }, (_, drive) => ({
     inputs: inputs.map((_, j) => {
       if (j % SEPARATE_DRIVES !== drive) return 0;
@@ -106,7 +107,7 @@ function frequencyDrives({ states, inputs }: StateSpace, drawing: RawDrawing): D
     }),
     states: rest,
   }));
-  if (drawing.isImproper || states.length === 0) return drives;
+  if (drawing.isImproper || states === 0) return drives;
   return [...drives, { inputs: inputs.map(() => 0), states: initialStates(drawing) }];
 }
 

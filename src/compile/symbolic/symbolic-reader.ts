@@ -66,6 +66,7 @@ function symbolicArithmetic(field: SymbolicField, scope: Scope): Arithmetic<Rati
   };
   return {
     field,
+    sum: field.add,
     allocate: length => new Array<RationalFunction>(length).fill(field.zero),
     toDouble: value => evaluateAt(value, doubleField, valueOf) ?? Number.NaN,
     magnitude: () => 1,
