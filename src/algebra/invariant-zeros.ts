@@ -9,6 +9,7 @@ import type { Polynomial } from './polynomial.ts';
 import { negateRational, type Rational, ZERO } from './rational.ts';
 import { reduceRows, subtractMultiple } from './row-reduction.ts';
 import { fromRows, type SparseMatrix, toRows } from './sparse-matrix.ts';
+import { squareSystemDeterminant } from './square-zeros.ts';
 
 type Rows = readonly (readonly Rational[])[];
 
@@ -26,12 +27,25 @@ interface System {
 /**
  * The product of the invariant polynomials in the Smith form of [sI − A, −B; C, D], monic: its roots with their multiplicities
  * are the invariant zeros, decoupling zeros included; 1 where there is none. Right for any number of inputs and outputs and any
- * normal rank. O(n³) exact operations, and the characteristic polynomial of what is left.
+ * normal rank. A square model with a determinant that does not vanish takes the short way of `squareSystemDeterminant`; others
+ * O(n³) exact operations, and the characteristic polynomial of what is left.
  *
  * The reduction of Emami-Naeini & Van Dooren (1982, Automatica 18), here by exact elimination in place of orthogonal
  * transformations, so that every rank is decided.
  */
 export function invariantZeroPolynomial(
+  A: SparseMatrix<Rational>,
+  B: SparseMatrix<Rational>,
+  C: SparseMatrix<Rational>,
+  D: SparseMatrix<Rational>,
+): Polynomial {
+  const direct = B.columns === C.rows ? squareSystemDeterminant(besideAndBelow(A, B, C, D), A) : null;
+  if (direct !== null) return direct;
+  return reducedZeroPolynomial(A, B, C, D);
+}
+
+/** The same by the reduction alone, which any model can take. */
+export function reducedZeroPolynomial(
   A: SparseMatrix<Rational>,
   B: SparseMatrix<Rational>,
   C: SparseMatrix<Rational>,
@@ -48,6 +62,20 @@ export function invariantZeroPolynomial(
   };
   const square = withRegularRows(dual(withRegularRows(whole)));
   return characteristicPolynomial(fromRows(zeroDynamics(square), square.states, ({ n }) => n === 0n));
+}
+
+/** [A, B; C, D]. */
+function besideAndBelow(
+  A: SparseMatrix<Rational>,
+  B: SparseMatrix<Rational>,
+  C: SparseMatrix<Rational>,
+  D: SparseMatrix<Rational>,
+): SparseMatrix<Rational> {
+  const beside = (left: SparseMatrix<Rational>, right: SparseMatrix<Rational>): Rational[][] => {
+    const others = toRows(right, ZERO);
+    return toRows(left, ZERO).map((row, i) => [...row, ...others[i]!]);
+  };
+  return fromRows([...beside(A, B), ...beside(C, D)], A.rows + B.columns, ({ n }) => n === 0n);
 }
 
 /** The system with all matrices transposed, inputs and outputs exchanged. */

@@ -6,6 +6,7 @@
 
 import { characteristicPolynomial } from './characteristic-polynomial.ts';
 import { integersFromResidues } from './chinese-remainder.ts';
+import { markovParameters, numeratorModulo } from './markov-parameters.ts';
 import {
   dividePolynomials,
   overOneDenominator,
@@ -15,7 +16,7 @@ import {
 } from './polynomial.ts';
 import { inverseModulo, primeAt, reduce, residue } from './primes.ts';
 import { ONE, type Rational, rationalOver, ZERO } from './rational.ts';
-import { denominatorProduct, multiplyModulo, rowBits, rowsModulo, type ScaledRows, scaledRows } from './scaled-rows.ts';
+import { denominatorProduct, rowBits, rowsModulo, type ScaledRows, scaledRows } from './scaled-rows.ts';
 import { entryAt, type SparseMatrix } from './sparse-matrix.ts';
 import { principalSubmatrix } from './strong-components.ts';
 
@@ -180,12 +181,13 @@ function numeratorsOf(part: Part, matrix: SparseMatrix<Rational>, outputs: numbe
   let missingBits = numeratorBits(system, n) + 2;
   for (let i = 0; missingBits > 0; i++) {
     const p = primeAt(i);
-    const markov = markovParameters(system, n, p);
-    if (markov === null) continue;
+    const image = rowsModulo(system, p);
+    if (image === null) continue;
+    const markov = markovParameters(image, n, 0, p);
     const characteristic = characteristicImage(part, p);
     markov.forEach((parameters, k) => {
       const scale = reduce(residue(states.scale, p) * residue(rows[k]!, p), p, 1 / p);
-      images[k]!.push(productStart(characteristic, parameters, scale, p));
+      images[k]!.push(numeratorModulo(characteristic, parameters, scale, p));
     });
     primes.push(p);
     missingBits -= Math.log2(p);
@@ -211,39 +213,4 @@ function characteristicImage({ numerators, denominator, images }: Part, p: numbe
   const image = Float64Array.from(numerators, x => reduce(residue(x, p) * factor, p, 1 / p));
   images.set(p, image);
   return image;
-}
-
-/** d, cb, cAb, … cAⁿ⁻¹b modulo p for each output row [c, d], or null where p divides a denominator. */
-function markovParameters(system: ScaledRows, n: number, p: number): Float64Array[] | null {
-  const image = rowsModulo(system, p);
-  if (image === null) return null;
-  const parameters = Array.from({ length: system.rows - n }, () => new Float64Array(n + 1));
-  // [A, b; C, d] times the unit vector of the input gives [b; d]; times [Aᵏb; 0] it gives [Aᵏ⁺¹b; CAᵏb].
-  let x: Float64Array = new Float64Array(system.rows);
-  let next: Float64Array = new Float64Array(system.rows);
-  x[n] = 1;
-  for (let k = 0; k <= n; k++) {
-    multiplyModulo(image, x, next, p);
-    parameters.forEach((list, i) => {
-      list[k] = next[n + i]!;
-    });
-    next[n] = 0;
-    [x, next] = [next, x];
-  }
-  return parameters;
-}
-
-/** The n + 1 coefficients of scale · f(s) · (h₀ + h₁/s + h₂/s² + …) down to the constant one, modulo p; f of degree n. */
-function productStart(f: Float64Array, h: Float64Array, scale: number, p: number): Float64Array {
-  const inverse = 1 / p;
-  const product = new Float64Array(f.length);
-  for (let power = 0; power < f.length; power++) {
-    let sum = 0;
-    for (let q = 0; q <= power; q++) {
-      sum += f[q]! * h[power - q]!;
-      if ((q & 3) === 3) sum = reduce(sum, p, inverse);
-    }
-    product[power] = reduce(reduce(sum, p, inverse) * scale, p, inverse);
-  }
-  return product;
 }

@@ -14,6 +14,7 @@ import {
   scalePolynomial,
   ZERO,
 } from '../../../src/algebra/index.ts';
+import { reducedZeroPolynomial } from '../../../src/algebra/invariant-zeros.ts';
 import { rowsOf, sparse } from '../../arbitraries/matrices.ts';
 import { SEED } from '../../arbitraries/rationals.ts';
 
@@ -89,9 +90,27 @@ test('the invariant zeros are those of the Smith form, whatever the shape and th
     fc.property(model, ({ m, A, B, C, D }) => {
       const expected = determinantalDivisor(systemMatrix(A, B, C, D), A.length + m);
       const n = A.length;
-      expect(invariantZeroPolynomial(sparse(A, n), sparse(B, m), sparse(C, n), sparse(D, m))).toEqual(expected);
+      const model = [sparse(A, n), sparse(B, m), sparse(C, n), sparse(D, m)] as const;
+      expect(invariantZeroPolynomial(...model)).toEqual(expected);
+      expect(reducedZeroPolynomial(...model)).toEqual(expected);
     }),
     { seed: SEED, numRuns: 600 },
+  );
+});
+
+test('for square models of ordinary size both ways lead to the same polynomial', () => {
+  const square = fc
+    .tuple(fc.integer({ min: 4, max: 9 }), fc.integer({ min: 1, max: 3 }))
+    .chain(([n, m]) =>
+      fc.record({ m: fc.constant(m), A: rowsOf(n, n, 3), B: rowsOf(n, m, 3), C: rowsOf(m, n, 3), D: rowsOf(m, m, 4) }),
+    );
+  fc.assert(
+    fc.property(square, ({ m, A, B, C, D }) => {
+      const n = A.length;
+      const model = [sparse(A, n), sparse(B, m), sparse(C, n), sparse(D, m)] as const;
+      expect(invariantZeroPolynomial(...model)).toEqual(reducedZeroPolynomial(...model));
+    }),
+    { seed: SEED, numRuns: 200 },
   );
 });
 
