@@ -3,6 +3,7 @@
 import type { Field } from '../field.ts';
 import type { SymbolicPolynomial } from './polynomial.ts';
 import type { RationalFunction } from './rational-function.ts';
+import type { SymbolicField } from './symbolic-field.ts';
 
 /**
  * The value of f where each of its variables is given one.
@@ -20,7 +21,7 @@ export function evaluateAt<T>(f: RationalFunction, field: Field<T>, lookup: (nam
 export function substitute(
   f: RationalFunction,
   replacements: ReadonlyMap<string, RationalFunction>,
-  field: Field<RationalFunction> & { variable(name: string): RationalFunction },
+  field: SymbolicField,
 ): RationalFunction | null {
   return evaluateAt(f, field, name => replacements.get(name) ?? field.variable(name));
 }

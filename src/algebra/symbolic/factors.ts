@@ -18,6 +18,7 @@ import {
   scalePolynomial,
   signOf,
 } from './polynomial.ts';
+import { isProvenIrreducible } from './probe.ts';
 
 /** A factor of positive sign and content one, with how often it divides. */
 export interface RepeatedFactor {
@@ -88,6 +89,11 @@ function dividedOut(
 /** Adds the factors of p ^ multiplicity, p of positive sign and content one, to a list. */
 function split(p: SymbolicPolynomial, multiplicity: number, found: RepeatedFactor[], effort: Effort): void {
   if (isConstantPolynomial(p)) return;
+  const degrees = degreesOf(p);
+  if (degrees.every(degree => degree === 1) && isProvenIrreducible(p, effort)) {
+    record(p, multiplicity, found);
+    return;
+  }
   for (const name of p.variables) {
     const shared = commonDivisorOfAll([...spreadIn(p, name).values()], effort);
     if (isConstantPolynomial(shared)) continue;
@@ -95,7 +101,6 @@ function split(p: SymbolicPolynomial, multiplicity: number, found: RepeatedFacto
     split(withPositiveSign(knownQuotient(p, shared, effort)), multiplicity, found, effort);
     return;
   }
-  const degrees = degreesOf(p);
   const lowest = Math.min(...degrees);
   if (lowest === 1) {
     // Of degree one in a parameter and without a divisor free of it: irreducible.

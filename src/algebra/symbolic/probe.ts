@@ -141,6 +141,37 @@ function imagesAt(
   return images;
 }
 
+/**
+ * Whether p, in which no exponent is above one and that no number or variable divides, is proven irreducible by one look.
+ *
+ * Factors of such a polynomial share no variable, so where x and y are in different ones, the sum of all terms times that
+ * of those with x and y equals the product of those with x and those with y, at any point (Shpilka & Volkovich, ICALP
+ * 2010). That it does not for the first variable against every other proves that they are all in one factor.
+ */
+export function isProvenIrreducible(p: SymbolicPolynomial, effort: Effort): boolean {
+  const n = p.variables.length;
+  effort.spend(Math.ceil((p.coefficients.length * n) / VARIABLES_AN_OPERATION));
+  const points = pointsOf(n, 0);
+  const withVariable = new Array<number>(n).fill(0);
+  const withFirstAnd = new Array<number>(n).fill(0);
+  let total = 0;
+  for (let t = 0; t < p.coefficients.length; t++) {
+    let value = residue(p.coefficients[t]!);
+    for (let v = 0; v < n; v++) if (p.exponents[t * n + v] === 1) value = times(value, points[v]!);
+    total = plus(total, value);
+    const hasFirst = p.exponents[t * n] === 1;
+    for (let v = 0; v < n; v++) {
+      if (p.exponents[t * n + v] !== 1) continue;
+      withVariable[v] = plus(withVariable[v]!, value);
+      if (hasFirst) withFirstAnd[v] = plus(withFirstAnd[v]!, value);
+    }
+  }
+  for (let v = 1; v < n; v++) {
+    if (times(total, withFirstAnd[v]!) === times(withVariable[0]!, withVariable[v]!)) return false;
+  }
+  return true;
+}
+
 /** Degree of the greatest common divisor modulo the prime of two coefficient lists, not both zero (Euclid). */
 function divisorDegree(a: readonly number[], b: readonly number[], effort: Effort): number {
   let high = withoutLeadingZeros([...a]);
