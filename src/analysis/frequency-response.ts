@@ -5,7 +5,7 @@
 
 import { type Rational, rational, toDouble, ZERO } from '../algebra/index.ts';
 import type { StateSpace } from '../compile/index.ts';
-import { balanceSystem, hessenbergSystem, type ResponseSystem, responseAt } from '../numeric/index.ts';
+import { balanceSystem, hessenbergSystem, responseOf } from '../numeric/index.ts';
 import { channelSystem } from './channel-system.ts';
 import { characteristicOf, type Effort, type ExactModel, exactModel, remembered } from './exact-model.ts';
 import { exactPoles, type Root, rootsOf } from './poles.ts';
@@ -121,9 +121,9 @@ function scaleByPower(x: number, exponent: number): number {
 function byHessenberg(model: StateSpace, output: number, input: number): Response {
   const { A, B, C, D } = channelSystem(model.numeric, input, [output]);
   const balanced = balanceSystem(A, B, C);
-  const system: ResponseSystem = { ...hessenbergSystem(balanced.A, balanced.B, balanced.C), D };
+  const respond = responseOf({ ...hessenbergSystem(balanced.A, balanced.B, balanced.C), D });
   return omega => {
-    const value = responseAt(system, 0, omega);
+    const value = respond(0, omega);
     return value === null ? null : [value.re[0] ?? 0, value.im[0] ?? 0];
   };
 }

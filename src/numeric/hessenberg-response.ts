@@ -16,65 +16,77 @@ export interface ResponseSystem {
   readonly D: DenseMatrix;
 }
 
-/**
- * The response at s = re + j·im, p × m; null where s is an eigenvalue of H to the last bit of the elimination.
- */
-export function responseAt(system: ResponseSystem, re: number, im: number): ComplexMatrix | null {
-  const { A, B, C, D } = system;
-  const shifted = shiftedNegative(A, re, im);
-  const x: ComplexMatrix = {
-    rows: B.rows,
-    columns: B.columns,
-    re: B.data.slice(),
-    im: new Float64Array(B.data.length),
+/** The response at s = re + j·im, p × m; null where s is an eigenvalue of H to the last bit of the elimination. */
+export type ResponseFunction = (re: number, im: number) => ComplexMatrix | null;
+
+/** The system's response as a function of s, with room for its elimination set aside once. */
+export function responseOf(system: ResponseSystem): ResponseFunction {
+  const { A, B } = system;
+  const M = zeroComplexMatrix(A.rows, A.rows);
+  const x = zeroComplexMatrix(B.rows, B.columns);
+  return (re, im) => {
+    fillShifted(M, A, re, im);
+    x.re.set(B.data);
+    x.im.fill(0);
+    for (let k = 0; k < M.rows; k++) if (!eliminateBelow(M, x, k)) return null;
+    substituteBack(M, x);
+    return outputs(system, x);
   };
-  if (!eliminate(shifted, x)) return null;
-  substituteBack(shifted, x);
-  const result = zeroComplexMatrix(D.rows, D.columns);
-  for (let i = 0; i < C.rows; i++) {
-    for (let j = 0; j < x.columns; j++) {
-      let [sumRe, sumIm] = [0, 0];
-      for (let k = 0; k < C.columns; k++) {
-        const c = C.data[i * C.columns + k]!;
-        sumRe += c * x.re[k * x.columns + j]!;
-        sumIm += c * x.im[k * x.columns + j]!;
-      }
-      result.re[i * D.columns + j] = D.data[i * D.columns + j]! + sumRe;
-      result.im[i * D.columns + j] = sumIm;
-    }
-  }
-  return result;
 }
 
-function shiftedNegative({ rows: n, data }: DenseMatrix, re: number, im: number): ComplexMatrix {
-  const M = { rows: n, columns: n, re: data.map(entry => -entry), im: new Float64Array(n * n) };
+/** M ← sI − H. */
+function fillShifted(M: ComplexMatrix, { rows: n, data }: DenseMatrix, re: number, im: number): void {
+  for (let k = 0; k < n * n; k++) M.re[k] = -data[k]!;
+  M.im.fill(0);
   for (let i = 0; i < n; i++) {
     M.re[i * n + i]! += re;
     M.im[i * n + i] = im;
   }
-  return M;
 }
 
-/** Brings M to triangular form and x along; false where a pivot vanishes. */
-function eliminate(M: ComplexMatrix, x: ComplexMatrix): boolean {
+/** Clears the entry below the diagonal of column k, after exchanging its two rows for the larger pivot; false where that is zero. */
+function eliminateBelow(M: ComplexMatrix, x: ComplexMatrix, k: number): boolean {
   const n = M.rows;
-  for (let k = 0; k < n; k++) {
-    const [top, below] = [k * n + k, (k + 1) * n + k];
-    if (k + 1 < n) {
-      const sizeBelow = Math.abs(M.re[below]!) + Math.abs(M.im[below]!);
-      if (sizeBelow > Math.abs(M.re[top]!) + Math.abs(M.im[top]!)) {
-        swapWithNext(M, k, k);
-        swapWithNext(x, k, 0);
-      }
-    }
-    if (M.re[top] === 0 && M.im[top] === 0) return false;
-    if (k + 1 === n) break;
-    const [re, im] = quotient(M.re[below]!, M.im[below]!, M.re[top]!, M.im[top]!);
-    if (re === 0 && im === 0) continue;
-    subtractFromNext(M, k, re, im, k + 1);
-    subtractFromNext(x, k, re, im, 0);
+  const top = k * n + k;
+  const below = top + n;
+  const hasNext = k + 1 < n;
+  if (hasNext && sizeAt(M, below) > sizeAt(M, top)) {
+    swapWithNext(M, k, k);
+    swapWithNext(x, k, 0);
   }
+  if (sizeAt(M, top) === 0) return false;
+  if (!hasNext || sizeAt(M, below) === 0) return true;
+  const [re, im] = quotient(M.re[below]!, M.im[below]!, M.re[top]!, M.im[top]!);
+  subtractFromNext(M, k, re, im, k + 1);
+  subtractFromNext(x, k, re, im, 0);
   return true;
+}
+
+function sizeAt({ re, im }: ComplexMatrix, k: number): number {
+  return Math.abs(re[k]!) + Math.abs(im[k]!);
+}
+
+function swapWithNext({ columns, re, im }: ComplexMatrix, row: number, from: number): void {
+  const end = (row + 1) * columns;
+  for (let p = row * columns + from; p < end; p++) {
+    const keptRe = re[p]!;
+    const keptIm = im[p]!;
+    re[p] = re[p + columns]!;
+    im[p] = im[p + columns]!;
+    re[p + columns] = keptRe;
+    im[p + columns] = keptIm;
+  }
+}
+
+/** Row k + 1 ← row k + 1 − (a + j·b) · row k from column `from` on. */
+function subtractFromNext({ columns, re, im }: ComplexMatrix, k: number, a: number, b: number, from: number): void {
+  const end = (k + 1) * columns;
+  for (let p = k * columns + from; p < end; p++) {
+    const x = re[p]!;
+    const y = im[p]!;
+    re[p + columns]! -= a * x - b * y;
+    im[p + columns]! -= a * y + b * x;
+  }
 }
 
 function substituteBack(M: ComplexMatrix, x: ComplexMatrix): void {
@@ -82,9 +94,13 @@ function substituteBack(M: ComplexMatrix, x: ComplexMatrix): void {
   const m = x.columns;
   for (let j = 0; j < m; j++) {
     for (let i = n - 1; i >= 0; i--) {
-      let [re, im] = [x.re[i * m + j]!, x.im[i * m + j]!];
-      for (let k = i + 1; k < n; k++) {
-        const [a, b, c, d] = [M.re[i * n + k]!, M.im[i * n + k]!, x.re[k * m + j]!, x.im[k * m + j]!];
+      let re = x.re[i * m + j]!;
+      let im = x.im[i * m + j]!;
+      for (let k = i + 1, p = i * n + k, q = k * m + j; k < n; k++, p++, q += m) {
+        const a = M.re[p]!;
+        const b = M.im[p]!;
+        const c = x.re[q]!;
+        const d = x.im[q]!;
         re -= a * c - b * d;
         im -= a * d + b * c;
       }
@@ -93,23 +109,21 @@ function substituteBack(M: ComplexMatrix, x: ComplexMatrix): void {
   }
 }
 
-function swapWithNext({ columns, re, im }: ComplexMatrix, row: number, from: number): void {
-  for (let j = from; j < columns; j++) {
-    const [p, q] = [row * columns + j, (row + 1) * columns + j];
-    const [keptRe, keptIm] = [re[p]!, im[p]!];
-    re[p] = re[q]!;
-    im[p] = im[q]!;
-    re[q] = keptRe;
-    im[q] = keptIm;
+/** C x + D. */
+function outputs({ C, D }: ResponseSystem, x: ComplexMatrix): ComplexMatrix {
+  const result = zeroComplexMatrix(D.rows, D.columns);
+  for (let i = 0; i < C.rows; i++) {
+    for (let j = 0; j < x.columns; j++) {
+      let re = 0;
+      let im = 0;
+      for (let k = 0; k < C.columns; k++) {
+        const c = C.data[i * C.columns + k]!;
+        re += c * x.re[k * x.columns + j]!;
+        im += c * x.im[k * x.columns + j]!;
+      }
+      result.re[i * D.columns + j] = D.data[i * D.columns + j]! + re;
+      result.im[i * D.columns + j] = im;
+    }
   }
-}
-
-/** Row k + 1 ← row k + 1 − (re + j·im) · row k from column `from` on. */
-function subtractFromNext(M: ComplexMatrix, k: number, re: number, im: number, from: number): void {
-  const n = M.columns;
-  for (let j = from; j < n; j++) {
-    const [x, y] = [M.re[k * n + j]!, M.im[k * n + j]!];
-    M.re[(k + 1) * n + j]! -= re * x - im * y;
-    M.im[(k + 1) * n + j]! -= re * y + im * x;
-  }
+  return result;
 }

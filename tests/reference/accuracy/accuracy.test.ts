@@ -8,7 +8,7 @@ import { readFileSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
 import { toRows } from '../../../src/algebra/index.ts';
 import { frequencyResponse, poles, type Root, stepResponse, stepValuesAt, zeros } from '../../../src/analysis/index.ts';
-import { balanceSystem, denseFromRows, hessenbergSystem, responseAt } from '../../../src/numeric/index.ts';
+import { balanceSystem, denseFromRows, hessenbergSystem, responseOf } from '../../../src/numeric/index.ts';
 import { type Rows, rationalModel } from '../../unit/analysis/rational-model.ts';
 
 interface HardModel {
@@ -84,10 +84,10 @@ describe.each(MODELS)('$name', ({ A, B, C, D, poles: truePoles, zeros: trueZeros
       return denseFromRows(toRows(matrix, 0), matrix.columns);
     };
     const balanced = balanceSystem(dense('A'), dense('B'), dense('C'));
-    const system = { ...hessenbergSystem(balanced.A, balanced.B, balanced.C), D: dense('D') };
+    const respond = responseOf({ ...hessenbergSystem(balanced.A, balanced.B, balanced.C), D: dense('D') });
     const peak = Math.max(...frequency.map(([, re, im]) => Math.hypot(re, im)));
     for (const [w, re, im] of frequency) {
-      const found = responseAt(system, 0, w);
+      const found = respond(0, w);
       const error = Math.hypot((found?.re[0] ?? NaN) - re, (found?.im[0] ?? NaN) - im) / peak;
       expect(error, `at ${w} rad/s`).toBeLessThan(FREQUENCY_ERROR);
     }

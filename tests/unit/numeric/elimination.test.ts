@@ -9,7 +9,7 @@ import {
   multiplyMatrices,
   oneNorm,
   quotient,
-  responseAt,
+  responseOf,
   solveComplex,
 } from '../../../src/numeric/index.ts';
 
@@ -117,7 +117,7 @@ describe('Hessenberg form', () => {
       full.im[i * 5] = im;
     }
     const x = solveComplex(full, { rows: 4, columns: 1, re: B.data, im: new Float64Array(4) })!;
-    const answer = responseAt(system, re, im)!;
+    const answer = responseOf(system)(re, im)!;
     expect(Math.abs(answer.re[0]! - (x.re[1]! + 3 * x.re[3]! + 0.5))).toBeLessThan(1e-14);
     expect(Math.abs(answer.im[0]! - (x.im[1]! + 3 * x.im[3]!))).toBeLessThan(1e-14);
   });
@@ -129,6 +129,6 @@ describe('Hessenberg form', () => {
       C: denseFromRows([[1]]),
       D: denseFromRows([[0]]),
     };
-    expect(responseAt(integrator, 0, 0)).toBeNull();
+    expect(responseOf(integrator)(0, 0)).toBeNull();
   });
 });
