@@ -49,7 +49,7 @@ test('a damaged link is refused and the work in hand stays', async ({ page }) =>
 test('a value that is no expression stays in its field with what to write', async ({ page }) => {
   await openEmptySheet(page);
   await writeBlocks(page, 'u>', '3', '1/s x', '>y');
-  await block(page, 'gain').dblclick();
+  await block(page, 'gain 3').dblclick();
   await page.getByLabel('gain', { exact: true }).fill('2 k');
   await page.keyboard.press('Enter');
   await expect(page.getByRole('alert')).toContainText('Write 2*k.');

@@ -23,7 +23,7 @@ test('a loop is placed, wired, edited and exported by keys alone', async ({ page
     ['1', '0'],
   ]);
 
-  await block(page, 'gain').focus();
+  await block(page, 'gain 2').focus();
   await page.keyboard.press('Enter');
   await page.keyboard.type('3/4');
   await page.keyboard.press('Enter');
@@ -31,7 +31,7 @@ test('a loop is placed, wired, edited and exported by keys alone', async ({ page
     ['−3/4', '3/4'],
     ['1', '0'],
   ]);
-  await expect(block(page, 'gain')).toBeFocused();
+  await expect(block(page, 'gain 3/4')).toBeFocused();
 
   await page.keyboard.press('ArrowDown');
   await page.keyboard.press('Control+z');
@@ -44,7 +44,7 @@ test('a loop is placed, wired, edited and exported by keys alone', async ({ page
   await page.keyboard.press('Control+e');
   const dialog = page.getByRole('dialog', { name: 'Export' });
   await expect(dialog).toBeVisible();
-  const save = dialog.getByRole('button', { name: /^Save .*CSV/i });
+  const save = dialog.getByRole('button', { name: 'Save Comma-separated values' });
   const download = page.waitForEvent('download');
   await save.focus();
   await page.keyboard.press('Enter');
@@ -72,7 +72,7 @@ test('parts are placed by their letters and other characters begin the write-a-b
   await page.keyboard.type('7/3');
   await expect(page.getByLabel('Write a block', { exact: true })).toHaveValue('7/3');
   await page.keyboard.press('Enter');
-  await expect(block(page, 'gain')).toBeVisible();
+  await expect(block(page, 'gain 7/3')).toBeVisible();
 });
 
 test('every key has its line on the page of keys', async ({ page }) => {

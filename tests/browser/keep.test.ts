@@ -6,6 +6,7 @@ import { block, blocks, openEmptySheet, writeBlocks } from './sheet-page.ts';
 test('a reloaded page shows what was on the sheet', async ({ page }) => {
   await openEmptySheet(page);
   await writeBlocks(page, 'u>', '2', '1/s level', '>y');
+  await page.waitForTimeout(1000);
   await page.reload();
   await expect(blocks(page)).toHaveCount(4);
   await expect(block(page, 'integrator level')).toBeVisible();
@@ -17,7 +18,9 @@ test('a tab killed in mid-edit has kept everything older than a second', async (
   await page.waitForTimeout(1000);
   await writeBlocks(page, '>y');
   const killer = await context.newCDPSession(page);
-  await killer.send('Page.crash').catch(() => undefined); // the connection breaks with the tab
+  // Never answered: the connection breaks with the tab.
+  killer.send('Page.crash').catch(() => undefined);
+  await page.waitForEvent('crash');
   const again = await context.newPage();
   await again.goto('./');
   await expect(block(again, 'integrator level')).toBeVisible();

@@ -1,9 +1,11 @@
 /** A block's fields, opened where it stands: Enter keeps them as one edit, Escape leaves all as it was. */
 
 import { type FormEvent, type KeyboardEvent, useEffect, useRef, useState } from 'react';
-import { type Block, blockTitle } from '../../diagram/index.ts';
+import type { Block } from '../../diagram/index.ts';
 import { actions } from '../store/index.ts';
+import { withNewParameters } from '../write-line/new-parameters.ts';
 import { fieldEdits, fieldsOf } from './block-field-table.ts';
+import { shownTitle } from './block-sentence.ts';
 import { focusBlock } from './focus-block.ts';
 
 export function BlockFields({ block }: { readonly block: Block }) {
@@ -19,7 +21,7 @@ export function BlockFields({ block }: { readonly block: Block }) {
   const keep = () => {
     if (form.current === null) return;
     const written = new FormData(form.current);
-    const edits = fieldEdits(block, name => String(written.get(name) ?? ''));
+    const edits = withNewParameters(fieldEdits(block, name => String(written.get(name) ?? '')));
     const problems = edits.length === 0 ? [] : actions.editTogether(edits);
     if (problems.length > 0) return setRefusal(problems[0]?.message ?? 'That value is not possible.');
     actions.editFields(null);
@@ -40,7 +42,7 @@ export function BlockFields({ block }: { readonly block: Block }) {
     <form
       ref={form}
       className="fields nodrag nopan nowheel"
-      aria-label={`Fields of ${blockTitle(block)}`}
+      aria-label={`Fields of ${shownTitle(block)}`}
       onSubmit={onSubmit}
       onKeyDown={onKeyDown}
       onDoubleClick={event => event.stopPropagation()}

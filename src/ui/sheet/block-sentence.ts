@@ -2,6 +2,11 @@
 
 import { type Block, blockTitle, type Sheet } from '../../diagram/index.ts';
 
+/** Kind and name as the sheet shows them: a gain without a name of its own goes by what is written in it. */
+export function shownTitle(block: Block): string {
+  return block.kind === 'gain' && block.name === undefined ? `gain ${block.gain}` : blockTitle(block);
+}
+
 /** Neighbours by block id, made once for a sheet. */
 interface Neighbours {
   readonly from: ReadonlyMap<string, readonly string[]>;
@@ -12,7 +17,7 @@ const known = new WeakMap<Sheet, Neighbours>();
 
 export function blockSentence(block: Block, sheet: Sheet): string {
   const { from, to } = neighboursOf(sheet);
-  const parts = [blockTitle(block)];
+  const parts = [shownTitle(block)];
   const sources = from.get(block.id);
   const targets = to.get(block.id);
   if (sources !== undefined) parts.push(`from ${sources.join(' and ')}`);
@@ -24,7 +29,7 @@ export function blockSentence(block: Block, sheet: Sheet): string {
 function neighboursOf(sheet: Sheet): Neighbours {
   const before = known.get(sheet);
   if (before !== undefined) return before;
-  const titles = new Map(sheet.blocks.map(block => [block.id, blockTitle(block)]));
+  const titles = new Map(sheet.blocks.map(block => [block.id, shownTitle(block)]));
   const from = new Map<string, string[]>();
   const to = new Map<string, string[]>();
   for (const wire of sheet.wires) {

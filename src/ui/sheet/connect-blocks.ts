@@ -1,7 +1,8 @@
 /** Wiring two blocks, by mouse or by key, with what was done said. */
 
-import { blockTitle, type Edit, type PortReference, portCounts } from '../../diagram/index.ts';
+import { type Edit, type PortReference, portCounts } from '../../diagram/index.ts';
 import { actions, store } from '../store/index.ts';
+import { shownTitle } from './block-sentence.ts';
 
 /**
  * Wires an output port to an input port; where the input port is null, to the block's first open one. A summing point
@@ -12,13 +13,13 @@ export function connectBlocks(from: PortReference, to: readonly [block: string, 
   const source = blocks.find(({ id }) => id === from[0]);
   const target = blocks.find(({ id }) => id === to[0]);
   if (source === undefined || target === undefined) return false;
-  if (portCounts(source).outputs === 0) return refuse(`${blockTitle(source)} has no output to wire from.`);
+  if (portCounts(source).outputs === 0) return refuse(`${shownTitle(source)} has no output to wire from.`);
   const inputs = portCounts(target).inputs;
-  if (inputs === 0) return refuse(`${blockTitle(target)} has no input to wire to.`);
+  if (inputs === 0) return refuse(`${shownTitle(target)} has no input to wire to.`);
   const taken = new Set(wires.filter(wire => wire.to[0] === target.id).map(wire => wire.to[1]));
   const open = Array.from({ length: inputs }, (_, port) => port).find(port => !taken.has(port));
   const port = to[1] !== null && !taken.has(to[1]) ? to[1] : open;
-  const said = `Wired ${blockTitle(source)} to ${blockTitle(target)}.`;
+  const said = `Wired ${shownTitle(source)} to ${shownTitle(target)}.`;
   const edits: Edit[] = [];
   if (port === undefined && target.kind === 'summer' && target.signs.length < 16) {
     edits.push({ kind: 'setField', id: target.id, field: 'signs', value: `${target.signs}+` });

@@ -1,8 +1,9 @@
 /** Removes the selected blocks with their wires, and the selected wires, as one step; focus goes to the sheet. */
 
-import { blockTitle, type Edit } from '../../diagram/index.ts';
+import type { Edit } from '../../diagram/index.ts';
 import { wireKey } from '../../diagram/routing/index.ts';
 import { actions, store } from '../store/index.ts';
+import { shownTitle } from './block-sentence.ts';
 import { focusedBlock, focusSheet } from './focus-block.ts';
 
 export function removeSelected(): boolean {
@@ -17,7 +18,7 @@ export function removeSelected(): boolean {
   if (gone.size + cut.length === 0) return false;
   const edits: Edit[] = cut.map(({ to }) => ({ kind: 'disconnect', to }));
   if (gone.size > 0) edits.push({ kind: 'removeBlocks', ids: [...gone] });
-  const titles = blocks.filter(({ id }) => gone.has(id)).map(blockTitle);
+  const titles = blocks.filter(({ id }) => gone.has(id)).map(shownTitle);
   if (cut.length > 0) titles.push(cut.length === 1 ? 'a wire' : `${cut.length} wires`);
   actions.editTogether(edits, `Removed ${titles.join(', ')}.`);
   focusSheet();

@@ -18,6 +18,7 @@ type Events = Pick<
   | 'onConnectEnd'
   | 'onReconnect'
   | 'onNodeDoubleClick'
+  | 'onEdgeClick'
   | 'onPaneClick'
 >;
 
@@ -34,6 +35,7 @@ export const SHEET_EVENTS: Events = {
   onConnectEnd: (_, state) => connectToBody(state),
   onReconnect: (edge, connection) => moveEnd(edge, connection),
   onNodeDoubleClick: (_, node) => actions.editFields(node.id),
+  onEdgeClick: () => focusSheet(),
   onPaneClick: () => {
     actions.editFields(null);
     focusSheet();

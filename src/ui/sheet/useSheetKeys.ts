@@ -2,12 +2,12 @@
 
 import { useEffect } from 'react';
 import { GRID } from '../../diagram/geometry/index.ts';
-import { blockTitle } from '../../diagram/index.ts';
 import { isTextField } from '../shell/usePageKeys.ts';
 import { actions, store } from '../store/index.ts';
 import { beginWriting } from '../write-line/begin-writing.ts';
 import { partOf } from '../write-line/parts.ts';
 import { placePart } from '../write-line/place-block.ts';
+import { shownTitle } from './block-sentence.ts';
 import { connectBlocks } from './connect-blocks.ts';
 import { focusedBlock } from './focus-block.ts';
 import { removeSelected } from './remove-selected.ts';
@@ -133,7 +133,7 @@ function beginWire(): boolean {
   const block = store.getState().document.diagram.blocks.find(({ id }) => id === from);
   if (block === undefined) return false;
   actions.beginWire(block.id);
-  actions.notify(`Wire from ${blockTitle(block)}: go to the block it leads to and press Enter. Escape lets go.`);
+  actions.notify(`Wire from ${shownTitle(block)}: go to the block it leads to and press Enter. Escape lets go.`);
   return true;
 }
 

@@ -18,8 +18,8 @@ export function NoticeLine() {
   }, [serial]);
   const shown = latest !== null && gone !== serial;
   return (
-    <div role="status" aria-live="polite">
-      {shown && <div className={`notice notice-${latest.tone}`}>{latest.text}</div>}
+    <div role="status" className={shown ? `notice notice-${latest.tone}` : 'notice notice-none'}>
+      {shown && latest.text}
     </div>
   );
 }

@@ -4,7 +4,7 @@
  */
 
 import type { Diagram, Edit } from '../../diagram/index.ts';
-import { editDiagram } from '../../diagram/index.ts';
+import { checkExpressions, editDiagram } from '../../diagram/index.ts';
 import type { Problem } from '../../problem/index.ts';
 
 export interface DocumentSlice {
@@ -29,7 +29,31 @@ export function edited(
   | { readonly ok: false; readonly problems: readonly Problem[] } {
   const result = editDiagram(slice.diagram, edit);
   if (!result.ok) return result;
+  const fault = writtenFault(result.value, edit);
+  if (fault !== null) return { ok: false, problems: [fault] };
   return { ok: true, slice: result.value === slice.diagram ? slice : advanced(slice, result.value) };
+}
+
+/** What is no expression in the text that the edit brings; a name nobody has defined yet may still be. */
+function writtenFault(diagram: Diagram, edit: Edit): Problem | null {
+  const concerned = concernedBy(edit);
+  if (concerned === null) return null;
+  const problems = checkExpressions(diagram).filter(({ code }) => code === 'bad-expression');
+  return problems.find(({ blocks, parameter }) => blocks.includes(concerned) || parameter === concerned) ?? null;
+}
+
+/** The block's id or the parameter's name whose text an edit writes; null where it writes none. */
+function concernedBy(edit: Edit): string | null {
+  switch (edit.kind) {
+    case 'setField':
+      return edit.id;
+    case 'setParameter':
+      return edit.name;
+    case 'addParameter':
+      return edit.parameter.name;
+    default:
+      return null;
+  }
 }
 
 /** The slice with `diagram` as its newest document and the former one to go back to. */

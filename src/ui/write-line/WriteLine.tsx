@@ -1,8 +1,8 @@
 /** The line at the sheet's lower edge: what is written on paper becomes a block; beside it the parts with their keys. */
 
+import { shownTitle } from '../sheet/block-sentence.ts';
 import './write-line.css';
 import { type KeyboardEvent, useState } from 'react';
-import { blockTitle } from '../../diagram/index.ts';
 import { readWrittenBlock } from '../../diagram/write-a-block/index.ts';
 import { PART_MIME, PARTS, type Part } from './parts.ts';
 import { placeBlock, placePart } from './place-block.ts';
@@ -68,7 +68,7 @@ function WriteField() {
 function previewOf(text: string): string {
   if (text.trim() === '') return '';
   const read = readWrittenBlock(text);
-  return read.ok ? `Enter places ${blockTitle({ ...read.value.block, id: '' })}` : '';
+  return read.ok ? `Enter places ${shownTitle({ ...read.value.block, id: '' })}` : '';
 }
 
 function PartButton({ part }: { readonly part: Part }) {
@@ -78,7 +78,6 @@ function PartButton({ part }: { readonly part: Part }) {
       className="write-part"
       draggable
       title={`${part.label}: press ${part.key} on the sheet, or drag it there`}
-      aria-label={`Place ${part.label}`}
       aria-keyshortcuts={part.key}
       onDragStart={event => {
         event.dataTransfer.setData(PART_MIME, part.id);
@@ -86,7 +85,10 @@ function PartButton({ part }: { readonly part: Part }) {
       }}
       onClick={() => placePart(part.id, null)}
     >
-      <span className="write-symbol">{part.symbol}</span>
+      <span className="unseen">Place {part.label}</span>
+      <span className="write-symbol" aria-hidden="true">
+        {part.symbol}
+      </span>
       <span className="write-key" aria-hidden="true">
         {part.key}
       </span>

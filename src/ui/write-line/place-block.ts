@@ -4,9 +4,11 @@
  */
 
 import { GRID, type Rectangle, sheetGeometry, snap } from '../../diagram/geometry/index.ts';
-import { type Block, blockTitle, type Edit, freshId, type Point, portCounts, type Sheet } from '../../diagram/index.ts';
+import { type Block, type Edit, freshId, type Point, portCounts, type Sheet } from '../../diagram/index.ts';
 import type { WrittenBlock } from '../../diagram/write-a-block/index.ts';
+import { shownTitle } from '../sheet/block-sentence.ts';
 import { actions, store } from '../store/index.ts';
+import { newParameter, unknownParameters } from './new-parameters.ts';
 import { partOf } from './parts.ts';
 import { sheetView } from './sheet-view.ts';
 
@@ -29,13 +31,13 @@ export function placeBlock(written: WrittenBlock, names: readonly string[], at: 
   const id = freshId(sheet, stemOf(written));
   const wanted = at ?? (source?.at === undefined ? openPlace(sheet) : besides(source));
   const block: Block = { ...written, id, at: freePlace(sheet, { ...written, id }, snap(wanted)) };
-  const unknown = names.filter(name => !document.diagram.parameters.some(parameter => parameter.name === name));
-  const edits: Edit[] = unknown.map(name => ({ kind: 'addParameter', parameter: { name, value: '1' } }));
+  const unknown = unknownParameters(names);
+  const edits: Edit[] = unknown.map(newParameter);
   edits.push({ kind: 'addBlock', block });
   const isChained = source !== null && portCounts(block).inputs > 0;
   if (isChained) edits.push({ kind: 'connect', from: [source.id, 0], to: [id, 0] });
-  const said = [`Placed ${blockTitle(block)}`];
-  if (isChained) said.push(`wired from ${blockTitle(source)}`);
+  const said = [`Placed ${shownTitle(block)}`];
+  if (isChained) said.push(`wired from ${shownTitle(source)}`);
   if (unknown.length > 0)
     said.push(`${unknown.join(', ')} added as ${unknown.length === 1 ? 'a parameter' : 'parameters'} with value 1`);
   if (actions.editTogether(edits, `${said.join(', ')}.`).length > 0) return null;
