@@ -113,7 +113,7 @@ function signLabels(signs: string, inputs: readonly PortPlace[]): readonly Label
     if (port.side === 'top') return label(spans, SETTINGS.sign, port.x + 11, port.y - 4, 'middle');
     if (port.side === 'bottom') return label(spans, SETTINGS.sign, port.x + 11, port.y + 13, 'middle');
     if (inside) return label(spans, SETTINGS.sign, port.x - 8 * out, port.y + 5, 'middle');
-    return label(spans, SETTINGS.sign, port.x + 10 * out, port.y - 5, 'middle');
+    return label(spans, SETTINGS.sign, port.x + 10 * out, port.y - 7, 'middle');
   });
 }
 

@@ -8,8 +8,8 @@ import { HALF_GRID } from '../geometry/index.ts';
 /** How far around a block lines are laid, in steps: the first that keeps the grid within `MOST_NODES` is taken. */
 const REACHES = [80, 30] as const;
 
-/** Most crossings of lines that are searched: some 60 MB of bookkeeping. */
-const MOST_NODES = 1_500_000;
+/** Most crossings of lines that are searched, at 35 bytes each. */
+const MOST_NODES = 3_000_000;
 
 /** A lattice line gives way to a port's line that is closer than this. */
 const TOO_CLOSE = 6;
@@ -82,4 +82,11 @@ export function lineFrom(lines: Float64Array, value: number): number {
 export function lineAt(lines: Float64Array, value: number): number {
   const index = lineFrom(lines, value);
   return index < lines.length && lines[index] === value ? index : -1;
+}
+
+/** Index of the next line beyond `value` in the direction of `step`, 1 or −1; out of range where there is none. */
+export function lineAfter(lines: Float64Array, value: number, step: number): number {
+  const index = lineFrom(lines, value);
+  if (step < 0) return index - 1;
+  return lines[index] === value ? index + 1 : index;
 }

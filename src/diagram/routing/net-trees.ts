@@ -3,7 +3,7 @@
  * node before it, so a wire's route is read backwards from its end.
  */
 
-import type { Beginning } from './path-search.ts';
+import type { Axis, Beginning } from './path-search.ts';
 
 /** Node → node before it on the way from the output port; the first node's is −1. */
 export class NetTree {
@@ -41,15 +41,17 @@ export class NetTree {
 /**
  * Every node of a tree from which a branch may leave, with the direction in which the tree comes there.
  *
+ * @param root   direction in which the output port is left.
  * @param price  what a branch costs there; infinite where there must be none.
  */
-export function branchings(tree: NetTree, price: (node: number) => number): readonly Beginning[] {
+export function branchings(tree: NetTree, root: Axis, price: (node: number) => number): readonly Beginning[] {
   const beginnings: Beginning[] = [];
   for (const node of tree.nodes) {
     const before = tree.nodeBefore(node);
     const cost = price(node);
-    if (before < 0 || cost === Number.POSITIVE_INFINITY) continue;
-    beginnings.push({ node, axis: Math.abs(node - before) === 1 ? 'horizontal' : 'vertical', cost });
+    if (cost === Number.POSITIVE_INFINITY) continue;
+    const axis = before < 0 ? root : Math.abs(node - before) === 1 ? 'horizontal' : 'vertical';
+    beginnings.push({ node, axis, cost });
   }
   return beginnings;
 }

@@ -7,9 +7,9 @@ import { lineFrom } from './grid-lines.ts';
 import { branchings, type NetTree } from './net-trees.ts';
 import { type Axis, type Beginning, cheapestWay } from './path-search.ts';
 import { simplified } from './polyline.ts';
-import { BLOCKED, LABEL, NEAR, nodeAt, nodesAlong, occupy, pointAt, type SheetGrid } from './sheet-grid.ts';
+import { BLOCKED, LABEL, NEAR, nodeAt, nodesAlong, occupy, pointAt, type SheetGrid, STANDING } from './sheet-grid.ts';
 import { type SheetRouter, treeOf } from './sheet-router.ts';
-import { SHORT_STUB, stubNode } from './stubs.ts';
+import { SHORT_STUB, stubNodes } from './stubs.ts';
 import { isHorizontal, outward, type PortEnd, type Route } from './types.ts';
 import type { EndedWire } from './wire-ends.ts';
 
@@ -27,22 +27,15 @@ const LAST_PATIENCE = 60_000;
 /** Routes a wire and takes its nodes; null where no way was found. */
 export function routeWire(router: SheetRouter, wire: EndedWire): Route | null {
   const { grid } = router.space;
-  const tree = treeOf(router, wire.net);
-  const from = nodeAt(grid, [wire.from.x, wire.from.y]);
-  const to = nodeAt(grid, [wire.to.x, wire.to.y]);
+  const { from, to, net } = wire;
+  const tree = treeOf(router, net);
   const way = straightWay(grid, wire, tree) ?? wayThrough(router, wire, tree);
   if (way === null) return null;
-  const before = tree.isEmpty ? nodesBetween(grid, from, way[0] ?? from) : [];
-  const whole = [...before, ...way, ...nodesBetween(grid, to, way.at(-1) ?? to).toReversed()];
-  tree.add(whole);
-  const route = simplified(tree.wayTo(to).map(node => pointAt(grid, node)));
-  occupy(grid, route, wire.net);
+  tree.add(way);
+  const points = tree.wayTo(way.at(-1) ?? -1).map(node => pointAt(grid, node));
+  const route = simplified([[from.x, from.y], ...points, [to.x, to.y]]);
+  occupy(grid, route, net);
   return route;
-}
-
-/** Nodes on a line from one node to another, the first included and the last not. */
-function nodesBetween(grid: SheetGrid, from: number, to: number): readonly number[] {
-  return from === to ? [] : nodesAlong(grid, [pointAt(grid, from), pointAt(grid, to)]).slice(0, -1);
 }
 
 /** The straight line from port to port, where the net has no tree yet and nothing is in the way. */
@@ -57,9 +50,13 @@ function straightWay(grid: SheetGrid, { from, to, wire, net }: EndedWire, tree: 
     [to.x, to.y],
   ]);
   const owners = x !== 0 ? grid.horizontalNet : grid.verticalNet;
-  const isFree = nodes.every((node, index) => {
-    const atPort = index === 0 || index === nodes.length - 1;
-    return (owners[node] === 0 || owners[node] === net) && (atPort || (grid.surroundings[node]! & 3) !== BLOCKED);
+  const isAtPort = (node: number): boolean => {
+    const [nodeX, nodeY] = pointAt(grid, node);
+    return [from, to].some(end => end.x === nodeX && end.y === nodeY);
+  };
+  const isFree = nodes.every(node => {
+    if (owners[node] !== 0 && owners[node] !== net) return false;
+    return (grid.surroundings[node]! & STANDING) !== BLOCKED || isAtPort(node);
   });
   return isFree ? nodes : null;
 }
@@ -67,15 +64,17 @@ function straightWay(grid: SheetGrid, { from, to, wire, net }: EndedWire, tree: 
 /** The cheapest way from the net's tree through the wire's own bend points to where its port is entered. */
 function wayThrough(router: SheetRouter, wire: EndedWire, tree: NetTree): readonly number[] | null {
   const { grid } = router.space;
-  const source = stubNode(grid, wire.from);
-  const target = stubNode(grid, wire.to);
-  if (source < 0 || target < 0) return null;
+  const out = stubNodes(grid, wire.from);
+  const into = stubNodes(grid, wire.to);
+  const source = out.at(-1);
+  const target = into.at(-1);
+  if (source === undefined || target === undefined) return null;
   const stops = [...(wire.wire.via ?? []).map(point => nodeAt(grid, point)), target];
   const own = new Set(tree.nodes);
-  let way: readonly number[] = [];
+  let way: readonly number[] = tree.isEmpty ? out : [];
   let beginnings = tree.isEmpty
     ? [{ node: source, axis: axisOf(wire.from), cost: 0 }]
-    : branchings(tree, node => branchPrice(router, wire.net, node));
+    : branchings(tree, axisOf(wire.from), node => branchPrice(router, wire.net, node));
   for (const [index, stop] of stops.entries()) {
     const goalAxis = index === stops.length - 1 ? axisOf(wire.to) : null;
     const piece = wayInWindows(router, wire, { beginnings, goal: stop, goalAxis, own });
@@ -84,7 +83,7 @@ function wayThrough(router: SheetRouter, wire: EndedWire, tree: NetTree): readon
     way = [...way, ...(way.length > 0 ? piece.slice(1) : piece)];
     beginnings = [{ node: stop, axis: arrivalAxis(way, axisOf(wire.from)), cost: 0 }];
   }
-  return way;
+  return [...way, ...into.toReversed().slice(1)];
 }
 
 const axisOf = (end: PortEnd): Axis => (isHorizontal(end.side) ? 'horizontal' : 'vertical');
@@ -108,7 +107,7 @@ function branchPrice({ space, ends }: SheetRouter, net: number, node: number): n
   const there = grid.surroundings[node]!;
   let price = (FROM_PORT - closest) * BRANCH_PRICES.eachUnit;
   if (there & LABEL) price += BRANCH_PRICES.underLabel;
-  if ((there & 3) >= NEAR) price += BRANCH_PRICES.near;
+  if ((there & STANDING) >= NEAR) price += BRANCH_PRICES.near;
   return price;
 }
 
@@ -135,7 +134,8 @@ function wayInWindows(router: SheetRouter, { from, to, net }: EndedWire, piece: 
     const question = { ...piece, net, window, middle };
     let way = cheapestWay(space, { ...question, haste: 1, patience });
     if (way === 'given-up') way = cheapestWay(space, { ...question, haste: HASTE, patience: LAST_PATIENCE });
-    if (typeof way !== 'string') return way;
+    if (way === 'given-up') return null;
+    if (way !== 'none') return way;
   }
   return null;
 }

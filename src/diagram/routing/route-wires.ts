@@ -58,8 +58,9 @@ export function rerouteMoved(
 
 const NO_ROUTE: WireRoute = { points: [], forced: false };
 
-/** How often wires that found no way are put in front and everything is routed again. */
-const RETRIES = 2;
+/** How often wires that found no way are put in front and everything is routed again, and on how large a sheet still. */
+const RETRIES = 3;
+const MOST_RETRIED_WIRES = 600;
 
 function complete(
   sheet: Sheet,
@@ -68,13 +69,17 @@ function complete(
   kept: ReadonlyMap<number, WireRoute>,
 ): Routes {
   const open = routingOrder(wires.filter(({ index }) => !kept.has(index)));
+  const forcedAmong = (routes: ReadonlyMap<number, WireRoute>): readonly EndedWire[] =>
+    open.filter(({ index }) => routes.get(index)?.forced === true);
   let found = routed(sheet, geometry, wires, kept, open);
-  for (let retry = 0; kept.size === 0 && retry < RETRIES; retry += 1) {
-    const isForced = ({ index }: EndedWire): boolean => found.get(index)?.forced === true;
-    const forced = open.filter(isForced);
+  const first = new Set(forcedAmong(found));
+  const isWorthwhile = kept.size === 0 && open.length <= MOST_RETRIED_WIRES;
+  for (let retry = 0; isWorthwhile && first.size > 0 && retry < RETRIES; retry += 1) {
+    const again = routed(sheet, geometry, wires, kept, [...first, ...open.filter(wire => !first.has(wire))]);
+    const forced = forcedAmong(again);
+    if (forced.length < forcedAmong(found).length) found = again;
     if (forced.length === 0) break;
-    const again = routed(sheet, geometry, wires, kept, [...forced, ...open.filter(wire => !isForced(wire))]);
-    if (open.filter(({ index }) => again.get(index)?.forced === true).length < forced.length) found = again;
+    for (const wire of forced) first.add(wire);
   }
   const all = sheet.wires.map((_, index) => kept.get(index) ?? found.get(index) ?? NO_ROUTE);
   return { wires: all, dots: branchingPoints(wires, all) };

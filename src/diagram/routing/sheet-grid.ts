@@ -8,19 +8,24 @@ import type { Point } from '../types.ts';
 import { type AxisNeeds, gridLines, lineAt, lineFrom } from './grid-lines.ts';
 import type { Route } from './types.ts';
 
-/** What stands at a node, the dearer the higher; a label adds `LABEL`. */
-export const FREE = 0;
+/** What stands at a node, in its lowest two bits, the dearer the higher; 0 is free paper. */
+export const STANDING = 3;
 export const NEAR = 1;
 export const TIGHT = 2;
 export const BLOCKED = 3;
+
+/** Further bits: a label stands there; a level or an upright wire runs close by in parallel; a port's straight piece ends there. */
 export const LABEL = 4;
+export const LEVEL_CROWD = 8;
+export const UPRIGHT_CROWD = 16;
+export const STUB_END = 32;
 
 /** Clearances around a block's frame: closer than the first a wire only goes where it must, closer than the second it rather not. */
 const TIGHT_CLEARANCE = 10;
 const NEAR_CLEARANCE = 30;
 
 /** Room between a label and a wire. */
-const LABEL_CLEARANCE = 4;
+const LABEL_CLEARANCE = 3;
 
 /** Parallel lines closer than this crowd each other. */
 const CROWDED = 15;
@@ -34,9 +39,6 @@ export interface SheetGrid {
   /** Number of the net, from 1, whose wire runs through the node horizontally (vertically), bends there or ends there; 0 for none. */
   readonly horizontalNet: Int32Array;
   readonly verticalNet: Int32Array;
-  /** 1 where a wire runs close by in parallel. */
-  readonly horizontalCrowd: Uint8Array;
-  readonly verticalCrowd: Uint8Array;
 }
 
 /** A grid with blocks and labels marked and no wires; null where the sheet is too large for one. */
@@ -58,8 +60,6 @@ export function sheetGrid(
     surroundings: new Uint8Array(nodes),
     horizontalNet: new Int32Array(nodes),
     verticalNet: new Int32Array(nodes),
-    horizontalCrowd: new Uint8Array(nodes),
-    verticalCrowd: new Uint8Array(nodes),
   };
   for (const block of blocks) {
     raise(grid, grown(block, NEAR_CLEARANCE), false, NEAR);
@@ -115,51 +115,70 @@ export function pointAt(grid: SheetGrid, node: number): Point {
   return [grid.xs[node % grid.columns]!, grid.ys[Math.floor(node / grid.columns)]!];
 }
 
-/**
- * Every node that a route passes, from its first point; empty where a point of it lies on no line. The route is orthogonal.
- */
+/** The nodes on a straight piece: the first, the last, and the step from one to the next. */
+interface Stretch {
+  readonly first: number;
+  readonly last: number;
+  /** 1 along a row, the number of columns along a column. */
+  readonly step: number;
+}
+
+/** The nodes from one point to another on a level or upright line of the grid; null where there are none. */
+function stretch(grid: SheetGrid, [x0, y0]: Point, [x1, y1]: Point): Stretch | null {
+  const isLevel = y0 === y1;
+  const lane = isLevel ? lineAt(grid.ys, y0) : lineAt(grid.xs, x0);
+  const lines = isLevel ? grid.xs : grid.ys;
+  const [from, to] = isLevel ? [Math.min(x0, x1), Math.max(x0, x1)] : [Math.min(y0, y1), Math.max(y0, y1)];
+  const [low, high] = linesWithin(lines, from, to, true);
+  if (lane < 0 || low > high) return null;
+  if (isLevel) return { first: lane * grid.columns + low, last: lane * grid.columns + high, step: 1 };
+  return { first: low * grid.columns + lane, last: high * grid.columns + lane, step: grid.columns };
+}
+
+/** Every node that a route passes, in its direction; the ports at its ends need be none. The route is orthogonal. */
 export function nodesAlong(grid: SheetGrid, route: Route): readonly number[] {
   const nodes: number[] = [];
   for (let index = 1; index < route.length; index += 1) {
-    const from = nodeAt(grid, route[index - 1] ?? [0, 0]);
-    const to = nodeAt(grid, route[index] ?? [0, 0]);
-    if (from < 0 || to < 0) return [];
-    if (from === to) continue;
-    const sameRow = Math.floor(from / grid.columns) === Math.floor(to / grid.columns);
-    const step = (sameRow ? 1 : grid.columns) * (to > from ? 1 : -1);
-    if (nodes.length === 0) nodes.push(from);
-    for (let node = from + step; node !== to + step; node += step) nodes.push(node);
+    const [from, to] = [route[index - 1]!, route[index]!];
+    const piece = stretch(grid, from, to);
+    if (piece === null) continue;
+    const count = (piece.last - piece.first) / piece.step;
+    const isForwards = to[0] > from[0] || to[1] > from[1];
+    for (let passed = 0; passed <= count; passed += 1) {
+      const node = isForwards ? piece.first + passed * piece.step : piece.last - passed * piece.step;
+      if (node !== nodes.at(-1)) nodes.push(node);
+    }
   }
   return nodes;
 }
 
-/** Gives the lines under a route to a net and marks the lines beside it as crowded. Points that lie on no line end the marking. */
+/** Gives the lines under a route to a net and marks the lines beside it as crowded. */
 export function occupy(grid: SheetGrid, route: Route, net: number): void {
   for (let index = 1; index < route.length; index += 1) {
-    const from = nodeAt(grid, route[index - 1]!);
-    const to = nodeAt(grid, route[index]!);
-    if (from < 0 || to < 0) return;
-    const first = Math.min(from, to);
-    const last = Math.max(from, to);
-    if (last - first < grid.columns) occupyPiece(grid, first, last, 1, net);
-    else occupyPiece(grid, first, last, grid.columns, net);
+    const piece = stretch(grid, route[index - 1]!, route[index]!);
+    if (piece !== null) occupyPiece(grid, piece, net);
   }
 }
 
-/** One straight piece from node `first` to node `last` in steps of 1 along a row, of `columns` along a column. */
-function occupyPiece(grid: SheetGrid, first: number, last: number, step: number, net: number): void {
-  const isHorizontal = step === 1;
-  const owners = isHorizontal ? grid.horizontalNet : grid.verticalNet;
+/** Gives nodes on one line to a net. */
+export function occupyNodes(grid: SheetGrid, nodes: readonly number[], isLevel: boolean, net: number): void {
+  const owners = isLevel ? grid.horizontalNet : grid.verticalNet;
+  for (const node of nodes) if (owners[node] === 0) owners[node] = net;
+}
+
+function occupyPiece(grid: SheetGrid, { first, last, step }: Stretch, net: number): void {
+  const isLevel = step === 1;
+  const owners = isLevel ? grid.horizontalNet : grid.verticalNet;
   for (let node = first; node <= last; node += step) if (owners[node] === 0) owners[node] = net;
-  const lines = isHorizontal ? grid.ys : grid.xs;
-  const marks = isHorizontal ? grid.horizontalCrowd : grid.verticalCrowd;
-  const aside = isHorizontal ? grid.columns : 1;
-  const own = isHorizontal ? Math.floor(first / grid.columns) : first % grid.columns;
+  const lines = isLevel ? grid.ys : grid.xs;
+  const crowd = isLevel ? LEVEL_CROWD : UPRIGHT_CROWD;
+  const aside = isLevel ? grid.columns : 1;
+  const own = isLevel ? Math.floor(first / grid.columns) : first % grid.columns;
   for (const direction of [-1, 1]) {
     let line = own + direction;
     while (line >= 0 && line < lines.length && Math.abs(lines[line]! - lines[own]!) < CROWDED) {
       const shift = (line - own) * aside;
-      for (let node = first; node <= last; node += step) marks[node + shift] = 1;
+      for (let node = first; node <= last; node += step) grid.surroundings[node + shift]! |= crowd;
       line += direction;
     }
   }

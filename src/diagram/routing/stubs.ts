@@ -1,37 +1,39 @@
 /** The straight piece at each port: no wire bends before it has left its port by an arrowhead's length. */
 
-import { lineFrom } from './grid-lines.ts';
-import { nodeAt, occupy, pointAt, type SheetGrid, TIGHT } from './sheet-grid.ts';
-import { outward, type PortEnd } from './types.ts';
+import { lineAfter, lineAt } from './grid-lines.ts';
+import { occupyNodes, type SheetGrid, STANDING, STUB_END, TIGHT } from './sheet-grid.ts';
+import { isHorizontal, outward, type PortEnd } from './types.ts';
 
 /** Room for an arrowhead and a little more, and what is left of it where blocks stand close. */
 const STUB = 16;
 export const SHORT_STUB = 10;
 
-/** Keeps the way straight out of a port free for its own net. */
+/** Keeps the way straight out of a port free for its own net, and others rather off the place where that net turns. */
 export function reserveStub(grid: SheetGrid, end: PortEnd, net: number): void {
-  const node = stubNode(grid, end);
-  if (node >= 0) occupy(grid, [[end.x, end.y], pointAt(grid, node)], net);
+  const nodes = stubNodes(grid, end);
+  occupyNodes(grid, nodes, isHorizontal(end.side), net);
+  const last = nodes.at(-1);
+  if (last !== undefined) grid.surroundings[last]! |= STUB_END;
 }
 
-/** Where the straight piece at a port ends; −1 where the port lies on no line. */
-export function stubNode(grid: SheetGrid, end: PortEnd): number {
-  const roomy = nodeAhead(grid, end, STUB);
-  if (roomy >= 0 && (grid.surroundings[roomy]! & 3) < TIGHT) return roomy;
-  return nodeAhead(grid, end, SHORT_STUB);
-}
-
-/** The first node straight out of a port that is at least `distance` away. */
-function nodeAhead(grid: SheetGrid, end: PortEnd, distance: number): number {
+/** The nodes straight out of a port, to where a wire may turn; empty where the port's line is missing or leads off the grid. */
+export function stubNodes(grid: SheetGrid, end: PortEnd): readonly number[] {
   const [x, y] = outward(end.side);
-  const port = nodeAt(grid, [end.x, end.y]);
-  if (port < 0) return -1;
-  const lines = x !== 0 ? grid.xs : grid.ys;
-  const wanted = (x !== 0 ? end.x : end.y) + (x + y) * distance;
-  const above = lineFrom(lines, wanted);
-  const index = x + y > 0 || lines[above] === wanted ? above : above - 1;
-  if (index < 0 || index >= lines.length) return -1;
-  const column = port % grid.columns;
-  const row = (port - column) / grid.columns;
-  return x !== 0 ? row * grid.columns + index : index * grid.columns + column;
+  const isLevel = x !== 0;
+  const lines = isLevel ? grid.xs : grid.ys;
+  const lane = isLevel ? lineAt(grid.ys, end.y) : lineAt(grid.xs, end.x);
+  const port = isLevel ? end.x : end.y;
+  const step = x + y;
+  const nodes: number[] = [];
+  let short = 0;
+  if (lane < 0) return nodes;
+  for (let line = lineAfter(lines, port, step); line >= 0 && line < lines.length; line += step) {
+    const node = isLevel ? lane * grid.columns + line : line * grid.columns + lane;
+    const distance = Math.abs(lines[line]! - port);
+    nodes.push(node);
+    if (short === 0 && distance >= SHORT_STUB) short = nodes.length;
+    if (distance < STUB) continue;
+    return (grid.surroundings[node]! & STANDING) < TIGHT ? nodes : nodes.slice(0, short);
+  }
+  return nodes.slice(0, short);
 }
