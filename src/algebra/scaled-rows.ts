@@ -15,6 +15,8 @@ export interface ScaledRows {
   readonly rowStart: Int32Array;
   readonly column: Int32Array;
   readonly numerators: readonly bigint[];
+  /** The numerators as doubles, NaN where that would round. */
+  readonly shortNumerators: Float64Array;
   /** rows long, positive. */
   readonly denominators: readonly bigint[];
 }
@@ -44,7 +46,11 @@ export function scaledRows(matrix: SparseMatrix<Rational>): ScaledRows {
     }
     denominators.push(denominator);
   }
-  return { rows, columns, rowStart, column, numerators, denominators };
+  const shortNumerators = Float64Array.from(numerators, x => {
+    const double = Number(x);
+    return Number.isSafeInteger(double) ? double : Number.NaN;
+  });
+  return { rows, columns, rowStart, column, numerators, shortNumerators, denominators };
 }
 
 /** Product of the denominators, and a number that all its prime factors divide: their least common multiple. */
@@ -60,7 +66,7 @@ export function denominatorProduct({ denominators }: ScaledRows): { readonly sca
 
 /** The image of the matrix modulo p, or null where p divides a denominator. */
 export function rowsModulo(matrix: ScaledRows, p: number): ModularRows | null {
-  const { rows, rowStart, column, numerators, denominators } = matrix;
+  const { rows, rowStart, column, numerators, shortNumerators, denominators } = matrix;
   const values = new Float64Array(numerators.length);
   const inverse = 1 / p;
   for (let i = 0; i < rows; i++) {
@@ -68,18 +74,16 @@ export function rowsModulo(matrix: ScaledRows, p: number): ModularRows | null {
     if (denominator === 0) return null;
     const factor = denominator === 1 ? 1 : inverseModulo(denominator, p);
     for (let k = rowStart[i]!; k < rowStart[i + 1]!; k++) {
-      const value = residue(numerators[k]!, p);
+      const short = shortNumerators[k]!;
+      const value = Number.isNaN(short) ? residue(numerators[k]!, p) : reduce(short, p, inverse);
       values[k] = factor === 1 ? value : reduce(value * factor, p, inverse);
     }
   }
   return { rows, rowStart, column, values };
 }
 
-/** A sum that has reached this is reduced before the next product below 2⁵⁰ is added, so that it stays exact. */
-const FULL = 2 ** 52;
-
-/** As many products below 2⁵⁰ add up to less than 2⁵³. */
-const SUMMANDS = 8;
+/** Products below 2⁵⁰ that may be added to a reduced sum before the next reduction, so that all stays below 2⁵³. */
+const SUMMANDS = 7;
 
 /** target = M x modulo p. */
 export function multiplyModulo(M: ModularRows, x: Float64Array, target: Float64Array, p: number): void {
@@ -87,15 +91,13 @@ export function multiplyModulo(M: ModularRows, x: Float64Array, target: Float64A
   const inverse = 1 / p;
   for (let i = 0; i < rows; i++) {
     let sum = 0;
-    let k = rowStart[i]!;
     const end = rowStart[i + 1]!;
-    const short = Math.min(end, k + SUMMANDS);
-    for (; k < short; k++) sum += values[k]! * x[column[k]!]!;
-    for (; k < end; k++) {
-      if (sum >= FULL) sum = reduce(sum, p, inverse);
-      sum += values[k]! * x[column[k]!]!;
+    for (let k = rowStart[i]!; k < end; ) {
+      const stop = Math.min(end, k + SUMMANDS);
+      for (; k < stop; k++) sum += values[k]! * x[column[k]!]!;
+      sum = reduce(sum, p, inverse);
     }
-    target[i] = reduce(sum, p, inverse);
+    target[i] = sum;
   }
 }
 
@@ -103,11 +105,12 @@ export function multiplyModulo(M: ModularRows, x: Float64Array, target: Float64A
 export function innerProductModulo(x: Float64Array, y: Float64Array, p: number): number {
   const inverse = 1 / p;
   let sum = 0;
-  for (let i = 0; i < x.length; i++) {
-    if (sum >= FULL) sum = reduce(sum, p, inverse);
-    sum += x[i]! * y[i]!;
+  for (let i = 0; i < x.length; ) {
+    const stop = Math.min(x.length, i + SUMMANDS);
+    for (; i < stop; i++) sum += x[i]! * y[i]!;
+    sum = reduce(sum, p, inverse);
   }
-  return reduce(sum, p, inverse);
+  return sum;
 }
 
 /**
