@@ -9,7 +9,8 @@ import { join } from 'node:path';
 import { performance } from 'node:perf_hooks';
 import { pathToFileURL } from 'node:url';
 import { installMissing } from './install-missing.mjs';
-import { root, run } from './project.mjs';
+import { root } from './project.mjs';
+import { run } from './run.mjs';
 
 const folder = join(root, 'tests', 'performance');
 const bundles = join(root, '.cache', 'bench');

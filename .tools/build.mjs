@@ -6,21 +6,23 @@
 import { mkdirSync, readdirSync, renameSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { installMissing } from './install-missing.mjs';
-import { isBuilt, isEntryPoint, markBuilt, root, run, sourcesFingerprint } from './project.mjs';
+import {
+  COMMAND_LINE_STAMP,
+  isBuilt,
+  isEntryPoint,
+  markBuilt,
+  PAGE_STAMP,
+  root,
+  sourcesFingerprint,
+} from './project.mjs';
+import { run } from './run.mjs';
 
 const dist = join(root, 'dist');
-const pageStamp = '.page-built-from';
-const commandLineStamp = 'cli/.built-from';
-
-/** Whether dist/cli is a build of the sources as they are. */
-export function isCommandLineBuilt(fingerprint = sourcesFingerprint()) {
-  return isBuilt(commandLineStamp, fingerprint);
-}
 
 /** Builds the page where it is missing or older than its sources; says whether it did. Throws with the builder's words. */
 export async function buildPage({ show }) {
   const fingerprint = sourcesFingerprint();
-  if (isBuilt(pageStamp, fingerprint)) return false;
+  if (isBuilt(PAGE_STAMP, fingerprint)) return false;
   const fresh = join(dist, `.page-${process.pid}`);
   await runVite(['build', '--outDir', fresh, '--emptyOutDir'], show, fresh);
   for (const name of readdirSync(dist)) {
@@ -28,20 +30,20 @@ export async function buildPage({ show }) {
   }
   for (const name of readdirSync(fresh)) renameSync(join(fresh, name), join(dist, name));
   rmSync(fresh, { recursive: true });
-  markBuilt(pageStamp, fingerprint);
+  markBuilt(PAGE_STAMP, fingerprint);
   return true;
 }
 
 /** Builds the command line where it is missing or older than its sources. Throws with the builder's words. */
 export async function buildCommandLine({ show }) {
   const fingerprint = sourcesFingerprint();
-  if (isCommandLineBuilt(fingerprint)) return false;
+  if (isBuilt(COMMAND_LINE_STAMP, fingerprint)) return false;
   const fresh = join(dist, `.cli-${process.pid}`);
   await runVite(['build', '--mode', 'cli', '--outDir', fresh, '--emptyOutDir'], show, fresh);
   mkdirSync(join(dist, 'cli'), { recursive: true });
   renameSync(join(fresh, 'poleward.js'), join(dist, 'cli', 'poleward.js'));
   rmSync(fresh, { recursive: true });
-  markBuilt(commandLineStamp, fingerprint);
+  markBuilt(COMMAND_LINE_STAMP, fingerprint);
   return true;
 }
 

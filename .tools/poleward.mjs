@@ -3,19 +3,19 @@
  * its sources, without a word on standard output, then becomes it.
  */
 
-import { join } from 'node:path';
-import { pathToFileURL } from 'node:url';
-import { buildCommandLine, isCommandLineBuilt } from './build.mjs';
-import { installMissing } from './install-missing.mjs';
-import { root } from './project.mjs';
+import { COMMAND_LINE_STAMP, isBuilt, sourcesFingerprint } from './project.mjs';
 
-try {
-  if (!isCommandLineBuilt()) {
+if (!isBuilt(COMMAND_LINE_STAMP, sourcesFingerprint())) await build();
+if (process.exitCode === undefined) await import('../dist/cli/poleward.js');
+
+async function build() {
+  try {
+    const { installMissing } = await import('./install-missing.mjs');
+    const { buildCommandLine } = await import('./build.mjs');
     installMissing();
     await buildCommandLine({ show: false });
+  } catch (error) {
+    process.stderr.write(`The command line could not be built: ${error.message}\n`);
+    process.exitCode = 1;
   }
-  await import(pathToFileURL(join(root, 'dist', 'cli', 'poleward.js')).href);
-} catch (error) {
-  process.stderr.write(`The command line could not be built: ${error.message}\n`);
-  process.exitCode = 1;
 }

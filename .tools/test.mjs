@@ -9,7 +9,8 @@ import { join } from 'node:path';
 import { buildCommandLine, buildPage } from './build.mjs';
 import { findChromium } from './find-chromium.mjs';
 import { installMissing } from './install-missing.mjs';
-import { root, run } from './project.mjs';
+import { root } from './project.mjs';
+import { run } from './run.mjs';
 import { weighFirstLoad } from './size.mjs';
 
 const filters = process.argv.slice(2);

@@ -1,6 +1,5 @@
 /** The machine as the command line sees it, through Node. Failures of the system become problems that name the file. */
 
-import { randomBytes } from 'node:crypto';
 import { constants } from 'node:fs';
 import { type FileHandle, open, realpath, rename, rm, stat, writeFile } from 'node:fs/promises';
 import { basename, dirname, join } from 'node:path';
@@ -89,7 +88,7 @@ async function realPath(path: string): Promise<string> {
 }
 
 async function writeBesideAndRename(target: string, content: string | Uint8Array, mode = 0o666): Promise<void> {
-  const beside = join(dirname(target), `.${basename(target)}.${randomBytes(6).toString('hex')}`);
+  const beside = join(dirname(target), `.${basename(target)}.${process.pid}`);
   try {
     const handle = await open(beside, 'wx', mode & 0o777);
     try {
