@@ -3,7 +3,14 @@
  * For the screen, where a wrong text is shown beside its field, and for edits that want to know before they are made.
  */
 
-import { evaluateParameters, evaluatePolynomial, evaluateQuantity, type Scope } from '../expression/index.ts';
+import {
+  evaluateParameters,
+  evaluatePolynomial,
+  evaluateQuantity,
+  evaluateTolerance,
+  onOneLine,
+  type Scope,
+} from '../expression/index.ts';
 import { type Problem, problem } from '../problem/index.ts';
 import { MOST_PROBLEMS } from './limits.ts';
 import { quantityFields } from './quantities.ts';
@@ -18,9 +25,20 @@ import type { Block, Diagram, Sheet } from './types.ts';
 export function checkExpressions(diagram: Diagram): readonly Problem[] {
   const parameters = evaluateParameters(diagram.parameters);
   if (!parameters.ok) return parameters.problems.slice(0, MOST_PROBLEMS);
-  const problems: Problem[] = [];
+  const problems = [...toleranceProblems(diagram, parameters.value)];
   checkSheet(diagram, TOP_SHEET, parameters.value, problems);
   return problems.slice(0, MOST_PROBLEMS);
+}
+
+function toleranceProblems({ parameters }: Diagram, scope: Scope): readonly Problem[] {
+  return parameters.flatMap(({ name, tolerance }) => {
+    const nominal = scope.get(name);
+    if (tolerance === undefined || nominal === undefined) return [];
+    const amount = evaluateTolerance(tolerance, nominal, scope);
+    if (amount.ok) return [];
+    const title = `Parameter ${onOneLine(name)}, tolerance`;
+    return amount.problems.map(({ code, message }) => problem(code, `${title}: ${message}`, { parameter: name }));
+  });
 }
 
 /** Recursion is as deep as groups are: at most 32. */

@@ -62,8 +62,10 @@ function minifySheet(sheet: Sheet): MinifiedSheet {
 
 /** The fields that are there, in the order of `keys`. */
 function inOrder(fields: object, keys: readonly string[]): Record<string, unknown> {
-  const present = new Map(Object.entries(fields));
-  return Object.fromEntries(keys.flatMap(key => (present.get(key) === undefined ? [] : [[key, present.get(key)]])));
+  const all: Readonly<Record<string, unknown>> = { ...fields };
+  const ordered: Record<string, unknown> = {};
+  for (const key of keys) if (all[key] !== undefined) ordered[key] = all[key];
+  return ordered;
 }
 
 const member = (key: string, value: unknown) => `${JSON.stringify(key)}: ${spaced(value)}`;

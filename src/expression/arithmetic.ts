@@ -16,7 +16,7 @@ import {
   toDouble,
   ZERO,
 } from '../algebra/index.ts';
-import { fail, ok, problem, type Result } from '../problem/index.ts';
+import { fail, ok, type Problem, problem, type Result } from '../problem/index.ts';
 import type { BinaryNode, BinaryOperator, CallNode, Value } from './expression.ts';
 import { applyFunction } from './functions.ts';
 import { print } from './print.ts';
@@ -103,18 +103,23 @@ function both(a: Quantity, b: Quantity, exact: Both<Rational>, double: Both<numb
 
 /** A refusal where a fraction has grown beyond what is kept. */
 function kept(node: BinaryNode, quantity: Quantity): Result<Quantity> {
-  if (typeof quantity === 'number') return ok(quantity);
-  const { n, d } = quantity;
-  return n < LARGEST && -n < LARGEST && d < LARGEST ? ok(quantity) : fail(tooLong(node));
+  return typeof quantity === 'number' || isKept(quantity) ? ok(quantity) : fail(tooLong(node));
 }
 
-function tooLong(node: BinaryNode) {
+/** Whether numerator and denominator are short enough to be kept. */
+export function isKept({ n, d }: Rational): boolean {
+  return n < LARGEST && -n < LARGEST && d < LARGEST;
+}
+
+/** The problem of a fraction that has grown beyond what is kept. */
+export function tooLong(node: BinaryNode): Problem {
   const advice = node.operator === '^' ? 'Use a smaller exponent.' : 'Round the numbers in it.';
   const message = `The exact value of ${quote(print(node))} has more than ${MOST_BITS} binary digits. ${advice}`;
   return problem('bad-expression', message);
 }
 
-function divisionByZero(node: BinaryNode) {
+/** The problem of a division, or a negative power, that meets a zero. */
+export function divisionByZero(node: BinaryNode): Problem {
   const by = node.operator === '/' ? node.right : node.left;
   const what = by.kind === 'number' ? '' : `: ${onOneLine(print(by))} is 0`;
   return problem('division-by-zero', `${quote(print(node))} divides by zero${what}. Change a value in it.`);

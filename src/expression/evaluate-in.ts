@@ -6,11 +6,12 @@
 
 import type { Field } from '../algebra/index.ts';
 import { fail, ok, problem, type Result } from '../problem/index.ts';
+import { coefficientLists } from './coefficient-lists.ts';
 import { evaluateExpression } from './evaluate.ts';
 import type { BinaryNode, BinaryOperator, Expression } from './expression.ts';
 import { foldUntil, inOrder } from './fold.ts';
 import { hasLaplaceVariable } from './names.ts';
-import { type CoefficientArithmetic, HIGHEST_DEGREE, readPolynomial } from './polynomial-arithmetic.ts';
+import { HIGHEST_DEGREE, readPolynomial } from './polynomial-reading.ts';
 
 /** What stands for a name in the field, `pi` and `e` included; null where nothing does. */
 export type Lookup<T> = (name: string) => T | null;
@@ -34,14 +35,15 @@ export function evaluatePolynomialIn<T>(
   field: Field<T>,
   lookup: Lookup<T>,
 ): readonly T[] | null {
-  const arithmetic: CoefficientArithmetic<T> = {
+  const arithmetic = coefficientLists<T>({
     zero: field.zero,
     one: field.one,
     node: (node, parts) => nodeIn(node, parts, field, lookup),
     combine: (operator, node, a, b) => combineIn(operator, node, a, b, field),
-    negate: field.negate,
+    negate: a => field.negate(a),
+    isZero: a => field.isZero(a),
     exponent: node => wholeExponent(node),
-  };
+  });
   const result = readPolynomial(expression, arithmetic);
   return result.ok ? result.value : null;
 }

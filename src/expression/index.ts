@@ -27,4 +27,5 @@ export { evaluateParameters, type ParameterText } from './parameters.ts';
 export { parseExpression } from './parse.ts';
 export { print } from './print.ts';
 export { nearestName } from './spelling.ts';
+export { evaluateTolerance } from './tolerance.ts';
 export { onOneLine, quote } from './wording.ts';

@@ -4,14 +4,14 @@
  */
 
 import { DEFAULT_DELAY_ORDER } from '../limits.ts';
-import { blockTitle } from '../titles.ts';
+import { blockTitle, displayName } from '../titles.ts';
 import type { Block, Diagram, Sheet } from '../types.ts';
 import { note, pathOf, type Reading, type SheetPlace, TOP_SHEET } from './reading.ts';
 
+/** The block that bears a name, and where it stands. */
 interface Bearer {
-  /** The block's title with the names of the groups around it. */
-  readonly title: string;
-  readonly path: string;
+  readonly block: Block;
+  readonly place: SheetPlace;
 }
 
 /** Notes each name that two states, two inputs of a sheet or two outputs of a sheet bear. Linear in the names. */
@@ -24,17 +24,21 @@ function noteOnSheet(sheet: Sheet, place: SheetPlace, states: Map<string, Bearer
   const inputs = new Map<string, Bearer>();
   const outputs = new Map<string, Bearer>();
   for (const block of sheet.blocks) {
-    const full = [...place.names, block.name ?? block.id].join('.');
-    const bearer = { title: blockTitle({ ...block, name: full }), path: pathOf(place, block.id) };
-    if (block.kind === 'input') noteClash(full, 'inputs', bearer, inputs, reading);
-    else if (block.kind === 'output') noteClash(full, 'outputs', bearer, outputs, reading);
+    const bearer = { block, place };
+    if (block.kind === 'input') noteClash(fullName(bearer), 'inputs', bearer, inputs, reading);
+    else if (block.kind === 'output') noteClash(fullName(bearer), 'outputs', bearer, outputs, reading);
     else if (block.kind === 'group') {
-      const inside = { ids: [...place.ids, block.id], names: [...place.names, block.name ?? block.id] };
+      const inside = { ids: [...place.ids, block.id], names: [...place.names, displayName(block)] };
       noteOnSheet(block.sheet, inside, states, reading);
     } else {
-      for (const state of stateNames(block, full)) noteClash(state, 'states', bearer, states, reading);
+      for (const state of stateNames(bearer)) noteClash(state, 'states', bearer, states, reading);
     }
   }
+}
+
+/** The block's name with those of the groups around it. */
+function fullName({ block, place }: Bearer): string {
+  return place.names.length === 0 ? displayName(block) : [...place.names, displayName(block)].join('.');
 }
 
 function noteClash(
@@ -49,20 +53,23 @@ function noteClash(
     seen.set(name, bearer);
     return;
   }
-  const blocks = other.path === bearer.path ? [bearer.path] : [other.path, bearer.path];
-  const message = `Two ${what} have the name ${name}: ${other.title} (${other.path}) and ${bearer.title} (${bearer.path}). Rename one.`;
-  note(reading, 'duplicate-name', message, { blocks });
+  const paths = [other, bearer].map(({ block, place }) => pathOf(place, block.id));
+  const titles = [other, bearer].map(one => blockTitle({ ...one.block, name: fullName(one) }));
+  const [first, second] = titles.map((title, i) => `${title} (${paths[i] ?? ''})`);
+  const message = `Two ${what} have the name ${name}: ${first} and ${second}. Rename one.`;
+  note(reading, 'duplicate-name', message, { blocks: [...new Set(paths)] });
 }
 
 /** The names of the states that a block is known to bring; none where that takes its order. */
-function stateNames(block: Block, name: string): readonly string[] {
+function stateNames(bearer: Bearer): readonly string[] {
+  const { block } = bearer;
   switch (block.kind) {
     case 'integrator':
-      return [name];
+      return [fullName(bearer)];
     case 'state-model':
-      return numbered(name, block.A.length);
+      return numbered(fullName(bearer), block.A.length);
     case 'delay':
-      return numbered(name, block.order ?? DEFAULT_DELAY_ORDER);
+      return numbered(fullName(bearer), block.order ?? DEFAULT_DELAY_ORDER);
     default:
       return [];
   }

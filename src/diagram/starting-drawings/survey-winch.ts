@@ -4,7 +4,7 @@
  * winds a line of stiffness k. The scenario and its figures are our own.
  */
 
-import type { Block, Diagram, Parameter, Wire } from '../types.ts';
+import type { Block, Diagram, Parameter, Point, Wire } from '../types.ts';
 
 /** Centre heights of the rows: the controller with its parallel path, the drum and line with their paths back. */
 const ROW = { parallel: 60, controller: 160, reaction: 300, heave: 360, plant: 440, friction: 540 } as const;
@@ -32,9 +32,26 @@ const BLOCKS: readonly Block[] = [
   { id: 'F_out', kind: 'output', name: 'F', unit: 'N', at: [1000, ROW.plant] },
 ];
 
+/** The tension's way back, underneath everything. */
+const FEEDBACK: readonly Point[] = [
+  [940, ROW.plant],
+  [940, 620],
+  [40, 620],
+  [40, 240],
+  [160, 240],
+];
+
+/** The torque's way from the end of the upper row to the beginning of the lower one. */
+const TO_THE_DRUM: readonly Point[] = [
+  [840, ROW.controller],
+  [840, 260],
+  [100, 260],
+  [100, ROW.plant],
+];
+
 const WIRES: readonly Wire[] = [
   { from: ['r', 0], to: ['e', 0] },
-  { from: ['F', 0], to: ['e', 1] },
+  { from: ['F', 0], to: ['e', 1], via: FEEDBACK },
   { from: ['e', 0], to: ['q', 0] },
   { from: ['e', 0], to: ['proportional', 0] },
   { from: ['q', 0], to: ['integral', 0] },
@@ -43,7 +60,7 @@ const WIRES: readonly Wire[] = [
   { from: ['T', 0], to: ['demand', 2] },
   { from: ['demand', 0], to: ['lag', 0] },
   { from: ['lag', 0], to: ['T', 0] },
-  { from: ['T', 0], to: ['torque', 0] },
+  { from: ['T', 0], to: ['torque', 0], via: TO_THE_DRUM },
   { from: ['reaction', 0], to: ['torque', 1] },
   { from: ['friction', 0], to: ['torque', 2] },
   { from: ['torque', 0], to: ['drum', 0] },

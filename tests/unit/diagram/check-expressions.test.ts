@@ -57,6 +57,18 @@ describe('the expressions of a drawing', () => {
     ]);
   });
 
+  test('of tolerances are among them', () => {
+    const parameters = [
+      { name: 'k', value: '1', tolerance: '10 %' },
+      { name: 'm', value: '1', tolerance: '-k' },
+      { name: 'n', value: '1', tolerance: '10 percent' },
+    ];
+    expect(messages(drawing([], parameters))).toEqual([
+      'bad-expression: Parameter m, tolerance: "-k" is a negative tolerance. Leave out its sign.',
+      'bad-expression: Parameter n, tolerance: "10 percent" is not an expression. Write 10*percent.',
+    ]);
+  });
+
   test('are reported up to a hundred', () => {
     const blocks = Array.from({ length: 300 }, (_, i): Block => ({ id: `g${i}`, kind: 'gain', gain: '' }));
     expect(checkExpressions(drawing(blocks))).toHaveLength(100);

@@ -30,6 +30,10 @@ describe('a polynomial in s', () => {
     ['sqrt(4)*s + abs(-1)', ['2', '1']],
     ['0', []],
     ['s - s', []],
+    ['w*s + 1', [0.5, '1']],
+    ['(w*s + 1)^2 - 1', [0.25, 1, '0']], // what is exact among irrational parts stays exact
+    ['s/3 + s/7 - 1/2', ['10/21', '-1/2']],
+    ['(s - 2/3)/(-5/7)', ['-7/5', '14/15']],
   ])('%s has the coefficients %j', (text, expected) => {
     expect(coefficients(text)).toEqual(expected);
   });
@@ -65,6 +69,14 @@ describe('a polynomial is refused', () => {
     ['(s^2)^101', 'bad-expression: "(s^2)^101" has a degree above 200 in s. Split it over several blocks.'],
     ['(s + 1)/m', 'division-by-zero: "(s + 1)/m" divides by zero: m is 0. Change a value in it.'],
     ['q*s', 'unknown-parameter: "q*s" uses q, which is not a parameter. Add q to the parameters.'],
+    [
+      '(0.1234567890123*s + 0.9876543210123)^200',
+      'bad-expression: A coefficient of "(0.1234567890123*s + 0.9876543210123)^200" has more than 8192 binary digits. Round the numbers in it.',
+    ],
+    [
+      '(2^8000*s)^5',
+      'bad-expression: The exact value of "(2^8000*s)^5" has more than 8192 binary digits. Use a smaller exponent.',
+    ],
     ['1e400*s', 'bad-expression: "1e400*s" is too large: it fits no finite double. Choose other units.'],
     ['2 s', 'bad-expression: "2 s" is not an expression. Write 2*s.'],
   ])('%s', (text, expected) => {
