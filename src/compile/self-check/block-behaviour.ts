@@ -59,26 +59,39 @@ function outputRow({ numerator, denominator }: Rational) {
 }
 
 /**
- * y = N(s)/D(s) u. With s X_i = X_{i+1} + x_i(0) along the chain, X_i = s^{i−1} X_1 − g_i, g_1 = 0, g_{i+1} = s g_i + x_i(0),
- * and its last link gives D(s) X_1 = u + x_n(0) + s g_n + Σ a_i g_{i+1}.
+ * y = N(s)/D(s) u. Along the chain s X_i = X_{i+1} + x_i(0), so X_i = s^{i−1}/D(s) · drive + h_i, where h answers to the
+ * initial values alone: from h_n = 0 downwards by divisions with s where |s| > 1, from h_1 = 0 upwards by multiplications
+ * otherwise, as either loses all digits in the other's place. The chain's last link gives the drive.
  */
 function rationalAt(law: Rational, s: Complex): BlockBehaviour | null {
   const { n, c } = outputRow(law);
   const powers = powersOver(law.denominator, Math.max(n, law.numerator.length), s);
   if (powers === null) return null;
-  const gain = law.numerator.reduce((sum, b, i) => add(sum, multiply(real(b), powers[i]!)), ZERO);
+  const gain = timesComplex(law.numerator, powers, ZERO);
   const chain = (values: readonly number[], u: Complex) => {
-    const g: Complex[] = [ZERO];
-    for (let i = 0; i < n; i++) g.push(add(multiply(s, g[i]!), real(values[i]!)));
-    let drive = add(u, g[n]!);
-    for (let i = 0; i < n; i++) drive = add(drive, multiply(real(law.denominator[i]!), g[i]!));
-    return Array.from({ length: n }, (_, i) => subtract(multiply(powers[i]!, drive), g[i]!));
+    const h = answerToInitial(values, s);
+    let drive = subtract(add(u, real(values[n - 1]!)), timesComplex(law.denominator.slice(0, n), h, ZERO));
+    if (!isLarge(s)) drive = subtract(drive, multiply(s, h[n - 1]!));
+    return h.map((own, i) => add(multiply(powers[i]!, drive), own));
   };
   return {
     gains: [[gain]],
     fromStates: values => [n === 0 ? ZERO : timesComplex(c, chain(values, ZERO), ZERO)],
     readStates: (values, [u = ZERO]) => (n === 0 ? NO_STATES : readingAt(s, chain(values, u), values)),
   };
+}
+
+/** h_i = (h_{i+1} + x_i(0)) / s down from h_n = 0, or h_{i+1} = s h_i − x_i(0) up from h_1 = 0. */
+function answerToInitial(values: readonly number[], s: Complex): Complex[] {
+  const n = values.length;
+  const h = new Array<Complex>(n).fill(ZERO);
+  if (isLarge(s)) for (let i = n - 2; i >= 0; i--) h[i] = divide(add(h[i + 1]!, real(values[i]!)), s);
+  else for (let i = 0; i < n - 1; i++) h[i + 1] = subtract(multiply(s, h[i]!), real(values[i]!));
+  return h;
+}
+
+function isLarge(s: Complex): boolean {
+  return modulus(s) > 1;
 }
 
 /** Derivatives s X − x(0). */
@@ -97,14 +110,14 @@ function readingHeld(values: readonly number[], derivative: readonly Complex[]):
 /** s^i / D(s) for i from 0 to highest, in powers of 1/s where those are the smaller ones; null where D(s) = 0. */
 function powersOver(denominator: readonly number[], highest: number, s: Complex): Complex[] | null {
   const n = denominator.length - 1;
-  const isLarge = Math.hypot(s.re, s.im) > 1;
-  const base = isLarge ? divide(ONE, s) : s;
-  const ordered = isLarge ? [...denominator].reverse() : denominator;
+  const large = isLarge(s);
+  const base = large ? divide(ONE, s) : s;
+  const ordered = large ? [...denominator].reverse() : denominator;
   const value = ordered.reduceRight((sum, a) => add(multiply(sum, base), real(a)), ZERO);
   if (value.re === 0 && value.im === 0) return null;
   const powers: Complex[] = [];
   for (let i = 0; i <= highest; i++) {
-    const scaled = isLarge ? power(i > n ? s : base, Math.abs(n - i)) : power(s, i);
+    const scaled = large ? power(i > n ? s : base, Math.abs(n - i)) : power(s, i);
     powers.push(divide(scaled, value));
   }
   return powers;

@@ -10,7 +10,7 @@ import { modulus } from './complex.ts';
 import { testFrequencies } from './frequencies.ts';
 import { awayFromZero, type Jitter, jitterOf, randomSigned } from './random.ts';
 import { type RawDrawing, rawDrawing } from './raw-drawing.ts';
-import { jittered, type RawLaw, stateCount } from './raw-laws.ts';
+import { jittered, type RawLaw } from './raw-laws.ts';
 import { type Residual, residuals } from './residuals.ts';
 import { type Drive, solveDrawing } from './solve-drawing.ts';
 import { transferResiduals } from './transfer-residuals.ts';
@@ -108,24 +108,7 @@ function frequencyDrives(drawing: RawDrawing): Drive[] {
     states: rest,
   }));
   if (drawing.isImproper || states === 0) return drives;
-  return [...drives, { inputs: inputs.map(() => 0), states: initialStates(drawing) }];
-}
-
-/**
- * Initial values are given to transfer functions of at most this order. What longer chains make of them cancels in powers
- * of s, and a transfer function always starts at rest anyway; they answer to their input alone.
- */
-const LONGEST_STARTED_CHAIN = 4;
-
-function initialStates({ blocks, states }: RawDrawing): number[] {
-  const random = randomSigned(4);
-  const initial = new Array<number>(states).fill(0);
-  for (const { law, firstState } of blocks) {
-    const count = stateCount(law);
-    if (count > LONGEST_STARTED_CHAIN && law.kind === 'rational') continue;
-    for (let i = 0; i < count; i++) initial[firstState + i] = awayFromZero(random);
-  }
-  return initial;
+  return [...drives, { inputs: inputs.map(() => 0), states: rest.map(() => awayFromZero(random)) }];
 }
 
 /** Largest relative difference; 1 where it is no number, null where the drawing has no answer at this frequency. */
