@@ -36,6 +36,8 @@ export interface Propagator {
 export interface Motion {
   readonly z: Float64Array;
   readonly lost: Float64Array;
+  /** Room for F z. */
+  readonly step: Float64Array;
 }
 
 /** Terms of the exponential series that reach 2⁻⁵³ of the first one at norm 1/2: (1/2)^15 / 15! < 2⁻⁵³. */
@@ -69,12 +71,15 @@ function propagatorOf({ A, B, C }: Balanced, interval: number, levels: readonly 
 
 /** The motion at time 0. */
 export function initialMotion({ start }: Propagator): Motion {
-  return { z: start.slice(), lost: new Float64Array(start.length) };
+  return motionFrom(start);
+}
+
+function motionFrom(z: Float64Array): Motion {
+  return { z: z.slice(), lost: new Float64Array(z.length), step: new Float64Array(z.length) };
 }
 
 /** Moves the motion on by interval / 2^level, in place. O(n²). */
-export function advance({ levels }: Propagator, { z, lost }: Motion, level: number): void {
-  const step = new Float64Array(z.length);
+export function advance({ levels }: Propagator, { z, lost, step }: Motion, level: number): void {
   multiplyVector(levels[level]!, z, step);
   for (let i = 0; i < z.length; i++) {
     const change = step[i]! + lost[i]!;
@@ -89,31 +94,26 @@ export function advance({ levels }: Propagator, { z, lost }: Motion, level: numb
  * O(n² (levels + 15)); z is left alone.
  */
 export function stateAfter(propagator: Propagator, z: Float64Array, elapsed: number): Float64Array {
-  const motion = { z: z.slice(), lost: new Float64Array(z.length) };
+  const motion = motionFrom(z);
   let rest = elapsed;
-  propagator.levels.forEach((_, level) => {
+  for (let level = 0; level < propagator.levels.length; level++) {
     const part = propagator.interval * 2 ** -level;
-    if (rest < part) return;
+    if (rest < part) continue;
     advance(propagator, motion, level);
     rest -= part;
-  });
-  if (rest > 0) addSeries(propagator.M, motion.z, rest);
-  return motion.z;
+  }
+  return rest > 0 ? bySeries(propagator.M, motion, rest) : motion.z;
 }
 
-/** z ← e^(M t) z by its series, smallest terms first. */
-function addSeries(M: DenseMatrix, z: Float64Array, t: number): void {
-  const terms = [z];
-  for (let k = 1; k <= SERIES_TERMS; k++) {
-    const next = derivative(M, terms[k - 1]!);
-    for (let i = 0; i < next.length; i++) next[i]! *= t / k;
-    terms.push(next);
+/** e^(M t) z by its series, as z + t M (z + t/2 M (z + t/3 M (…))). */
+function bySeries(M: DenseMatrix, { z, step }: Motion, t: number): Float64Array {
+  const sum = z.slice();
+  for (let k = SERIES_TERMS; k > 0; k--) {
+    multiplyVector(M, sum, step);
+    const factor = t / k;
+    for (let i = 0; i < z.length; i++) sum[i] = z[i]! + factor * step[i]!;
   }
-  for (let i = 0; i < z.length; i++) {
-    let sum = 0;
-    for (let k = SERIES_TERMS; k > 0; k--) sum += terms[k]![i]!;
-    z[i]! += sum;
-  }
+  return sum;
 }
 
 /** M z. */

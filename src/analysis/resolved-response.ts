@@ -35,6 +35,10 @@ const FEWEST_HALVINGS = 6;
 /** A mode asks for its steps while its decaying factor is above this. */
 const ALIVE = 1e-7;
 
+/** Steps and relative accuracy of a lifetime, of which two figures matter. */
+const MOST_STEPS = 50;
+const DECAY_DIGITS = 1e-3;
+
 /** Modes within this factor in |λ| act together like one multiple pole. */
 const CLUSTER = 1.5;
 
@@ -101,12 +105,20 @@ export function lifetime(mode: Mode, modes: readonly Mode[], share: number): num
     const isConjugate = re === mode.re && im === -mode.im && im !== 0;
     if (other <= CLUSTER * size && size <= CLUSTER * other && !isConjugate) together += multiplicity;
   }
+  return decayTime(together, share) / -mode.re;
+}
+
+/** The x above m − 1 at which x^(m−1) e^(−x) / (m−1)! is `share`. */
+function decayTime(m: number, share: number): number {
   let offset = -Math.log(share);
-  for (let k = 2; k < together; k++) offset -= Math.log(k);
-  let x = Math.max(1, together - Math.log(share));
-  // x ← offset + (m − 1) ln x contracts above m − 1, where the function falls.
-  for (let k = 0; k < 50; k++) x = Math.max(1, together - 1, offset + (together - 1) * Math.log(x));
-  return x / -mode.re;
+  for (let k = 2; k < m; k++) offset -= Math.log(k);
+  let x = m - Math.log(share);
+  for (let k = 0; k < MOST_STEPS; k++) {
+    const next = Math.max(1, m - 1, offset + (m - 1) * Math.log(x)); // a contraction above m − 1
+    if (Math.abs(next - x) < DECAY_DIGITS * x) return next;
+    x = next;
+  }
+  return x;
 }
 
 function followed(motionOf: Propagator, levels: readonly number[]): ResolvedResponse {

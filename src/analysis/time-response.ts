@@ -125,7 +125,9 @@ function longestHorizon(motions: readonly ChannelMotion[]): Horizon {
 }
 
 function times({ duration }: Horizon, points: number): Float64Array {
-  return Float64Array.from({ length: points }, (_, k) => duration * (k / (points - 1)));
+  const t = new Float64Array(points);
+  for (let k = 0; k < points; k++) t[k] = duration * (k / (points - 1));
+  return t;
 }
 
 /** Outputs that share the model's states are followed together, those realised by themselves each alone. */
@@ -153,9 +155,7 @@ function samples(system: FreeSystem, { interval, points }: Grid): Float64Array[]
   const y = Array.from({ length: system.C.rows }, () => new Float64Array(points));
   for (let k = 0; k < points; k++) {
     if (k > 0) advance(motionOf, motion, 0);
-    y.forEach((values, output) => {
-      values[k] = outputOf(motionOf.C, output, motion.z);
-    });
+    for (let output = 0; output < y.length; output++) y[output]![k] = outputOf(motionOf.C, output, motion.z);
   }
   return y;
 }
