@@ -16,11 +16,11 @@ export {
 export { emptyDiagram } from './empty-diagram.ts';
 export { MAXIMUM_BYTES } from './limits.ts';
 export { portCounts } from './port-counts.ts';
-export { mapQuantities, type QuantityField, quantityFields } from './quantities.ts';
+export { type QuantityField, quantityFields } from './quantities.ts';
 export { readDiagram } from './reading/index.ts';
 export { isSameModel } from './same-model.ts';
 export { startingDrawing } from './starting-drawings/index.ts';
-export { blockTitle, blockTitleAtStart, displayName, KIND_WORDS } from './titles.ts';
+export { blockTitle, blockTitleAtStart, displayName } from './titles.ts';
 export type {
   Block,
   BlockKind,

@@ -8,7 +8,7 @@ export { evaluateIn, evaluatePolynomialIn, type Lookup } from './evaluate-in.ts'
 export { evaluatePolynomial, polynomialAsWritten } from './evaluate-polynomial.ts';
 export type { BinaryOperator, Expression, Value } from './expression.ts';
 export { fold } from './fold.ts';
-export { FUNCTION_NAMES, type FunctionName, isFunctionName } from './functions.ts';
+export { FUNCTION_NAMES, type FunctionName } from './functions.ts';
 export { hasLaplaceVariable, namesIn, parameterNameFault, renameIn } from './names.ts';
 export {
   escapeLatex,

@@ -1,7 +1,7 @@
 /** Reading documents from text, stage by stage, and the rules that edits share with it. */
 
-export { blockSchemas, nameSchema } from './block-schemas.ts';
-export { checkJoining, wireTitle } from './joining.ts';
+export { blockSchemas } from './block-schemas.ts';
+export { wireTitle } from './joining.ts';
 export { noteNameClashes } from './names.ts';
 export { readDiagram } from './read-diagram.ts';
 export { beginReading, pathOf, type SheetPlace, TOP_SHEET } from './reading.ts';
