@@ -23,7 +23,7 @@ export function writeMathml(context: ModelContext): string {
   const { note, ...rows } = printedRows(context, PRINTER);
   const lines = equations(model, rows).map(equation => `<mtr><mtd>${row(...equation)}</mtd></mtr>`);
   const comment = oneLine(`${model.title} ${note ?? ''} ${CAUTION}`).replace(/-(?=-)/g, '- ');
-  return `<!-- ${comment} -->\n${mathElement(`<mtable>\n${lines.join('\n')}\n</mtable>`, 'block')}\n`;
+  return `<!-- ${comment} -->\n${mathElement(`<mtable displaystyle="true">\n${lines.join('\n')}\n</mtable>`, 'block')}\n`;
 }
 
 function equations(model: StateSpace, { A, B, C, D }: MatrixRows<string>): string[][] {
