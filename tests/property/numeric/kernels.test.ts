@@ -29,6 +29,13 @@ const square: fc.Arbitrary<DenseMatrix> = fc.integer({ min: 1, max: 12 }).chain(
     .map(rows => denseFromRows(rows, n));
 });
 
+/** Square matrices of 1 to 5 rows, entries from −1 to 1. */
+const small: fc.Arbitrary<DenseMatrix> = fc.integer({ min: 1, max: 5 }).chain(n => {
+  const entry = fc.integer({ min: -1000, max: 1000 }).map(x => x / 1000);
+  const row = fc.array(entry, { minLength: n, maxLength: n });
+  return fc.array(row, { minLength: n, maxLength: n }).map(rows => denseFromRows(rows, n));
+});
+
 const trace = ({ rows, data }: DenseMatrix) => data.reduce((sum, x, k) => (k % (rows + 1) === 0 ? sum + x : sum), 0);
 
 describe('kernels on random matrices', () => {
@@ -43,6 +50,24 @@ describe('kernels on random matrices', () => {
         imaginary.forEach((im, k) => {
           expect(im).toBe(-imaginary[imaginary.length - 1 - k]!);
         });
+      }),
+      RUNS,
+    );
+  });
+
+  test('the product of eigenvalues is the determinant', () => {
+    fc.assert(
+      fc.property(small, A => {
+        const values = eigenvalues(A)!;
+        // det of complex pairs multiplied out side by side: (a + jb)(a − jb) = a² + b².
+        let [re, im] = [1, 0];
+        values.re.forEach((a, k) => {
+          [re, im] = [re * a - im * values.im[k]!, re * values.im[k]! + im * a];
+        });
+        const factors = luFactors(A);
+        const determinant = factors === null ? 0 : luDeterminant(factors);
+        // Entries up to 1, five rows: |det| ≤ 5^2.5 = 56 (Hadamard), and a change of 8 n ε in each row moves it by n times that.
+        expect(Math.hypot(re - determinant, im)).toBeLessThanOrEqual(5 * 56 * 5 * 8 * Number.EPSILON);
       }),
       RUNS,
     );

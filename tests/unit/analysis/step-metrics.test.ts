@@ -178,3 +178,8 @@ test('of a model too large for exact answers the figures rest on doubles', () =>
   expectNear(found.finalValue, 1);
   expectNear(found.settlingTime2percent, 0.5 * Math.log(50));
 });
+
+test('a response that swings a million times before it settles is not followed, and says so', () => {
+  const found = metrics(companionModel([1], [1, 2e-7, 1]));
+  expect(found).toMatchObject({ finalValue: 1, settlingTime2percent: null, peak: null, status: 'not-computed' });
+});
