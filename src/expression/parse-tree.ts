@@ -1,13 +1,13 @@
 /**
- * The one place that knows mathjs. Its parser is given four kinds of node of ours in place of its own twenty, which bring
+ * The one place that knows mathjs. Its parser is given two kinds of node of ours in place of its own twenty, which bring
  * evaluation, printing and types that nothing here uses and weigh twice as much as the parser. A text that would need
- * another kind never gets here: grammar.ts has refused it.
+ * another kind never gets here: it holds placeholder names and operators only.
  */
 
 import { createParse } from 'mathjs/number';
 
-/** The kinds of node that a checked text leads to, with the fields by which mathjs knows them. */
-export type ParsedNode = SymbolNode | OperatorNode | FunctionNode | ParenthesisNode;
+/** The kinds of node that such a text leads to, with the fields by which mathjs knows them. */
+export type ParsedNode = SymbolNode | OperatorNode;
 
 /** What mathjs asks of a node before it trusts its other marks. */
 class BaseNode {
@@ -40,32 +40,10 @@ export class OperatorNode extends BaseNode {
   }
 }
 
-export class FunctionNode extends BaseNode {
-  readonly type = 'function';
-  readonly isFunctionNode = true;
-  readonly fn: SymbolNode;
-  readonly args: readonly ParsedNode[];
-  constructor(fn: SymbolNode, args: readonly ParsedNode[]) {
-    super();
-    this.fn = fn;
-    this.args = args;
-  }
-}
-
-export class ParenthesisNode extends BaseNode {
-  readonly type = 'parenthesis';
-  readonly isParenthesisNode = true;
-  readonly content: ParsedNode;
-  constructor(content: ParsedNode) {
-    super();
-    this.content = content;
-  }
-}
-
-/** In place of every kind that a checked text cannot lead to. */
+/** In place of every kind that such a text cannot lead to. */
 class Unexpected {
   constructor() {
-    throw new Error('the parser met what the grammar has refused');
+    throw new Error('the parser met what it was not to be given');
   }
 }
 
@@ -75,15 +53,13 @@ const onlyText = Object.assign(
   { addConversion: () => undefined },
 );
 
-/** The tree of an expression of placeholder names, operators, parentheses and calls. */
+/** The tree of placeholder names and operators. Recurses once for each minus sign or power that waits for another. */
 export const parseTree: (text: string) => ParsedNode = createParse({
   typed: onlyText,
   numeric: () => new Unexpected(),
   config: { number: 'number' },
   SymbolNode,
   OperatorNode,
-  FunctionNode,
-  ParenthesisNode,
   AccessorNode: Unexpected,
   ArrayNode: Unexpected,
   AssignmentNode: Unexpected,
@@ -91,8 +67,10 @@ export const parseTree: (text: string) => ParsedNode = createParse({
   ConditionalNode: Unexpected,
   ConstantNode: Unexpected,
   FunctionAssignmentNode: Unexpected,
+  FunctionNode: Unexpected,
   IndexNode: Unexpected,
   ObjectNode: Unexpected,
+  ParenthesisNode: Unexpected,
   RangeNode: Unexpected,
   RelationalNode: Unexpected,
 });
