@@ -3,6 +3,7 @@
  * why in the notice.
  */
 
+import { placeUnplaced } from '../../diagram/arranging/index.ts';
 import type { Diagram, Edit, Point } from '../../diagram/index.ts';
 import type { Problem } from '../../problem/index.ts';
 import type { Answer, Notation } from '../../worker/index.ts';
@@ -43,6 +44,15 @@ export function editTogether(changes: readonly Edit[], said?: string): readonly 
   return [];
 }
 
+/** Whatever edits `work` makes are one undo step. */
+export function asOneStep(work: () => void): void {
+  const start = store.getState().document;
+  work();
+  const { document } = store.getState();
+  if (document.revision <= start.revision + 1 || document.key !== start.key) return;
+  store.setState({ document: { ...document, past: [...start.past, start.diagram] } });
+}
+
 export function undo(): void {
   const { document } = store.getState();
   if (document.past.length === 0) return notify('Nothing to undo.');
@@ -57,12 +67,12 @@ export function redo(): void {
   notify('Redone.');
 }
 
-/** Puts another drawing on the sheet; what was open stays kept under its own key. */
+/** Puts another drawing on the sheet, with places for blocks that have none; what was open stays kept under its own key. */
 export function openDrawing(diagram: Diagram, key: string, said: string): void {
   store.setState(state => ({
-    document: opened(state.document, diagram, key),
+    document: opened(state.document, placeUnplaced(diagram), key),
     selection: NOTHING_SELECTED,
-    view: { ...state.view, editing: null, input: null, output: null, kept: null },
+    view: { ...state.view, editing: null, writingAt: null, finding: false, input: null, output: null, kept: null },
   }));
   notify(said);
 }
@@ -88,6 +98,16 @@ export function editFields(editing: string | null): void {
 /** Begins a wire by key from a block, or lets go of it. */
 export function beginWire(wiringFrom: string | null): void {
   changeView({ wiringFrom });
+}
+
+/** Says where the next written block goes and what is wired to it. */
+export function beginWritingAt(writingAt: ViewSlice['writingAt']): void {
+  changeView({ writingAt });
+}
+
+/** Opens or closes the field that finds blocks. */
+export function openFinding(finding: boolean): void {
+  changeView({ finding });
 }
 
 export function setNotation(notation: Notation): void {

@@ -1,5 +1,6 @@
 /** The view slice: what is shown and how, nothing of it part of the document. */
 
+import type { Point, PortReference } from '../../diagram/index.ts';
 import type { Notation } from '../../worker/index.ts';
 
 export interface ViewSlice {
@@ -13,6 +14,10 @@ export interface ViewSlice {
   readonly editing: string | null;
   /** The block that a wire was begun from by key. */
   readonly wiringFrom: string | null;
+  /** Where the block that is being written goes and the port that its wire starts at; null: where it falls. */
+  readonly writingAt: { readonly at: Point; readonly from: PortReference | null } | null;
+  /** Whether the field that finds blocks is open. */
+  readonly finding: boolean;
   /** A title block folded to its heading. */
   readonly folded: boolean;
   readonly dialog: 'export' | 'drawings' | 'keys' | null;
@@ -36,6 +41,8 @@ export const FIRST_VIEW: ViewSlice = {
   theme: null,
   editing: null,
   wiringFrom: null,
+  writingAt: null,
+  finding: false,
   folded: false,
   dialog: null,
   notice: null,
