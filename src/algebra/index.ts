@@ -11,7 +11,6 @@ export { invariantZeroPolynomial } from './invariant-zeros.ts';
 export type { Polynomial } from './polynomial.ts';
 export {
   addPolynomials,
-  arePolynomialsEqual,
   derivative,
   dividePolynomials,
   evaluatePolynomialAt,
@@ -43,7 +42,6 @@ export type { SparseMatrix } from './sparse-matrix.ts';
 export { entryAt, fromRows, toRows } from './sparse-matrix.ts';
 export type { SquareFreeFactor } from './square-free.ts';
 export { squareFreeFactors } from './square-free.ts';
-export { principalSubmatrix, strongComponents } from './strong-components.ts';
 export type {
   EffortLimit,
   EffortLimits,

@@ -139,8 +139,3 @@ export function evaluatePolynomialAt(p: Polynomial, x: Rational): Rational {
 export function reflectPolynomial(p: Polynomial): Polynomial {
   return p.map((coefficient, i) => ((p.length - 1 - i) % 2 === 0 ? coefficient : negateRational(coefficient)));
 }
-
-/** Whether p and q have the same coefficients. */
-export function arePolynomialsEqual(p: Polynomial, q: Polynomial): boolean {
-  return p.length === q.length && p.every((a, i) => a.n === q[i]?.n && a.d === q[i]?.d);
-}

@@ -10,13 +10,13 @@ import {
   type Rational,
   rational,
   type SparseMatrix,
-  strongComponents,
   subtractPolynomials,
   toFraction,
   ZERO,
 } from '../../../src/algebra/index.ts';
 import { shortestRecurrence } from '../../../src/algebra/modular-characteristic.ts';
 import { primeAt } from '../../../src/algebra/primes.ts';
+import { strongComponents } from '../../../src/algebra/strong-components.ts';
 import { repeatedEigenvalues } from '../../../src/algebra/structural-rank.ts';
 
 function matrix(rows: readonly (readonly (number | string)[])[]): SparseMatrix<Rational> {

@@ -105,6 +105,15 @@ describe('greatest common divisor', () => {
   });
 });
 
+describe('a candidate from images alone', () => {
+  test('coprime polynomials that agree modulo the first two primes are still found coprime', () => {
+    const product = BigInt(primeAt(0)) * BigInt(primeAt(1));
+    const p = multiplyPolynomials(poly('1 1'), poly('1 2'));
+    const q = multiplyPolynomials([rational(1n), rational(1n + product)], poly('1 3'));
+    expect(written(greatestCommonDivisorOfPolynomials(p, q))).toBe('1');
+  });
+});
+
 describe('exact quotient', () => {
   test('it is there only where every coefficient is whole and nothing is left', () => {
     expect(exactQuotient([2n, 3n, 1n], [1n, 1n])).toEqual([2n, 1n]);
