@@ -4,8 +4,10 @@
  */
 
 import { add, type Complex, divide, modulus, multiply, ONE, real, subtract, ZERO } from './complex.ts';
+import { SystemWriter } from './complex-system.ts';
+import { factorComplex } from './factor-complex.ts';
 import type { RawLaw } from './raw-laws.ts';
-import { type ComplexRow, factorComplex, solveComplex } from './sparse-complex-lu.ts';
+import { solveRefined } from './solve-complex.ts';
 
 /** The complex frequency, or `held` for states held at given values. */
 export type Setting = Complex | 'held';
@@ -30,21 +32,10 @@ export interface BlockBehaviour {
 
 const NO_STATES: StateReading = { x: [], derivative: [], size: [] };
 
-/** The behaviour of a law; null where s is a pole of the block. */
-export function behaviour(law: RawLaw, setting: Setting): BlockBehaviour | null {
-  switch (law.kind) {
-    case 'static': {
-      const gains = law.gains.map(row => row.map(real));
-      const rest = gains.map(() => ZERO);
-      return { gains, fromStates: () => rest, readStates: () => NO_STATES };
-    }
-    case 'rational':
-      return setting === 'held' ? rationalHeld(law) : rationalAt(law, setting);
-    case 'matrices':
-      return setting === 'held' ? matricesHeld(law) : matricesAt(law, setting);
-    default:
-      return law satisfies never;
-  }
+/** The behaviour of a law that may have states; null where s is a pole of the block. */
+export function behaviour(law: Rational | Matrices, setting: Setting): BlockBehaviour | null {
+  if (law.kind === 'rational') return setting === 'held' ? rationalHeld(law) : rationalAt(law, setting);
+  return setting === 'held' ? matricesHeld(law) : matricesAt(law, setting);
 }
 
 type Rational = Extract<RawLaw, { kind: 'rational' }>;
@@ -157,23 +148,15 @@ function matricesHeld({ A, B, C, D }: Matrices): BlockBehaviour {
 
 /** X = (sI − A)⁻¹ (x(0) + B u), Y = C X + D u. */
 function matricesAt({ A, B, C, D }: Matrices, s: Complex): BlockBehaviour | null {
-  const resolvent = factorComplex(
-    A.map((row, i): ComplexRow => {
-      const column = row.flatMap((a, j) => (a !== 0 || i === j ? [j] : []));
-      return {
-        column,
-        re: column.map(j => (i === j ? s.re : 0) - row[j]!),
-        im: column.map(j => (i === j ? s.im : 0)),
-      };
-    }),
-  );
-  if (resolvent === null) return null;
+  const system = resolventOf(A, s);
+  const factors = factorComplex(system);
+  if (factors === null) return null;
   const states = (drive: readonly Complex[]): Complex[] => {
-    const { re, im } = solveComplex(
-      resolvent,
-      Float64Array.from(drive, ({ re }) => re),
-      Float64Array.from(drive, ({ im }) => im),
-    );
+    const right = {
+      re: Float64Array.from(drive, value => value.re),
+      im: Float64Array.from(drive, value => value.im),
+    };
+    const { re, im } = solveRefined(system, factors, right);
     return Array.from(re, (value, i) => ({ re: value, im: im[i]! }));
   };
   const inputs = D[0]?.length ?? B[0]?.length ?? 0;
@@ -187,6 +170,19 @@ function matricesAt({ A, B, C, D }: Matrices, s: Complex): BlockBehaviour | null
     readStates: (values, u) =>
       readingAt(s, states(values.map((value, i) => timesComplex(B[i]!, u, real(value)))), values),
   };
+}
+
+/** sI − A. */
+function resolventOf(A: Matrices['A'], s: Complex) {
+  const writer = new SystemWriter();
+  A.forEach((row, i) => {
+    writer.add(i, s.re, s.im);
+    row.forEach((a, j) => {
+      if (a !== 0) writer.add(j, -a, 0);
+    });
+    writer.endRow();
+  });
+  return writer.finish();
 }
 
 function timesComplex(row: readonly number[], values: readonly Complex[], start: Complex): Complex {

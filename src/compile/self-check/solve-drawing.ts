@@ -4,10 +4,12 @@
  */
 
 import { type BlockBehaviour, behaviour, type Setting } from './block-behaviour.ts';
-import { type Complex, multiply, real, ZERO } from './complex.ts';
+import { type Complex, ZERO } from './complex.ts';
+import { type ComplexSystem, type ComplexVector, SystemWriter } from './complex-system.ts';
+import { factorComplex } from './factor-complex.ts';
 import type { RawBlock, RawDrawing } from './raw-drawing.ts';
 import { type RawLaw, stateCount } from './raw-laws.ts';
-import { type ComplexRow, copyRow, factorComplex, solveRefined } from './sparse-complex-lu.ts';
+import { solveRefined } from './solve-complex.ts';
 
 /** What a drawing is driven with: its external inputs, and initial or held values of its states. */
 export interface Drive {
@@ -36,69 +38,92 @@ export function solveDrawing(
   drives: readonly Drive[],
   laws: readonly RawLaw[],
 ): readonly Answer[] | null {
-  const behaviours: BlockBehaviour[] = [];
-  for (const law of laws) {
-    const own = behaviour(law, setting);
-    if (own === null) return null;
-    behaviours.push(own);
-  }
-  const rows = writeRows(drawing, behaviours);
-  const factors = factorComplex(rows.map(copyRow));
-  if (factors === null) return null;
+  const behaviours = behavioursOf(laws, setting);
+  const system = behaviours === null ? null : writeSystem(drawing, laws, behaviours);
+  const factors = system === null ? null : factorComplex(system);
+  if (behaviours === null || system === null || factors === null) return null;
   return drives.map(drive => {
-    const re = new Float64Array(drawing.unknowns);
-    const im = new Float64Array(drawing.unknowns);
-    drawing.inputs.forEach((unknown, j) => {
-      re[unknown] = drive.inputs[j]!;
-    });
-    drawing.blocks.forEach((block, b) => {
-      behaviours[b]!.fromStates(statesOf(block, drive)).forEach((value, o) => {
-        re[block.firstUnknown + o] = value.re;
-        im[block.firstUnknown + o] = value.im;
-      });
-    });
-    const y = solveRefined(rows, factors, re, im);
+    const y = solveRefined(system, factors, rightSide(drawing, behaviours, drive));
     return readAnswer(drawing, behaviours, drive, unknown =>
       unknown < 0 ? ZERO : { re: y.re[unknown]!, im: y.im[unknown]! },
     );
   });
 }
 
-const NONE: readonly number[] = [];
-
-function statesOf({ law, firstState }: RawBlock, { states }: Drive): readonly number[] {
-  const count = stateCount(law);
-  return count === 0 ? NONE : states.slice(firstState, firstState + count);
+/** The behaviour of each block with states, null for the others; null in all where s is a pole of one. */
+function behavioursOf(laws: readonly RawLaw[], setting: Setting): (BlockBehaviour | null)[] | null {
+  const behaviours: (BlockBehaviour | null)[] = [];
+  for (const law of laws) {
+    const own = law.kind === 'static' ? null : behaviour(law, setting);
+    if (own === null && law.kind !== 'static') return null;
+    behaviours.push(own);
+  }
+  return behaviours;
 }
 
-function writeRows({ unknowns, blocks }: RawDrawing, behaviours: readonly BlockBehaviour[]): readonly ComplexRow[] {
-  const rows = Array.from({ length: unknowns }, (_, y): ComplexRow => ({ column: [y], re: [1], im: [0] }));
+/** One row an unknown, in their order; those of external inputs hold nothing else. */
+function writeSystem(
+  { unknowns, blocks }: RawDrawing,
+  laws: readonly RawLaw[],
+  behaviours: readonly (BlockBehaviour | null)[],
+): ComplexSystem {
+  const writer = new SystemWriter();
+  let written = 0;
+  const begin = () => writer.add(written, 1, 0);
+  const end = () => {
+    writer.endRow();
+    written += 1;
+  };
+  const writeInputsUpTo = (unknown: number) => {
+    while (written < unknown) {
+      begin();
+      end();
+    }
+  };
   blocks.forEach(({ firstUnknown, fedBy }, b) => {
-    behaviours[b]!.gains.forEach((gains, o) => {
-      const row = rows[firstUnknown + o]!;
-      gains.forEach((gain, port) => {
-        if (fedBy[port]! >= 0) addToRow(row, fedBy[port]!, multiply(real(-1), gain));
+    writeInputsUpTo(firstUnknown);
+    const law = laws[b]!;
+    const gains = law.kind === 'static' ? law.gains : behaviours[b]!.gains;
+    for (const row of gains) {
+      begin();
+      row.forEach((gain, port) => {
+        const source = fedBy[port]!;
+        if (source < 0) return;
+        if (typeof gain === 'number') writer.add(source, -gain, 0);
+        else writer.add(source, -gain.re, -gain.im);
       });
+      end();
+    }
+  });
+  writeInputsUpTo(unknowns);
+  return writer.finish();
+}
+
+function rightSide(
+  { unknowns, inputs, blocks }: RawDrawing,
+  behaviours: readonly (BlockBehaviour | null)[],
+  drive: Drive,
+): ComplexVector {
+  const right = { re: new Float64Array(unknowns), im: new Float64Array(unknowns) };
+  inputs.forEach((unknown, j) => {
+    right.re[unknown] = drive.inputs[j]!;
+  });
+  blocks.forEach((block, b) => {
+    behaviours[b]?.fromStates(statesOf(block, drive)).forEach((value, o) => {
+      right.re[block.firstUnknown + o] = value.re;
+      right.im[block.firstUnknown + o] = value.im;
     });
   });
-  return rows;
+  return right;
 }
 
-function addToRow(row: ComplexRow, column: number, { re, im }: Complex): void {
-  const at = row.column.indexOf(column);
-  if (at >= 0) {
-    row.re[at]! += re;
-    row.im[at]! += im;
-  } else if (re !== 0 || im !== 0) {
-    row.column.push(column);
-    row.re.push(re);
-    row.im.push(im);
-  }
+function statesOf({ law, firstState }: RawBlock, { states }: Drive): readonly number[] {
+  return states.slice(firstState, firstState + stateCount(law));
 }
 
 function readAnswer(
   { blocks, outputs }: RawDrawing,
-  behaviours: readonly BlockBehaviour[],
+  behaviours: readonly (BlockBehaviour | null)[],
   drive: Drive,
   unknownAt: (unknown: number) => Complex,
 ): Answer {
@@ -106,9 +131,9 @@ function readAnswer(
   const derivatives: Complex[] = [];
   const sizes: number[] = [];
   blocks.forEach((block, b) => {
-    const values = statesOf(block, drive);
-    if (values.length === 0) return;
-    const { x, derivative, size } = behaviours[b]!.readStates(values, block.fedBy.map(unknownAt));
+    const own = behaviours[b];
+    if (own === null || own === undefined) return;
+    const { x, derivative, size } = own.readStates(statesOf(block, drive), block.fedBy.map(unknownAt));
     states.push(...x);
     derivatives.push(...derivative);
     sizes.push(...size);

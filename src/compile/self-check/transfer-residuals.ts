@@ -5,10 +5,12 @@
 
 import type { SystemMatrices } from '../state-space.ts';
 import { type Complex, modulus, real } from './complex.ts';
+import { type ComplexSystem, SystemWriter } from './complex-system.ts';
+import { factorComplex } from './factor-complex.ts';
 import type { Jitter } from './random.ts';
 import { type Residual, residual, rowTimes } from './residuals.ts';
+import { solveRefined } from './solve-complex.ts';
 import type { Answer } from './solve-drawing.ts';
-import { type ComplexRow, factorComplex, solveComplex } from './sparse-complex-lu.ts';
 
 /**
  * Y of the drawing minus C (sI − A)⁻¹ B u + D u for each answer: p equations each; null where s is a pole of the model.
@@ -22,12 +24,13 @@ export function transferResiduals(
   jitter: Jitter | null,
 ): Residual[] | null {
   const { A, B, C, D } = jitter === null ? model : changed(model, jitter);
-  const factors = factorComplex(resolventRows(A, s));
+  const system = resolventOf(A, s);
+  const factors = factorComplex(system);
   if (factors === null) return null;
   return answers.flatMap(({ drive, outputs }) => {
     const u = drive.inputs.map(real);
     const drives = Float64Array.from({ length: A.rows }, (_, i) => rowTimes(B, i, u).sum.re);
-    const { re, im } = solveComplex(factors, drives, new Float64Array(A.rows));
+    const { re, im } = solveRefined(system, factors, { re: drives, im: new Float64Array(A.rows) });
     const x = Array.from(re, (value, i) => ({ re: value, im: im[i]! }));
     return outputs.map((value, i) => residual(value, modulus(value), C, D, i, x, u));
   });
@@ -41,19 +44,13 @@ function changed({ A, B, C, D }: SystemMatrices<number>, jitter: Jitter): System
   return { A: change(A), B: change(B), C: change(C), D: change(D) };
 }
 
-/** Rows of sI − A. */
-function resolventRows(A: SystemMatrices<number>['A'], s: Complex): ComplexRow[] {
-  return Array.from({ length: A.rows }, (_, i) => {
-    const row: ComplexRow = { column: [i], re: [s.re], im: [s.im] };
-    for (let k = A.rowStart[i]!; k < A.rowStart[i + 1]!; k++) {
-      const j = A.column[k]!;
-      if (j === i) row.re[0]! -= A.values[k]!;
-      else {
-        row.column.push(j);
-        row.re.push(-A.values[k]!);
-        row.im.push(0);
-      }
-    }
-    return row;
-  });
+/** sI − A. */
+function resolventOf({ rows, rowStart, column, values }: SystemMatrices<number>['A'], s: Complex): ComplexSystem {
+  const writer = new SystemWriter();
+  for (let i = 0; i < rows; i++) {
+    writer.add(i, s.re, s.im);
+    for (let k = rowStart[i]!; k < rowStart[i + 1]!; k++) writer.add(column[k]!, -values[k]!, 0);
+    writer.endRow();
+  }
+  return writer.finish();
 }

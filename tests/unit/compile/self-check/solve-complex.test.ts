@@ -1,29 +1,30 @@
 import { expect, test } from 'vitest';
-import {
-  type ComplexRow,
-  copyRow,
-  factorComplex,
-  solveRefined,
-} from '../../../../src/compile/self-check/sparse-complex-lu.ts';
+import { type ComplexSystem, SystemWriter } from '../../../../src/compile/self-check/complex-system.ts';
+import { factorComplex } from '../../../../src/compile/self-check/factor-complex.ts';
+import { solveRefined } from '../../../../src/compile/self-check/solve-complex.ts';
 
-function rowsOf(entries: readonly (readonly (readonly [re: number, im: number])[])[]): ComplexRow[] {
-  return entries.map(row => {
-    const column = row.flatMap(([re, im], j) => (re !== 0 || im !== 0 ? [j] : []));
-    return { column, re: column.map(j => row[j]?.[0] ?? 0), im: column.map(j => row[j]?.[1] ?? 0) };
-  });
+function systemOf(entries: readonly (readonly (readonly [re: number, im: number])[])[]): ComplexSystem {
+  const writer = new SystemWriter();
+  for (const row of entries) {
+    row.forEach(([re, im], column) => {
+      if (re !== 0 || im !== 0) writer.add(column, re, im);
+    });
+    writer.endRow();
+  }
+  return writer.finish();
 }
 
-function solve(rows: readonly ComplexRow[], re: readonly number[], im: readonly number[]) {
-  const factors = factorComplex(rows.map(copyRow));
+function solve(system: ComplexSystem, re: readonly number[], im: readonly number[]) {
+  const factors = factorComplex(system);
   if (factors === null) return null;
-  const solution = solveRefined(rows, factors, Float64Array.from(re), Float64Array.from(im));
+  const solution = solveRefined(system, factors, { re: Float64Array.from(re), im: Float64Array.from(im) });
   return { re: [...solution.re], im: [...solution.im] };
 }
 
 test('a complex system of two unknowns is solved: x + i y = 1, i x + 2 y = i', () => {
   // Subtracting i times the first: (2 + 1) y = 0, so y = 0 and x = 1.
   const solution = solve(
-    rowsOf([
+    systemOf([
       [
         [1, 0],
         [0, 1],
@@ -43,7 +44,7 @@ test('a complex system of two unknowns is solved: x + i y = 1, i x + 2 y = i', (
 
 test('an unknown that no path leads to from the right-hand side is exactly zero', () => {
   const solution = solve(
-    rowsOf([
+    systemOf([
       [
         [1, 0],
         [0, 0],
@@ -63,18 +64,18 @@ test('a singular system has no factors', () => {
   const one = [1, 0] as const;
   expect(
     factorComplex(
-      rowsOf([
+      systemOf([
         [one, one],
         [one, one],
       ]),
     ),
   ).toBeNull();
-  expect(factorComplex(rowsOf([[[0, 0]]]))).toBeNull();
+  expect(factorComplex(systemOf([[[0, 0]]]))).toBeNull();
 });
 
 test('refinement leaves a residual of rounding size in every row, also of tiny unknowns', () => {
   const n = 30;
-  const rows = rowsOf(
+  const system = systemOf(
     Array.from({ length: n }, (_, i) =>
       Array.from({ length: n }, (_, j): [number, number] => {
         if (i === j) return [1, 0];
@@ -83,15 +84,17 @@ test('refinement leaves a residual of rounding size in every row, also of tiny u
     ),
   );
   const right = Array.from({ length: n }, (_, i) => (i === 0 ? 1 : 0));
-  const solution = solve(rows, right, new Array(n).fill(0));
-  rows.forEach(({ column, re, im }, i) => {
+  const solution = solve(system, right, new Array(n).fill(0));
+  for (let i = 0; i < n; i++) {
     let [sumRe, sumIm, size] = [-(right[i] ?? NaN), 0, Math.abs(right[i] ?? NaN)];
-    column.forEach((j, k) => {
-      const [xRe, xIm, aRe, aIm] = [solution?.re[j] ?? NaN, solution?.im[j] ?? NaN, re[k] ?? NaN, im[k] ?? NaN];
+    for (let k = system.start[i] ?? 0; k < (system.start[i + 1] ?? 0); k++) {
+      const j = system.column[k] ?? -1;
+      const [xRe, xIm] = [solution?.re[j] ?? NaN, solution?.im[j] ?? NaN];
+      const [aRe, aIm] = [system.re[k] ?? NaN, system.im[k] ?? NaN];
       sumRe += aRe * xRe - aIm * xIm;
       sumIm += aRe * xIm + aIm * xRe;
       size += Math.hypot(aRe, aIm) * Math.hypot(xRe, xIm);
-    });
+    }
     expect(Math.hypot(sumRe, sumIm)).toBeLessThanOrEqual(64 * Number.EPSILON * size);
-  });
+  }
 });

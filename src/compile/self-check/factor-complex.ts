@@ -1,0 +1,327 @@
+/**
+ * Gaussian elimination of a sparse complex system. Written for the self-check alone, so that a fault in the derivation's
+ * elimination cannot hide in both.
+ */
+
+import { type ColumnIndex, type ComplexSystem, columnIndex } from './complex-system.ts';
+
+/**
+ * Steps of the elimination in order, flat. Step k took row[k] and column[k]; what was left of the row is rest[i] for
+ * restStart[k] ≤ i < restStart[k + 1], and target[i] for targetStart[k] ≤ i < targetStart[k + 1] are the rows that lost
+ * factor[i] times it.
+ */
+export interface ComplexFactors {
+  readonly columns: ColumnIndex;
+  readonly row: number[];
+  readonly column: number[];
+  readonly pivotRe: number[];
+  readonly pivotIm: number[];
+  readonly restStart: number[];
+  readonly rest: number[];
+  readonly restRe: number[];
+  readonly restIm: number[];
+  readonly targetStart: number[];
+  readonly target: number[];
+  readonly factorRe: number[];
+  readonly factorIm: number[];
+}
+
+/** A pivot of the core is at least this fraction of the largest entry of its column: multipliers stay below 10. */
+const THRESHOLD = 0.1;
+
+/**
+ * Factors a system: first every row with one unknown left, as substitution does, then every unknown that one row is left to
+ * hold, and for the core always the column with the fewest rows, in it the shortest row whose entry is not too small
+ * (threshold pivoting; Duff, Erisman & Reid 1986, Direct Methods for Sparse Matrices, chapter 7).
+ *
+ * @returns null where no pivot other than zero is left.
+ */
+export function factorComplex(system: ComplexSystem): ComplexFactors | null {
+  const work = begin(system);
+  takeRowsOfOne(work);
+  takeColumnsOfOne(work);
+  const core = coreOf(work);
+  while (work.factors.row.length < system.size) {
+    const column = nextColumn(core);
+    if (column === null || !eliminateColumn(work, core, column)) return null;
+  }
+  return work.factors;
+}
+
+interface Work {
+  readonly system: ComplexSystem;
+  readonly factors: ComplexFactors;
+  /** 1 once taken. */
+  readonly rowDone: Uint8Array;
+  readonly columnDone: Uint8Array;
+  /** Entries of each row in columns not taken, and of each column in rows not taken. */
+  readonly rowCount: Int32Array;
+  readonly columnCount: Int32Array;
+}
+
+function begin(system: ComplexSystem): Work {
+  const { size, start } = system;
+  const columns = columnIndex(system);
+  return {
+    system,
+    factors: {
+      columns,
+      row: [],
+      column: [],
+      pivotRe: [],
+      pivotIm: [],
+      restStart: [0],
+      rest: [],
+      restRe: [],
+      restIm: [],
+      targetStart: [0],
+      target: [],
+      factorRe: [],
+      factorIm: [],
+    },
+    rowDone: new Uint8Array(size),
+    columnDone: new Uint8Array(size),
+    rowCount: Int32Array.from({ length: size }, (_, i) => start[i + 1]! - start[i]!),
+    columnCount: Int32Array.from({ length: size }, (_, c) => columns.start[c + 1]! - columns.start[c]!),
+  };
+}
+
+/** Begins a step; its rest and targets are pushed before `endStep`. */
+function beginStep({ factors, rowDone, columnDone }: Work, row: number, column: number, re: number, im: number): void {
+  factors.row.push(row);
+  factors.column.push(column);
+  factors.pivotRe.push(re);
+  factors.pivotIm.push(im);
+  rowDone[row] = 1;
+  columnDone[column] = 1;
+}
+
+function endStep({ factors }: Work): void {
+  factors.restStart.push(factors.rest.length);
+  factors.targetStart.push(factors.target.length);
+}
+
+function pushRest({ factors }: Work, column: number, re: number, im: number): void {
+  factors.rest.push(column);
+  factors.restRe.push(re);
+  factors.restIm.push(im);
+}
+
+/** A row loses (re, im) / pivot times the step's row; returns the factor through `factors`. */
+function pushTarget({ factors }: Work, row: number, re: number, im: number): void {
+  const pivotRe = factors.pivotRe[factors.pivotRe.length - 1]!;
+  const pivotIm = factors.pivotIm[factors.pivotIm.length - 1]!;
+  const size = pivotRe * pivotRe + pivotIm * pivotIm;
+  factors.target.push(row);
+  factors.factorRe.push((re * pivotRe + im * pivotIm) / size);
+  factors.factorIm.push((im * pivotRe - re * pivotIm) / size);
+}
+
+/** Rows with one unknown left: nothing fills in, only right-hand sides change. */
+function takeRowsOfOne(work: Work): void {
+  const { system, factors, rowDone, columnDone, rowCount, columnCount } = work;
+  const { columns } = factors;
+  const waiting: number[] = [];
+  for (let i = system.size - 1; i >= 0; i--) if (rowCount[i] === 1) waiting.push(i);
+  for (let row = waiting.pop(); row !== undefined; row = waiting.pop()) {
+    if (rowDone[row] === 1) continue;
+    let k = system.start[row]!;
+    while (columnDone[system.column[k]!] === 1) k += 1;
+    if (system.re[k] === 0 && system.im[k] === 0) continue;
+    const column = system.column[k]!;
+    beginStep(work, row, column, system.re[k]!, system.im[k]!);
+    for (let h = columns.start[column]!; h < columns.start[column + 1]!; h++) {
+      const target = columns.row[h]!;
+      if (rowDone[target] === 1) continue;
+      pushTarget(work, target, system.re[columns.at[h]!]!, system.im[columns.at[h]!]!);
+      rowCount[target]! -= 1;
+      if (rowCount[target] === 1) waiting.push(target);
+    }
+    columnCount[column] = 0;
+    endStep(work);
+  }
+  countColumns(work);
+}
+
+function countColumns({ system, rowDone, columnCount }: Work): void {
+  columnCount.fill(0);
+  for (let i = 0; i < system.size; i++) {
+    if (rowDone[i] === 1) continue;
+    for (let k = system.start[i]!; k < system.start[i + 1]!; k++) columnCount[system.column[k]!]! += 1;
+  }
+}
+
+/** Unknowns that one row is left to hold: nothing is eliminated at all. */
+function takeColumnsOfOne(work: Work): void {
+  const { system, factors, rowDone, columnDone, columnCount } = work;
+  const { columns } = factors;
+  const waiting: number[] = [];
+  for (let c = system.size - 1; c >= 0; c--) if (columnDone[c] === 0 && columnCount[c] === 1) waiting.push(c);
+  for (let column = waiting.pop(); column !== undefined; column = waiting.pop()) {
+    if (columnDone[column] === 1) continue;
+    let h = columns.start[column]!;
+    while (rowDone[columns.row[h]!] === 1) h += 1;
+    const row = columns.row[h]!;
+    const [re, im] = [system.re[columns.at[h]!]!, system.im[columns.at[h]!]!];
+    if (re === 0 && im === 0) continue;
+    beginStep(work, row, column, re, im);
+    for (let k = system.start[row]!; k < system.start[row + 1]!; k++) {
+      const other = system.column[k]!;
+      if (columnDone[other] === 1) continue;
+      pushRest(work, other, system.re[k]!, system.im[k]!);
+      columnCount[other]! -= 1;
+      if (columnCount[other] === 1) waiting.push(other);
+    }
+    endStep(work);
+  }
+}
+
+interface CoreRow {
+  readonly column: number[];
+  readonly re: number[];
+  readonly im: number[];
+}
+
+/** What neither end of the substitution reaches. */
+interface Core {
+  /** By row number; empty for rows taken. */
+  readonly rows: readonly CoreRow[];
+  /** For each column the core rows that hold or held it. */
+  readonly holders: readonly number[][];
+  readonly count: Int32Array;
+  /** Columns by how many rows hold them; entries may be out of date. */
+  readonly waiting: number[][];
+  /** Place of a column in the row in hand, counted from 1. */
+  readonly place: Int32Array;
+  readonly columnDone: Uint8Array;
+}
+
+const TAKEN: CoreRow = { column: [], re: [], im: [] };
+const NOBODY: number[] = [];
+
+function coreOf({ system, rowDone, columnDone, factors }: Work): Core {
+  const { size, start, column } = system;
+  const left = size - factors.row.length;
+  const rows: CoreRow[] = new Array<CoreRow>(size).fill(TAKEN);
+  const holders: number[][] = new Array<number[]>(size).fill(NOBODY);
+  for (let c = 0; c < size; c++) if (columnDone[c] === 0) holders[c] = [];
+  for (let i = 0; i < size; i++) {
+    if (rowDone[i] === 1) continue;
+    const row: CoreRow = { column: [], re: [], im: [] };
+    for (let k = start[i]!; k < start[i + 1]!; k++) {
+      if (columnDone[column[k]!] === 1) continue;
+      row.column.push(column[k]!);
+      row.re.push(system.re[k]!);
+      row.im.push(system.im[k]!);
+      holders[column[k]!]!.push(i);
+    }
+    rows[i] = row;
+  }
+  const count = Int32Array.from(holders, list => list.length);
+  const waiting: number[][] = Array.from({ length: left + 1 }, () => []);
+  for (let c = size - 1; c >= 0; c--) if (columnDone[c] === 0) waiting[count[c]!]!.push(c);
+  return { rows, holders, count, waiting, place: new Int32Array(size), columnDone };
+}
+
+/** The open column held by the fewest rows; null where one is held by none. */
+function nextColumn({ waiting, count, columnDone }: Core): number | null {
+  for (let held = 0; held < waiting.length; held++) {
+    const columns = waiting[held]!;
+    for (let c = columns.pop(); c !== undefined; c = columns.pop()) {
+      if (columnDone[c] === 0 && count[c] === held) return held === 0 ? null : c;
+    }
+  }
+  return null;
+}
+
+function recount({ waiting, count }: Core, column: number, change: number): void {
+  count[column]! += change;
+  waiting[count[column]!]!.push(column);
+}
+
+/** False where the column has no pivot. */
+function eliminateColumn(work: Work, core: Core, column: number): boolean {
+  const open = openHolders(work, core, column);
+  const row = choosePivotRow(core, open, column);
+  if (row === null) return false;
+  const pivotRow = core.rows[row]!;
+  const [pivotRe, pivotIm] = takeEntry(pivotRow, column);
+  beginStep(work, row, column, pivotRe, pivotIm);
+  for (let k = 0; k < pivotRow.column.length; k++) {
+    pushRest(work, pivotRow.column[k]!, pivotRow.re[k]!, pivotRow.im[k]!);
+    recount(core, pivotRow.column[k]!, -1);
+  }
+  const { factorRe, factorIm } = work.factors;
+  for (const target of open) {
+    if (target === row) continue;
+    const [re, im] = takeEntry(core.rows[target]!, column);
+    pushTarget(work, target, re, im);
+    subtractRow(core, target, pivotRow, factorRe[factorRe.length - 1]!, factorIm[factorIm.length - 1]!);
+  }
+  endStep(work);
+  return true;
+}
+
+/** Rows not yet taken that hold the column, each once. */
+function openHolders({ rowDone }: Work, { holders, rows }: Core, column: number): number[] {
+  const open: number[] = [];
+  for (const row of holders[column]!) {
+    if (rowDone[row] === 0 && rows[row]!.column.includes(column) && !open.includes(row)) open.push(row);
+  }
+  return open;
+}
+
+function choosePivotRow({ rows }: Core, holders: readonly number[], column: number): number | null {
+  let largest = 0;
+  const sizes = holders.map(row => {
+    const at = rows[row]!.column.indexOf(column);
+    const size = Math.abs(rows[row]!.re[at]!) + Math.abs(rows[row]!.im[at]!);
+    largest = Math.max(largest, size);
+    return size;
+  });
+  let best: number | null = null;
+  for (let i = 0; i < holders.length; i++) {
+    if (sizes[i] === 0 || sizes[i]! < THRESHOLD * largest) continue;
+    const row = holders[i]!;
+    if (best === null || rows[row]!.column.length < rows[best]!.column.length) best = row;
+  }
+  return best;
+}
+
+/** Takes a column's entry out of a row; the last takes its place. */
+function takeEntry({ column, re, im }: CoreRow, wanted: number): readonly [re: number, im: number] {
+  const at = column.indexOf(wanted);
+  const entry = [re[at]!, im[at]!] as const;
+  const last = column.length - 1;
+  column[at] = column[last]!;
+  re[at] = re[last]!;
+  im[at] = im[last]!;
+  column.length = last;
+  re.length = last;
+  im.length = last;
+  return entry;
+}
+
+/** Row target minus factor × row. Entries that cancel are kept as zeros. */
+function subtractRow(core: Core, target: number, row: CoreRow, fRe: number, fIm: number): void {
+  const { column, re, im } = core.rows[target]!;
+  const { place } = core;
+  for (let k = 0; k < column.length; k++) place[column[k]!] = k + 1;
+  for (let k = 0; k < row.column.length; k++) {
+    const c = row.column[k]!;
+    const changeRe = fRe * row.re[k]! - fIm * row.im[k]!;
+    const changeIm = fRe * row.im[k]! + fIm * row.re[k]!;
+    const at = place[c]! - 1;
+    if (at >= 0) {
+      re[at]! -= changeRe;
+      im[at]! -= changeIm;
+    } else {
+      column.push(c);
+      re.push(-changeRe);
+      im.push(-changeIm);
+      core.holders[c]!.push(target);
+      recount(core, c, 1);
+    }
+  }
+  for (let k = 0; k < column.length; k++) place[column[k]!] = 0;
+}
