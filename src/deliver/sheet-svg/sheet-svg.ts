@@ -14,7 +14,7 @@ import {
   sheetGeometry,
 } from '../../diagram/geometry/index.ts';
 import type { Diagram, Sheet } from '../../diagram/index.ts';
-import { type Routes, routeWires } from '../../diagram/routing/index.ts';
+import { ownParts, type Routes, routeWires } from '../../diagram/routing/index.ts';
 import { oneLine } from '../one-line.ts';
 import { coordinate, element, escaped } from './markup.ts';
 import { dotMarkup, shapeMarkup, wireMarkup } from './shape-markup.ts';
@@ -60,7 +60,7 @@ export function sheetSvg(diagram: Diagram, options: SheetSvgOptions = {}): strin
     element('style', {}, styleRules(inks)),
     element('rect', { fill: inks.paper, ...box(paper) }),
     options.grid === true ? squares(paper) : '',
-    ...routes.wires.map(({ points }) => wireMarkup(points)),
+    ...ownParts(sheet, routes).map(wireMarkup),
     ...routes.dots.map(dotMarkup),
     ...blocksMarkup(sheet, geometry, options.values),
     ...sheet.wires.map((wire, index) => wireNameMarkup(wire, routes.wires[index]?.points ?? [])),

@@ -75,12 +75,37 @@ function parameterRows(parameters: readonly Parameter[]): readonly (readonly Cel
   const heading = ['parameter', 'value', 'unit', ...(hasNotes ? ['note'] : [])].map(text => plain(text));
   const rows = parameters.slice(0, MOST_ROWS).map(({ name, value, unit, tolerance, note }) => {
     const remark = [tolerance === undefined ? undefined : `± ${tolerance}`, note].filter(text => text !== undefined);
-    const cells = [{ spans: nameSpans(name), face: 'math' as const }, plain(value, 'figures'), plain(unit ?? '')];
+    const cells = [
+      { spans: nameSpans(name), face: 'math' as const },
+      plain(value, 'figures'),
+      plain(unitText(unit ?? '')),
+    ];
     return hasNotes ? [...cells, plain(remark.join(', '))] : cells;
   });
   const more = parameters.length - rows.length;
   return more > 0 ? [heading, ...rows, [plain(`and ${more} more`)]] : [heading, ...rows];
 }
+
+/** A unit as it is written on paper: `kg*m^2` as kg·m². */
+function unitText(unit: string): string {
+  const raised = (_: string, exponent: string): string =>
+    [...exponent].map(digit => SUPERSCRIPTS[digit] ?? digit).join('');
+  return unit.replaceAll('*', '·').replace(/\^(-?\d+)/g, raised);
+}
+
+const SUPERSCRIPTS: Readonly<Record<string, string>> = {
+  '-': '⁻',
+  '0': '⁰',
+  '1': '¹',
+  '2': '²',
+  '3': '³',
+  '4': '⁴',
+  '5': '⁵',
+  '6': '⁶',
+  '7': '⁷',
+  '8': '⁸',
+  '9': '⁹',
+};
 
 function tableMarkup(rows: readonly (readonly Cell[])[], widths: readonly number[], width: number): string {
   const parts: string[] = [];

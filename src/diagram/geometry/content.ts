@@ -146,8 +146,19 @@ function transferFunction(numerator: Quantity, denominator: Quantity): Content {
   return fraction(inlineMath(numerator), inlineMath(denominator), true);
 }
 
+/** Contents by block: blocks never change, and a drag asks for all of them many times a second. */
+const contents = new WeakMap<Block, Content>();
+
 /** What stands in the frame of a block; a terminal, a summing point and a group have nothing there. */
 export function blockContent(block: Block): Content {
+  const known = contents.get(block);
+  if (known !== undefined) return known;
+  const content = typeset(block);
+  contents.set(block, content);
+  return content;
+}
+
+function typeset(block: Block): Content {
   switch (block.kind) {
     case 'gain':
       return oneLine(inlineMath(block.gain));

@@ -89,8 +89,8 @@ function inputTerminalPort(block: Block, around: Neighbours): PortPlace {
 
 /**
  * A circle's first input lies against its output; each further one on top where its source stands higher than the
- * summing point, else at the bottom, and on the other of the two where that is taken. More inputs than a circle has sides
- * for lie one under the other.
+ * summing point, else at the bottom. Of two that want the same, the one that wants it more has it, the second rather than
+ * the third. More inputs than a circle has sides for lie one under the other.
  */
 function summingInputs(block: SummerBlock, around: Neighbours): readonly PortPlace[] {
   const front: Side = block.mirrored ? 'right' : 'left';
@@ -99,27 +99,40 @@ function summingInputs(block: SummerBlock, around: Neighbours): readonly PortPla
     const x = block.mirrored ? SUMMING_RADIUS : -SUMMING_RADIUS;
     return portOffsets(count, false).map(y => ({ x, y, side: front }));
   }
-  const wanted = Array.from({ length: count }, (_, port) => wantedSide(block, port, around));
   const sides: Side[] = [front];
-  if (count > 1) sides.push(wanted[1] ?? 'bottom');
-  if (count > 2) sides.push(sides[1] === 'top' ? 'bottom' : 'top');
-  if (count > 2 && wanted[1] === null && wanted[2] !== null) {
-    sides[2] = wanted[2] ?? 'bottom';
-    sides[1] = sides[2] === 'top' ? 'bottom' : 'top';
+  if (count > 1) {
+    const second = wantedSide(block, 1, around);
+    const third = count > 2 ? wantedSide(block, 2, around) : NOT_WANTED;
+    const first = third.strength > second.strength ? opposite(third.side) : second.side;
+    sides.push(first, opposite(first));
   }
-  return sides.map(side => placeOn(side, SUMMING_RADIUS));
+  return sides.slice(0, count).map(side => placeOn(side, SUMMING_RADIUS));
+}
+
+type Flank = 'top' | 'bottom';
+
+/** How much a port wants its side: 0 nothing is joined to it, 1 its source stands level with it, 2 higher or lower. */
+interface Wanted {
+  readonly side: Flank;
+  readonly strength: 0 | 1 | 2;
+}
+
+const NOT_WANTED: Wanted = { side: 'bottom', strength: 0 };
+
+function opposite(side: Flank): Flank {
+  return side === 'top' ? 'bottom' : 'top';
 }
 
 /**
- * Top or bottom by where the source stands; null where nothing is joined. From its own height the way back of a feedback is
- * drawn underneath, the way ahead of a feedforward on top.
+ * Top or bottom by where the source stands. From its own height the way back of a feedback is drawn underneath, the way ahead
+ * of a feedforward on top.
  */
-function wantedSide(block: SummerBlock, port: number, around: Neighbours): 'top' | 'bottom' | null {
+function wantedSide(block: SummerBlock, port: number, around: Neighbours): Wanted {
   const source = around.sources.get(`${block.id}:${port}`);
-  if (source === undefined) return null;
+  if (source === undefined) return NOT_WANTED;
   const [x, y] = block.at ?? [0, 0];
   const [sourceX, sourceY] = source.at ?? [0, 0];
-  if (sourceY !== y) return sourceY < y ? 'top' : 'bottom';
+  if (sourceY !== y) return { side: sourceY < y ? 'top' : 'bottom', strength: 2 };
   const isBehind = block.mirrored ? sourceX > x : sourceX < x;
-  return isBehind ? 'top' : 'bottom';
+  return { side: isBehind ? 'top' : 'bottom', strength: 1 };
 }

@@ -3,6 +3,7 @@
  * something is being dragged. Pure functions of the sheet and its geometry.
  */
 
+export { ownParts } from './branching-points.ts';
 export { elbowRoute } from './elbow-route.ts';
 export { routeLength } from './polyline.ts';
 export { rerouteMoved, routeWires } from './route-wires.ts';
