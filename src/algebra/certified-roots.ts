@@ -33,24 +33,19 @@ export interface CertifiedRoot {
 /**
  * The roots of p by real part descending, then by imaginary part descending; none for a constant or zero.
  *
- * Throws where the roots could not be separated within 8,192 bits, which no polynomial from a drawing has been seen to need;
- * `findCertifiedRoots` gives that as an answer.
+ * Throws where `findCertifiedRoots` has no answer, which no polynomial from a drawing has been seen to bring about.
  */
 export function certifiedRoots(p: Polynomial): CertifiedRoot[] {
-  return certifiedRootsOfProduct([p]);
-}
-
-/** The roots of the product of the factors, found factor by factor; the same answers as `certifiedRoots` of the product. */
-export function certifiedRootsOfProduct(factors: readonly Polynomial[]): CertifiedRoot[] {
-  const roots = findCertifiedRoots(factors);
+  const roots = findCertifiedRoots([p]);
   if (roots === null) throw new RangeError('roots that are not separated within 8192 bits');
   return roots;
 }
 
 /**
- * The roots of the product of the factors, or null where the iteration did not converge: roots nearer to each other than
- * 2⁻⁹⁰⁰ of their magnitude, or too ill-conditioned for 8,192 bits. A part is the nearest double unless it lies within 2⁻³⁰⁰ of
- * itself from the middle between two doubles, when it may be either. Parts that are not zero never become zero.
+ * The roots of the product of the factors, found factor by factor, in the order of `certifiedRoots`; null where the iteration
+ * did not converge: roots nearer to each other than 2⁻⁹⁰⁰ of their magnitude, or too ill-conditioned for 8,192 bits. A part is
+ * the nearest double unless it lies within 2⁻³⁰⁰ of itself from the middle between two doubles, when it may be either. Parts
+ * that are not zero never become zero.
  *
  * Square-free factors by Yun (1976), starts by Bini (1996), steps by Ehrlich (1967) and Aberth (1973), discs n |f / f′| pairwise
  * disjoint (B. T. Smith 1970, J. ACM 17), precision raised as needed as in Bini & Fiorentino (2000, Numer. Algorithms 23).
@@ -124,5 +119,6 @@ function halfUnits({ re, im, isExact = false }: RoundedRoot): number {
 
 /** Half the spacing of doubles at x: 2⁻⁵³ of the power of two below |x|, half the least subnormal at the least. */
 function halfUnit(x: number): number {
+  if (!Number.isFinite(x)) return Number.POSITIVE_INFINITY;
   return x === 0 ? 0 : Math.max(2 ** (exponentOf(x) - 53), 2 ** -1074);
 }

@@ -1,7 +1,7 @@
 /** Exact numbers: rationals, polynomials, rational functions of parameters, matrices over a field, certified roots. */
 
 export type { CertifiedRoot } from './certified-roots.ts';
-export { certifiedRoots, certifiedRootsOfProduct, findCertifiedRoots } from './certified-roots.ts';
+export { certifiedRoots, findCertifiedRoots } from './certified-roots.ts';
 export { characteristicFactors, characteristicPolynomial } from './characteristic-polynomial.ts';
 export type { Field } from './field.ts';
 export { doubleField, rationalField } from './fields.ts';
