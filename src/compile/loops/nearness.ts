@@ -5,8 +5,9 @@
 
 import { RowStore } from '../equations/index.ts';
 import { doubleArithmetic, type Numbers } from '../quantities/index.ts';
-import { factorLoop, type LoopFactors, solveFactored } from './factor-loop.ts';
+import { factorLoop, type LoopFactors } from './factor-loop.ts';
 import type { LoopSystem } from './loop-system.ts';
+import { solveFactored } from './solve-factored.ts';
 
 /**
  * The relative change of the loop's coefficients M, each at its worst, that to first order brings det(I − M) to zero:

@@ -2,7 +2,8 @@
 
 import type { RowStore } from '../equations/index.ts';
 import type { Arithmetic, Numbers } from '../quantities/index.ts';
-import { factorLoop, solveFactored } from './factor-loop.ts';
+import { factorLoop } from './factor-loop.ts';
+import { solveFactored } from './solve-factored.ts';
 
 /**
  * Solves (I − M) Y = R for the n signals of a loop.

@@ -1,7 +1,7 @@
 /** Right-hand sides through the factors of a sparse complex system, refined until rounding is all that is left. */
 
 import { type ComplexSystem, type ComplexVector, reachedUnknowns, subtractProduct } from './complex-system.ts';
-import type { ComplexFactors } from './factor-complex.ts';
+import type { ComplexFactors } from './elimination-steps.ts';
 
 /** Most steps of refinement; each gains about as many digits as elimination kept, so two or three do where any do. */
 const MOST_STEPS = 6;

@@ -1,7 +1,8 @@
 import { describe, expect, test } from 'vitest';
 import { parseRational, rational, toFraction, ZERO } from '../../../../src/algebra/index.ts';
 import { RowStore } from '../../../../src/compile/equations/index.ts';
-import { factorLoop, solveFactored } from '../../../../src/compile/loops/factor-loop.ts';
+import { factorLoop } from '../../../../src/compile/loops/factor-loop.ts';
+import { solveFactored } from '../../../../src/compile/loops/solve-factored.ts';
 import { type Arithmetic, doubleArithmetic, rationalArithmetic } from '../../../../src/compile/quantities/index.ts';
 
 function storeOf<T>(arithmetic: Arithmetic<T>, rows: readonly (readonly T[])[]): RowStore<T> {
