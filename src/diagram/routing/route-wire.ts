@@ -70,7 +70,7 @@ function wayThrough(router: SheetRouter, wire: EndedWire, tree: NetTree): readon
   const target = into.at(-1);
   if (source === undefined || target === undefined) return null;
   const stops = [...(wire.wire.via ?? []).map(point => nodeAt(grid, point)), target];
-  const own = new Set(tree.nodes);
+  const own = new Set([...tree.nodes, ...out, ...into.slice(0, -1)]);
   let way: readonly number[] = tree.isEmpty ? out : [];
   let beginnings = tree.isEmpty
     ? [{ node: source, axis: axisOf(wire.from), cost: 0 }]

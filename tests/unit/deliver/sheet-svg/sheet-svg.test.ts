@@ -1,0 +1,102 @@
+import { describe, expect, test } from 'vitest';
+import { sheetSvg } from '../../../../src/deliver/sheet-svg/index.ts';
+import { type Diagram, emptyDiagram, startingDrawing } from '../../../../src/diagram/index.ts';
+
+/** Throws where tags are not balanced, attributes not quoted, or a bare & or < stands in the text (XML 1.0, section 2.1). */
+function checkWellFormed(xml: string): void {
+  const open: string[] = [];
+  const body = xml.replace(/^<\?xml version="1\.0" encoding="UTF-8"\?>\n/, '');
+  const tag = /<(\/?)([a-z]+)((?: [a-z-]+="[^"<&]*(?:&(?:amp|lt|gt|quot);[^"<&]*)*")*)(\/?)>/gi;
+  const text = body.replace(tag, (_, closing: string, name: string, __, empty: string) => {
+    if (closing === '/' && open.pop() !== name) throw new Error(`</${name}> closes nothing`);
+    if (closing === '' && empty === '') open.push(name);
+    return '';
+  });
+  if (open.length > 0) throw new Error(`${open.join()} left open`);
+  const stray = /<|&(?!(?:amp|lt|gt|quot);)/.exec(text);
+  if (stray !== null) throw new Error(`stray ${text.slice(stray.index, stray.index + 20)}`);
+}
+
+const small: Diagram = {
+  ...emptyDiagram(),
+  title: 'Lag',
+  parameters: [{ name: 'tau', value: '0.5', unit: 'kg*m^2', note: 'measured' }],
+  blocks: [
+    { id: 'u', kind: 'input', at: [60, 60] },
+    { id: 'k', kind: 'gain', gain: '1/tau', at: [180, 60] },
+    { id: 'y', kind: 'output', at: [300, 60] },
+  ],
+  wires: [
+    { from: ['u', 0], to: ['k', 0] },
+    { from: ['k', 0], to: ['y', 0], name: 'v_1' },
+  ],
+};
+
+describe('the SVG of a sheet', () => {
+  test('is well-formed for the starting drawing, in every theme', () => {
+    for (const theme of ['light', 'dark', 'print'] as const) {
+      checkWellFormed(sheetSvg(startingDrawing(), { theme, grid: true }));
+    }
+  });
+
+  test('stays well-formed whatever stands in title, names and notes', () => {
+    const rough = '</text><script>&"\'\u0000\u0008\ud800]]>';
+    const parameters = [{ name: 'tau', value: '0.5', unit: rough, note: rough }];
+    const blocks = small.blocks.map(block => ({ ...block, name: rough }));
+    const svg = sheetSvg({ ...small, title: rough, parameters, blocks });
+    checkWellFormed(svg);
+    expect(svg).not.toContain('<script');
+    // biome-ignore lint/suspicious/noControlCharactersInRegex: these are what XML forbids
+    expect(svg).not.toMatch(/[\u0000-\u0008\ud800-\udfff]/);
+  });
+
+  test('refers to nothing outside itself', () => {
+    const svg = sheetSvg(startingDrawing(), { grid: true }).replace('xmlns="http://www.w3.org/2000/svg"', '');
+    expect(svg).not.toMatch(/https?:|href|url\(|@import|<image/);
+  });
+
+  test('is the same for the same diagram', () => {
+    expect(sheetSvg(startingDrawing())).toBe(sheetSvg(structuredClone(startingDrawing())));
+  });
+
+  test('shows names in mathematics, wires named, values under symbols where they are given', () => {
+    const svg = sheetSvg(small, { values: new Map([['k', '2']]) });
+    expect(svg).toContain('>τ</tspan>');
+    expect(svg).toMatch(/class="figures soft"[^>]*>2<\/text>/);
+    expect(svg).toMatch(/>v<\/tspan><tspan[^>]*>1<\/tspan>/);
+    expect(sheetSvg(small)).not.toMatch(/class="figures soft"[^>]*>2<\/text>/);
+  });
+
+  test('has the parameter table with units as they are written on paper', () => {
+    const svg = sheetSvg(small);
+    expect(svg).toContain('>kg·m²</text>');
+    expect(svg).toContain('>measured</text>');
+    expect(sheetSvg(small, { titleBlock: false })).not.toContain('measured');
+  });
+
+  test('draws a selection only, with the wires inside it', () => {
+    const wiresOf = (svg: string): number => svg.match(/class="solid"/g)?.length ?? 0;
+    const all = sheetSvg(small, { titleBlock: false });
+    const part = sheetSvg(small, { titleBlock: false, selection: new Set(['u', 'k']) });
+    expect(wiresOf(all)).toBe(2);
+    expect(wiresOf(part)).toBe(1);
+    expect(part).not.toContain('>y</text>');
+  });
+
+  test('has squared paper on request only', () => {
+    expect(sheetSvg(small, { grid: true })).toContain('class="squares"');
+    expect(sheetSvg(small)).not.toContain('class="squares"');
+  });
+
+  test('of an empty sheet is a sheet of paper', () => {
+    const svg = sheetSvg(emptyDiagram(), { titleBlock: false });
+    checkWellFormed(svg);
+    expect(svg).toContain('viewBox="-40 -40 480 280"');
+  });
+
+  test('covers no block with the title block', () => {
+    const svg = sheetSvg(small);
+    const corner = /translate\((-?[\d.]+) (-?[\d.]+)\)"><rect class="ink paper line" x="0" y="0"/.exec(svg);
+    expect(Number(corner?.[2])).toBeGreaterThanOrEqual(100);
+  });
+});
