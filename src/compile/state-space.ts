@@ -50,7 +50,7 @@ export interface AlgebraicLoop {
 
 /** The result against the drawing's raw equations by a route that shares no code with the elimination. */
 export interface SelfCheck {
-  /** Largest relative difference seen; NaN never. */
+  /** Largest relative difference seen, 1 where the drawing has no answer to compare with; NaN never. */
   readonly error: number;
   /** What `error` may at most be for the check to have passed, scaled with the size and conditioning. */
   readonly limit: number;

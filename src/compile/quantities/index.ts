@@ -14,5 +14,4 @@ export {
   numericReader,
   type PolynomialReading,
   type QuantityReader,
-  withoutLeadingZeros,
 } from './reader.ts';

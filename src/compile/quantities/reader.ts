@@ -83,7 +83,7 @@ function literal(text: string): Result<Value> | null {
 }
 
 /** The coefficients from the first that is not zero on. */
-export function withoutLeadingZeros<T>(written: readonly T[], isZero: (value: T) => boolean): PolynomialReading<T> {
+function withoutLeadingZeros<T>(written: readonly T[], isZero: (value: T) => boolean): PolynomialReading<T> {
   const first = written.findIndex(value => !isZero(value));
   if (first < 0) return { coefficients: [], lowered: written.length - 1 };
   return { coefficients: written.slice(first), lowered: first };

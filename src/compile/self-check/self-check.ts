@@ -58,7 +58,7 @@ export function selfCheck(diagram: Diagram, scope: Scope, model: StateSpace): Se
     error,
     limit,
     passed: error <= limit,
-    frequencies: isHeld ? 0 : compared.length,
+    frequencies: isHeld ? 0 : comparisons.length,
     vectors: isHeld ? HELD_VECTORS : 0,
   };
 }

@@ -15,10 +15,12 @@ export function sizesText({ states, inputs, outputs }: StateSpace): string {
   return parts.join(' · ');
 }
 
-/** `checked against the drawing at 3 frequencies, 1e−16`, or that the check failed. */
-export function selfCheckText({ error, limit, passed, frequencies }: SelfCheck): string {
-  if (frequencies === 0) return 'nothing to check yet';
-  const figure = `${count(frequencies, 'frequency', 'frequencies')}, ${power(error)}`;
+/** `checked against the drawing at 3 frequencies, 1e−16` (large drawings at random states), or that the check failed. */
+export function selfCheckText({ error, limit, passed, frequencies, vectors }: SelfCheck): string {
+  if (frequencies + vectors === 0) return 'nothing to check yet';
+  const where =
+    frequencies > 0 ? count(frequencies, 'frequency', 'frequencies') : count(vectors, 'random state', 'random states');
+  const figure = `${where}, ${power(error)}`;
   if (passed) return `checked against the drawing at ${figure}`;
   return `SELF-CHECK FAILED: off from the drawing at ${figure}, at most ${power(limit)} allowed. Do not use this model.`;
 }
