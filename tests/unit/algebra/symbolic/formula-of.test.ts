@@ -28,6 +28,10 @@ describe('formulas as an engineer writes them', () => {
     expect(written('1/(1 - G)')).toBe('1/(1 - G)');
     expect(written('-Kp*(G - 1)/J')).toBe('Kp*(1 - G)/J');
     expect(written('-J - b')).toBe('-(J + b)');
+    // The term that is negative may be declared first.
+    expect(written('1/(J - b)')).toBe('1/(J - b)');
+    expect(written('1/(J - b)', ['b', 'J'])).toBe('1/(J - b)');
+    expect(written('J/(b - m)', ['m', 'b', 'J'])).toBe('J/(b - m)');
   });
 
   test('terms rise in degree; equals follow the order of declaration', () => {
