@@ -1,4 +1,7 @@
-/** Whole numbers from their residues modulo several primes (Chinese remainder theorem). */
+/**
+ * Whole numbers from their residues modulo several primes (Chinese remainder theorem). Everything that is computed modulo
+ * primes comes back to exact numbers here; that enough primes were taken is the caller's promise.
+ */
 
 import { inverseModulo, reduce, residue } from './primes.ts';
 

@@ -1,5 +1,6 @@
 /**
  * Rationals from and to text. A decimal is read from its digits, never guessed from a JavaScript number: `0.1` is one tenth.
+ * What a text may cost is bounded here.
  */
 
 import { ONE, type Rational, rational, ZERO } from './rational.ts';

@@ -1,4 +1,7 @@
-/** From isolated roots to answers: steps with more bits, each with its bound, until a reading of the disc is decided. */
+/**
+ * From isolated roots to answers: steps with more bits, each with its bound, until a reading of the disc is decided. Comes
+ * after root-isolation.ts; the reading is a rounding of root-rounding.ts.
+ */
 
 import { MOST_BITS, smaller } from './root-isolation.ts';
 import { type Site, views, withBits } from './root-sites.ts';

@@ -1,4 +1,7 @@
-/** Reduced row echelon form of written-out rational rows: the exact elimination of the exact room. */
+/**
+ * Reduced row echelon form of written-out rational rows: the exact elimination of the exact room. Zeros cost nothing, so that
+ * the sparse rows of a drawing stay cheap.
+ */
 
 import { rationalField } from './fields.ts';
 import { divideRationals, multiplyRationals, type Rational, subtractRationals } from './rational.ts';

@@ -10,10 +10,7 @@ import {
   rational,
   ZERO,
 } from '../../../src/algebra/index.ts';
-
-function poly(text: string): Polynomial {
-  return text.split(' ').map(word => parseRational(word) ?? ZERO);
-}
+import { poly } from './as-written.ts';
 
 /** Roots as `re im multiplicity`. */
 function listed(p: Polynomial): [number, number, number][] {

@@ -6,7 +6,6 @@ import {
   fromRows,
   multiplyPolynomials,
   type Polynomial,
-  parseRational,
   type Rational,
   rational,
   type SparseMatrix,
@@ -18,18 +17,10 @@ import { shortestRecurrence } from '../../../src/algebra/modular-characteristic.
 import { primeAt } from '../../../src/algebra/primes.ts';
 import { strongComponents } from '../../../src/algebra/strong-components.ts';
 import { repeatedEigenvalues } from '../../../src/algebra/structural-rank.ts';
-
-function matrix(rows: readonly (readonly (number | string)[])[]): SparseMatrix<Rational> {
-  const exact = rows.map(row => row.map(entry => parseRational(String(entry)) ?? ZERO));
-  return fromRows(exact, rows.length, ({ n }) => n === 0n);
-}
+import { matrix, poly as polyOf, written } from './as-written.ts';
 
 function poly(...coefficients: (number | string)[]): Polynomial {
-  return coefficients.map(c => parseRational(String(c)) ?? ZERO);
-}
-
-function written(p: Polynomial): string {
-  return p.map(toFraction).join(' ');
+  return polyOf(coefficients.join(' '));
 }
 
 /** Ones above the diagonal, minus the coefficients in the last row. */

@@ -1,30 +1,12 @@
 import { describe, expect, test } from 'vitest';
-import {
-  fromRows,
-  invariantZeroPolynomial,
-  parseRational,
-  type Rational,
-  rankOf,
-  type SparseMatrix,
-  toFraction,
-  ZERO,
-} from '../../../src/algebra/index.ts';
+import { invariantZeroPolynomial, rankOf } from '../../../src/algebra/index.ts';
 import { primeAt } from '../../../src/algebra/primes.ts';
+import { exactRows, matrix, type WrittenRows, written } from './as-written.ts';
 
-type Written = readonly (readonly (number | string)[])[];
-
-function exactRows(rows: Written): Rational[][] {
-  return rows.map(row => row.map(entry => parseRational(String(entry)) ?? ZERO));
-}
-
-function matrix(rows: Written, columns: number): SparseMatrix<Rational> {
-  return fromRows(exactRows(rows), columns, ({ n }) => n === 0n);
-}
-
-function zeros(A: Written, B: Written, C: Written, D: Written, inputs: number): string {
+function zeros(A: WrittenRows, B: WrittenRows, C: WrittenRows, D: WrittenRows, inputs: number): string {
   const n = A.length;
   const p = invariantZeroPolynomial(matrix(A, n), matrix(B, inputs), matrix(C, n), matrix(D, inputs));
-  return p.map(toFraction).join(' ');
+  return written(p);
 }
 
 describe('invariant zeros', () => {

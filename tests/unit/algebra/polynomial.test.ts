@@ -8,7 +8,6 @@ import {
   monic,
   multiplyPolynomials,
   type Polynomial,
-  parseRational,
   polynomial,
   rational,
   reflectPolynomial,
@@ -18,15 +17,7 @@ import {
 } from '../../../src/algebra/index.ts';
 import { exactQuotient } from '../../../src/algebra/integer-polynomial.ts';
 import { primeAt } from '../../../src/algebra/primes.ts';
-
-/** Coefficients in descending powers, written as in a textbook: `1 -3/2 0`. */
-function poly(text: string): Polynomial {
-  return text.split(' ').map(word => parseRational(word) ?? rational(0n));
-}
-
-function written(p: Polynomial): string {
-  return p.map(toFraction).join(' ');
-}
+import { poly, written } from './as-written.ts';
 
 function power(p: Polynomial, exponent: number): Polynomial {
   return Array.from({ length: exponent }).reduce<Polynomial>(product => multiplyPolynomials(product, p), poly('1'));

@@ -1,19 +1,11 @@
 import { describe, expect, test } from 'vitest';
 import {
   characteristicPolynomial,
-  fromRows,
-  parseRational,
   type Rational,
   type SparseMatrix,
-  toFraction,
   transferNumerators,
-  ZERO,
 } from '../../../src/algebra/index.ts';
-
-function matrix(rows: readonly (readonly (number | string)[])[], columns: number): SparseMatrix<Rational> {
-  const exact = rows.map(row => row.map(entry => parseRational(String(entry)) ?? ZERO));
-  return fromRows(exact, columns, ({ n }) => n === 0n);
-}
+import { matrix, written } from './as-written.ts';
 
 function numerators(
   A: SparseMatrix<Rational>,
@@ -22,7 +14,7 @@ function numerators(
   D: SparseMatrix<Rational>,
 ): string[][] {
   const all = transferNumerators(A, B, C, D, characteristicPolynomial(A));
-  return all.map(row => row.map(p => p.map(toFraction).join(' ')));
+  return all.map(row => row.map(written));
 }
 
 describe('transfer numerators', () => {
