@@ -1,6 +1,6 @@
 /** The shapes of the sheet's geometry, routes and lines of text as SVG elements. */
 
-import { SCRIPT_SCALE, SCRIPT_SHIFT, type Shape, type TextShape } from '../../diagram/geometry/index.ts';
+import { SCRIPT_SCALE, SCRIPT_SHIFT, type Shape, type TextShape, textWidth } from '../../diagram/geometry/index.ts';
 import type { Point } from '../../diagram/index.ts';
 import type { Route } from '../../diagram/routing/index.ts';
 import type { Span } from '../../expression/index.ts';
@@ -32,8 +32,17 @@ export function textMarkup({ x, y, anchor, size, face, role, spans }: TextShape,
   if (spans.length === 0) return '';
   const place = anchor === 'start' ? {} : { 'text-anchor': anchor };
   const tone = `${SOFT_ROLES.has(role) ? ' soft' : ''}${isStrong ? ' strong' : ''}`;
-  return element('text', { class: `${face}${tone}`, x, y, 'font-size': size, ...place }, spanMarkup(spans, size));
+  const width = textWidth(spans, size, face);
+  const fitted = role === 'symbol' && width > FITTED ? { textLength: width, lengthAdjust: 'spacingAndGlyphs' } : {};
+  return element(
+    'text',
+    { class: `${face}${tone}`, x, y, 'font-size': size, ...place, ...fitted },
+    spanMarkup(spans, size),
+  );
 }
+
+/** A symbol wider than this keeps to its frame where the reader's font is wider than the one it was measured in. */
+const FITTED = 36;
 
 function spanMarkup(spans: readonly Span[], size: number): string {
   let sunk = 0;

@@ -18,7 +18,7 @@ import { ownParts, type Routes, routeWires } from '../../diagram/routing/index.t
 import { oneLine } from '../one-line.ts';
 import { coordinate, element, escaped } from './markup.ts';
 import { dotMarkup, shapeMarkup, wireMarkup } from './shape-markup.ts';
-import { INKS, styleRules, type Theme } from './themes.ts';
+import { INKS, styleRules, type Theme, themeClass } from './themes.ts';
 import { type TitleBlock, titleBlock } from './title-block.ts';
 import { wireNameMarkup } from './wire-names.ts';
 
@@ -54,11 +54,11 @@ export function sheetSvg(diagram: Diagram, options: SheetSvgOptions = {}): strin
   const block = options.titleBlock === false ? null : titleBlock(diagram);
   const corner = block === null ? null : titleBlockCorner(block, content, obstacles(sheet, geometry, routes));
   const paper = paperAround(content, block, corner);
-  const inks = INKS[options.theme ?? 'light'];
+  const theme = options.theme ?? 'light';
   const parts = [
     element('title', {}, escaped(oneLine(diagram.title) || 'untitled')),
-    element('style', {}, styleRules(inks)),
-    element('rect', { fill: inks.paper, ...box(paper) }),
+    element('style', {}, styleRules(theme)),
+    element('rect', { fill: INKS[theme].paper, ...box(paper) }),
     options.grid === true ? squares(paper) : '',
     ...ownParts(sheet, routes).map(wireMarkup),
     ...routes.dots.map(dotMarkup),
@@ -72,7 +72,7 @@ export function sheetSvg(diagram: Diagram, options: SheetSvgOptions = {}): strin
   }
   const { x, y, width, height } = box(paper);
   const viewBox = [x, y, width, height].map(coordinate).join(' ');
-  const root = { xmlns: 'http://www.w3.org/2000/svg', viewBox, width, height, role: 'img' };
+  const root = { xmlns: 'http://www.w3.org/2000/svg', viewBox, width, height, role: 'img', class: themeClass(theme) };
   return `<?xml version="1.0" encoding="UTF-8"?>\n${element('svg', root, parts.filter(part => part !== '').join('\n'))}\n`;
 }
 

@@ -25,22 +25,29 @@ const FACES = {
   plain: "'B612', system-ui, Helvetica, Arial, sans-serif",
 } as const;
 
+/** The class of a sheet's outermost element, by which its rules hold inside it and nowhere else on a page. */
+export function themeClass(theme: Theme): string {
+  return `sheet-${theme}`;
+}
+
 /** The rules of a sheet's style element. */
-export function styleRules({ field, ink, soft, line, square }: Inks): string {
-  return [
-    `.ink{fill:none;stroke:${ink};stroke-linejoin:miter}`,
-    `.paper{fill:${field}}`,
-    '.thin{stroke-width:1}',
-    '.line{stroke-width:1.4}',
-    '.state{stroke-width:2.6}',
-    `.solid{fill:${ink};stroke:none}`,
-    `.squares{fill:none;stroke:${square};stroke-width:1}`,
-    `.rule{fill:none;stroke:${line};stroke-width:1}`,
-    `text{fill:${ink};stroke:none;white-space:pre}`,
-    `.soft{fill:${soft}}`,
-    '.strong{font-weight:700}',
-    `.math{font-family:${FACES.math}}`,
-    `.figures{font-family:${FACES.figures}}`,
-    `.plain{font-family:${FACES.plain}}`,
-  ].join('');
+export function styleRules(theme: Theme): string {
+  const { field, ink, soft, line, square } = INKS[theme];
+  const rules: readonly (readonly [selector: string, declarations: string])[] = [
+    ['.ink', `fill:none;stroke:${ink};stroke-linejoin:miter`],
+    ['.paper', `fill:${field}`],
+    ['.thin', 'stroke-width:1'],
+    ['.line', 'stroke-width:1.4'],
+    ['.state', 'stroke-width:2.6'],
+    ['.solid', `fill:${ink};stroke:none`],
+    ['.squares', `fill:none;stroke:${square};stroke-width:1`],
+    ['.rule', `fill:none;stroke:${line};stroke-width:1`],
+    ['text', `fill:${ink};stroke:none;white-space:pre`],
+    ['.soft', `fill:${soft}`],
+    ['.strong', 'font-weight:700'],
+    ['.math', `font-family:${FACES.math}`],
+    ['.figures', `font-family:${FACES.figures}`],
+    ['.plain', `font-family:${FACES.plain}`],
+  ];
+  return rules.map(([selector, declarations]) => `.${themeClass(theme)} ${selector}{${declarations}}`).join('');
 }

@@ -1,6 +1,6 @@
 /** The title block with the parameter table, as an engineering drawing has it in its lower right corner. */
 
-import { type Face, textWidth } from '../../diagram/geometry/index.ts';
+import { type Face, GRID, textWidth } from '../../diagram/geometry/index.ts';
 import type { Diagram, Parameter } from '../../diagram/index.ts';
 import { nameSpans, type Span } from '../../expression/index.ts';
 import { oneLine } from '../one-line.ts';
@@ -11,6 +11,9 @@ const ROW = 20;
 const HEAD = 28;
 const PADDING = 8;
 const SIZE = 12;
+
+/** How much wider bold type is than the type that is measured. */
+const BOLD = 1.1;
 
 /** Widest text of a column before it is cut, in sheet units. */
 const WIDEST = 220;
@@ -53,7 +56,7 @@ export function titleBlock(diagram: Diagram): TitleBlock {
   const columns = (rows[0] ?? []).map((_, column) => Math.max(...rows.map(row => cellWidth(row[column] ?? plain('')))));
   const title: Cell = { ...plain(oneLine(diagram.title) || 'untitled', 'plain', WIDEST_TITLE), isStrong: true };
   const issue = plain(issueText(diagram));
-  const head = cellWidth(title) * 1.1 + cellWidth(issue);
+  const head = cellWidth(title) * BOLD + GRID + cellWidth(issue);
   const table = columns.reduce((sum, width) => sum + width, 0);
   const width = Math.ceil(Math.max(head, table, 200));
   const last = columns.length - 1;
