@@ -4,12 +4,15 @@
  */
 
 import 'reactflow/dist/base.css';
-import { Background, BackgroundVariant, ConnectionMode, ReactFlow } from 'reactflow';
+import { Background, BackgroundVariant, ConnectionMode, ReactFlow, type ReactFlowState, useStore } from 'reactflow';
 import { GRID } from '../../diagram/geometry/index.ts';
+import { AlignmentLines } from './AlignmentLines.tsx';
 import { BlockNode } from './BlockNode.tsx';
 import { BranchDots } from './BranchDots.tsx';
 import { DrawnWire } from './DrawnWire.tsx';
+import { DropTarget } from './DropTarget.tsx';
 import { SHEET_EVENTS } from './sheet-events.ts';
+import { useClipboard } from './useClipboard.ts';
 import { useDropPart } from './useDropPart.ts';
 import { useFitOnOpening } from './useFitOnOpening.ts';
 import { usePlacedSheet } from './usePlacedSheet.ts';
@@ -27,17 +30,30 @@ const CENTRE: [number, number] = [0.5, 0.5];
 /** Above this many blocks only those in view are kept in the page (dependencies: measured at some 300). */
 const ALL_IN_PAGE = 300;
 
+/** Below this zoom what is written beside blocks cannot be read and is left out. */
+const FAR = 0.35;
+
+const isFar = (flow: ReactFlowState) => flow.transform[2] < FAR;
+
 export function Sheet() {
   const placed = usePlacedSheet();
   const nodes = useSheetNodes(placed);
   const edges = useSheetWires(placed);
   const drop = useDropPart();
+  const far = useStore(isFar) ? ' sheet-far' : '';
   useSheetKeys();
+  useClipboard();
   useFitOnOpening();
   useSheetView();
   return (
-    // biome-ignore lint/a11y/noNoninteractiveTabindex: the sheet takes keys, and an empty one holds nothing to focus
-    <div className="sheet" role="application" tabIndex={0} aria-label="Block diagram. Press ? for all keys." {...drop}>
+    <div
+      className={`sheet${far}`}
+      // biome-ignore lint/a11y/noNoninteractiveTabindex: the sheet takes keys, and an empty one holds nothing to focus
+      tabIndex={0}
+      role="application"
+      aria-label="Block diagram. Press ? for all keys."
+      {...drop}
+    >
       <ReactFlow
         nodes={nodes}
         edges={edges}
@@ -57,12 +73,15 @@ export function Sheet() {
         zoomOnDoubleClick={false}
         disableKeyboardA11y
         edgesFocusable={false}
+        edgesReconnectable={false}
         elevateNodesOnSelect={false}
         onlyRenderVisibleElements={nodes.length > ALL_IN_PAGE}
         {...SHEET_EVENTS}
       >
         <Background variant={BackgroundVariant.Lines} gap={GRID} lineWidth={1} color="var(--square)" />
         <BranchDots dots={placed.routes.dots} />
+        <AlignmentLines {...placed} />
+        <DropTarget />
       </ReactFlow>
     </div>
   );

@@ -1,14 +1,26 @@
-/** One wire along its route, with an arrowhead at the port it ends at. */
+/**
+ * One wire along its route, with an arrowhead at the port it ends at. Dragging from it draws a branch, from its arrowhead moves
+ * that end; selected, it shows the grips that bend it and those of its two ends.
+ */
 
 import { memo } from 'react';
 import { BaseEdge, type EdgeProps } from 'reactflow';
+import { BendGrips } from './BendGrips.tsx';
+import { EndGrips } from './EndGrips.tsx';
 import type { WireFlowEdge } from './useSheetWires.ts';
+import { type WireEnds, watchWire } from './wire-gesture.ts';
 import { arrowHead, wirePath } from './wire-path.ts';
 
-export const WireEdge = memo(function WireEdge({ id, data, selected }: EdgeProps<WireFlowEdge>) {
+export const WireEdge = memo(function WireEdge(edge: EdgeProps<WireFlowEdge>) {
+  const { id, data, selected } = edge;
   const points = data?.points ?? [];
   if (points.length < 2) return null;
   const state = selected === true ? ' wire-selected' : '';
+  const ends: WireEnds = {
+    wire: id,
+    source: { block: edge.source, handle: edge.sourceHandleId ?? 'out:0' },
+    target: { block: edge.target, handle: edge.targetHandleId ?? 'in:0' },
+  };
   return (
     <>
       <BaseEdge
@@ -17,8 +29,14 @@ export const WireEdge = memo(function WireEdge({ id, data, selected }: EdgeProps
         className={`wire${state}`}
         interactionWidth={0}
       />
-      <path className="wire-reach react-flow__edge-interaction" d={wirePath(points)} />
+      <path
+        className="wire-reach react-flow__edge-interaction"
+        d={wirePath(points)}
+        onPointerDown={event => watchWire(event, ends, points)}
+      />
       <path className={`wire-head${state}`} d={arrowHead(points)} />
+      {selected === true && <BendGrips wire={id} points={points} />}
+      {selected === true && <EndGrips ends={ends} points={points} />}
     </>
   );
 });

@@ -6,7 +6,8 @@ import { actions, store } from '../store/index.ts';
 import { shownTitle } from './block-sentence.ts';
 import { focusedBlock, focusSheet } from './focus-block.ts';
 
-export function removeSelected(): boolean {
+/** @param healing  what fed a removed block then feeds what it fed. */
+export function removeSelected(healing: boolean): boolean {
   const { selection, document: slice } = store.getState();
   const { blocks, wires } = slice.diagram;
   const focused = focusedBlock();
@@ -17,10 +18,11 @@ export function removeSelected(): boolean {
   );
   if (gone.size + cut.length === 0) return false;
   const edits: Edit[] = cut.map(({ to }) => ({ kind: 'disconnect', to }));
-  if (gone.size > 0) edits.push({ kind: 'removeBlocks', ids: [...gone] });
+  if (gone.size > 0) edits.push({ kind: healing ? 'removeBlocksHealing' : 'removeBlocks', ids: [...gone] });
   const titles = blocks.filter(({ id }) => gone.has(id)).map(shownTitle);
   if (cut.length > 0) titles.push(cut.length === 1 ? 'a wire' : `${cut.length} wires`);
-  actions.editTogether(edits, `Removed ${titles.join(', ')}.`);
+  const healed = healing && gone.size > 0 ? ' The wires close behind.' : '';
+  actions.editTogether(edits, `Removed ${titles.join(', ')}.${healed}`);
   focusSheet();
   return true;
 }

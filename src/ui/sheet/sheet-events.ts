@@ -1,9 +1,10 @@
 /** What React Flow reports of the hand, turned into selection, a live drag, and edits when it ends. */
 
-import type { Connection, Edge, EdgeChange, FinalConnectionState, Node, NodeChange, ReactFlowProps } from 'reactflow';
-import type { PortReference } from '../../diagram/index.ts';
+import type { EdgeChange, NodeChange, ReactFlowProps } from 'reactflow';
+import { straightenWires } from '../commands/bend-chosen.ts';
+import { dropBlock } from '../commands/insert-in-wire.ts';
 import { actions, store } from '../store/index.ts';
-import { connectBlocks } from './connect-blocks.ts';
+import { connect, dropDrawnWire, wireOf } from './drop-wire.ts';
 import { focusSheet } from './focus-block.ts';
 import type { BlockFlowNode } from './useSheetNodes.ts';
 import type { WireFlowEdge } from './useSheetWires.ts';
@@ -16,9 +17,9 @@ type Events = Pick<
   | 'onSelectionDragStop'
   | 'onConnect'
   | 'onConnectEnd'
-  | 'onReconnect'
   | 'onNodeDoubleClick'
   | 'onEdgeClick'
+  | 'onEdgeDoubleClick'
   | 'onPaneClick'
 >;
 
@@ -29,15 +30,19 @@ export const SHEET_EVENTS: Events = {
     takeDrag(changes);
   },
   onEdgesChange: (changes: EdgeChange<WireFlowEdge>[]) => takeSelection(changes, 'wires'),
-  onNodeDragStop: (_, node) => dropHeld(node),
-  onSelectionDragStop: (_, nodes) => dropHeld(nodes[0]),
-  onConnect: connection => connect(connection),
-  onConnectEnd: (_, state) => connectToBody(state),
-  onReconnect: (edge, connection) => moveEnd(edge, connection),
+  onNodeDragStop: (event, node) => dropHeld(node.id, event.altKey),
+  onSelectionDragStop: (event, nodes) => dropHeld(nodes[0]?.id, event.altKey),
+  onConnect: connect,
+  onConnectEnd: dropDrawnWire,
   onNodeDoubleClick: (_, node) => actions.editFields(node.id),
   onEdgeClick: () => focusSheet(),
+  onEdgeDoubleClick: (_, edge) => {
+    const wire = wireOf(edge);
+    if (wire !== undefined) straightenWires([wire]);
+  },
   onPaneClick: () => {
     actions.editFields(null);
+    actions.beginWritingAt(null);
     focusSheet();
   },
 };
@@ -71,40 +76,20 @@ function takeDrag(changes: readonly NodeChange<BlockFlowNode>[]): void {
   if (isChanged) actions.hold(held);
 }
 
-/** Ends a drag: everything held moves by what the block under the hand moved, as one edit. */
-function dropHeld(node: Node | undefined): void {
+/**
+ * Ends a drag: everything held moves by what the block under the hand moved, as one edit. A single block goes into the wire it
+ * is let go on, and out of its own wires where it was pulled.
+ */
+function dropHeld(id: string | undefined, isPulled: boolean): void {
   const { held, document } = store.getState();
-  const to = node === undefined ? undefined : held?.get(node.id);
-  const from = document.diagram.blocks.find(({ id }) => id === node?.id)?.at;
-  if (held !== null && to !== undefined && from !== undefined) {
+  const block = document.diagram.blocks.find(candidate => candidate.id === id);
+  const to = block === undefined ? undefined : held?.get(block.id);
+  const from = block?.at;
+  if (held !== null && block !== undefined && to !== undefined && from !== undefined) {
     const [dx, dy] = [to[0] - from[0], to[1] - from[1]];
-    if (dx !== 0 || dy !== 0) actions.edit({ kind: 'moveBlocks', ids: [...held.keys()], dx, dy });
+    const isMoved = dx !== 0 || dy !== 0;
+    if (isMoved && held.size === 1) dropBlock(block, [dx, dy], isPulled);
+    else if (isMoved) actions.edit({ kind: 'moveBlocks', ids: [...held.keys()], dx, dy });
   }
   actions.hold(null);
-}
-
-function connect({ source, sourceHandle, target, targetHandle }: Connection): void {
-  connectBlocks([source, portOf(sourceHandle)], [target, portOf(targetHandle)]);
-}
-
-/** A wire let go over a block's body goes to its first open port. */
-function connectToBody({ isValid, fromHandle, toHandle, toNode }: FinalConnectionState): void {
-  if (isValid === true || toHandle !== null || toNode === null || fromHandle === null) return;
-  const here: PortReference = [fromHandle.nodeId, portOf(fromHandle.id ?? null)];
-  if (fromHandle.type === 'source') connectBlocks(here, [toNode.id, null]);
-  else connectBlocks([toNode.id, 0], here);
-}
-
-function moveEnd(edge: Edge, connection: Connection): void {
-  actions.edit({
-    kind: 'moveWireEnd',
-    to: [edge.target, portOf(edge.targetHandle)],
-    newFrom: [connection.source, portOf(connection.sourceHandle)],
-    newTo: [connection.target, portOf(connection.targetHandle)],
-  });
-}
-
-/** The port's number in a handle's id, `in:2`. */
-function portOf(handle: string | null | undefined): number {
-  return Number(handle?.split(':')[1] ?? 0);
 }

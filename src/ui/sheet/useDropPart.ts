@@ -1,9 +1,9 @@
-/** A part dragged from the row of parts and let go on the sheet. */
+/** A part dragged from the row of parts and let go on the sheet; on a wire, it goes into that wire. */
 
 import type { DragEvent } from 'react';
 import { useReactFlow } from 'reactflow';
+import { placePartInWire } from '../commands/insert-in-wire.ts';
 import { isPart, PART_MIME } from '../write-line/parts.ts';
-import { placePart } from '../write-line/place-block.ts';
 
 interface DropPart {
   readonly onDragOver: (event: DragEvent) => void;
@@ -23,7 +23,7 @@ export function useDropPart(): DropPart {
       if (!isPart(part)) return;
       event.preventDefault();
       const { x, y } = flow.screenToFlowPosition({ x: event.clientX, y: event.clientY });
-      placePart(part, [x, y]);
+      placePartInWire(part, [x, y]);
     },
   };
 }

@@ -1,4 +1,4 @@
-/** Puts the whole drawing in view, beside the title block and above the write-a-block line. */
+/** Puts the whole drawing in view, under the commands, beside the title block and above the write-a-block line. */
 
 import { useCallback } from 'react';
 import { useReactFlow } from 'reactflow';
@@ -20,7 +20,9 @@ export function useFit(): (glide: boolean) => void {
       const drawing = drawnBounds();
       if (sheet === undefined || drawing === null) return;
       const line = within(sheet, '.write-line');
-      const area = { left: 0, top: 0, right: sheet.width, bottom: line?.top ?? sheet.height };
+      const tools = within(sheet, '.sheet-toolbar');
+      const top = tools === null ? 0 : Math.max(0, tools.bottom - LIMITS.margin / 2);
+      const area = { left: 0, top, right: sheet.width, bottom: line?.top ?? sheet.height };
       const still = !glide || window.matchMedia('(prefers-reduced-motion: reduce)').matches;
       const placement = fitPlacement(drawing, area, within(sheet, '.title-block'), LIMITS);
       void flow.setViewport(placement, still ? {} : { duration: MILLISECONDS });

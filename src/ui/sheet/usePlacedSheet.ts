@@ -3,11 +3,13 @@
  * geometry, the wires' routes and the branch dots.
  */
 
-import { useMemo, useRef } from 'react';
+import { useLayoutEffect, useMemo, useRef } from 'react';
 import { type SheetGeometry, sheetGeometry } from '../../diagram/geometry/index.ts';
 import type { Point, Sheet } from '../../diagram/index.ts';
 import { type Routes, rerouteMoved, routeWires } from '../../diagram/routing/index.ts';
 import { type State, useStore } from '../store/index.ts';
+import { heldRoutes } from './held-routes.ts';
+import { setShownSheet } from './shown-sheet.ts';
 
 export interface PlacedSheet {
   readonly sheet: Sheet;
@@ -18,20 +20,30 @@ export interface PlacedSheet {
 const diagram = (state: State) => state.document.diagram;
 const held = (state: State) => state.held;
 
+/** Up to so many blocks in hand, on a sheet of so many, wires find their full way in every frame of a drag. */
+const FEW_HELD = 3;
+const FEW_BLOCKS = 120;
+
 export function usePlacedSheet(): PlacedSheet {
   const document = useStore(diagram);
   const moved = useStore(held);
-  const before = useRef<PlacedSheet | null>(null);
-  return useMemo(() => {
+  const routed = useRef<PlacedSheet | null>(null);
+  const placed = useMemo(() => {
     const sheet = moved === null ? document : withHeld(document, moved);
     const geometry = sheetGeometry(sheet);
-    const former = before.current;
-    const routes =
-      former === null ? routeWires(sheet, geometry) : rerouteMoved(former.routes, former.sheet, sheet, geometry);
-    const placed = { sheet, geometry, routes };
-    before.current = placed;
-    return placed;
+    const former = routed.current;
+    if (former === null) return { sheet, geometry, routes: routeWires(sheet, geometry) };
+    const isMuch = moved !== null && (moved.size > FEW_HELD || sheet.blocks.length > FEW_BLOCKS);
+    const routes = isMuch
+      ? heldRoutes(former, { sheet, geometry }, moved)
+      : rerouteMoved(former.routes, former.sheet, sheet, geometry);
+    return { sheet, geometry, routes, isMuch };
   }, [document, moved]);
+  useLayoutEffect(() => {
+    if (!('isMuch' in placed && placed.isMuch)) routed.current = placed;
+    setShownSheet(placed);
+  }, [placed]);
+  return placed;
 }
 
 function withHeld(sheet: Sheet, moved: ReadonlyMap<string, Point>): Sheet {

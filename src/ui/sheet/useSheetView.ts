@@ -1,8 +1,9 @@
-/** Tells the write-a-block line what is seen of the sheet. */
+/** Tells the write-a-block line and the commands what is seen of the sheet and where the pointer is over it. */
 
 import { useEffect } from 'react';
 import { useReactFlow } from 'reactflow';
 import { setSheetView } from '../write-line/sheet-view.ts';
+import { setConverter, setPointer } from './pointer.ts';
 
 /** Pixels that a revealed block keeps from the edge: half a wide block and its label. */
 const EDGE = 110;
@@ -34,7 +35,22 @@ export function useSheetView(): void {
         void flow.setViewport({ x: left - dx, y: top - dy, zoom }, still ? {} : { duration: MILLISECONDS });
       },
     });
+    setConverter((x, y) => {
+      const place = flow.screenToFlowPosition({ x, y }, { snapToGrid: false });
+      return [place.x, place.y];
+    });
   }, [flow]);
+  useEffect(followPointer, []);
+}
+
+/** Only a mouse or a pen stays over the sheet; where a finger was last says nothing. */
+function followPointer(): () => void {
+  const onMove = ({ target, clientX, clientY, pointerType }: PointerEvent) => {
+    const isOver = pointerType !== 'touch' && target instanceof Element && target.closest('.sheet') !== null;
+    setPointer(isOver ? [clientX, clientY] : null);
+  };
+  window.addEventListener('pointermove', onMove, { passive: true });
+  return () => window.removeEventListener('pointermove', onMove);
 }
 
 /** The sheet above the write-a-block line, in pixels of the window. */

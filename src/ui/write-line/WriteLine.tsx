@@ -4,6 +4,7 @@ import { shownTitle } from '../sheet/block-sentence.ts';
 import './write-line.css';
 import { type KeyboardEvent, useState } from 'react';
 import { readWrittenBlock } from '../../diagram/write-a-block/index.ts';
+import { actions } from '../store/index.ts';
 import { PART_MIME, PARTS, type Part } from './parts.ts';
 import { placeBlock, placePart } from './place-block.ts';
 import { WRITE_LINE_ID } from './write-line-id.ts';
@@ -29,6 +30,7 @@ function WriteField() {
     if (event.key === 'Escape') {
       setText('');
       setRefusal(null);
+      actions.beginWritingAt(null);
       event.currentTarget.blur();
     }
     if (event.key !== 'Enter') return;

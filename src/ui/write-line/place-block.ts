@@ -25,22 +25,26 @@ export function placePart(part: string, at: Point | null): void {
 
 /** Returns the new block's id, null where the edit was refused. */
 export function placeBlock(written: WrittenBlock, names: readonly string[], at: Point | null): string | null {
-  const { document, selection } = store.getState();
+  const { document, selection, view } = store.getState();
   const sheet = document.diagram;
-  const source = at === null && selection.blocks.size === 1 ? leadingBlock(sheet, [...selection.blocks][0]) : null;
+  const begun = at === null ? view.writingAt : null;
+  const [chosen] = selection.blocks.size === 1 ? selection.blocks : [];
+  const leading = begun === null ? chosen : begun.from?.[0];
+  const source = at === null ? leadingBlock(sheet, leading) : null;
   const id = freshId(sheet, stemOf(written));
-  const wanted = at ?? (source?.at === undefined ? openPlace(sheet) : besides(source));
+  const wanted = at ?? begun?.at ?? (source?.at === undefined ? openPlace(sheet) : besides(source));
   const block: Block = { ...written, id, at: freePlace(sheet, { ...written, id }, snap(wanted)) };
   const unknown = unknownParameters(names);
   const edits: Edit[] = unknown.map(newParameter);
   edits.push({ kind: 'addBlock', block });
   const isChained = source !== null && portCounts(block).inputs > 0;
-  if (isChained) edits.push({ kind: 'connect', from: [source.id, 0], to: [id, 0] });
+  if (isChained) edits.push({ kind: 'connect', from: [source.id, begun?.from?.[1] ?? 0], to: [id, 0] });
   const said = [`Placed ${shownTitle(block)}`];
   if (isChained) said.push(`wired from ${shownTitle(source)}`);
   if (unknown.length > 0)
     said.push(`${unknown.join(', ')} added as ${unknown.length === 1 ? 'a parameter' : 'parameters'} with value 1`);
   if (actions.editTogether(edits, `${said.join(', ')}.`).length > 0) return null;
+  actions.beginWritingAt(null);
   actions.selectBlocks([id]);
   sheetView().reveal(block.at ?? wanted);
   return id;

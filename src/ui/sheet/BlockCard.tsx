@@ -1,0 +1,70 @@
+/** What is known of the block that is pointed at or has the focus: value, unit, signal, and the states it takes part in. */
+
+import { useMemo } from 'react';
+import { useViewport } from 'reactflow';
+import { blockRectangle, sheetGeometry } from '../../diagram/geometry/index.ts';
+import { type Block, displayName, type Sheet } from '../../diagram/index.ts';
+import { statesOfBlock } from '../commands/states-of-block.ts';
+import { type State, useStore } from '../store/index.ts';
+import { formatValue } from '../title-block/format-value.ts';
+import { shownTitle } from './block-sentence.ts';
+import { usePointedBlock } from './usePointedBlock.ts';
+
+const diagram = (state: State) => state.document.diagram;
+const isBusy = (state: State) => state.held !== null || state.view.editing !== null || state.view.dialog !== null;
+
+export function BlockCard() {
+  const id = usePointedBlock();
+  const sheet = useStore(diagram);
+  const busy = useStore(isBusy);
+  const block = id === null ? undefined : sheet.blocks.find(candidate => candidate.id === id);
+  return block === undefined || busy ? null : <ShownCard block={block} sheet={sheet} />;
+}
+
+/** Pixels between the block, its labels and the card. */
+const UNDERNEATH = 26;
+
+function ShownCard({ block, sheet }: { readonly block: Block; readonly sheet: Sheet }) {
+  const value = useStore((state: State) => state.results.values.blocks[block.id]);
+  const { x, y, zoom } = useViewport();
+  const frame = useMemo(() => {
+    const placed = sheetGeometry(sheet).get(block.id);
+    return placed === undefined ? null : blockRectangle(block, placed);
+  }, [sheet, block]);
+  const { carries, drives } = useMemo(() => statesOfBlock(sheet, block.id), [sheet, block.id]);
+  if (frame === null) return null;
+  const left = x + zoom * ((frame.left + frame.right) / 2);
+  const top = y + zoom * frame.bottom + UNDERNEATH * Math.max(zoom, 0.5);
+  return (
+    <div className="block-card" role="tooltip" style={{ left, top }}>
+      <strong>{shownTitle(block)}</strong>
+      <dl>
+        {factsOf(block, value).map(([name, text]) => (
+          <Fact key={name} name={name} text={text} />
+        ))}
+        {carries.length > 0 && <Fact name="carries" text={carries.join(', ')} />}
+        {drives.length > 0 && <Fact name="drives" text={drives.map(name => `d${name}/dt`).join(', ')} />}
+      </dl>
+    </div>
+  );
+}
+
+function Fact({ name, text }: { readonly name: string; readonly text: string }) {
+  return (
+    <>
+      <dt>{name}</dt>
+      <dd>{text}</dd>
+    </>
+  );
+}
+
+function factsOf(block: Block, value: number | undefined): readonly (readonly [string, string])[] {
+  const facts: (readonly [string, string])[] = [];
+  if (value !== undefined) facts.push(['value', formatValue(value)]);
+  if (block.kind === 'transfer-function') facts.push(['value', `(${block.numerator})/(${block.denominator})`]);
+  if (block.kind === 'summer') facts.push(['signs', block.signs]);
+  if ('unit' in block && block.unit !== undefined) facts.push(['unit', block.unit]);
+  facts.push(['signal', displayName(block)]);
+  if (block.note !== undefined) facts.push(['note', block.note]);
+  return facts;
+}

@@ -1,0 +1,110 @@
+/** Finds a block by name, value or parameter: written above, the matches below it, Enter goes to the marked one. */
+
+import { type KeyboardEvent, useMemo, useState } from 'react';
+import { type Found, findBlocks } from '../commands/find-blocks.ts';
+import { actions, type State, useStore } from '../store/index.ts';
+import { formatValue } from '../title-block/format-value.ts';
+import { sheetView } from '../write-line/sheet-view.ts';
+import { shownTitle } from './block-sentence.ts';
+import { focusBlock, focusSheet } from './focus-block.ts';
+
+/** More than a look takes in are only counted. */
+const MOST_SHOWN = 8;
+
+const isOpen = (state: State) => state.view.finding;
+
+export function FindField() {
+  return useStore(isOpen) ? <OpenFindField /> : null;
+}
+
+const diagram = (state: State) => state.document.diagram;
+const blockValues = (state: State) => state.results.values.blocks;
+
+function OpenFindField() {
+  const sheet = useStore(diagram);
+  const values = useStore(blockValues);
+  const [text, setText] = useState('');
+  const [marked, setMarked] = useState(0);
+  const found = useMemo(() => {
+    const shown = new Map(Object.entries(values).map(([id, value]) => [id, formatValue(value)]));
+    return findBlocks(sheet, text, shown);
+  }, [sheet, text, values]);
+  const shown = found.slice(0, MOST_SHOWN);
+  const close = () => {
+    actions.openFinding(false);
+    focusSheet();
+  };
+  const onKeyDown = (event: KeyboardEvent) => {
+    event.stopPropagation();
+    const step = event.key === 'ArrowDown' ? 1 : event.key === 'ArrowUp' ? -1 : 0;
+    const choice = found[marked];
+    if (event.key === 'Escape') close();
+    else if (step !== 0) setMarked(Math.max(0, Math.min(shown.length - 1, marked + step)));
+    else if (event.key === 'Enter' && choice !== undefined) goToFound(choice);
+    else return;
+    event.preventDefault();
+  };
+  return (
+    <search className="find" onKeyDown={onKeyDown}>
+      <input
+        className="field"
+        ref={field => field?.focus()}
+        role="combobox"
+        aria-label="Find a block"
+        aria-expanded={shown.length > 0}
+        aria-controls="find-list"
+        aria-activedescendant={shown[marked] === undefined ? undefined : `find-${marked}`}
+        placeholder="name, value or parameter"
+        value={text}
+        spellCheck={false}
+        autoComplete="off"
+        onChange={event => {
+          setText(event.currentTarget.value);
+          setMarked(0);
+        }}
+      />
+      <button type="button" className="quiet" onClick={close}>
+        Close
+      </button>
+      <FoundList found={shown} marked={marked} />
+      <p className="find-count" role="status">
+        {countSentence(text, found.length, shown.length)}
+      </p>
+    </search>
+  );
+}
+
+function FoundList({ found, marked }: { readonly found: readonly Found[]; readonly marked: number }) {
+  return (
+    <div id="find-list" role="listbox" aria-label="Blocks found" className="find-list">
+      {found.map((item, place) => (
+        // biome-ignore lint/a11y/useKeyWithClickEvents: the field above takes the keys for the whole list
+        <div
+          key={item.block.id}
+          id={`find-${place}`}
+          role="option"
+          aria-selected={place === marked}
+          tabIndex={-1}
+          onClick={() => goToFound(item)}
+        >
+          {shownTitle(item.block)}
+          {item.because !== '' && <span className="find-because"> {item.because}</span>}
+        </div>
+      ))}
+    </div>
+  );
+}
+
+function countSentence(text: string, found: number, shown: number): string {
+  if (text.trim() === '') return '';
+  if (found === 0) return `No block holds “${text.trim()}”.`;
+  return found > shown ? `${found} blocks, the first ${shown} shown.` : '';
+}
+
+function goToFound({ block }: Found): void {
+  actions.openFinding(false);
+  actions.selectBlocks([block.id]);
+  sheetView().reveal(block.at ?? [0, 0]);
+  actions.notify(`Found ${shownTitle(block)}.`);
+  focusBlock(block.id);
+}

@@ -1,0 +1,49 @@
+/** The commands at the sheet's upper left that have no other button: fit, arrange, find, zoom. */
+
+import { useReactFlow } from 'reactflow';
+import { arrangeChosen } from '../commands/arrange-chosen.ts';
+import { actions } from '../store/index.ts';
+import { focusSheet } from './focus-block.ts';
+import { useFit } from './useFit.ts';
+
+const MILLISECONDS = 160;
+
+export function SheetToolbar() {
+  const flow = useReactFlow();
+  const fitDrawing = useFit();
+  const still = () => window.matchMedia('(prefers-reduced-motion: reduce)').matches;
+  const glide = () => (still() ? {} : { duration: MILLISECONDS });
+  const arrange = () => {
+    if (arrangeChosen()) fitDrawing(true);
+    focusSheet();
+  };
+  return (
+    <div className="sheet-toolbar" role="toolbar" aria-label="Sheet">
+      <button
+        type="button"
+        aria-keyshortcuts="Z"
+        title="Fit the drawing to the sheet: Z"
+        onClick={() => fitDrawing(true)}
+      >
+        Fit
+      </button>
+      <button type="button" aria-keyshortcuts="L" title="Arrange the selected blocks, or all: L" onClick={arrange}>
+        Arrange
+      </button>
+      <button
+        type="button"
+        aria-keyshortcuts="Control+F"
+        title="Find a block by name, value or parameter: Ctrl+F"
+        onClick={() => actions.openFinding(true)}
+      >
+        Find
+      </button>
+      <button type="button" aria-label="Zoom out" title="Zoom out" onClick={() => void flow.zoomOut(glide())}>
+        −
+      </button>
+      <button type="button" aria-label="Zoom in" title="Zoom in" onClick={() => void flow.zoomIn(glide())}>
+        +
+      </button>
+    </div>
+  );
+}
