@@ -4,10 +4,21 @@
  * exact verdict on stability stand on it.
  */
 
-import { integersFromResidues } from './chinese-remainder.ts';
-import { characteristicByHessenberg, minimalByRecurrence } from './modular-characteristic.ts';
+import {
+  characteristicByHessenberg,
+  denominatorProduct,
+  integersFromResidues,
+  inverseModulo,
+  type ModularRows,
+  minimalByRecurrence,
+  primeAt,
+  reduce,
+  residue,
+  rowBits,
+  rowsModulo,
+  scaledRows,
+} from './modular/index.ts';
 import { type Polynomial, productOfPolynomials } from './polynomial.ts';
-import { inverseModulo, primeAt, reduce, residue } from './primes.ts';
 import {
   addRationals,
   multiplyRationals,
@@ -18,7 +29,6 @@ import {
   subtractRationals,
   ZERO,
 } from './rational.ts';
-import { denominatorProduct, type ModularRows, rowBits, rowsModulo, scaledRows } from './scaled-rows.ts';
 import { entryAt, type SparseMatrix } from './sparse-matrix.ts';
 import { principalSubmatrix, strongComponents } from './strong-components.ts';
 import { type RepeatedEigenvalue, repeatedEigenvalues } from './structural-rank.ts';

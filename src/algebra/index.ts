@@ -1,7 +1,5 @@
 /** Exact numbers: rationals, polynomials, rational functions of parameters, matrices over a field, certified roots. */
 
-export type { CertifiedRoot } from './certified-roots.ts';
-export { certifiedRoots, findCertifiedRoots } from './certified-roots.ts';
 export { characteristicFactors, characteristicPolynomial } from './characteristic-polynomial.ts';
 export type { Field } from './field.ts';
 export { doubleField, rationalField } from './fields.ts';
@@ -38,6 +36,8 @@ export {
 } from './rational.ts';
 export { rationalFromDouble, toDouble } from './rational-double.ts';
 export { parseRational, toFraction } from './rational-text.ts';
+export type { CertifiedRoot } from './roots/index.ts';
+export { certifiedRoots, findCertifiedRoots } from './roots/index.ts';
 export type { SparseMatrix } from './sparse-matrix.ts';
 export { entryAt, fromRows, toRows } from './sparse-matrix.ts';
 export type { SquareFreeFactor } from './square-free.ts';

@@ -4,11 +4,19 @@
  * by multiplying out, so neither a small nor a large dimension rests on luck.
  */
 
-import { combineResidues, type Lift } from './chinese-remainder.ts';
 import { absolute, bitLength } from './integer.ts';
-import { inverseModulo, primeAt, reduce } from './primes.ts';
+import {
+  combineResidues,
+  inverseModulo,
+  type Lift,
+  type ModularRows,
+  multiplyModulo,
+  primeAt,
+  reduce,
+  rowsModulo,
+  scaledRows,
+} from './modular/index.ts';
 import { addRationals, multiplyRationals, ONE, type Rational, rational, ZERO } from './rational.ts';
-import { type ModularRows, multiplyModulo, rowsModulo, scaledRows } from './scaled-rows.ts';
 import { entryAt, type SparseMatrix } from './sparse-matrix.ts';
 
 /** A basis in reduced row echelon form: row i is 1 in column `pivots[i]`, where all other rows are 0. */

@@ -4,12 +4,20 @@
  * Chinese remainder theorem until the candidate divides both, which proves it (Brown 1971, J. ACM 18).
  */
 
-import { combineResidues, type Lift, symmetric } from './chinese-remainder.ts';
 import { greatestCommonDivisor } from './integer.ts';
 import { exactQuotient, type IntegerPolynomial, monicOf, primitiveOf, primitivePart } from './integer-polynomial.ts';
-import { imageModulo, type ModularPolynomial, modularGcd } from './modular-polynomial.ts';
+import {
+  combineResidues,
+  imageModulo,
+  type Lift,
+  type ModularPolynomial,
+  modularGcd,
+  primeAt,
+  reduce,
+  residue,
+  symmetric,
+} from './modular/index.ts';
 import type { Polynomial } from './polynomial.ts';
-import { primeAt, reduce, residue } from './primes.ts';
 
 /** Monic gcd of p and q; the zero polynomial where both are zero. */
 export function greatestCommonDivisorOfPolynomials(p: Polynomial, q: Polynomial): Polynomial {

@@ -4,8 +4,8 @@
  */
 
 import { bitLength } from './integer.ts';
+import { inverseModulo, primeAt, reduce, residue } from './modular/index.ts';
 import { overOneDenominator } from './polynomial.ts';
-import { inverseModulo, primeAt, reduce, residue } from './primes.ts';
 import type { Rational } from './rational.ts';
 
 /**

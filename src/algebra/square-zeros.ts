@@ -5,12 +5,21 @@
  */
 
 import { characteristicPolynomial } from './characteristic-polynomial.ts';
-import { integersFromResidues } from './chinese-remainder.ts';
-import { markovParameters, numeratorModulo } from './markov-parameters.ts';
+import {
+  denominatorProduct,
+  integersFromResidues,
+  inverseModulo,
+  markovParameters,
+  numeratorModulo,
+  primeAt,
+  reduce,
+  residue,
+  rowBits,
+  rowsModulo,
+  scaledRows,
+} from './modular/index.ts';
 import { monic, overOneDenominator, type Polynomial, polynomial } from './polynomial.ts';
-import { inverseModulo, primeAt, reduce, residue } from './primes.ts';
 import { type Rational, rationalOver } from './rational.ts';
-import { denominatorProduct, rowBits, rowsModulo, scaledRows } from './scaled-rows.ts';
 import type { SparseMatrix } from './sparse-matrix.ts';
 
 /** Primes modulo which a determinant that is not zero may vanish before the longer way is taken. */

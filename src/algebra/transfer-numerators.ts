@@ -5,8 +5,20 @@
  */
 
 import { characteristicPolynomial } from './characteristic-polynomial.ts';
-import { integersFromResidues } from './chinese-remainder.ts';
-import { markovParameters, numeratorModulo } from './markov-parameters.ts';
+import {
+  denominatorProduct,
+  integersFromResidues,
+  inverseModulo,
+  markovParameters,
+  numeratorModulo,
+  primeAt,
+  reduce,
+  residue,
+  rowBits,
+  rowsModulo,
+  type ScaledRows,
+  scaledRows,
+} from './modular/index.ts';
 import {
   dividePolynomials,
   overOneDenominator,
@@ -14,9 +26,7 @@ import {
   polynomial,
   productOfPolynomials,
 } from './polynomial.ts';
-import { inverseModulo, primeAt, reduce, residue } from './primes.ts';
 import { ONE, type Rational, rationalOver, ZERO } from './rational.ts';
-import { denominatorProduct, rowBits, rowsModulo, type ScaledRows, scaledRows } from './scaled-rows.ts';
 import { entryAt, type SparseMatrix } from './sparse-matrix.ts';
 import { principalSubmatrix } from './strong-components.ts';
 

@@ -1,5 +1,4 @@
 import { describe, expect, test } from 'vitest';
-import { integersFromResidues } from '../../../src/algebra/chinese-remainder.ts';
 import {
   characteristicFactors,
   characteristicPolynomial,
@@ -13,8 +12,9 @@ import {
   toFraction,
   ZERO,
 } from '../../../src/algebra/index.ts';
-import { shortestRecurrence } from '../../../src/algebra/modular-characteristic.ts';
-import { primeAt } from '../../../src/algebra/primes.ts';
+import { integersFromResidues } from '../../../src/algebra/modular/chinese-remainder.ts';
+import { shortestRecurrence } from '../../../src/algebra/modular/modular-characteristic.ts';
+import { primeAt } from '../../../src/algebra/modular/primes.ts';
 import { strongComponents } from '../../../src/algebra/strong-components.ts';
 import { repeatedEigenvalues } from '../../../src/algebra/structural-rank.ts';
 import { matrix, poly as polyOf, written } from './as-written.ts';

@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { invariantZeroPolynomial, rankOf } from '../../../src/algebra/index.ts';
-import { primeAt } from '../../../src/algebra/primes.ts';
+import { primeAt } from '../../../src/algebra/modular/primes.ts';
 import { exactRows, matrix, type WrittenRows, written } from './as-written.ts';
 
 function zeros(A: WrittenRows, B: WrittenRows, C: WrittenRows, D: WrittenRows, inputs: number): string {

@@ -16,7 +16,7 @@ import {
   toFraction,
 } from '../../../src/algebra/index.ts';
 import { exactQuotient } from '../../../src/algebra/integer-polynomial.ts';
-import { primeAt } from '../../../src/algebra/primes.ts';
+import { primeAt } from '../../../src/algebra/modular/primes.ts';
 import { poly, written } from './as-written.ts';
 
 function power(p: Polynomial, exponent: number): Polynomial {

@@ -3,7 +3,7 @@
  * has a scale of its own, a power of two, so that neither degree nor magnitude overflows.
  */
 
-import type { IntegerPolynomial } from './integer-polynomial.ts';
+import type { IntegerPolynomial } from '../integer-polynomial.ts';
 import { mantissaAndExponent, type ScaledPoint } from './root-starts.ts';
 
 /** A root in doubles, and what is known about its error from the last step. */

@@ -3,8 +3,8 @@
  * the coefficients' logarithms foretells roots of that magnitude. Coefficients of any length are handled by their logarithms.
  */
 
-import { bitLength } from './integer.ts';
-import type { IntegerPolynomial } from './integer-polynomial.ts';
+import { bitLength } from '../integer.ts';
+import type { IntegerPolynomial } from '../integer-polynomial.ts';
 
 /** (re + i·im) · 2^exponent. */
 export interface ScaledPoint {

@@ -4,20 +4,20 @@
  * give the values. Poles, zeros and stability stand on it.
  */
 
+import { exponentOf } from '../integer.ts';
+import { exactQuotient, type IntegerPolynomial, primitiveOf, primitivePart } from '../integer-polynomial.ts';
+import type { Polynomial } from '../polynomial.ts';
+import { integerGcd } from '../polynomial-gcd.ts';
+import { compareRationals, rational } from '../rational.ts';
+import { rationalFromDouble, toDouble } from '../rational-double.ts';
+import { coprimeFactors, integerSquareFreeFactors } from '../square-free.ts';
 import { approximateRoots } from './approximate-roots.ts';
-import { exponentOf } from './integer.ts';
-import { exactQuotient, type IntegerPolynomial, primitiveOf, primitivePart } from './integer-polynomial.ts';
-import type { Polynomial } from './polynomial.ts';
-import { integerGcd } from './polynomial-gcd.ts';
-import { compareRationals, rational } from './rational.ts';
-import { rationalFromDouble, toDouble } from './rational-double.ts';
 import { isolated } from './root-isolation.ts';
 import { type RoundedRoot, roundedRoots, roundedSquareRoots } from './root-rounding.ts';
 import { sharpenedUntil } from './root-sharpening.ts';
 import type { Site } from './root-sites.ts';
 import { startingPoints } from './root-starts.ts';
 import { subjectOf } from './root-steps.ts';
-import { coprimeFactors, integerSquareFreeFactors } from './square-free.ts';
 
 /** A root; a complex pair is two of them. */
 export interface CertifiedRoot {

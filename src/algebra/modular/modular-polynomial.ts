@@ -3,7 +3,7 @@
  * put together. Descending powers, no leading zero; zero is empty.
  */
 
-import type { IntegerPolynomial } from './integer-polynomial.ts';
+import type { IntegerPolynomial } from '../integer-polynomial.ts';
 import { inverseModulo, reduce, residue } from './primes.ts';
 
 export type ModularPolynomial = Float64Array;

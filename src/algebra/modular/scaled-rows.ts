@@ -3,10 +3,10 @@
  * and everything that is computed modulo primes.
  */
 
-import { absolute, bitLength, greatestCommonDivisor } from './integer.ts';
+import { absolute, bitLength, greatestCommonDivisor } from '../integer.ts';
+import type { Rational } from '../rational.ts';
+import type { SparseMatrix } from '../sparse-matrix.ts';
 import { inverseModulo, reduce, residue } from './primes.ts';
-import type { Rational } from './rational.ts';
-import type { SparseMatrix } from './sparse-matrix.ts';
 
 /** Row i holds the whole numbers `numerators[k]` over the one denominator `denominators[i]`, in the pattern of a SparseMatrix. */
 export interface ScaledRows {

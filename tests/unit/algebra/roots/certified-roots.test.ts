@@ -9,8 +9,8 @@ import {
   productOfPolynomials,
   rational,
   ZERO,
-} from '../../../src/algebra/index.ts';
-import { poly } from './as-written.ts';
+} from '../../../../src/algebra/index.ts';
+import { poly } from '../as-written.ts';
 
 /** Roots as `re im multiplicity`. */
 function listed(p: Polynomial): [number, number, number][] {

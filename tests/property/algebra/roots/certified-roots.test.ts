@@ -13,9 +13,9 @@ import {
   rationalFromDouble,
   subtractRationals,
   toDouble,
-} from '../../../src/algebra/index.ts';
-import { nonzeroPolynomialOf } from '../../arbitraries/polynomials.ts';
-import { nonzeroRational, SEED, shortRational } from '../../arbitraries/rationals.ts';
+} from '../../../../src/algebra/index.ts';
+import { nonzeroPolynomialOf } from '../../../arbitraries/polynomials.ts';
+import { nonzeroRational, SEED, shortRational } from '../../../arbitraries/rationals.ts';
 
 interface KnownRoot {
   readonly re: Rational;

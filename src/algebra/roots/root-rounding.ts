@@ -3,8 +3,8 @@
  * one. Also the square roots of discs, by which roots ±z of a polynomial in s² are found from those in s².
  */
 
-import { bitLength } from './integer.ts';
-import { dyadicToDouble } from './rational-double.ts';
+import { bitLength } from '../integer.ts';
+import { dyadicToDouble } from '../rational-double.ts';
 import { fromFixed, type Site, toFixed } from './root-sites.ts';
 
 /** A root whose parts are nearest doubles. */

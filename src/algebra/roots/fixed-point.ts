@@ -4,8 +4,8 @@
  * disc and the largest coefficient is about one.
  */
 
-import { bitLength } from './integer.ts';
-import type { IntegerPolynomial } from './integer-polynomial.ts';
+import { bitLength } from '../integer.ts';
+import type { IntegerPolynomial } from '../integer-polynomial.ts';
 
 /** (x + i·y) · 2^(exponent − bits), |x + i·y| ≤ 2^bits. */
 export interface FixedPoint {

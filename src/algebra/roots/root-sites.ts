@@ -3,8 +3,8 @@
  * the sites, their scale and precision, and how they see one another; the steps that move them stand on it.
  */
 
+import { bitLength, exponentOf } from '../integer.ts';
 import type { FixedPoint } from './fixed-point.ts';
-import { bitLength, exponentOf } from './integer.ts';
 
 /**
  * A point that stands for one root (`real`, `single`) or for a root and its conjugate (`pair`, y > 0). `radius` is in units

@@ -3,9 +3,9 @@
  * root, and the point to go to with a bound on what is left. Isolation and sharpening are loops around it.
  */
 
+import { bitLength } from '../integer.ts';
+import type { IntegerPolynomial } from '../integer-polynomial.ts';
 import { evaluateAtComplex, evaluateAtReal, type FixedValue, fixedCoefficients } from './fixed-point.ts';
-import { bitLength } from './integer.ts';
-import type { IntegerPolynomial } from './integer-polynomial.ts';
 import { fromFixed, LEAST_RADIUS, type Site, toFixed, type View } from './root-sites.ts';
 
 /** Relative room for the rounding of the handful of double operations in a bound. */

@@ -2,17 +2,17 @@
 
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
+import { bitLength } from '../../../../src/algebra/integer.ts';
+import type { IntegerPolynomial } from '../../../../src/algebra/integer-polynomial.ts';
 import {
   evaluateAtComplex,
   evaluateAtReal,
   type FixedValue,
   fixedCoefficients,
-} from '../../../src/algebra/fixed-point.ts';
-import { bitLength } from '../../../src/algebra/integer.ts';
-import type { IntegerPolynomial } from '../../../src/algebra/integer-polynomial.ts';
-import { type Site, views } from '../../../src/algebra/root-sites.ts';
-import { discRadius, newtonAt, stepped, subjectOf } from '../../../src/algebra/root-steps.ts';
-import { SEED } from '../../arbitraries/rationals.ts';
+} from '../../../../src/algebra/roots/fixed-point.ts';
+import { type Site, views } from '../../../../src/algebra/roots/root-sites.ts';
+import { discRadius, newtonAt, stepped, subjectOf } from '../../../../src/algebra/roots/root-steps.ts';
+import { SEED } from '../../../arbitraries/rationals.ts';
 
 /** Numbers of this many bits more than the values under test stand for exact ones. */
 const EXTRA = 400;

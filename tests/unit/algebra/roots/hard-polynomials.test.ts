@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { certifiedRoots, rational } from '../../../src/algebra/index.ts';
+import { certifiedRoots, rational } from '../../../../src/algebra/index.ts';
 import reference from './hard-polynomials.json' with { type: 'json' };
 
 describe('ill-conditioned polynomials of ordinary-looking models', () => {
