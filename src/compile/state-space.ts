@@ -55,7 +55,10 @@ export interface SelfCheck {
   /** What `error` may at most be for the check to have passed, scaled with the size and conditioning. */
   readonly limit: number;
   readonly passed: boolean;
-  /** Complex frequencies at which the two were compared; 0 where there was nothing to compare (no input or no output and no state). */
+  /**
+   * Complex frequencies at which the two were compared; 0 where there was nothing to compare: no input or no output, and no
+   * state or states that differentiation may have shifted.
+   */
   readonly frequencies: number;
   /** Random vectors of states and inputs that were compared in place of frequencies, where the drawing is large for those. */
   readonly vectors: number;

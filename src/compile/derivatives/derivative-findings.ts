@@ -3,7 +3,7 @@
 import { type Problem, problem } from '../../problem/index.ts';
 import type { DifferentiatedSignal, Equations, RowStore } from '../equations/index.ts';
 import type { FlatDrawing } from '../flatten/index.ts';
-import { titleOf } from '../flatten/index.ts';
+import { listTitles, pathsOf } from '../loops/index.ts';
 
 const REMEDY = 'Put a lag in its place, or take the output from behind an integrator.';
 
@@ -15,11 +15,11 @@ export function derivativeOfInput<T>(
   output: number,
   input: number,
 ): Problem {
-  const blocks = between(equations, reduced, output, input);
+  const blocks = blocksOf(drawing, between(equations, reduced, output, input));
   const message =
     `Output ${equations.outputs[output]!.name} needs a derivative of input ${equations.inputs[input]!.name}, ` +
-    `which ${namesOf(drawing, blocks)} would have to form. ${REMEDY}`;
-  return problem('derivative-of-input', message, { blocks });
+    `which ${listTitles(drawing, blocks)} would have to form. ${REMEDY}`;
+  return problem('derivative-of-input', message, { blocks: pathsOf(drawing, blocks) });
 }
 
 /** The refusal of differentiations that determine nothing, `open` by their numbers. */
@@ -28,30 +28,32 @@ export function differentiationWithoutSolution<T>(
   { differentiated }: Equations<T>,
   open: readonly number[],
 ): Problem {
-  const blocks = pathsOfDifferentiated(open.map(k => differentiated[k]!));
+  const blocks = blocksOf(
+    drawing,
+    open.map(k => differentiated[k]!),
+  );
   const message =
-    `The algebraic loop through ${namesOf(drawing, blocks)} has no unique solution. ` +
+    `The algebraic loop through ${listTitles(drawing, blocks)} has no unique solution. ` +
     'Change a gain or put an integrator in it.';
-  return problem('loop-without-solution', message, { blocks });
+  return problem('loop-without-solution', message, { blocks: pathsOf(drawing, blocks) });
 }
 
-function pathsOfDifferentiated(signals: readonly DifferentiatedSignal[]): string[] {
-  return [...new Set(signals.map(({ block }) => block))];
-}
-
-function namesOf({ blocks }: FlatDrawing, paths: readonly string[]): string {
-  const titles = paths.map(path => {
-    const flat = blocks.find(block => block.path === path);
-    return flat === undefined ? path : titleOf(flat);
-  });
-  return titles.length < 2 ? titles.join() : `${titles.slice(0, -1).join(', ')} and ${titles.at(-1)}`;
+/** Indices of the blocks that differentiate the signals, in document order, each once. */
+function blocksOf(drawing: FlatDrawing, signals: readonly DifferentiatedSignal[]): number[] {
+  const paths = new Set(signals.map(({ block }) => block));
+  return drawing.blocks.flatMap(({ path }, b) => (paths.has(path) ? [b] : []));
 }
 
 /**
  * The differentiating blocks on some way from the input to the output. Row r of the reduced equations gives known r, as far
  * as it is a state or a derivative; outputs have the rows and inputs the columns behind.
  */
-function between<T>(equations: Equations<T>, reduced: RowStore<T>, output: number, input: number): string[] {
+function between<T>(
+  equations: Equations<T>,
+  reduced: RowStore<T>,
+  output: number,
+  input: number,
+): DifferentiatedSignal[] {
   const inner = equations.states.length + equations.differentiated.length;
   const isInner = (node: number) => node < inner;
   const columnsOf = (row: number) => [...reduced.column.subarray(reduced.start[row], reduced.start[row + 1])];
@@ -60,9 +62,7 @@ function between<T>(equations: Equations<T>, reduced: RowStore<T>, output: numbe
   const fromInput = reachable(rowsOf[inner + input]!.filter(isInner), node => rowsOf[node]!.filter(isInner));
   const toOutput = reachable(columnsOf(inner + output).filter(isInner), node => columnsOf(node).filter(isInner));
   const first = equations.states.length;
-  return pathsOfDifferentiated(
-    equations.differentiated.filter((_, k) => fromInput.has(first + k) && toOutput.has(first + k)),
-  );
+  return equations.differentiated.filter((_, k) => fromInput.has(first + k) && toOutput.has(first + k));
 }
 
 function reachable(start: readonly number[], next: (node: number) => readonly number[]): ReadonlySet<number> {

@@ -43,10 +43,13 @@ export function pathsOf({ blocks }: FlatDrawing, indices: readonly number[]): st
 /** `gain a, gain b and summing point c`; blocks on the boundary of a group are left out where others are there. */
 export function listTitles({ blocks }: FlatDrawing, indices: readonly number[]): string {
   const inside = indices.filter(b => blocks[b]!.role !== 'boundary');
-  const titles = (inside.length > 0 ? inside : indices).map(b => titleOf(blocks[b]!));
+  return listed((inside.length > 0 ? inside : indices).map(b => titleOf(blocks[b]!)));
+}
+
+function listed(titles: readonly string[]): string {
   if (titles.length > BLOCKS_LISTED) {
     const left = titles.length - BLOCKS_LISTED;
-    return `${titles.slice(0, BLOCKS_LISTED).join(', ')} and ${left} more blocks`;
+    return `${titles.slice(0, BLOCKS_LISTED).join(', ')} and ${left} more block${left === 1 ? '' : 's'}`;
   }
   return titles.length < 2 ? titles.join() : `${titles.slice(0, -1).join(', ')} and ${titles.at(-1)}`;
 }

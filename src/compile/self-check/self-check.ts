@@ -6,7 +6,7 @@
 import type { Diagram } from '../../diagram/index.ts';
 import type { Scope } from '../../expression/index.ts';
 import type { SelfCheck, StateSpace } from '../state-space.ts';
-import { modulus } from './complex.ts';
+import { type Complex, modulus } from './complex.ts';
 import { testFrequencies } from './frequencies.ts';
 import { awayFromZero, type Jitter, jitterOf, randomSigned } from './random.ts';
 import { type RawDrawing, rawDrawing } from './raw-drawing.ts';
@@ -28,12 +28,13 @@ const HELD_VECTORS = 3;
 const SEPARATE_DRIVES = 8;
 
 /**
- * Largest relative difference that rounding may leave: units in the last place for each unknown, with a floor of about
- * 4e-13. A difference is taken relative to the terms of its equation and to what a relative change of the drawing's
- * coefficients makes of it, so that the limit need not know the conditioning.
+ * Largest relative difference that rounding may leave: units in the last place for each unknown and each state, whose
+ * coefficients every answer runs through, with a floor of about 4e-13. A difference is taken relative to the terms of its
+ * equation and to what a relative change of the drawing's coefficients makes of it, so that the limit need not know the
+ * conditioning.
  */
-function differenceLimit(unknowns: number): number {
-  return Number.EPSILON * Math.max(2048, 16 * unknowns);
+function differenceLimit({ unknowns, states }: RawDrawing): number {
+  return Number.EPSILON * Math.max(2048, 16 * unknowns + 32 * states);
 }
 
 /** The random relative change of the coefficients: its effect is far above rounding, and still linear in the change. */
@@ -46,9 +47,10 @@ const JITTER = 2 ** -40;
  */
 export function selfCheck(diagram: Diagram, scope: Scope, model: StateSpace): SelfCheck {
   const drawing = rawDrawing(diagram, scope);
-  const limit = differenceLimit(drawing.unknowns);
-  const nothing = model.states.length === 0 && (model.inputs.length === 0 || model.outputs.length === 0);
-  if (nothing) return { error: 0, limit, passed: true, frequencies: 0, vectors: 0 };
+  const limit = differenceLimit(drawing);
+  const isOneSided = model.inputs.length === 0 || model.outputs.length === 0;
+  if (isOneSided && (drawing.isImproper || model.states.length === 0))
+    return { error: 0, limit, passed: true, frequencies: 0, vectors: 0 };
   const isHeld = drawing.unknowns > LARGEST_AT_FREQUENCIES && !drawing.isImproper;
   const comparisons = isHeld ? [heldComparison(drawing, model)] : frequencyComparisons(drawing, model);
   const errors = comparisons.map(comparison => largestError(comparison, limit));
@@ -58,7 +60,7 @@ export function selfCheck(diagram: Diagram, scope: Scope, model: StateSpace): Se
     error,
     limit,
     passed: error <= limit,
-    frequencies: isHeld ? 0 : comparisons.length,
+    frequencies: isHeld ? 0 : compared.length || comparisons.length,
     vectors: isHeld ? HELD_VECTORS : 0,
   };
 }
@@ -80,15 +82,36 @@ function heldComparison(drawing: RawDrawing, { states, inputs, numeric }: StateS
   };
 }
 
+/** One for each test frequency, with milder ones in reserve where its powers leave the doubles. */
 function frequencyComparisons(drawing: RawDrawing, model: StateSpace): Comparison[] {
   const drives = frequencyDrives(drawing);
   return testFrequencies(model.numeric.A).map(s => jitter => {
     if (!drawing.isImproper && drawing.states !== model.states.length) return null;
-    const answers = solveDrawing(drawing, s, drives, lawsOf(drawing, jitter));
-    if (answers === null) return null;
-    if (!drawing.isImproper) return answers.flatMap(answer => residuals(model.numeric, answer));
-    return transferResiduals(model.numeric, s, answers, jitter);
+    for (const milder of [s, towardsOne(s, 0.5), towardsOne(s, 0)]) {
+      const found = compareAt(drawing, model, milder, drives, jitter);
+      if (found?.every(({ scale }) => Number.isFinite(scale))) return found;
+    }
+    return null;
   });
+}
+
+/** The same direction, the modulus raised to a power. */
+function towardsOne({ re, im }: Complex, exponent: number): Complex {
+  const size = Math.hypot(re, im);
+  return { re: (re / size) * size ** exponent, im: (im / size) * size ** exponent };
+}
+
+function compareAt(
+  drawing: RawDrawing,
+  { numeric }: StateSpace,
+  s: Complex,
+  drives: readonly Drive[],
+  jitter: Jitter | null,
+): readonly Residual[] | null {
+  const answers = solveDrawing(drawing, s, drives, lawsOf(drawing, jitter));
+  if (answers === null) return null;
+  if (!drawing.isImproper) return answers.flatMap(answer => residuals(numeric, answer));
+  return transferResiduals(numeric, s, answers, jitter);
 }
 
 function lawsOf({ blocks }: RawDrawing, jitter: Jitter | null): readonly RawLaw[] {
@@ -125,11 +148,17 @@ function largestError(comparison: Comparison, limit: number): number | null {
   });
 }
 
+/**
+ * Terms below this, against drives of 1, are at the end of the range of doubles and have lost their digits: 2⁻¹⁰²² is the
+ * smallest number with all of them.
+ */
+const VANISHED = 2 ** -960;
+
 function largestRatio(found: readonly Residual[], scaleOf: (residual: Residual, i: number) => number): number {
   let largest = 0;
   found.forEach((residual, i) => {
     const size = modulus(residual.difference);
-    const ratio = size === 0 ? 0 : size / scaleOf(residual, i);
+    const ratio = size < VANISHED ? 0 : size / scaleOf(residual, i);
     largest = Math.max(largest, Number.isFinite(ratio) ? ratio : 1);
   });
   return largest;

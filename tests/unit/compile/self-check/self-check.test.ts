@@ -207,10 +207,30 @@ test('signals that cancel exactly are no difference', () => {
   expect(check.passed).toBe(true);
 });
 
+test('a signal that fades below the doubles along a long chain is no difference', () => {
+  const lags = Array.from({ length: 900 }, (_, i) => quotient(`g${i}`, '1', '40*s + 1'));
+  const wires = lags.slice(1).map((_, i) => `g${i} -> g${i + 1}`);
+  const drawing = draw([input('u'), ...lags, output('y')], ['u -> g0', ...wires, 'g899 -> y']);
+  expect(valueOf(compile(drawing)).selfCheck.passed).toBe(true);
+});
+
+test('powers of s beyond the doubles are avoided by a milder frequency', () => {
+  const drawing = draw(
+    [input('u'), quotient('lead', '(s + 1)^190', 's + 2'), quotient('lag', '1', '(s + 2)^189'), output('y')],
+    ['u -> lead', 'lead -> lag', 'lag -> y'],
+  );
+  expect(valueOf(compile(drawing)).selfCheck).toMatchObject({ passed: true, frequencies: 3 });
+});
+
 test('nothing is compared where there is nothing: no state, and no input or no output', () => {
   for (const drawing of [draw([], []), draw([input('u'), gain('k', '2')], ['u -> k']), draw([output('y')], [])]) {
     expect(valueOf(compile(drawing)).selfCheck).toMatchObject({ passed: true, frequencies: 0, error: 0 });
   }
+});
+
+test('nothing is compared where a drawing that differentiates has no input or no output', () => {
+  const drawing = draw([integrator('x'), differentiator('d'), output('y')], ['x -> d', 'd -> y']);
+  expect(valueOf(compile(drawing)).selfCheck).toMatchObject({ passed: true, frequencies: 0 });
 });
 
 test('the limit grows with the drawing from 2,048 units in the last place', () => {
