@@ -4,8 +4,9 @@
  */
 
 import type { Diagram, Edit } from '../../diagram/index.ts';
-import { checkExpressions, editDiagram } from '../../diagram/index.ts';
-import type { Problem } from '../../problem/index.ts';
+import { blockTitleAtStart, editDiagram, quantityFields } from '../../diagram/index.ts';
+import { parseExpression } from '../../expression/index.ts';
+import { type Problem, problem } from '../../problem/index.ts';
 
 export interface DocumentSlice {
   readonly diagram: Diagram;
@@ -36,24 +37,30 @@ export function edited(
 
 /** What is no expression in the text that the edit brings; a name nobody has defined yet may still be. */
 function writtenFault(diagram: Diagram, edit: Edit): Problem | null {
-  const concerned = concernedBy(edit);
-  if (concerned === null) return null;
-  const problems = checkExpressions(diagram).filter(({ code }) => code === 'bad-expression');
-  return problems.find(({ blocks, parameter }) => blocks.includes(concerned) || parameter === concerned) ?? null;
-}
-
-/** The block's id or the parameter's name whose text an edit writes; null where it writes none. */
-function concernedBy(edit: Edit): string | null {
   switch (edit.kind) {
-    case 'setField':
-      return edit.id;
+    case 'setField': {
+      const block = diagram.blocks.find(({ id }) => id === edit.id);
+      if (block === undefined || !quantityFields(block).some(({ field }) => field === edit.field)) return null;
+      return textFault(edit.value, blockTitleAtStart(block), { blocks: [edit.id] });
+    }
     case 'setParameter':
-      return edit.name;
+      return edit.value === undefined ? null : parameterFault(edit.name, edit.value);
     case 'addParameter':
-      return edit.parameter.name;
+      return parameterFault(edit.parameter.name, edit.parameter.value);
     default:
       return null;
   }
+}
+
+function parameterFault(name: string, value: string): Problem | null {
+  return textFault(value, `Parameter ${name}`, { parameter: name });
+}
+
+function textFault(text: string, title: string, concerns: Parameters<typeof problem>[2]): Problem | null {
+  const parsed = parseExpression(text);
+  if (parsed.ok) return null;
+  const { code, message } = parsed.problems[0] ?? { code: 'bad-expression', message: 'is no expression' };
+  return problem(code, `${title}: ${message}`, concerns);
 }
 
 /** The slice with `diagram` as its newest document and the former one to go back to. */
