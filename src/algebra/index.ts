@@ -66,7 +66,6 @@ export {
   formulaOf,
   formulaPython,
   formulaText,
-  functionLength,
   rationalFunction,
   solveSymbolic,
   substitute,

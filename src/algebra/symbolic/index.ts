@@ -19,6 +19,6 @@ export { formulaMathML } from './formula-mathml.ts';
 export { type FormulaOptions, formulaOf } from './formula-of.ts';
 export { formulaC, formulaPython, formulaText, type NameSpelling } from './formula-text.ts';
 export type { SymbolicPolynomial } from './polynomial.ts';
-export { functionLength, type RationalFunction, rationalFunction } from './rational-function.ts';
+export { type RationalFunction, rationalFunction } from './rational-function.ts';
 export { type SymbolicSolution, solveSymbolic } from './solve.ts';
 export { createSymbolicField, type SymbolicField } from './symbolic-field.ts';

@@ -168,8 +168,8 @@ export function powerOfFunction(f: RationalFunction, exponent: number, effort: E
   };
 }
 
-/** Terms of numerator and denominator together: what is shown, and what decides between pivots. */
-export function functionLength(f: RationalFunction): number {
+/** Terms of numerator and denominator together. */
+function functionLength(f: RationalFunction): number {
   return f.numerator.coefficients.length + f.denominator.coefficients.length;
 }
 
