@@ -3,7 +3,7 @@
  * one line. After a move only what the move touches is routed again.
  */
 
-import { blockRectangle, type SheetGeometry, sheetGeometry } from '../geometry/index.ts';
+import { blockRectangle, type Rectangle, type SheetGeometry, sheetGeometry } from '../geometry/index.ts';
 import type { Point, Sheet } from '../types.ts';
 import { branchingPoints } from './branching-points.ts';
 import { elbowRoute } from './elbow-route.ts';
@@ -11,6 +11,7 @@ import { simplified } from './polyline.ts';
 import { EVERYWHERE, holds, overlap, pieces, regionAround } from './region.ts';
 import { routeWire } from './route-wire.ts';
 import { sheetRouter } from './sheet-router.ts';
+import { stubArea } from './stubs.ts';
 import { type PortEnd, type Route, type Routes, type WireRoute, wireKey } from './types.ts';
 import { type EndedWire, endedWires, routingOrder } from './wire-ends.ts';
 
@@ -36,24 +37,43 @@ export function rerouteMoved(
   geometry: SheetGeometry = sheetGeometry(sheet),
 ): Routes {
   const former = new Set(before.blocks);
-  const changed = sheet.blocks.filter(block => !former.has(block));
-  const changedIds = new Set(changed.map(({ id }) => id));
-  const obstacles = changed.flatMap(block => {
-    const placed = geometry.get(block.id);
-    return placed === undefined ? [] : [blockRectangle(block, placed)];
-  });
-  const formerRoutes = new Map(before.wires.map((wire, index) => [wireKey(wire), previous.wires[index]]));
+  const changed = new Set(sheet.blocks.filter(block => !former.has(block)).map(({ id }) => id));
   const wires = endedWires(sheet, geometry);
+  const obstacles = obstaclesOf(sheet, geometry, wires, changed);
+  const formerRoutes = new Map(before.wires.map((wire, index) => [wireKey(wire), previous.wires[index]]));
   const kept = new Map<number, WireRoute>();
-  for (const { index, from, to, wire } of wires) {
+  for (const { index, from, to, wire, net } of wires) {
     const route = formerRoutes.get(wireKey(wire));
-    if (route === undefined) continue;
-    if (changedIds.has(wire.from[0]) || changedIds.has(wire.to[0])) continue;
+    if (route === undefined || changed.has(wire.from[0]) || changed.has(wire.to[0])) continue;
     if (!joins(route.points, from, to) || (wire.via ?? []).some(point => !passes(route.points, point))) continue;
-    if (!pieces(route.points).some(piece => obstacles.some(obstacle => overlap(piece, obstacle))))
-      kept.set(index, route);
+    const inTheWay = obstacles.filter(obstacle => obstacle.net !== net);
+    if (!pieces(route.points).some(piece => inTheWay.some(({ area }) => overlap(piece, area)))) kept.set(index, route);
   }
   return complete(sheet, geometry, wires, kept);
+}
+
+/** What a route that is to stay must not touch; `net` is the net that may, 0 for none. */
+interface Obstacle {
+  readonly area: Rectangle;
+  readonly net: number;
+}
+
+/** The frames of changed blocks and the straight pieces at their wired ports. */
+function obstaclesOf(
+  sheet: Sheet,
+  geometry: SheetGeometry,
+  wires: readonly EndedWire[],
+  changed: ReadonlySet<string>,
+): readonly Obstacle[] {
+  const frames = sheet.blocks.flatMap((block): Obstacle[] => {
+    const placed = changed.has(block.id) ? geometry.get(block.id) : undefined;
+    return placed === undefined ? [] : [{ area: blockRectangle(block, placed), net: 0 }];
+  });
+  const stubs = wires.flatMap(({ wire, from, to, net }): Obstacle[] => [
+    ...(changed.has(wire.from[0]) ? [{ area: stubArea(from), net }] : []),
+    ...(changed.has(wire.to[0]) ? [{ area: stubArea(to), net }] : []),
+  ]);
+  return [...frames, ...stubs];
 }
 
 const NO_ROUTE: WireRoute = { points: [], forced: false };

@@ -1,5 +1,6 @@
 /** The straight piece at each port: no wire bends before it has left its port by an arrowhead's length. */
 
+import { HALF_GRID, type Rectangle } from '../geometry/index.ts';
 import { lineAfter, lineAt } from './grid-lines.ts';
 import { occupyNodes, type SheetGrid, STANDING, STUB_END, TIGHT } from './sheet-grid.ts';
 import { isHorizontal, outward, type PortEnd } from './types.ts';
@@ -36,4 +37,14 @@ export function stubNodes(grid: SheetGrid, end: PortEnd): readonly number[] {
     return (grid.surroundings[node]! & STANDING) < TIGHT ? nodes : nodes.slice(0, short);
   }
   return nodes.slice(0, short);
+}
+
+/** The longest that the straight piece at a port can be: up to the next line beyond its least length. */
+const LONGEST = STUB + HALF_GRID;
+
+/** The line straight out of a port, as far as the wire may have to run there. */
+export function stubArea({ x, y, side }: PortEnd): Rectangle {
+  const [outX, outY] = outward(side);
+  const [endX, endY] = [x + LONGEST * outX, y + LONGEST * outY];
+  return { left: Math.min(x, endX), right: Math.max(x, endX), top: Math.min(y, endY), bottom: Math.max(y, endY) };
 }

@@ -6,7 +6,7 @@ import type { Block, Point, Sheet } from '../../../../src/diagram/types.ts';
 import { placedSheet } from '../../../arbitraries/placed-sheets.ts';
 import { SEED } from '../../../arbitraries/rationals.ts';
 
-const RUNS = { seed: SEED, numRuns: 150 };
+const RUNS = { seed: SEED, numRuns: 100 };
 
 interface Piece extends Rectangle {
   readonly net: string;
@@ -92,7 +92,7 @@ function expectDotsWhereWiresPart(sheet: Sheet, routes: Routes): void {
   expect(dots).toEqual(parting);
 }
 
-describe('routes of a whole sheet', () => {
+describe('routes of a whole sheet', { timeout: 60_000 }, () => {
   test('join their ports with level and upright pieces, clear of every block, and none is forced', () => {
     fc.assert(
       fc.property(placedSheet(9), sheet => {
@@ -129,7 +129,7 @@ describe('routes of a whole sheet', () => {
   });
 });
 
-describe('routes after a move', () => {
+describe('routes after a move', { timeout: 60_000 }, () => {
   const move = fc.tuple(placedSheet(9), fc.nat(), fc.integer({ min: -1, max: 3 }), fc.integer({ min: -1, max: 3 }));
 
   function moved(sheet: Sheet, which: number, dx: number, dy: number): Sheet {

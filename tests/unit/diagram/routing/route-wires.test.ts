@@ -16,6 +16,24 @@ function routesOf(sheet: Sheet): readonly Route[] {
   return routeWires(sheet).wires.map(({ points }) => points);
 }
 
+/** Whether two routes have a piece on one line with a point in common. */
+function runOnOneLine(a: Route, b: Route): boolean {
+  const pieces = (route: Route) => route.slice(1).map((to, index) => [route[index] ?? to, to] as const);
+  const meet = (low: number, high: number, otherLow: number, otherHigh: number): boolean =>
+    Math.max(Math.min(low, high), Math.min(otherLow, otherHigh)) <=
+    Math.min(Math.max(low, high), Math.max(otherLow, otherHigh));
+  return pieces(a).some(([from, to]) =>
+    pieces(b).some(([otherFrom, otherTo]) =>
+      [0, 1].some(axis => {
+        const along = 1 - axis;
+        const lines = [from[axis], to[axis], otherFrom[axis], otherTo[axis]];
+        const onOneLine = lines.every(line => line === lines[0]);
+        return onOneLine && meet(from[along] ?? 0, to[along] ?? 0, otherFrom[along] ?? 0, otherTo[along] ?? 0);
+      }),
+    ),
+  );
+}
+
 describe('a wire', () => {
   test('between two blocks of one height is one straight line', () => {
     const sheet = { blocks: [gain('a', 100, 100), gain('b', 300, 100)], wires: [wire('a', 'b')] };
@@ -165,6 +183,21 @@ describe('after a move', () => {
     const again = rerouteMoved(routeWires(before), before, withBlock(gain('b', 300, 300)));
     expect(again.wires[1]?.forced).toBe(false);
     expect(again.wires[1]?.points.length).toBeGreaterThan(2);
+  });
+
+  test('a wire gives way that ran where a moved port is entered now', () => {
+    const sheet: Sheet = {
+      blocks: [gain('b0', 0, 20), gain('b1', 320, 40, true), { ...sum('b2', 560, 40), mirrored: true }],
+      wires: [wire('b0', 'b0'), wire('b0', 'b1'), wire('b1', 'b2'), wire('b0', 'b2', 1)],
+    };
+    const after: Sheet = {
+      blocks: sheet.blocks.map(block => (block.id === 'b1' ? gain('b1', 300, 20, true) : block)),
+      wires: sheet.wires,
+    };
+    const { wires } = rerouteMoved(routeWires(sheet), sheet, after);
+    expect(wires.every(({ forced }) => !forced)).toBe(true);
+    const fromB1 = wires[2]?.points ?? [];
+    for (const index of [0, 1, 3]) expect(runOnOneLine(fromB1, wires[index]?.points ?? [])).toBe(false);
   });
 
   test('a new wire is routed and a removed one is gone', () => {
