@@ -56,10 +56,10 @@ function editTimes(page: Page): Promise<number[]> {
     if (field === null || region === null) throw new Error('the page has no field or no results');
     const times: number[] = [];
     for (let edit = 0; edit < edits; edit++) {
-      const value = 2 + edit;
+      const value = 1001 + edit;
       field.focus();
       field.value = `-${value}`;
-      const shown = () => region.querySelector('table td')?.textContent?.includes(`${value}`) === true;
+      const shown = () => Array.from(region.querySelectorAll('td')).some(cell => cell.textContent === `−${value}`);
       const start = performance.now();
       const done = new Promise<void>(resolve => {
         const observer = new MutationObserver(() => {

@@ -11,6 +11,9 @@ const DrawingsDialog = lazy(() =>
   import('./DrawingsDialog.tsx').then(({ DrawingsDialog }) => ({ default: DrawingsDialog })),
 );
 const KeysDialog = lazy(() => import('./KeysDialog.tsx').then(({ KeysDialog }) => ({ default: KeysDialog })));
+const CautionDialog = lazy(() =>
+  import('./CautionDialog.tsx').then(({ CautionDialog }) => ({ default: CautionDialog })),
+);
 
 export function DialogHost() {
   const open = useStore(dialog);
@@ -20,6 +23,7 @@ export function DialogHost() {
       {open === 'export' && <ExportDialog />}
       {open === 'drawings' && <DrawingsDialog />}
       {open === 'keys' && <KeysDialog />}
+      {open === 'caution' && <CautionDialog />}
     </Suspense>
   );
 }

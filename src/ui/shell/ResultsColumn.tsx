@@ -6,6 +6,7 @@ import { AnswerPanels } from './AnswerPanels.tsx';
 import { goTo } from './go-to.ts';
 
 const derivation = (state: State) => state.results.derivation;
+const poles = (state: State) => state.results.poles;
 const problems = (state: State) => state.results.problems;
 const status = (state: State) => state.results.status;
 const notation = (state: State) => state.view.notation;
@@ -48,7 +49,9 @@ function MatrixPanel() {
 }
 
 function WarningPanel() {
-  const warnings = useStore(derivation)?.warnings ?? [];
+  const derived = useStore(derivation)?.warnings ?? [];
+  const hidden = useStore(poles)?.warnings ?? [];
+  const warnings = [...derived, ...hidden];
   if (warnings.length === 0) return null;
   return (
     <Panel title={warnings.length === 1 ? 'Warning' : 'Warnings'}>

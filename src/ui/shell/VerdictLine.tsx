@@ -1,6 +1,7 @@
 /** The line at the bottom: stability, sizes, algebraic loops, the self-check, and the standing caution. */
 
 import type { Derivation } from '../../compile/index.ts';
+import type { Warning } from '../../problem/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
 import { selfCheckText, sizesText, stabilityText } from './verdict-texts.ts';
 
@@ -20,11 +21,13 @@ export function VerdictLine() {
           <StabilityWord answer={poles} />
           <span>{sizesText(derivation.model)}</span>
           <LoopCount derivation={derivation} />
-          <WarningCount derivation={derivation} />
+          <WarningCount warnings={[...derivation.warnings, ...(poles?.warnings ?? [])]} />
           <CheckFigure derivation={derivation} />
         </>
       )}
-      <span className="verdict-caution">linear model: verify on the machine before use</span>
+      <button type="button" className="quiet verdict-caution" onClick={() => actions.openDialog('caution')}>
+        linear model: verify on the machine before use
+      </button>
     </footer>
   );
 }
@@ -50,8 +53,7 @@ function LoopCount({ derivation }: { readonly derivation: Derivation }) {
   );
 }
 
-function WarningCount({ derivation }: { readonly derivation: Derivation }) {
-  const { warnings } = derivation;
+function WarningCount({ warnings }: { readonly warnings: readonly Warning[] }) {
   if (warnings.length === 0) return null;
   return (
     <button

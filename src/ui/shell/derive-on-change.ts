@@ -1,6 +1,6 @@
 /**
- * Asks the worker after each change that can change the model, and for the other channel when one is chosen. Moving a
- * block or writing a note asks nothing.
+ * Asks the worker after each change that can change the model, a parameter's movement under the hand included, and for the
+ * other channel when one is chosen. Moving a block or writing a note asks nothing.
  */
 
 import workerAddress from 'virtual:derivation-worker';
@@ -21,7 +21,10 @@ export const makeFile = line.file;
 export function followDocument(): void {
   ask(store.getState());
   store.subscribe((now, before) => {
-    if (now.document !== before.document) {
+    if (now.live !== before.live) {
+      // What was shown while it moved was perhaps derived in doubles: when the hand lets go, the answer is exact again.
+      ask(now);
+    } else if (now.document !== before.document) {
       if (needsDerivation(before.document.diagram, now.document.diagram)) ask(now);
     } else if (now.view.input !== before.view.input || now.view.output !== before.view.output) {
       line.chooseChannel(now.document.revision, chosenChannel(now));
@@ -34,5 +37,8 @@ function needsDerivation(before: Diagram, now: Diagram): boolean {
 }
 
 function ask(state: State): void {
-  line.derive(state.document.revision, state.document.diagram, chosenChannel(state));
+  const { document, live } = state;
+  const channel = chosenChannel(state);
+  if (live === null) line.derive(document.revision, document.diagram, channel);
+  else line.derive(live.revision, live.diagram, channel, true);
 }

@@ -20,7 +20,7 @@ export interface ViewSlice {
   readonly finding: boolean;
   /** A title block folded to its heading. */
   readonly folded: boolean;
-  readonly dialog: 'export' | 'drawings' | 'keys' | null;
+  readonly dialog: 'export' | 'drawings' | 'keys' | 'caution' | null;
   /** The last thing that was done or refused, for the eye and the screen reader. */
   readonly notice: Notice | null;
   /** When the drawing was last kept on the device, or why it could not be. */
