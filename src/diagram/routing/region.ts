@@ -21,23 +21,31 @@ export function holds({ left, top, right, bottom }: Rectangle, [x, y]: Point): b
   return left <= x && x <= right && top <= y && y <= bottom;
 }
 
-/** The straight pieces of a route as rectangles without width or height. */
-export function pieces(route: Route): readonly Rectangle[] {
-  return route.slice(1).map(([x1, y1], index) => {
-    const [x0, y0] = route[index] ?? [x1, y1];
-    return { left: Math.min(x0, x1), right: Math.max(x0, x1), top: Math.min(y0, y1), bottom: Math.max(y0, y1) };
-  });
+/** Whether a route touches a rectangle. */
+export function touches(route: Route, area: Rectangle): boolean {
+  for (let index = 1; index < route.length; index += 1) {
+    const [x0, y0] = route[index - 1]!;
+    const [x1, y1] = route[index]!;
+    const isBesideX = Math.max(x0, x1) < area.left || Math.min(x0, x1) > area.right;
+    const isBesideY = Math.max(y0, y1) < area.top || Math.min(y0, y1) > area.bottom;
+    if (!isBesideX && !isBesideY) return true;
+  }
+  return false;
 }
 
-/** What of a route lies in a region: the route itself where that is everywhere, else its straight pieces, cut off at the edges. */
+/** What of a route lies in a region: the route itself where it is inside, else its straight pieces, cut off at the edges. */
 export function clipped(route: Route, region: Rectangle): readonly Route[] {
-  if (region === EVERYWHERE) return [route];
-  return pieces(route)
-    .filter(piece => overlap(piece, region))
-    .map(({ left, top, right, bottom }) => [
-      [Math.max(left, region.left), Math.max(top, region.top)],
-      [Math.min(right, region.right), Math.min(bottom, region.bottom)],
-    ]);
+  if (route.every(point => holds(region, point))) return [route];
+  const inside: Route[] = [];
+  for (let index = 1; index < route.length; index += 1) {
+    const piece: Route = [route[index - 1]!, route[index]!];
+    if (touches(piece, region)) inside.push(piece.map(point => nearestWithin(region, point)));
+  }
+  return inside;
+}
+
+function nearestWithin({ left, top, right, bottom }: Rectangle, [x, y]: Point): Point {
+  return [Math.min(right, Math.max(left, x)), Math.min(bottom, Math.max(top, y))];
 }
 
 /** How far around its ends a wire's way may lead. */

@@ -8,7 +8,7 @@ import type { Point, Sheet } from '../types.ts';
 import { branchingPoints } from './branching-points.ts';
 import { elbowRoute } from './elbow-route.ts';
 import { simplified } from './polyline.ts';
-import { EVERYWHERE, holds, overlap, pieces, regionAround } from './region.ts';
+import { EVERYWHERE, regionAround, touches } from './region.ts';
 import { routeWire } from './route-wire.ts';
 import { sheetRouter } from './sheet-router.ts';
 import { stubArea } from './stubs.ts';
@@ -46,8 +46,8 @@ export function rerouteMoved(
     const route = formerRoutes.get(wireKey(wire));
     if (route === undefined || changed.has(wire.from[0]) || changed.has(wire.to[0])) continue;
     if (!joins(route.points, from, to) || (wire.via ?? []).some(point => !passes(route.points, point))) continue;
-    const inTheWay = obstacles.filter(obstacle => obstacle.net !== net);
-    if (!pieces(route.points).some(piece => inTheWay.some(({ area }) => overlap(piece, area)))) kept.set(index, route);
+    const isInTheWay = (obstacle: Obstacle): boolean => obstacle.net !== net && touches(route.points, obstacle.area);
+    if (!obstacles.some(isInTheWay)) kept.set(index, route);
   }
   return complete(sheet, geometry, wires, kept);
 }
@@ -151,6 +151,6 @@ function joins(route: Route, from: PortEnd, to: PortEnd): boolean {
   return first?.[0] === from.x && first[1] === from.y && last?.[0] === to.x && last[1] === to.y;
 }
 
-function passes(route: Route, point: Point): boolean {
-  return pieces(route).some(piece => holds(piece, point));
+function passes(route: Route, [x, y]: Point): boolean {
+  return touches(route, { left: x, top: y, right: x, bottom: y });
 }

@@ -6,7 +6,7 @@ import { blockRectangle, type Rectangle, type SheetGeometry } from '../geometry/
 import type { Sheet } from '../types.ts';
 import { NetTree } from './net-trees.ts';
 import { type Searcher, searcher } from './path-search.ts';
-import { clipped, holds, pieces as linePieces, overlap } from './region.ts';
+import { clipped, holds, overlap } from './region.ts';
 import { nodesAlong, occupy, sheetGrid } from './sheet-grid.ts';
 import { reserveStub } from './stubs.ts';
 import { isHorizontal, type PortEnd, type Route } from './types.ts';
@@ -76,9 +76,12 @@ function linesNeeded(wires: readonly EndedWire[], open: ReadonlySet<number>, rou
       ys.push(y);
     }
   }
-  for (const { left, right, top } of routes.flatMap(({ route }) => linePieces(route))) {
-    if (left === right) xs.push(left);
-    else ys.push(top);
+  for (const { route } of routes) {
+    for (let index = 1; index < route.length; index += 1) {
+      const [x0, y0] = route[index - 1]!;
+      if (x0 === route[index]![0]) xs.push(x0);
+      else ys.push(y0);
+    }
   }
   return { xs, ys };
 }
