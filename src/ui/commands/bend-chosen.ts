@@ -11,7 +11,7 @@ import { actions, store } from '../store/index.ts';
 export function bendWire(key: string, via: readonly Point[]): void {
   const wire = store.getState().document.diagram.wires.find(candidate => wireKey(candidate) === key);
   if (wire === undefined) return;
-  const said = 'Bent the wire. A double press on it, or R, lets it find its own way again.';
+  const said = 'Bent the wire. R takes its bends out.';
   actions.edit({ kind: 'setVia', to: wire.to, via }, said);
 }
 
@@ -50,25 +50,4 @@ export function straightenWires(wires: readonly Wire[]): boolean {
 export function chosenWires(): readonly Wire[] {
   const { selection, document } = store.getState();
   return document.diagram.wires.filter(wire => selection.wires.has(wireKey(wire)));
-}
-
-/** Selects the next wire at the block that is chosen, or at the block that the selected wire ends at; false without one. */
-export function chooseNextWire(block: string | null): boolean {
-  const { wires } = store.getState().document.diagram;
-  const [current] = chosenWires();
-  const at = block ?? null;
-  const around = wires.filter(({ from, to }) =>
-    at === null
-      ? current !== undefined && (to[0] === current.to[0] || from[0] === current.to[0])
-      : from[0] === at || to[0] === at,
-  );
-  if (around.length === 0) return false;
-  const place = current === undefined ? -1 : around.indexOf(current);
-  const next = around[(place + 1) % around.length];
-  if (next === undefined) return false;
-  actions.select({ blocks: new Set(), wires: new Set([wireKey(next)]) });
-  actions.notify(
-    `Wire from ${next.from[0]} to ${next.to[0]}: arrows bend it, + and - set its sign at a summing point.`,
-  );
-  return true;
 }

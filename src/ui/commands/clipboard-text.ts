@@ -29,7 +29,9 @@ export function readClipboard(text: string): Result<Diagram> {
   if (!read.ok && /^\s*\{[\s\S]*"poleward-diagram"/.test(text)) return read;
   if (!read.ok)
     return fail(problem('not-a-diagram', 'The clipboard holds no blocks but other text. Copy some blocks first.'));
-  return read.value.blocks.length > 0 ? ok(read.value) : fail(problem('not-a-diagram', 'The copied drawing is empty.'));
+  return read.value.blocks.length > 0
+    ? ok(read.value)
+    : fail(problem('not-a-diagram', 'The copied drawing is empty. Copy some blocks first.'));
 }
 
 /** Parameters that a pasted drawing brings along, and the names it shares with other values on the sheet, which stay. */

@@ -2,8 +2,9 @@
 
 import { alignChosen, spreadChosen } from '../commands/align-chosen.ts';
 import { arrangeChosen } from '../commands/arrange-chosen.ts';
-import { chooseNextWire, chosenWires, straightenWires } from '../commands/bend-chosen.ts';
+import { chosenWires, straightenWires } from '../commands/bend-chosen.ts';
 import { setSignOfWires, turnLastSign } from '../commands/change-sign.ts';
+import { chooseNextWire } from '../commands/choose-wire.ts';
 import { duplicateChosen } from '../commands/clipboard.ts';
 import { pullOutChosen } from '../commands/insert-in-wire.ts';
 import { actions, store } from '../store/index.ts';
