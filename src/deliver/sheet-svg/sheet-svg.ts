@@ -1,6 +1,6 @@
 /**
- * A whole sheet as one SVG file: squared paper, wires, blocks, title block, drawn of the same geometry as the sheet on the screen.
- * Nothing in it refers outside, and the same diagram gives the same bytes.
+ * A whole sheet as one SVG file: squared paper, wires, blocks, title block, drawn of the same geometry as the sheet on
+ * the screen. Nothing in it refers outside, and the same diagram gives the same bytes.
  */
 
 import {
@@ -43,8 +43,8 @@ const CLEARANCE = GRID;
 const EMPTY: Rectangle = { left: 0, top: 0, right: 20 * GRID, bottom: 10 * GRID };
 
 /**
- * The sheet of a diagram as a standalone SVG document, one sheet unit a pixel, light theme on plain paper with the title block unless
- * asked otherwise. Blocks without a place are drawn at the origin: arrange the sheet first.
+ * The sheet of a diagram as a standalone SVG document, one sheet unit a pixel, light theme on plain paper with the
+ * title block unless asked otherwise. Blocks without a place are drawn at the origin: arrange the sheet first.
  */
 export function sheetSvg(diagram: Diagram, options: SheetSvgOptions = {}): string {
   const sheet = selectedSheet(diagram, options.selection);

@@ -1,6 +1,7 @@
 /**
- * Arranges blocks as a drawing is read: the signal from left to right, one column after the other, what leads back mirrored underneath
- * (Sugiyama, Tagawa & Toda 1981). Nothing overlaps, centres lie on the grid, and the same sheet gives the same places.
+ * Arranges blocks as a drawing is read: the signal from left to right, one column after the other, what leads back
+ * mirrored underneath (Sugiyama, Tagawa & Toda 1981). Nothing overlaps, centres lie on the grid, and the same sheet
+ * gives the same places.
  */
 
 import { enclosing, GRID, type Rectangle } from '../geometry/index.ts';
@@ -29,8 +30,8 @@ const BETWEEN_PARTS = 3 * GRID;
 const ROW_WIDTH = 60 * GRID;
 
 /**
- * Places for the blocks with these ids, in document order, as they would stand by themselves: the upper left corner of all, labels
- * included, at the origin or up to a square beyond. Some 2,000 blocks take a second.
+ * Places for the blocks with these ids, in document order, as they would stand by themselves: the upper left corner of
+ * all, labels included, at the origin or up to a square beyond. Some 2,000 blocks take a second.
  */
 export function arranged(sheet: Sheet, ids: ReadonlySet<string>): readonly Place[] {
   const graph = graphOf(sheet, ids);

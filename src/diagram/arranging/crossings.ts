@@ -1,10 +1,16 @@
-/** Fewer crossings: each column in turn is sorted by where its neighbours stand (barycentres; Sugiyama, Tagawa & Toda 1981). */
+/**
+ * Fewer crossings: each column in turn is sorted by where its neighbours stand (barycentres; Sugiyama, Tagawa & Toda
+ * 1981).
+ */
 
 import type { Item, Rows } from './rows.ts';
 
 const SWEEPS = 8;
 
-/** How far below its neighbours' middle a way back is sorted (above, what comes from there), and how much more for each column of it. */
+/**
+ * How far below its neighbours' middle a way back is sorted (above, what comes from there), and how much more for each
+ * column of it.
+ */
 const BELOW = 0.5;
 const BELOW_EACH_COLUMN = 0.02;
 
@@ -69,7 +75,10 @@ function sortByNeighbours(
   column.sort((a, b) => key.get(a)! - key.get(b)! || place[a]! - place[b]!);
 }
 
-/** Pairs of links that cross between neighbouring columns: inversions, counted in a Fenwick tree (Barth, Mutzel & Jünger 2004). */
+/**
+ * Pairs of links that cross between neighbouring columns: inversions, counted in a Fenwick tree (Barth, Mutzel & Jünger
+ * 2004).
+ */
 function crossings({ links, items, columns }: Rows, place: Float64Array): number {
   const byColumn: (typeof links)[number][][] = columns.map(() => []);
   for (const link of links) byColumn[items[link.left]?.column ?? 0]?.push(link);

@@ -1,6 +1,6 @@
 /**
- * Which wires lead back: a depth-first search from the inputs (Tarjan 1972) follows the signal, and a wire to a block that is still
- * being followed closes a loop. Without these wires the graph has no cycle.
+ * Which wires lead back: a depth-first search from the inputs (Tarjan 1972) follows the signal, and a wire to a block
+ * that is still being followed closes a loop. Without these wires the graph has no cycle.
  */
 
 import type { Graph } from './graph.ts';

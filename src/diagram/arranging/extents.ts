@@ -3,7 +3,10 @@
 import { type BlockGeometry, type Rectangle, sheetGeometry } from '../geometry/index.ts';
 import type { Block } from '../types.ts';
 
-/** Geometry of a block by itself, as nothing of its surroundings is known yet, and the rectangle of its frame and labels. */
+/**
+ * Geometry of a block by itself, as nothing of its surroundings is known yet, and the rectangle of its frame and
+ * labels.
+ */
 export interface Extent {
   readonly geometry: BlockGeometry;
   readonly area: Rectangle;

@@ -1,7 +1,7 @@
 /**
- * The height of each item: wires run straight where they can. In every column the items of greatest priority take the height of what
- * they are joined to, the others give way (the priority method of Sugiyama, Tagawa & Toda 1981). Passages and long chains
- * come first.
+ * The height of each item: wires run straight where they can. In every column the items of greatest priority take the
+ * height of what they are joined to, the others give way (the priority method of Sugiyama, Tagawa & Toda 1981).
+ * Passages and long chains come first.
  */
 
 import { GRID } from '../geometry/index.ts';
@@ -56,7 +56,10 @@ function stackedOffsets(column: readonly number[], items: readonly Item[], exten
   return offsets;
 }
 
-/** What an item's height is taken from: another item, and how much lower its own centre lies when the wire between is straight. */
+/**
+ * What an item's height is taken from: another item, and how much lower its own centre lies when the wire between is
+ * straight.
+ */
 interface Joint {
   readonly item: number;
   readonly lower: number;
@@ -68,7 +71,9 @@ interface Joints {
   readonly right: readonly Joint[][];
 }
 
-/** Weights of a straight wire: along a passage, on the way forward into a front port, into the side of a summing point. */
+/**
+ * Weights of a straight wire: along a passage, on the way forward into a front port, into the side of a summing point.
+ */
 const WEIGHTS = { passage: 3, forward: 2, back: 0.5, aside: 0.1 } as const;
 
 function jointsOf(graph: Graph, { items, links }: Rows, extents: readonly Extent[]): Joints {
@@ -139,7 +144,8 @@ function priorities(graph: Graph, { items }: Rows, joints: Joints): Float64Array
 }
 
 /**
- * Places a column's items: the greatest priority takes what it wants, each further one what those above and below it leave.
+ * Places a column's items: the greatest priority takes what it wants, each further one what those above and below it
+ * leave.
  *
  * @param offsets  the items' heights when they are stacked; differences of heights are never less than theirs.
  */

@@ -1,6 +1,6 @@
 /**
- * Places for blocks: `placeUnplaced` when a drawing is opened whose file gives none, `arrangeBlocks` for a selection or a whole sheet on
- * request. Pure functions of the sheet.
+ * Places for blocks: `placeUnplaced` when a drawing is opened whose file gives none, `arrangeBlocks` for a selection or
+ * a whole sheet on request. Pure functions of the sheet.
  */
 
 export type { Place } from './arrange.ts';

@@ -1,6 +1,6 @@
 /**
- * The column of each block: a wire leads at least one column to the right, those on the way back excepted, which run the other way
- * under the way forward. Longest paths first, then every block moves to where its wires are shortest.
+ * The column of each block: a wire leads at least one column to the right, those on the way back excepted, which run
+ * the other way under the way forward. Longest paths first, then every block moves to where its wires are shortest.
  */
 
 import type { DepthFirst } from './depth-first.ts';
@@ -40,7 +40,10 @@ function constraintsOf(graph: Graph, { leadsBack }: DepthFirst, isBack: readonly
   });
 }
 
-/** Blocks so that every constraint leads forward (Kahn 1962). They have no cycle, as only wires that lead back close one. */
+/**
+ * Blocks so that every constraint leads forward (Kahn 1962). They have no cycle, as only wires that lead back close
+ * one.
+ */
 function topologicalOrder(count: number, after: readonly Constraint[][], before: readonly Constraint[][]): number[] {
   const open = before.map(list => list.length);
   const order = Array.from({ length: count }, (_, block) => block).filter(block => open[block] === 0);
@@ -71,7 +74,9 @@ function shorten(graph: Graph, order: readonly number[], { column, after, before
   }
 }
 
-/** Blocks on a way back move to the middle between where it ends and where it begins, those near its beginning first. */
+/**
+ * Blocks on a way back move to the middle between where it ends and where it begins, those near its beginning first.
+ */
 function spreadWaysBack(
   graph: Graph,
   { found, foundOver }: DepthFirst,

@@ -1,4 +1,7 @@
-/** Places for blocks that have none: what a drawing gets when it is opened. Blocks that have a place stay where they are. */
+/**
+ * Places for blocks that have none: what a drawing gets when it is opened. Blocks that have a place stay where they
+ * are.
+ */
 
 import { GRID, type Rectangle, sheetBounds } from '../geometry/index.ts';
 import type { Block, Sheet } from '../types.ts';
@@ -9,8 +12,9 @@ const ORIGIN = 2 * GRID;
 const UNDERNEATH = 3 * GRID;
 
 /**
- * The sheet with a place for every block, groups' sheets included; the same object where none was missing. Unplaced blocks are arranged
- * among themselves, under those that have a place. A block on a way back is mirrored unless its file says which way it runs.
+ * The sheet with a place for every block, groups' sheets included; the same object where none was missing. Unplaced
+ * blocks are arranged among themselves, under those that have a place. A block on a way back is mirrored unless its
+ * file says which way it runs.
  */
 export function placeUnplaced<T extends Sheet>(sheet: T): T {
   const inside = sheet.blocks.map(withPlacedSheet);
@@ -40,8 +44,9 @@ function placedAt(block: Block, place: Place | undefined, left: number, top: num
 }
 
 /**
- * New places for a selection of placed blocks, arranged where it stands: its upper left corner stays, unless it would then cover a
- * block that is not selected, in which case it moves down. All blocks of the sheet where nothing is selected.
+ * New places for a selection of placed blocks, arranged where it stands: its upper left corner stays, unless it would
+ * then cover a block that is not selected, in which case it moves down. All blocks of the sheet where nothing is
+ * selected.
  */
 export function arrangeBlocks(sheet: Sheet, selection: ReadonlySet<string>): readonly Place[] {
   const ids = selection.size === 0 ? new Set(sheet.blocks.map(({ id }) => id)) : selection;

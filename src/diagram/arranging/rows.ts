@@ -1,6 +1,6 @@
 /**
- * Blocks and the wires that pass between them column by column, in the order from top to bottom. A wire over several columns
- * stands in each of them as a passage, so that it gets room like a block.
+ * Blocks and the wires that pass between them column by column, in the order from top to bottom. A wire over several
+ * columns stands in each of them as a passage, so that it gets room like a block.
  */
 
 import type { DepthFirst } from './depth-first.ts';
@@ -11,7 +11,10 @@ export interface Item {
   /** Number of the block; −1 for a passage. */
   readonly block: number;
   readonly column: number;
-  /** Positive on a way back, which lies below the way forward, the deeper the longer; negative for what comes in from above. */
+  /**
+   * Positive on a way back, which lies below the way forward, the deeper the longer; negative for what comes in from
+   * above.
+   */
   readonly depth: number;
   /** Where it stands at first: the order in which the search found it. */
   readonly rank: number;

@@ -4,7 +4,10 @@ import type { BlockKind } from '../types.ts';
 import type { DepthFirst } from './depth-first.ts';
 import type { Graph } from './graph.ts';
 
-/** Kinds that stand on a way back; summing points and integrators keep the direction of reading, terminals have no way back. */
+/**
+ * Kinds that stand on a way back; summing points and integrators keep the direction of reading, terminals have no way
+ * back.
+ */
 const MAY_LEAD_BACK: ReadonlySet<BlockKind> = new Set([
   'gain',
   'transfer-function',

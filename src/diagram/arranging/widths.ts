@@ -1,4 +1,7 @@
-/** Where each column stands: wide enough for its blocks and labels, apart enough for the wires that change height between. */
+/**
+ * Where each column stands: wide enough for its blocks and labels, apart enough for the wires that change height
+ * between.
+ */
 
 import { GRID, HALF_GRID } from '../geometry/index.ts';
 import type { Extent } from './extents.ts';

@@ -36,8 +36,8 @@ export function blockOutline(block: Block): Outline {
 }
 
 /**
- * Width and height of a block's frame. Rectangles are whole grid squares wide and high, so that their edges and ports lie on
- * the grid wherever their centres do; circles are 28 across, terminals 8.
+ * Width and height of a block's frame. Rectangles are whole grid squares wide and high, so that their edges and ports
+ * lie on the grid wherever their centres do; circles are 28 across, terminals 8.
  */
 export function blockBox(block: Block): Box {
   switch (block.kind) {

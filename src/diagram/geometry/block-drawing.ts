@@ -1,6 +1,6 @@
 /**
- * A block as a list of shapes in its own coordinates. The sheet on the screen and the sheet in a file both draw from this list, so
- * they cannot differ.
+ * A block as a list of shapes in its own coordinates. The sheet on the screen and the sheet in a file both draw from
+ * this list, so they cannot differ.
  */
 
 import type { Block, Sheet } from '../types.ts';
@@ -11,8 +11,8 @@ import type { BlockGeometry, Ink, Shape } from './types.ts';
 /**
  * The shapes of a block, centre at (0, 0), in drawing order: frame, what stands in it, labels.
  *
- * @param value  the number behind the symbol, shown in small type under a gain, a dead time or a limiter that has a symbol;
- *               nothing is shown there where it is left out.
+ * @param value  the number behind the symbol, shown in small type under a gain, a dead time or a limiter that has a
+ *               symbol; nothing is shown there where it is left out.
  */
 export function blockDrawing(block: Block, geometry: BlockGeometry, value?: string): readonly Shape[] {
   return [...frame(block, geometry), ...blockContent(block).shapes, ...labels(geometry, value)];

@@ -1,8 +1,8 @@
 /**
- * Advance widths of the faces in which a sheet is set, so that a block's size is the same in the browser, in a file and in
- * a test, before any font has loaded. Read from the horizontal metrics of the fonts themselves (STIX Two Text regular and
- * italic, B612), in thousandths of the type size, characters within 2.5 % of each other in one row; a character that is not
- * listed takes the face's usual width.
+ * Advance widths of the faces in which a sheet is set, so that a block's size is the same in the browser, in a file and
+ * in a test, before any font has loaded. Read from the horizontal metrics of the fonts themselves (STIX Two Text
+ * regular and italic, B612), in thousandths of the type size, characters within 2.5 % of each other in one row; a
+ * character that is not listed takes the face's usual width.
  */
 
 import type { Span } from '../../expression/index.ts';

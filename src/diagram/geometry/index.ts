@@ -1,13 +1,11 @@
 /**
- * The sizes, ports, labels and shapes of blocks on the sheet. The sheet on the screen, the wires' routes, the arranging and the
- * sheet's SVG all start here. Everything is a pure function of the document.
+ * The sizes, ports, labels and shapes of blocks on the sheet. The sheet on the screen, the wires' routes, the arranging
+ * and the sheet's SVG all start here. Everything is a pure function of the document.
  */
 
-export { blockBox, blockOutline, SUMMING_RADIUS, TERMINAL_RADIUS } from './block-box.ts';
+export { blockBox, blockOutline } from './block-box.ts';
 export { blockDrawing, holdsState } from './block-drawing.ts';
 export { SCRIPT_SCALE, SCRIPT_SHIFT, textWidth } from './character-widths.ts';
-export { TYPE } from './content.ts';
-export { textArea } from './labels.ts';
 export { blockRectangle, enclosing, sheetBounds, snap } from './sheet-bounds.ts';
 export { sheetGeometry } from './sheet-geometry.ts';
 export type {

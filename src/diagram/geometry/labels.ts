@@ -1,6 +1,6 @@
 /**
- * The texts beside a block with the areas that they take: signs beside arrowheads, a signal's name over the wire that leaves,
- * a terminal's name and unit, the room for the number under a symbol.
+ * The texts beside a block with the areas that they take: signs beside arrowheads, a signal's name over the wire that
+ * leaves, a terminal's name and unit, the room for the number under a symbol.
  */
 
 import { nameSpans, type Span } from '../../expression/index.ts';
@@ -43,7 +43,7 @@ function label(spans: readonly Span[], setting: Setting, x: number, y: number, a
 }
 
 /** The area of a line of text: three quarters of its size above the baseline, a quarter below. */
-export function textArea(x: number, y: number, width: number, size: number, anchor: Anchor): Rectangle {
+function textArea(x: number, y: number, width: number, size: number, anchor: Anchor): Rectangle {
   const left = anchor === 'start' ? x : anchor === 'end' ? x - width : x - width / 2;
   return { left, right: left + width, top: y - 0.75 * size, bottom: y + 0.25 * size };
 }
@@ -92,7 +92,10 @@ function valueLabel(isSymbolic: boolean, box: Box): readonly Label[] {
   return [label([], SETTINGS.value, 0, box.height / 2 + 14, 'middle', VALUE_WIDTH)];
 }
 
-/** The name stands where no wire leaves: an input's before it, an output's behind it, beside a wire that leaves downwards. */
+/**
+ * The name stands where no wire leaves: an input's before it, an output's behind it, beside a wire that leaves
+ * downwards.
+ */
 function terminalLabels(name: string, unit: string | undefined, port: PortPlace | undefined, kind: Block['kind']) {
   const upright = port?.side === 'top' || port?.side === 'bottom';
   const onRight = upright || port?.side === 'left';

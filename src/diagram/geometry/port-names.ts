@@ -1,4 +1,6 @@
-/** The names at a group's ports: those of the inputs and outputs of its own sheet, in block order, as format.md has it. */
+/**
+ * The names at a group's ports: those of the inputs and outputs of its own sheet, in block order, as format.md has it.
+ */
 
 import { nameSpans, type Span } from '../../expression/index.ts';
 import type { Block, GroupBlock } from '../types.ts';

@@ -1,4 +1,6 @@
-/** Where ports lie on a frame that stands alone. Summing points and terminals, which look at their wires, build on this. */
+/**
+ * Where ports lie on a frame that stands alone. Summing points and terminals, which look at their wires, build on this.
+ */
 
 import { portCounts } from '../port-counts.ts';
 import type { Block } from '../types.ts';

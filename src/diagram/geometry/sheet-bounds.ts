@@ -33,7 +33,8 @@ export function enclosing(rectangles: readonly Rectangle[]): Rectangle | null {
 }
 
 /**
- * The smallest rectangle around every block of the sheet, with its labels and the bend points of its wires; null for an empty sheet.
+ * The smallest rectangle around every block of the sheet, with its labels and the bend points of its wires; null for an
+ * empty sheet.
  *
  * @param geometry  that of the same sheet, where it is at hand.
  */

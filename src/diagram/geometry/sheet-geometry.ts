@@ -1,7 +1,7 @@
 /**
  * Every block of a sheet as it stands among the others: summing points and terminals turn their ports towards what they
- * are joined to, as they are drawn by hand. Routes and drawings are made from this; it promises the same answer whatever
- * order the wires come in, and unchanged ports for whatever does not move.
+ * are joined to, as they are drawn by hand. Routes and drawings are made from this; it promises the same answer
+ * whatever order the wires come in, and unchanged ports for whatever does not move.
  */
 
 import type { Block, Sheet, SummerBlock } from '../types.ts';
@@ -89,8 +89,8 @@ function inputTerminalPort(block: Block, around: Neighbours): PortPlace {
 
 /**
  * A circle's first input lies against its output; each further one on top where its source stands higher than the
- * summing point, else at the bottom. Of two that want the same, the one that wants it more has it, the second rather than
- * the third. More inputs than a circle has sides for lie one under the other.
+ * summing point, else at the bottom. Of two that want the same, the one that wants it more has it, the second rather
+ * than the third. More inputs than a circle has sides for lie one under the other.
  */
 function summingInputs(block: SummerBlock, around: Neighbours): readonly PortPlace[] {
   const front: Side = block.mirrored ? 'right' : 'left';
@@ -124,8 +124,8 @@ function opposite(side: Flank): Flank {
 }
 
 /**
- * Top or bottom by where the source stands. From its own height the way back of a feedback is drawn underneath, the way ahead
- * of a feedforward on top.
+ * Top or bottom by where the source stands. From its own height the way back of a feedback is drawn underneath, the way
+ * ahead of a feedforward on top.
  */
 function wantedSide(block: SummerBlock, port: number, around: Neighbours): Wanted {
   const source = around.sources.get(`${block.id}:${port}`);

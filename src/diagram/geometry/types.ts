@@ -40,8 +40,9 @@ export type Face = 'math' | 'figures' | 'plain';
 export type Anchor = 'start' | 'middle' | 'end';
 
 /**
- * `symbol` what stands in the frame, `name` a signal or state, `caption` the name of a block that has no wire to carry it,
- * `title` a group's, `port` a group's port, `sign` beside an arrowhead, `unit` under a terminal, `value` under a symbol.
+ * `symbol` what stands in the frame, `name` a signal or state, `caption` the name of a block that has no wire to carry
+ * it, `title` a group's, `port` a group's port, `sign` beside an arrowhead, `unit` under a terminal, `value` under a
+ * symbol.
  */
 export type TextRole = 'symbol' | 'name' | 'caption' | 'title' | 'port' | 'sign' | 'unit' | 'value';
 

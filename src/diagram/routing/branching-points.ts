@@ -5,8 +5,8 @@ import type { Route, Routes, WireRoute } from './types.ts';
 import type { EndedWire } from './wire-ends.ts';
 
 /**
- * Branching points of all nets, each once, nets in the order of their first wire. Two routes from one port part at the end of what
- * they have in common from there.
+ * Branching points of all nets, each once, nets in the order of their first wire. Two routes from one port part at the
+ * end of what they have in common from there.
  *
  * @param routes  by the wire's place among the sheet's wires.
  */
@@ -23,8 +23,8 @@ export function branchingPoints(wires: readonly EndedWire[], routes: readonly Wi
 }
 
 /**
- * What of each wire is not drawn with an earlier wire of the same output already: from where it parts to its input port. Inked so,
- * no line is drawn twice. In the order of the sheet's wires.
+ * What of each wire is not drawn with an earlier wire of the same output already: from where it parts to its input
+ * port. Inked so, no line is drawn twice. In the order of the sheet's wires.
  */
 export function ownParts(sheet: Sheet, { wires }: Routes): readonly Route[] {
   const drawn = new Map<string, Route[]>();

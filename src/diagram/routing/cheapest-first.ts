@@ -1,6 +1,6 @@
 /**
- * A queue that gives the entry of least cost first: a binary heap (Williams 1964). Among equal costs the latest comes first, so
- * that a search goes on where it is deepest.
+ * A queue that gives the entry of least cost first: a binary heap (Williams 1964). Among equal costs the latest comes
+ * first, so that a search goes on where it is deepest.
  */
 
 /** Entries are whole numbers; the same entry may stand in it more than once. */
@@ -10,10 +10,6 @@ export class CheapestFirst {
   private ages: Int32Array = new Int32Array(1024);
   private age = 0;
   private count = 0;
-
-  get size(): number {
-    return this.count;
-  }
 
   clear(): void {
     this.count = 0;

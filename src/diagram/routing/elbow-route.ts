@@ -1,6 +1,6 @@
 /**
- * The plain elbow between two ports: what is drawn while a wire or a block is being dragged, and where no free way exists. It
- * looks at nothing but its two ends.
+ * The plain elbow between two ports: what is drawn while a wire or a block is being dragged, and where no free way
+ * exists. It looks at nothing but its two ends.
  */
 
 import type { Point } from '../types.ts';

@@ -1,6 +1,6 @@
 /**
- * The lines on which wires may run: multiples of 10 around every block, and the lines of ports, bend points and routes that
- * stay, wherever those lie. Where nothing stands there are no lines, so empty paper costs nothing.
+ * The lines on which wires may run: multiples of 10 around every block, and the lines of ports, bend points and routes
+ * that stay, wherever those lie. Where nothing stands there are no lines, so empty paper costs nothing.
  */
 
 import { HALF_GRID } from '../geometry/index.ts';

@@ -1,6 +1,6 @@
 /**
- * The tree that a net's wires make: one trunk from the output port, a branch for each further wire. It remembers for each node the
- * node before it, so a wire's route is read backwards from its end.
+ * The tree that a net's wires make: one trunk from the output port, a branch for each further wire. It remembers for
+ * each node the node before it, so a wire's route is read backwards from its end.
  */
 
 import type { Axis, Beginning } from './path-search.ts';
@@ -16,7 +16,9 @@ export class NetTree {
     return this.nodes.size === 0;
   }
 
-  /** Adds a way; its first node is on the tree, or is the tree's first. Nodes already on it keep what is before them. */
+  /**
+   * Adds a way; its first node is on the tree, or is the tree's first. Nodes already on it keep what is before them.
+   */
   add(way: readonly number[]): void {
     way.forEach((node, index) => {
       if (this.nodes.has(node)) return;

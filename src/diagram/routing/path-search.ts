@@ -1,7 +1,7 @@
 /**
  * The cheapest way on the grid from a net's tree to a port: A* (Hart, Nilsson & Raphael 1968) over (node, direction of
- * travel), so that bends have a price. Lengths are dearer close to blocks, labels and parallel wires; a wire of another net
- * may only be crossed straight. Promises the same way for the same grid.
+ * travel), so that bends have a price. Lengths are dearer close to blocks, labels and parallel wires; a wire of another
+ * net may only be crossed straight. Promises the same way for the same grid.
  */
 
 import { GRID } from '../geometry/index.ts';
@@ -54,7 +54,10 @@ export interface SearchQuestion {
   readonly window: { readonly left: number; readonly right: number; readonly top: number; readonly bottom: number };
   /** Where vertical pieces rather lie, where it makes no other difference; null for anywhere. */
   readonly middle: number | null;
-  /** What the remaining length counts for over itself: 1 finds the cheapest way, more of it finds a good one sooner (Pohl 1970). */
+  /**
+   * What the remaining length counts for over itself: 1 finds the cheapest way, more of it finds a good one sooner
+   * (Pohl 1970).
+   */
   readonly haste: number;
   /** Steps after which the search is given up. */
   readonly patience: number;

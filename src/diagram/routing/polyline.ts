@@ -1,4 +1,4 @@
-/** Orthogonal polylines: dropping needless points, walking segments. */
+/** Orthogonal polylines without needless points. */
 
 import type { Point } from '../types.ts';
 import type { Route } from './types.ts';
@@ -20,15 +20,4 @@ function goesOn(a: Point, b: Point, c: Point): boolean {
   const horizontal = a[1] === b[1] && b[1] === c[1] && (b[0] - a[0]) * (c[0] - b[0]) > 0;
   const vertical = a[0] === b[0] && b[0] === c[0] && (b[1] - a[1]) * (c[1] - b[1]) > 0;
   return horizontal || vertical;
-}
-
-/** Total length of a route. */
-export function routeLength(route: Route): number {
-  let length = 0;
-  for (let index = 1; index < route.length; index += 1) {
-    const [x0, y0] = route[index - 1] ?? [0, 0];
-    const [x1, y1] = route[index] ?? [0, 0];
-    length += Math.abs(x1 - x0) + Math.abs(y1 - y0);
-  }
-  return length;
 }

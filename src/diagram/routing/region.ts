@@ -33,7 +33,10 @@ export function touches(route: Route, area: Rectangle): boolean {
   return false;
 }
 
-/** What of a route lies in a region: the route itself where it is inside, else its straight pieces, cut off at the edges. */
+/**
+ * What of a route lies in a region: the route itself where it is inside, else its straight pieces, cut off at the
+ * edges.
+ */
 export function clipped(route: Route, region: Rectangle): readonly Route[] {
   if (route.every(point => holds(region, point))) return [route];
   const inside: Route[] = [];

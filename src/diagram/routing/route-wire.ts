@@ -1,6 +1,6 @@
 /**
- * Routes one wire: the cheapest way from its net's tree to its port. Where the near surroundings hold no way the window is
- * widened. What is routed is taken into the grid, so later wires of other nets keep off it.
+ * Routes one wire: the cheapest way from its net's tree to its port. Where the near surroundings hold no way the window
+ * is widened. What is routed is taken into the grid, so later wires of other nets keep off it.
  */
 
 import { lineFrom } from './grid-lines.ts';
@@ -16,11 +16,16 @@ import type { EndedWire } from './wire-ends.ts';
 /** How far around its ends a wire's way is sought, in turn. */
 const WINDOWS = [120, 500, Number.POSITIVE_INFINITY] as const;
 
-/** Prices of a branch for each unit that it is closer to a port than `FROM_PORT`, under a name, and close to a frame. */
+/**
+ * Prices of a branch for each unit that it is closer to a port than `FROM_PORT`, under a name, and close to a frame.
+ */
 const BRANCH_PRICES = { eachUnit: 0.4, underLabel: 24, near: 4 } as const;
 const FROM_PORT = 40;
 
-/** How a way is sought once a wire's patience is used up: the remaining length counts three times, as what it will cross may cost. */
+/**
+ * How a way is sought once a wire's patience is used up: the remaining length counts three times, as what it will cross
+ * may cost.
+ */
 const HASTE = 3;
 const LAST_PATIENCE = 60_000;
 

@@ -1,6 +1,6 @@
 /**
- * All wires of a sheet as orthogonal routes: around blocks, wires of one output on a common trunk, wires of different outputs never on
- * one line. After a move only what the move touches is routed again.
+ * All wires of a sheet as orthogonal routes: around blocks, wires of one output on a common trunk, wires of different
+ * outputs never on one line. After a move only what the move touches is routed again.
  */
 
 import { blockRectangle, type Rectangle, type SheetGeometry, sheetGeometry } from '../geometry/index.ts';
@@ -25,8 +25,8 @@ export function routeWires(sheet: Sheet, geometry: SheetGeometry = sheetGeometry
 }
 
 /**
- * Routes again what an edit touches: wires at blocks that moved or changed, new wires, wires whose ports have turned, and wires that a
- * changed block now stands on. All other routes stay the same objects.
+ * Routes again what an edit touches: wires at blocks that moved or changed, new wires, wires whose ports have turned,
+ * and wires that a changed block now stands on. All other routes stay the same objects.
  *
  * @param previous  the routes of the sheet `before`.
  */
@@ -78,7 +78,9 @@ function obstaclesOf(
 
 const NO_ROUTE: WireRoute = { points: [], forced: false };
 
-/** How often wires that found no way are put in front and everything is routed again, and on how large a sheet still. */
+/**
+ * How often wires that found no way are put in front and everything is routed again, and on how large a sheet still.
+ */
 const RETRIES = 3;
 const MOST_RETRIED_WIRES = 600;
 

@@ -1,6 +1,6 @@
 /**
- * The sheet as the router sees it: at each crossing of two lines what stands there and which net runs through, horizontally and
- * vertically. Blocks and labels are marked once; nets are added as they are routed.
+ * The sheet as the router sees it: at each crossing of two lines what stands there and which net runs through,
+ * horizontally and vertically. Blocks and labels are marked once; nets are added as they are routed.
  */
 
 import type { Rectangle } from '../geometry/index.ts';
@@ -14,13 +14,19 @@ export const NEAR = 1;
 export const TIGHT = 2;
 export const BLOCKED = 3;
 
-/** Further bits: a label stands there; a level or an upright wire runs close by in parallel; a port's straight piece ends there. */
+/**
+ * Further bits: a label stands there; a level or an upright wire runs close by in parallel; a port's straight piece
+ * ends there.
+ */
 export const LABEL = 4;
 export const LEVEL_CROWD = 8;
 export const UPRIGHT_CROWD = 16;
 export const STUB_END = 32;
 
-/** Clearances around a block's frame: closer than the first a wire only goes where it must, closer than the second it rather not. */
+/**
+ * Clearances around a block's frame: closer than the first a wire only goes where it must, closer than the second it
+ * rather not.
+ */
 const TIGHT_CLEARANCE = 10;
 const NEAR_CLEARANCE = 30;
 
@@ -36,7 +42,10 @@ export interface SheetGrid {
   readonly ys: Float64Array;
   readonly columns: number;
   readonly surroundings: Uint8Array;
-  /** Number of the net, from 1, whose wire runs through the node horizontally (vertically), bends there or ends there; 0 for none. */
+  /**
+   * Number of the net, from 1, whose wire runs through the node horizontally (vertically), bends there or ends there; 0
+   * for none.
+   */
   readonly horizontalNet: Int32Array;
   readonly verticalNet: Int32Array;
 }

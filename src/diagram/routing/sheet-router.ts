@@ -1,5 +1,6 @@
 /**
- * What the wires of a sheet are routed on: one grid, with what stays as it is already in it, and the trees that the nets grow.
+ * What the wires of a sheet are routed on: one grid, with what stays as it is already in it, and the trees that the
+ * nets grow.
  */
 
 import { blockRectangle, type Rectangle, type SheetGeometry } from '../geometry/index.ts';
@@ -62,7 +63,10 @@ export function sheetRouter(
   return { patience, space: searcher(grid), trees: new Map(), kept: keptByNet, ends: netEnds(wires) };
 }
 
-/** Every port needs the line that leads out of it, every route the lines it runs on, every bend point of the user's both. */
+/**
+ * Every port needs the line that leads out of it, every route the lines it runs on, every bend point of the user's
+ * both.
+ */
 function linesNeeded(wires: readonly EndedWire[], open: ReadonlySet<number>, routes: readonly KeptRoute[]) {
   const xs: number[] = [];
   const ys: number[] = [];

@@ -17,7 +17,10 @@ export function reserveStub(grid: SheetGrid, end: PortEnd, net: number): void {
   if (last !== undefined) grid.surroundings[last]! |= STUB_END;
 }
 
-/** The nodes straight out of a port, to where a wire may turn; empty where the port's line is missing or leads off the grid. */
+/**
+ * The nodes straight out of a port, to where a wire may turn; empty where the port's line is missing or leads off the
+ * grid.
+ */
 export function stubNodes(grid: SheetGrid, end: PortEnd): readonly number[] {
   const [x, y] = outward(end.side);
   const isLevel = x !== 0;

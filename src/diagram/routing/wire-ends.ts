@@ -42,8 +42,8 @@ function portEnd(block: Block | undefined, place: PortPlace | undefined): PortEn
 const BEND = 40;
 
 /**
- * The order of routing: bend points that the user has set first, then straight wires, then from short to long, so that the long way
- * round goes outside. Equal ones in document order.
+ * The order of routing: bend points that the user has set first, then straight wires, then from short to long, so that
+ * the long way round goes outside. Equal ones in document order.
  */
 export function routingOrder(wires: readonly EndedWire[]): readonly EndedWire[] {
   const ranked = wires.map(wire => ({ wire, rank: rank(wire) }));
