@@ -26,10 +26,7 @@ export interface SolvedLoop {
 export interface Elimination<T> {
   /** The loops in the order of their first signal. */
   readonly loops: readonly SolvedLoop[];
-  /**
-   * Rows over the knowns: state derivatives, differentiated signals, outputs, in this order. Null where a loop is singular
-   * or, with `budget`, the work was given up.
-   */
+  /** Rows over the knowns: state derivatives, differentiated signals, outputs, in this order. Null where a loop is singular. */
   readonly reduced: RowStore<T> | null;
 }
 
@@ -40,7 +37,8 @@ export interface EliminationOptions {
 
 /**
  * Eliminates all signals that something needs; loops among the others are only looked at. Costs the terms of the rows
- * that come out, and for each loop what its elimination fills in; nothing is as large as signals × knowns.
+ * that come out, and for each loop what its elimination fills in. The largest buffer is that of one loop, its signals × the
+ * knowns that reach it.
  */
 export function eliminate<T>(
   equations: Equations<T>,
