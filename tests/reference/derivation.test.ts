@@ -6,7 +6,7 @@ import { createSymbolicField } from '../../src/algebra/symbolic/index.ts';
 import { compile, type Derivation, deriveSymbolic } from '../../src/compile/index.ts';
 import { evaluateIn, parseExpression } from '../../src/expression/index.ts';
 import { EXIT_STATUS } from '../../src/problem/index.ts';
-import { isWithin, readSituations, type Situation } from './read-cases.ts';
+import { isWithin, readSituations, type Situation, situationsWith } from './read-cases.ts';
 
 const MATRICES = ['A', 'B', 'C', 'D'] as const;
 
@@ -16,7 +16,6 @@ function derivationOf({ diagram }: Situation, field: 'rational' | 'double' = 'ra
   return result.value;
 }
 
-const asserts = (key: string) => readSituations().filter(({ expect: expected }) => expected[key] !== undefined);
 const derivable = readSituations().filter(({ expect: expected }) => expected.error === undefined);
 const names = (signals: readonly { readonly name: string }[]) => signals.map(({ name }) => name);
 
@@ -52,7 +51,7 @@ describe.each(derivable)('$name', situation => {
   });
 });
 
-test.each(asserts('exact'))('$name: the exact matrices are the fractions of the source', situation => {
+test.each(situationsWith('exact'))('$name: the exact matrices are the fractions of the source', situation => {
   const { model } = derivationOf(situation);
   const wanted = situation.expect.exact;
   if (wanted === null || wanted === undefined) {
@@ -66,7 +65,7 @@ test.each(asserts('exact'))('$name: the exact matrices are the fractions of the 
   }
 });
 
-test.each(asserts('symbolic'))('$name: the symbolic matrices are the formulas of the source', situation => {
+test.each(situationsWith('symbolic'))('$name: the symbolic matrices are the formulas of the source', situation => {
   const field = createSymbolicField();
   const wanted = situation.expect.symbolic;
   const derived = deriveSymbolic(situation.diagram);
@@ -86,20 +85,20 @@ test.each(asserts('symbolic'))('$name: the symbolic matrices are the formulas of
   }
 });
 
-test.each(asserts('irrationalParameters'))('$name: its irrational parameters are named', situation => {
+test.each(situationsWith('irrationalParameters'))('$name: its irrational parameters are named', situation => {
   const { model, warnings } = derivationOf(situation);
   const named = model.irrational.map(text => text.split(' = ')[0]);
   expect(named).toEqual(situation.expect.irrationalParameters);
   expect(warnings.filter(({ code }) => code === 'irrational-value')).toHaveLength(named.length);
 });
 
-test.each(asserts('warnings'))('$name: exactly the expected warnings are given', situation => {
+test.each(situationsWith('warnings'))('$name: exactly the expected warnings are given', situation => {
   const given = derivationOf(situation).warnings.map(({ code, blocks }) => ({ code, blocks }));
   expect(given).toHaveLength(situation.expect.warnings?.length ?? 0);
   expect(given).toEqual(expect.arrayContaining([...(situation.expect.warnings ?? [])]));
 });
 
-test.each(asserts('error'))(
+test.each(situationsWith('error'))(
   '$name: the drawing is refused in words that name its blocks',
   ({ diagram, expect: expected }) => {
     const error = expected.error;
