@@ -9,6 +9,7 @@ import type { Point, Sheet } from '../../diagram/index.ts';
 import { type Routes, rerouteMoved, routeWires } from '../../diagram/routing/index.ts';
 import { type State, useStore } from '../store/index.ts';
 import { heldRoutes } from './held-routes.ts';
+import { keptGeometry } from './kept-geometry.ts';
 import { setShownSheet } from './shown-sheet.ts';
 
 export interface PlacedSheet {
@@ -17,7 +18,8 @@ export interface PlacedSheet {
   readonly routes: Routes;
 }
 
-const diagram = (state: State) => state.document.diagram;
+const blocksOf = (state: State) => state.document.diagram.blocks;
+const wiresOf = (state: State) => state.document.diagram.wires;
 const held = (state: State) => state.held;
 
 /** Up to so many blocks in hand, on a sheet of so many, wires find their full way in every frame of a drag. */
@@ -25,20 +27,22 @@ const FEW_HELD = 3;
 const FEW_BLOCKS = 120;
 
 export function usePlacedSheet(): PlacedSheet {
-  const document = useStore(diagram);
+  // Not the document itself: a parameter's new value leaves every block and wire where it is.
+  const blocks = useStore(blocksOf);
+  const wires = useStore(wiresOf);
   const moved = useStore(held);
   const routed = useRef<PlacedSheet | null>(null);
   const placed = useMemo(() => {
-    const sheet = moved === null ? document : withHeld(document, moved);
-    const geometry = sheetGeometry(sheet);
+    const sheet = moved === null ? { blocks, wires } : withHeld({ blocks, wires }, moved);
     const former = routed.current;
+    const geometry = keptGeometry(former?.geometry, sheetGeometry(sheet));
     if (former === null) return { sheet, geometry, routes: routeWires(sheet, geometry) };
     const isMuch = moved !== null && (moved.size > FEW_HELD || sheet.blocks.length > FEW_BLOCKS);
     const routes = isMuch
       ? heldRoutes(former, { sheet, geometry }, moved)
       : rerouteMoved(former.routes, former.sheet, sheet, geometry);
     return { sheet, geometry, routes, isMuch };
-  }, [document, moved]);
+  }, [blocks, wires, moved]);
   useLayoutEffect(() => {
     if (!('isMuch' in placed && placed.isMuch)) routed.current = placed;
     setShownSheet(placed);
