@@ -1,4 +1,7 @@
-/** Exact numbers: rationals, polynomials, rational functions of parameters, matrices over a field, certified roots. */
+/**
+ * Exact numbers: rationals, polynomials, matrices over a field, certified roots. Rational functions of the parameters are in
+ * symbolic/, which has its own list.
+ */
 
 export { characteristicFactors, characteristicPolynomial } from './characteristic-polynomial.ts';
 export type { Field } from './field.ts';
@@ -42,33 +45,4 @@ export type { SparseMatrix } from './sparse-matrix.ts';
 export { entryAt, fromRows, toRows } from './sparse-matrix.ts';
 export type { SquareFreeFactor } from './square-free.ts';
 export { squareFreeFactors } from './square-free.ts';
-export type {
-  EffortLimit,
-  EffortLimits,
-  EffortOutcome,
-  Formula,
-  FormulaOptions,
-  NameSpelling,
-  RationalFunction,
-  SymbolicField,
-  SymbolicPolynomial,
-  SymbolicSolution,
-} from './symbolic/index.ts';
-export {
-  createSymbolicField,
-  DEFAULT_LIMITS,
-  Effort,
-  EffortSpent,
-  evaluateAt,
-  formulaC,
-  formulaLatex,
-  formulaMathML,
-  formulaOf,
-  formulaPython,
-  formulaText,
-  rationalFunction,
-  solveSymbolic,
-  substitute,
-  withinEffort,
-} from './symbolic/index.ts';
 export { transferNumerators } from './transfer-numerators.ts';

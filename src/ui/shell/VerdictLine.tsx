@@ -5,6 +5,7 @@ import type { Warning } from '../../problem/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
 import { selfCheckText, sizesText, stabilityText } from './verdict-texts.ts';
 
+const theme = (state: State) => state.view.theme;
 const results = (state: State) => state.results;
 
 export function VerdictLine() {
@@ -25,6 +26,7 @@ export function VerdictLine() {
           <CheckFigure derivation={derivation} />
         </>
       )}
+      <ThemeChoice />
       <button type="button" className="quiet verdict-caution" onClick={() => actions.openDialog('caution')}>
         linear model: verify on the machine before use
       </button>
@@ -70,4 +72,22 @@ function WarningCount({ warnings }: { readonly warnings: readonly Warning[] }) {
 function CheckFigure({ derivation }: { readonly derivation: Derivation }) {
   const { selfCheck } = derivation;
   return <span className={`verdict-check ${selfCheck.passed ? '' : 'verdict-wrong'}`}>{selfCheckText(selfCheck)}</span>;
+}
+
+const NEXT_THEME = { system: 'light', light: 'dark', dark: 'system' } as const;
+
+/** The sheet's own colours: as the system says, or always light or dark. */
+function ThemeChoice() {
+  const chosen = useStore(theme) ?? 'system';
+  const next = NEXT_THEME[chosen];
+  return (
+    <button
+      type="button"
+      className="quiet verdict-caution"
+      aria-label={`Colours: ${chosen}. Change to ${next}.`}
+      onClick={() => actions.setTheme(next === 'system' ? null : next)}
+    >
+      colours: {chosen}
+    </button>
+  );
 }
