@@ -25,7 +25,7 @@ export function routeWires(sheet: Sheet, geometry: SheetGeometry = sheetGeometry
 }
 
 /**
- * Routes again what an edit touches: wires at blocks that moved or changed, new wires, wires whose ports have turned,
+ * Routes again what an edit touches: wires at blocks that moved or changed, new wires, wires whose ports have turned or whose bend points were taken out,
  * and wires that a changed block now stands on. All other routes stay the same objects.
  *
  * @param previous  the routes of the sheet `before`.
@@ -41,10 +41,12 @@ export function rerouteMoved(
   const wires = endedWires(sheet, geometry);
   const obstacles = obstaclesOf(sheet, geometry, wires, changed);
   const formerRoutes = new Map(before.wires.map((wire, index) => [wireKey(wire), previous.wires[index]]));
+  const formerVia = new Map(before.wires.map(wire => [wireKey(wire), wire.via]));
   const kept = new Map<number, WireRoute>();
   for (const { index, from, to, wire, net } of wires) {
     const route = formerRoutes.get(wireKey(wire));
     if (route === undefined || changed.has(wire.from[0]) || changed.has(wire.to[0])) continue;
+    if (wire.via === undefined && formerVia.get(wireKey(wire)) !== undefined) continue;
     if (!joins(route.points, from, to) || (wire.via ?? []).some(point => !passes(route.points, point))) continue;
     const isInTheWay = (obstacle: Obstacle): boolean => obstacle.net !== net && touches(route.points, obstacle.area);
     if (!obstacles.some(isInTheWay)) kept.set(index, route);
