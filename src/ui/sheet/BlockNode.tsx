@@ -2,7 +2,7 @@
 
 import { memo } from 'react';
 import { Handle, type NodeProps } from 'reactflow';
-import { type BlockGeometry, blockDrawing, type PortPlace } from '../../diagram/geometry/index.ts';
+import { type BlockGeometry, blockDrawing, type PortPlace, type Side } from '../../diagram/geometry/index.ts';
 import { type State, useStore } from '../store/index.ts';
 import { formatValue } from '../title-block/format-value.ts';
 import { BlockFields } from './BlockFields.tsx';
@@ -24,6 +24,7 @@ export const BlockNode = memo(function BlockNode({ id, data, selected }: NodePro
     >
       <svg className="block-drawing" width={width} height={height} aria-hidden="true">
         <g transform={`translate(${width / 2} ${height / 2})`}>
+          {geometry.outline === 'terminal' && <circle className="block-reach" r={TERMINAL_REACH} />}
           {Array.from(blockDrawing(block, geometry, shownValue).entries(), ([place, shape]) => (
             <ShapeView key={place} shape={shape} />
           ))}
@@ -48,9 +49,24 @@ function OpenPort({ place }: { readonly place: PortPlace | undefined }) {
   );
 }
 
+const OUTWARD: Readonly<Record<Side, readonly [number, number]>> = {
+  left: [-1, 0],
+  right: [1, 0],
+  top: [0, -1],
+  bottom: [0, 1],
+};
+
+/** A terminal is smaller than a fingertip: it is taken hold of this far around, and its port is moved off it. */
+const TERMINAL_REACH = 14;
+const PORT_OFF = 9;
+
 const Ports = memo(function Ports({ geometry }: { readonly geometry: BlockGeometry }) {
   const { width, height } = geometry.box;
-  const at = (place: PortPlace) => ({ left: width / 2 + place.x, top: height / 2 + place.y });
+  const off = geometry.outline === 'terminal' ? PORT_OFF : 0;
+  const at = ({ x, y, side }: PortPlace) => {
+    const [dx, dy] = OUTWARD[side];
+    return { left: width / 2 + x + off * dx, top: height / 2 + y + off * dy };
+  };
   return (
     <>
       {Array.from(geometry.inputs.entries(), ([port, place]) => (

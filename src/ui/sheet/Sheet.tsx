@@ -24,7 +24,6 @@ import { WireEdge } from './WireEdge.tsx';
 
 const NODE_TYPES = { block: BlockNode };
 const EDGE_TYPES = { wire: WireEdge };
-const SNAP: [number, number] = [GRID, GRID];
 const CENTRE: [number, number] = [0.5, 0.5];
 
 /** Above this many blocks only those in view are kept in the page (dependencies: measured at some 300). */
@@ -60,8 +59,6 @@ export function Sheet() {
         nodeTypes={NODE_TYPES}
         edgeTypes={EDGE_TYPES}
         nodeOrigin={CENTRE}
-        snapToGrid
-        snapGrid={SNAP}
         minZoom={0.1}
         maxZoom={4}
         connectionMode={ConnectionMode.Strict}

@@ -1,6 +1,8 @@
 /** What React Flow reports of the hand, turned into selection, a live drag, and edits when it ends. */
 
 import type { EdgeChange, NodeChange, ReactFlowProps } from 'reactflow';
+import { snap } from '../../diagram/geometry/index.ts';
+import type { Point } from '../../diagram/index.ts';
 import { straightenWires } from '../commands/bend-chosen.ts';
 import { dropBlock } from '../commands/insert-in-wire.ts';
 import { actions, store } from '../store/index.ts';
@@ -62,18 +64,30 @@ function takeSelection(
   if (!isSame) actions.select({ ...before, [part]: chosen });
 }
 
+/** Everything in hand moves by the same squares: those that put the first of it on the grid. */
 function takeDrag(changes: readonly NodeChange<BlockFlowNode>[]): void {
-  const held = new Map(store.getState().held);
-  let isChanged = false;
+  const { held, document } = store.getState();
+  const places = new Map(document.diagram.blocks.map(({ id, at }) => [id, at]));
+  const moved = new Map(held);
+  let shift: Point | null = null;
   for (const change of changes) {
     if (change.type !== 'position' || change.dragging !== true || change.position === undefined) continue;
-    const { x, y } = change.position;
-    const former = held.get(change.id);
-    if (former !== undefined && former[0] === x && former[1] === y) continue;
-    held.set(change.id, [x, y]);
-    isChanged = true;
+    const start = places.get(change.id);
+    if (start === undefined) continue;
+    shift ??= squaresBetween(start, change.position);
+    moved.set(change.id, [start[0] + shift[0], start[1] + shift[1]]);
   }
-  if (isChanged) actions.hold(held);
+  if (shift !== null && !isSamePlaces(held, moved)) actions.hold(moved);
+}
+
+function squaresBetween([x, y]: Point, to: { readonly x: number; readonly y: number }): Point {
+  const [snappedX, snappedY] = snap([to.x, to.y]);
+  return [snappedX - x, snappedY - y];
+}
+
+function isSamePlaces(a: ReadonlyMap<string, Point> | null, b: ReadonlyMap<string, Point>): boolean {
+  if (a?.size !== b.size) return false;
+  return [...b].every(([id, [x, y]]) => a.get(id)?.[0] === x && a.get(id)?.[1] === y);
 }
 
 /**

@@ -13,7 +13,7 @@ import { placeOf } from './pointer.ts';
 const CLICK_SLACK = 5;
 
 /** A press this near a wire's arrowhead takes that end, sheet units. */
-const HEAD_REACH = 16;
+const HEAD_REACH = 28;
 
 /** Where a branch leaves its wire. */
 export interface BranchStart {
