@@ -103,7 +103,6 @@ test('a saved drawing is opened again by button and by dropping its file', async
   const path = await file.path();
   await page.keyboard.press('Escape');
 
-  await page.getByRole('button', { name: 'Drawings' }).click();
   await page.getByRole('button', { name: 'Empty sheet' }).click();
   await expect(blocks(page)).toHaveCount(0);
   await page.getByRole('button', { name: 'Drawings' }).click();
@@ -115,7 +114,6 @@ test('a saved drawing is opened again by button and by dropping its file', async
     ['1', '0'],
   ]);
 
-  await page.getByRole('button', { name: 'Drawings' }).click();
   await page.getByRole('button', { name: 'Empty sheet' }).click();
   await expect(blocks(page)).toHaveCount(0);
   await dropText(page, 'loop.poleward.json', await readFile(path, 'utf8'));

@@ -32,7 +32,6 @@ test('the drawing left for another is in the list and comes back', async ({ page
   await page.getByLabel('Title of the drawing').fill('Ballast pump');
   await page.keyboard.press('Enter');
   await writeBlocks(page, '1/s level');
-  await page.getByRole('button', { name: 'Drawings' }).click();
   await page.getByRole('button', { name: 'Empty sheet' }).click();
   await page.getByRole('button', { name: 'Drawings' }).click();
   await page.getByRole('button', { name: 'Open Ballast pump' }).click();

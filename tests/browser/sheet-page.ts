@@ -5,7 +5,6 @@ import { expect, type Locator, type Page } from 'playwright/test';
 /** Opens the page on an empty sheet. */
 export async function openEmptySheet(page: Page): Promise<void> {
   await page.goto('./');
-  await page.getByRole('button', { name: 'Drawings' }).click();
   await page.getByRole('button', { name: 'Empty sheet' }).click();
   await expect(blocks(page)).toHaveCount(0);
 }

@@ -2,6 +2,7 @@
 
 import { actions, type State, useStore } from '../store/index.ts';
 import { KeptMark } from './KeptMark.tsx';
+import { openEmptySheet } from './open-empty-sheet.ts';
 import { shareLink } from './share-link.ts';
 
 const title = (state: State) => state.document.diagram.title;
@@ -22,6 +23,9 @@ export function Heading() {
         </button>
         <button type="button" className="button" disabled={!canRedo} onClick={actions.redo}>
           Redo
+        </button>
+        <button type="button" className="button" onClick={openEmptySheet}>
+          Empty sheet
         </button>
         <button type="button" className="button" onClick={() => actions.openDialog('drawings')}>
           Drawings
