@@ -1,6 +1,6 @@
 /** A block's fields, opened where it stands: Enter keeps them as one edit, Escape leaves all as it was. */
 
-import { type FormEvent, type KeyboardEvent, useEffect, useRef, useState } from 'react';
+import { type FormEvent, type KeyboardEvent, useLayoutEffect, useRef, useState } from 'react';
 import type { Block } from '../../diagram/index.ts';
 import { actions } from '../store/index.ts';
 import { withNewParameters } from '../write-line/new-parameters.ts';
@@ -12,7 +12,7 @@ export function BlockFields({ block }: { readonly block: Block }) {
   const form = useRef<HTMLFormElement>(null);
   const [refusal, setRefusal] = useState<string | null>(null);
   const fields = fieldsOf(block);
-  useEffect(() => {
+  useLayoutEffect(() => {
     const first = form.current?.querySelector('input');
     first?.focus();
     first?.select();

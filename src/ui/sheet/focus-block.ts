@@ -1,7 +1,11 @@
-/** Keyboard focus on a block's element, after the next picture has put it there. */
+/** Where the keyboard's focus is on the sheet, and taking it to a block or to the sheet itself. */
 
+import { isTextField } from '../shell/usePageKeys.ts';
+
+/** Keyboard focus on a block's element, after the next picture has put it there; a field opened meanwhile keeps it. */
 export function focusBlock(id: string): void {
   requestAnimationFrame(() => {
+    if (isTextField(document.activeElement)) return;
     const node = document.querySelector(`.react-flow__node[data-id="${CSS.escape(id)}"]`);
     if (node instanceof HTMLElement) node.focus({ preventScroll: true });
   });
