@@ -118,6 +118,8 @@ export interface Parameter {
   /** A plus-or-minus amount: `"10 %"` or an absolute expression. */
   readonly tolerance?: string;
   readonly note?: string;
+  /** Ends of the slider, as arithmetic without parameters; a range around the value where absent. */
+  readonly range?: readonly [low: Quantity, high: Quantity];
 }
 
 export interface Diagram extends Sheet {

@@ -26,7 +26,7 @@ const BLOCK_KEYS = [
   'note',
 ] as const;
 const WIRE_KEYS = ['from', 'to', 'name', 'via'] as const;
-const PARAMETER_KEYS = ['name', 'value', 'unit', 'tolerance', 'note'] as const;
+const PARAMETER_KEYS = ['name', 'value', 'unit', 'tolerance', 'note', 'range'] as const;
 const HEAD_KEYS = ['format', 'version', 'title', 'revision', 'date', 'author', 'notes'] as const;
 
 /** The diagram file: one block, wire and parameter a line, a line feed at the end. Reading it gives the document back. */

@@ -1,12 +1,15 @@
 /** The first answer: the model itself, since the matrices are what is waited for. */
 
-import { compile } from '../compile/index.ts';
+import { type CompileOptions, compile } from '../compile/index.ts';
 import type { ModelAnswer, Question } from './protocol.ts';
 import { quantityValues } from './quantity-values.ts';
 
 /** Derives the drawing of the question; runs without a worker too. */
-export function modelAnswer({ revision, diagram }: Extract<Question, { kind: 'derive' }>): ModelAnswer {
+export function modelAnswer(
+  { revision, diagram }: Extract<Question, { kind: 'derive' }>,
+  field: CompileOptions['field'] & string = 'auto',
+): ModelAnswer {
   const start = performance.now();
-  const outcome = compile(diagram);
+  const outcome = compile(diagram, { field });
   return { kind: 'model', revision, outcome, values: quantityValues(diagram), elapsed: performance.now() - start };
 }

@@ -18,7 +18,14 @@ export interface Channel {
 export type Notation = 'fractions' | 'decimals';
 
 export type Question =
-  | { readonly kind: 'derive'; readonly revision: number; readonly diagram: Diagram; readonly channel: Channel }
+  | {
+      readonly kind: 'derive';
+      readonly revision: number;
+      readonly diagram: Diagram;
+      readonly channel: Channel;
+      /** A value of it is still moving. */
+      readonly isLive: boolean;
+    }
   | { readonly kind: 'channel'; readonly revision: number; readonly channel: Channel }
   | {
       readonly kind: 'file';

@@ -1,13 +1,18 @@
 /**
  * The worker: one switch over pure functions. The newest derivation is answered first and in stages, a turn of the event loop
  * each, so that a newer question is seen in between and the rest of the older one is dropped. Analyses and files are loaded
- * when they are first needed, after the first matrices.
+ * when they are first needed, after the first matrices. While a value moves, a drawing that takes long is derived in doubles.
  */
 
 import type { StateSpace } from '../compile/index.ts';
 import { modelAnswer } from './model-answer.ts';
 import type { Answer, Channel, Question } from './protocol.ts';
 
+/** Milliseconds beyond which an exact derivation is too slow to follow a moving value: half a frame. */
+const LIVE_LIMIT = 8;
+
+/** Milliseconds that the last exact derivation took. */
+let exactElapsed = 0;
 /** The newest question for a derivation, and its model once it is derived. */
 let newest: Extract<Question, { kind: 'derive' }> | null = null;
 /** The channel chosen since that question. */
@@ -32,7 +37,9 @@ self.onmessage = ({ data }: MessageEvent<Question>) => {
 async function derive(question: Extract<Question, { kind: 'derive' }>): Promise<void> {
   await turn();
   if (newest !== question) return;
-  const answer = modelAnswer(question);
+  const field = question.isLive && exactElapsed > LIVE_LIMIT ? 'double' : 'auto';
+  const answer = modelAnswer(question, field);
+  if (field === 'auto') exactElapsed = answer.elapsed;
   latest = answer.outcome.ok ? { revision: question.revision, model: answer.outcome.value.model } : null;
   send(answer);
   if (latest === null) return;

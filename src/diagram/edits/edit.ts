@@ -148,6 +148,8 @@ export interface SetParameter {
   readonly unit?: string;
   readonly tolerance?: string;
   readonly note?: string;
+  /** Null lets the slider take its range from the value. */
+  readonly range?: readonly [low: Quantity, high: Quantity] | null;
 }
 /** Names in their new order; those not listed follow in the old one. */
 export interface ReorderParameters {

@@ -47,13 +47,13 @@ const OPTIONAL = ['unit', 'tolerance', 'note'] as const;
 
 /** Without optional texts that are blank. */
 function withoutBlanks(parameter: Parameter): Parameter {
-  const { name, value } = parameter;
+  const { name, value, range } = parameter;
   const kept: { -readonly [K in (typeof OPTIONAL)[number]]?: string } = {};
   for (const key of OPTIONAL) {
     const text = parameter[key]?.trim() ?? '';
     if (text !== '') kept[key] = text;
   }
-  return { name, value: value.trim(), ...kept };
+  return { name, value: value.trim(), ...kept, ...(range === undefined ? {} : { range }) };
 }
 
 /** Removes a parameter from the table. */
@@ -96,9 +96,14 @@ function renamedBlock(block: Block, rename: (text: string) => string): Block {
 export function setParameter(diagram: Diagram, edit: SetParameter): Result<Diagram> {
   const former = diagram.parameters.find(({ name }) => name === edit.name);
   if (former === undefined) return fail(goneParameter(edit.name));
-  const { kind: _, ...given } = edit;
-  const changed = withoutBlanks({ ...former, ...given });
-  const isSame = former.value === changed.value && OPTIONAL.every(key => former[key] === changed[key]);
+  const { kind: _, range = former.range, ...given } = edit;
+  const { range: __, ...texts } = former;
+  const changed = withoutBlanks({ ...texts, ...given, ...(range ? { range } : {}) });
+  const isSame =
+    former.value === changed.value &&
+    OPTIONAL.every(key => former[key] === changed[key]) &&
+    former.range?.[0] === changed.range?.[0] &&
+    former.range?.[1] === changed.range?.[1];
   if (isSame) return ok(diagram);
   const parameters = diagram.parameters.map(parameter => (parameter === former ? changed : parameter));
   return ok({ ...diagram, parameters });

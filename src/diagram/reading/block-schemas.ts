@@ -125,4 +125,5 @@ export const parameterSchema = v.object({
   unit,
   tolerance: v.exactOptional(v.union([textSchema, quantitySchema], 'an amount, such as "10 %" or "0.2"')),
   note: v.exactOptional(textSchema),
+  range: v.exactOptional(v.strictTuple([quantitySchema, quantitySchema], 'two quantities: ["0", "10"]')),
 });

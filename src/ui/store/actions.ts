@@ -8,6 +8,7 @@ import type { Diagram, Edit, Point } from '../../diagram/index.ts';
 import type { Problem } from '../../problem/index.ts';
 import type { Answer, Notation } from '../../worker/index.ts';
 import { type DocumentSlice, edited, opened, redone, undone } from './document.ts';
+import { moved } from './live.ts';
 import { answered } from './results.ts';
 import { NOTHING_SELECTED, type SelectionSlice, stillThere } from './selection.ts';
 import { store } from './store.ts';
@@ -15,6 +16,7 @@ import type { ViewSlice } from './view.ts';
 
 /** Makes one edit, one undo step. Returns the problems where it is refused, none where it is done. */
 export function edit(change: Edit, said?: string): readonly Problem[] {
+  settleParameter();
   const outcome = edited(store.getState().document, change);
   if (!outcome.ok) {
     notify(outcome.problems[0]?.message ?? 'That edit is not possible.', 'refused');
@@ -27,6 +29,7 @@ export function edit(change: Edit, said?: string): readonly Problem[] {
 
 /** Makes several edits as one undo step, or none of them. */
 export function editTogether(changes: readonly Edit[], said?: string): readonly Problem[] {
+  settleParameter();
   const start = store.getState().document;
   let slice = start;
   for (const change of changes) {
@@ -53,7 +56,32 @@ export function asOneStep(work: () => void): void {
   store.setState({ document: { ...document, past: [...start.past, start.diagram] } });
 }
 
+/** Shows a parameter at another value while the hand moves it; no undo step. */
+export function moveParameter(name: string, value: string): void {
+  if (store.getState().live?.name !== name) settleParameter();
+  store.setState(({ document, live }) => ({ live: moved(document, live, name, value) }));
+}
+
+/** Makes the value that a moved parameter has come to one edit, one undo step. */
+export function settleParameter(): void {
+  const { live, document } = store.getState();
+  if (live === null) return;
+  const outcome = edited(document, { kind: 'setParameter', name: live.name, value: live.value });
+  const slice = outcome.ok ? outcome.slice : document;
+  store.setState({ live: null, document: { ...slice, revision: document.revision + 1 } });
+  if (!outcome.ok) notify(outcome.problems[0]?.message ?? 'That value is not possible.', 'refused');
+  else if (slice !== document) notify(`${live.name} = ${live.value}.`);
+}
+
+/** Brings a moved parameter back to where it was. */
+export function returnParameter(): void {
+  const { live, document } = store.getState();
+  if (live === null) return;
+  store.setState({ live: null, document: { ...document, revision: document.revision + 1 } });
+}
+
 export function undo(): void {
+  settleParameter();
   const { document } = store.getState();
   if (document.past.length === 0) return notify('Nothing to undo.');
   replaceDocument(undone(document));
@@ -61,6 +89,7 @@ export function undo(): void {
 }
 
 export function redo(): void {
+  settleParameter();
   const { document } = store.getState();
   if (document.future.length === 0) return notify('Nothing to redo.');
   replaceDocument(redone(document));
@@ -69,6 +98,7 @@ export function redo(): void {
 
 /** Puts another drawing on the sheet, with places for blocks that have none; what was open stays kept under its own key. */
 export function openDrawing(diagram: Diagram, key: string, said: string): void {
+  settleParameter();
   store.setState(state => ({
     document: opened(state.document, placeUnplaced(diagram), key),
     selection: NOTHING_SELECTED,

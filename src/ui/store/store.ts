@@ -7,6 +7,7 @@ import { useStore as useZustand } from 'zustand';
 import { createStore } from 'zustand/vanilla';
 import { type Point, startingDrawing } from '../../diagram/index.ts';
 import type { DocumentSlice } from './document.ts';
+import type { LiveSlice } from './live.ts';
 import { NO_RESULTS, type ResultsSlice } from './results.ts';
 import { NOTHING_SELECTED, type SelectionSlice } from './selection.ts';
 import { FIRST_VIEW, type ViewSlice } from './view.ts';
@@ -16,6 +17,8 @@ export interface State {
   readonly selection: SelectionSlice;
   /** Where the hand has the blocks it is dragging; null when it drags none. Becomes one edit when the drag ends. */
   readonly held: ReadonlyMap<string, Point> | null;
+  /** The parameter that the hand is moving; null when it moves none. Becomes one edit when the hand lets go. */
+  readonly live: LiveSlice | null;
   readonly view: ViewSlice;
   readonly results: ResultsSlice;
 }
@@ -24,6 +27,7 @@ export const store = createStore<State>()(() => ({
   document: { diagram: startingDrawing(), key: 'first', revision: 0, past: [], future: [] },
   selection: NOTHING_SELECTED,
   held: null,
+  live: null,
   view: FIRST_VIEW,
   results: NO_RESULTS,
 }));

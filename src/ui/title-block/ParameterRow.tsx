@@ -1,40 +1,58 @@
-/** One parameter: its name (renamed wherever it is used), value or expression of others, unit and note. */
+/** One parameter: its name (renamed wherever it is used), value or expression of others, unit, slider and note. */
 
-import { MathName } from '../figures/index.ts';
+import { formatUnit, MathName, RaisedText } from '../figures/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
 import { formatValue } from './format-value.ts';
+import { ParameterSlider } from './ParameterSlider.tsx';
+import { parameterUse } from './parameter-use.ts';
+import { plainNumber } from './slider-range.ts';
 import { TextField } from './TextField.tsx';
 
 export function ParameterRow({ name }: { readonly name: string }) {
   const parameter = useStore((state: State) => state.document.diagram.parameters.find(p => p.name === name));
+  const moving = useStore((state: State) => (state.live?.name === name ? state.live.value : null));
   const value = useStore((state: State) => state.results.values.parameters[name]);
+  const isUnused = useStore((state: State) => parameterUse(state.document.diagram).unused.has(name));
+  const fault = useStore((state: State) => state.results.problems.find(({ parameter: at }) => at === name)?.message);
   if (parameter === undefined) return null;
+  const { unit = '', note = '', range } = parameter;
+  const written = moving ?? parameter.value;
+  const number = plainNumber(written);
   const set = (field: 'value' | 'unit' | 'note') => (text: string) =>
     actions.edit({ kind: 'setParameter', name, [field]: text });
   return (
     <tr>
-      <th scope="row" className="title-block-named">
+      <th scope="row">
         <TextField
           label={`Name of parameter ${name}`}
           text={name}
           className="title-block-field title-block-name"
+          shown={<MathName name={name} />}
           onCommit={to => actions.edit({ kind: 'renameParameter', from: name, to }, `${name} is now ${to} everywhere.`)}
         />
-        <span className="title-block-shown" aria-hidden="true">
-          <MathName name={name} />
-        </span>
+        {isUnused && <span className="title-block-aside">unused</span>}
       </th>
-      <td className="title-block-value">
-        <TextField label={`Value of ${name}`} text={parameter.value} onCommit={set('value')} />
-        <ComputedValue written={parameter.value} value={value} />
+      <td>
+        <TextField label={`Value of ${name}`} text={written} fault={fault} onCommit={set('value')} />
+        <ComputedValue written={written} value={value} />
       </td>
       <td>
-        <TextField label={`Unit of ${name}`} text={parameter.unit ?? ''} onCommit={set('unit')} />
+        <TextField
+          label={`Unit of ${name}`}
+          text={unit}
+          shown={<RaisedText text={formatUnit(unit)} />}
+          onCommit={set('unit')}
+        />
+      </td>
+      <td>
+        {number !== null && (
+          <ParameterSlider name={name} value={number} unit={unit} range={range} isMoving={moving !== null} />
+        )}
       </td>
       <td>
         <TextField
           label={`Note on ${name}`}
-          text={parameter.note ?? ''}
+          text={note}
           className="title-block-field title-block-note"
           onCommit={set('note')}
         />
@@ -42,7 +60,7 @@ export function ParameterRow({ name }: { readonly name: string }) {
       <td>
         <button
           type="button"
-          className="quiet"
+          className="quiet title-block-remove"
           aria-label={`Remove parameter ${name}`}
           onClick={() => actions.edit({ kind: 'removeParameter', name }, `Parameter ${name} removed.`)}
         >
@@ -55,6 +73,6 @@ export function ParameterRow({ name }: { readonly name: string }) {
 
 /** What an expression comes to, where it is not a plain number. */
 function ComputedValue({ written, value }: { readonly written: string; readonly value: number | undefined }) {
-  if (value === undefined || Number(written) === value) return null;
-  return <span className="title-block-computed">= {formatValue(value)}</span>;
+  if (value === undefined || plainNumber(written) !== null) return null;
+  return <span className="title-block-aside">= {formatValue(value)}</span>;
 }

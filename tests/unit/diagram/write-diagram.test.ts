@@ -69,7 +69,7 @@ describe('a written diagram', () => {
       date: 'd',
       author: 'a',
       notes: 'n',
-      parameters: [{ name: 'k', value: '1', unit: 'u', tolerance: 't', note: 'n' }],
+      parameters: [{ name: 'k', value: '1', unit: 'u', tolerance: 't', note: 'n', range: ['0', '5'] }],
       blocks: [
         { id: 'u', kind: 'input', name: 'n', unit: 'N', at: [0, 0], mirrored: true, note: 'n' },
         { id: 'a', kind: 'summer', signs: '+-' },

@@ -140,3 +140,13 @@ describe('the title block', () => {
     expect(changesNothing(DRAWING, { kind: 'setTitleFields', title: 'small', author: '' })).toBe(true);
   });
 });
+
+describe('the range of a slider', () => {
+  test('is set, kept by other edits and taken away by null', () => {
+    const after = edited(DRAWING, { kind: 'setParameter', name: 'm', range: ['0', '1/2'] });
+    expect(after.parameters[1]).toEqual({ ...DRAWING.parameters[1], range: ['0', '1/2'] });
+    expect(changesNothing(after, { kind: 'setParameter', name: 'm', range: ['0', '1/2'] })).toBe(true);
+    expect(edited(after, { kind: 'setParameter', name: 'm', value: '3' }).parameters[1]?.range).toEqual(['0', '1/2']);
+    expect(edited(after, { kind: 'setParameter', name: 'm', range: null })).toEqual(DRAWING);
+  });
+});

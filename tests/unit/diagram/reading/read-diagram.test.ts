@@ -28,7 +28,7 @@ describe('a file is read', () => {
       { id: 'S', kind: 'group', sheet: { blocks: [{ id: 'u', kind: 'input' }], wires: [] } },
     ];
     const wires = [{ from: ['u', 0], to: ['S', 0], name: 'f', via: [[1, 2]] }];
-    const parameters = [{ name: 'k', value: '1', unit: 'm', tolerance: '10 %', note: 'n' }];
+    const parameters = [{ name: 'k', value: '1', unit: 'm', tolerance: '10 %', note: 'n', range: ['0', '5'] }];
     const head = { title: 't', notes: 'n', revision: '2', date: 'd', author: 'a' };
     expect(valueOf(readDiagram(file({ ...head, parameters, blocks, wires })))).toEqual({
       format: 'poleward-diagram',
