@@ -45,6 +45,6 @@ function EndGrip({ ends, end, at }: EndGripProps) {
 
 function outside(port: Point = [0, 0], next: Point = port): Point {
   const length = Math.abs(next[0] - port[0]) + Math.abs(next[1] - port[1]);
-  const reach = length === 0 ? 0 : Math.min(OUTSIDE, length / 3) / length;
+  const reach = length === 0 ? 0 : Math.min(OUTSIDE, 0.7 * length) / length;
   return [port[0] + (next[0] - port[0]) * reach, port[1] + (next[1] - port[1]) * reach];
 }
