@@ -46,7 +46,7 @@ async function dragFrom(page: Page, start: { x: number; y: number }, end: { x: n
   await page.mouse.up();
 }
 
-/** How many undo steps lead back to the state before. */
+/** Takes the last step back. */
 async function undoOnce(page: Page): Promise<void> {
   await page.getByRole('button', { name: 'Undo' }).click();
 }
