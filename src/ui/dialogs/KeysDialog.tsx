@@ -8,8 +8,19 @@ const KEYS: readonly { readonly group: string; readonly keys: readonly (readonly
     keys: [
       ['U  Y', 'an input, an output'],
       ['G  A  I', 'a gain, a summing point, an integrator'],
-      ['F', 'a transfer function'],
-      ['0–9  (  +  -  Shift+letter', 'write a block: opens the line with that character'],
+      ['F  D  C', 'a transfer function, a dead time, a limiter'],
+      ['0–9  (  +  -  @  Shift+letter', 'write a block: opens the line with that character'],
+      ['Tab  ↓  in the line', 'complete the name of a parameter, or of a block after @'],
+      ['K = 3.5  @sum-  in the line', 'a gain with its value; a wire to the block sum with minus'],
+    ],
+  },
+  {
+    group: 'On a slider',
+    keys: [
+      ['← →  with Shift', 'move the value finely, coarsely'],
+      ['Home  End', 'to the ends of its range'],
+      ['Enter  double click', 'change its range'],
+      ['Escape', 'bring the value back'],
     ],
   },
   {

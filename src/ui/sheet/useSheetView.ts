@@ -24,6 +24,7 @@ export function useSheetView(): void {
     setSheetView({
       start: () => at(0.12, 0.35),
       centre: () => at(0.5, 0.5),
+      onScreen: ([x, y]) => flow.flowToScreenPosition({ x, y }),
       reveal: ([x, y]) => {
         const box = visibleBox();
         const place = flow.flowToScreenPosition({ x, y });

@@ -4,7 +4,15 @@
  */
 
 import { GRID, type Rectangle, sheetGeometry, snap } from '../../diagram/geometry/index.ts';
-import { type Block, type Edit, freshId, type Point, portCounts, type Sheet } from '../../diagram/index.ts';
+import {
+  type Block,
+  type Edit,
+  freshId,
+  type Parameter,
+  type Point,
+  portCounts,
+  type Sheet,
+} from '../../diagram/index.ts';
 import type { WrittenBlock } from '../../diagram/write-a-block/index.ts';
 import { shownTitle } from '../sheet/block-sentence.ts';
 import { actions, store } from '../store/index.ts';
@@ -24,7 +32,12 @@ export function placePart(part: string, at: Point | null): void {
 }
 
 /** Returns the new block's id, null where the edit was refused. */
-export function placeBlock(written: WrittenBlock, names: readonly string[], at: Point | null): string | null {
+export function placeBlock(
+  written: WrittenBlock,
+  names: readonly string[],
+  at: Point | null,
+  defines?: Parameter,
+): string | null {
   const { document, selection, view } = store.getState();
   const sheet = document.diagram;
   const begun = at === null ? view.writingAt : null;
@@ -35,19 +48,33 @@ export function placeBlock(written: WrittenBlock, names: readonly string[], at: 
   const wanted = at ?? begun?.at ?? (source?.at === undefined ? openPlace(sheet) : besides(source));
   const block: Block = { ...written, id, at: freePlace(sheet, { ...written, id }, snap(wanted)) };
   const unknown = unknownParameters(names);
-  const edits: Edit[] = unknown.map(newParameter);
+  const fresh = unknown.filter(name => name !== defines?.name);
+  const edits: Edit[] = fresh.map(newParameter);
+  if (defines !== undefined) edits.push(definition(defines, unknown.includes(defines.name)));
   edits.push({ kind: 'addBlock', block });
   const isChained = source !== null && portCounts(block).inputs > 0;
   if (isChained) edits.push({ kind: 'connect', from: [source.id, begun?.from?.[1] ?? 0], to: [id, 0] });
   const said = [`Placed ${shownTitle(block)}`];
   if (isChained) said.push(`wired from ${shownTitle(source)}`);
-  if (unknown.length > 0)
-    said.push(`${unknown.join(', ')} added as ${unknown.length === 1 ? 'a parameter' : 'parameters'} with value 1`);
+  if (defines !== undefined) said.push(`${defines.name} = ${defines.value}`);
+  if (fresh.length > 0)
+    said.push(`${fresh.join(', ')} added as ${fresh.length === 1 ? 'a parameter' : 'parameters'} with value 1`);
   if (actions.editTogether(edits, `${said.join(', ')}.`).length > 0) return null;
   actions.beginWritingAt(null);
   actions.selectBlocks([id]);
   sheetView().reveal(block.at ?? wanted);
   return id;
+}
+
+/** The block that the next written one is wired from; null where there is none. */
+export function chainedFrom(): Block | null {
+  const { document, selection, view } = store.getState();
+  const [chosen] = selection.blocks.size === 1 ? selection.blocks : [];
+  return leadingBlock(document.diagram, view.writingAt === null ? chosen : view.writingAt.from?.[0]);
+}
+
+function definition({ name, value }: Parameter, isNew: boolean): Edit {
+  return isNew ? { kind: 'addParameter', parameter: { name, value } } : { kind: 'setParameter', name, value };
 }
 
 function openPlace({ blocks }: Sheet): Point {
@@ -79,6 +106,12 @@ function stemOf(written: WrittenBlock): string {
       return 'sum';
     case 'transfer-function':
       return 'G';
+    case 'delay':
+      return 'delay';
+    case 'differentiator':
+      return 'slope';
+    case 'limiter':
+      return 'limit';
     default:
       return unreachable(written);
   }

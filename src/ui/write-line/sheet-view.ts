@@ -7,11 +7,18 @@ export interface SheetView {
   readonly start: () => Point;
   /** The middle of what is seen. */
   readonly centre: () => Point;
+  /** Where a point of the sheet is in the window, pixels. */
+  readonly onScreen: (point: Point) => { readonly x: number; readonly y: number };
   /** Pans as far as is needed to see the point. */
   readonly reveal: (point: Point) => void;
 }
 
-let current: SheetView = { start: () => [0, 0], centre: () => [0, 0], reveal: () => undefined };
+let current: SheetView = {
+  start: () => [0, 0],
+  centre: () => [0, 0],
+  onScreen: ([x, y]) => ({ x, y }),
+  reveal: () => undefined,
+};
 
 export function sheetView(): SheetView {
   return current;

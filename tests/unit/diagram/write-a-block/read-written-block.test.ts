@@ -28,7 +28,15 @@ describe('what is written on paper becomes a block', () => {
     ['[s+2]/[s+5]', { kind: 'transfer-function', numerator: 's + 2', denominator: 's + 5' }],
     ['1/(s+2)*K', { kind: 'transfer-function', numerator: '1*K', denominator: 's + 2' }],
     ['K/s', { kind: 'transfer-function', numerator: 'K', denominator: 's' }],
-    ['s', { kind: 'transfer-function', numerator: 's', denominator: '1' }],
+    ['s', { kind: 'differentiator' }],
+    ['2*s', { kind: 'transfer-function', numerator: '2*s', denominator: '1' }],
+    ['e^(-T*s)', { kind: 'delay', time: 'T' }],
+    ['e^( -0.5 * s )', { kind: 'delay', time: '0.5' }],
+    ['exp(-s*T_d)', { kind: 'delay', time: 'T_d' }],
+    ['e^(-s)', { kind: 'delay', time: '1' }],
+    ['-1 .. 1', { kind: 'limiter', lower: '-1', upper: '1' }],
+    ['-u_max..u_max', { kind: 'limiter', lower: '-u_max', upper: 'u_max' }],
+    ['K_x = 3.5', { kind: 'gain', gain: 'K_x' }],
     ['1/s^2', { kind: 'transfer-function', numerator: '1', denominator: 's^2' }],
     ['(s+1)^-2', { kind: 'transfer-function', numerator: '1', denominator: '(s + 1)^2' }],
     ['K_p + K_i/s', { kind: 'transfer-function', numerator: 'K_p*s + K_i', denominator: 's' }],
@@ -42,7 +50,21 @@ describe('what is written on paper becomes a block', () => {
   });
 });
 
+test('a gain written with its value defines its parameter', () => {
+  const read = readWrittenBlock('K_x = 2*a');
+  expect(read.ok && read.value).toEqual({
+    block: { kind: 'gain', gain: 'K_x' },
+    names: ['K_x', 'a'],
+    defines: { name: 'K_x', value: '2*a' },
+  });
+});
+
 describe('what is no block is refused with what to write', () => {
+  test('a value or a dead time with s in it, a constant that is given a value', () => {
+    expect(refusalOf('K = s + 1')).toBe('"s + 1" holds s. Write a quantity without it.');
+    expect(refusalOf('e^(-T*s*s)')).toBe('"T*s" holds s. Write a quantity without it.');
+    expect(refusalOf('pi = 3')).toBe('pi is a constant. Choose another name.');
+  });
   test('nothing', () => {
     expect(refusalOf('  ')).toBe('Write a block: 3.5, K_p, 1/s, +-, (s+2)/(s+5), r> or >y.');
   });
