@@ -71,7 +71,7 @@ export function WriteField() {
         aria-expanded={names.length > 0}
         aria-controls={LIST_ID}
         {...(names[active] === undefined ? {} : { 'aria-activedescendant': `${LIST_ID}-${active}` })}
-        placeholder="write a block: 3.5 · K_p = 0.5 · 1/s · +- · e^(-T*s) · r> · >y · @sum-"
+        placeholder="write a block: K = 3.5 · 1/s · +- · r> · >y · @sum-"
         value={text}
         maxLength={10_000}
         spellCheck={false}
