@@ -20,10 +20,11 @@ export function usePageKeys(): void {
   }, []);
 }
 
-/** Whether keys typed at the target belong to it. */
+/** Whether keys typed at the target belong to it; a slider has no text to undo. */
 export function isTextField(target: EventTarget | null): boolean {
   return (
     target instanceof HTMLElement &&
+    !(target instanceof HTMLInputElement && target.type === 'range') &&
     (target.isContentEditable || ['INPUT', 'TEXTAREA', 'SELECT'].includes(target.tagName))
   );
 }
