@@ -1,13 +1,17 @@
 /** Arranges the selected blocks, or the whole drawing where none is selected: one undo step, gliding to the new places. */
 
-import { arrangeBlocks, type Place } from '../../diagram/arranging/index.ts';
+import type { Place } from '../../diagram/arranging/index.ts';
 import type { Edit, Sheet } from '../../diagram/index.ts';
 import { glide } from '../sheet/glide.ts';
 import { actions, store } from '../store/index.ts';
 import { countedBlocks } from './chosen-blocks.ts';
 
-/** Whether the whole drawing was arranged, so that it may have to be fitted to the sheet again. */
-export function arrangeChosen(): boolean {
+/**
+ * Whether the whole drawing was arranged, so that it may have to be fitted to the sheet again. What arranges is loaded when
+ * it is first asked for.
+ */
+export async function arrangeChosen(): Promise<boolean> {
+  const { arrangeBlocks } = await import('../../diagram/arranging/index.ts');
   const { selection, document } = store.getState();
   const sheet = document.diagram;
   if (sheet.blocks.length === 0) {

@@ -1,6 +1,5 @@
 /** Copy, cut, paste and duplicate. What is pasted gets fresh ids and names and is selected, one undo step each. */
 
-import { placeUnplaced } from '../../diagram/arranging/index.ts';
 import {
   blockRectangle,
   GRID,
@@ -41,12 +40,13 @@ export function cutChosen(): string | null {
  *
  * @param at  where their middle goes, sheet units; where they were where null; aside of other blocks.
  */
-export function pasteText(text: string, at: Point | null): boolean {
+export async function pasteText(text: string, at: Point | null): Promise<boolean> {
   const read = readClipboard(text);
   if (!read.ok) {
     actions.notify(read.problems[0]?.message ?? 'That cannot be pasted.', 'refused');
     return false;
   }
+  const { placeUnplaced } = await import('../../diagram/arranging/index.ts');
   const pasted = placeUnplaced(read.value);
   const { missing, kept } = broughtParameters(store.getState().document.diagram.parameters, pasted.parameters);
   const said = [`Pasted ${countedBlocks(pasted.blocks.length)}.`];

@@ -2,13 +2,18 @@
 
 import './sheet.css';
 import './sheet-tools.css';
+import { lazy, Suspense } from 'react';
 import { ReactFlowProvider } from 'reactflow';
-import { TitleBlock } from '../title-block/TitleBlock.tsx';
 import { WriteLine } from '../write-line/WriteLine.tsx';
 import { BlockCard } from './BlockCard.tsx';
 import { FindField } from './FindField.tsx';
 import { Sheet } from './Sheet.tsx';
 import { SheetToolbar } from './SheetToolbar.tsx';
+
+/** After the drawing and its matrices: what is read first need not wait for what is edited later. */
+const TitleBlock = lazy(() =>
+  import('../title-block/TitleBlock.tsx').then(({ TitleBlock }) => ({ default: TitleBlock })),
+);
 
 export function SheetArea() {
   return (
@@ -18,7 +23,9 @@ export function SheetArea() {
         <FindField />
         <Sheet />
         <BlockCard />
-        <TitleBlock />
+        <Suspense fallback={null}>
+          <TitleBlock />
+        </Suspense>
         <WriteLine />
       </section>
     </ReactFlowProvider>

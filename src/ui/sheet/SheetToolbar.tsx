@@ -14,7 +14,7 @@ export function SheetToolbar() {
   const still = () => window.matchMedia('(prefers-reduced-motion: reduce)').matches;
   const glide = () => (still() ? {} : { duration: MILLISECONDS });
   const arrange = () => {
-    if (arrangeChosen()) fitDrawing(true);
+    void arrangeChosen().then(isWhole => isWhole && fitDrawing(true));
     focusSheet();
   };
   return (

@@ -16,7 +16,7 @@ export function commandKey({ key }: KeyboardEvent, fitDrawing: () => void): bool
     case 'h':
       return pullOutChosen();
     case 'l':
-      if (arrangeChosen()) fitDrawing();
+      void arrangeChosen().then(isWhole => isWhole && fitDrawing());
       return true;
     case 'n':
       return chooseNextWire(chosenBlock());

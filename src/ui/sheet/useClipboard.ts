@@ -19,7 +19,7 @@ export function useClipboard(): void {
     const onCut = (event: ClipboardEvent) => take(event, cutChosen);
     const onPaste = (event: ClipboardEvent) => {
       if (!isForSheet(event)) return;
-      pasteText(event.clipboardData?.getData('text/plain') ?? '', pointerPlace());
+      void pasteText(event.clipboardData?.getData('text/plain') ?? '', pointerPlace());
       event.preventDefault();
     };
     document.addEventListener('copy', onCopy);

@@ -3,11 +3,10 @@
  * why in the notice.
  */
 
-import { placeUnplaced } from '../../diagram/arranging/index.ts';
-import type { Diagram, Edit, Point } from '../../diagram/index.ts';
+import type { Diagram, Edit, Point, Sheet } from '../../diagram/index.ts';
 import type { Problem } from '../../problem/index.ts';
 import type { Answer, Notation } from '../../worker/index.ts';
-import { type DocumentSlice, edited, opened, redone, undone } from './document.ts';
+import { type DocumentSlice, advanced, edited, opened, redone, undone } from './document.ts';
 import { moved } from './live.ts';
 import { answered } from './results.ts';
 import { NOTHING_SELECTED, type SelectionSlice, stillThere } from './selection.ts';
@@ -98,12 +97,40 @@ export function redo(): void {
 
 /** Puts another drawing on the sheet, with places for blocks that have none; what was open stays kept under its own key. */
 export function openDrawing(diagram: Diagram, key: string, said: string): void {
+  if (hasUnplaced(diagram)) return void placed(diagram).then(complete => openDrawing(complete, key, said));
   settleParameter();
   store.setState(state => ({
-    document: opened(state.document, placeUnplaced(diagram), key),
+    document: opened(state.document, diagram, key),
     selection: NOTHING_SELECTED,
     view: { ...state.view, editing: null, writingAt: null, finding: false, input: null, output: null, kept: null },
   }));
+  notify(said);
+}
+
+/** Whether a block, of a group's sheet too, has no place yet. */
+function hasUnplaced({ blocks }: Sheet): boolean {
+  return blocks.some(block => block.at === undefined || (block.kind === 'group' && hasUnplaced(block.sheet)));
+}
+
+/** The drawing with a place for each block; what finds the places is loaded when a drawing first needs it. */
+async function placed(diagram: Diagram): Promise<Diagram> {
+  const { placeUnplaced } = await import('../../diagram/arranging/index.ts');
+  return placeUnplaced(diagram);
+}
+
+/** Goes on with what is on the sheet as another drawing, under a key of its own and a title that says why. */
+export function goOnAsCopy(key: string, said: string): void {
+  store.setState(({ document }) => {
+    const title = `${document.diagram.title || 'untitled'} (from another tab)`;
+    return { document: { ...document, key, diagram: { ...document.diagram, title }, revision: document.revision + 1 } };
+  });
+  notify(said, 'refused');
+}
+
+/** Makes a former version the newest document, one undo step. */
+export function returnTo(diagram: Diagram, said: string): void {
+  settleParameter();
+  replaceDocument(advanced(store.getState().document, placeUnplaced(diagram)));
   notify(said);
 }
 
@@ -154,6 +181,11 @@ export function chooseChannel(input: string, output: string): void {
 
 export function foldTitleBlock(folded: boolean): void {
   changeView({ folded });
+}
+
+/** The title block has come onto the sheet. */
+export function showTitleBlock(): void {
+  changeView({ hasTitleBlock: true });
 }
 
 export function openDialog(dialog: ViewSlice['dialog']): void {

@@ -21,6 +21,8 @@ export interface ViewSlice {
   /** A title block folded to its heading. */
   readonly folded: boolean;
   readonly dialog: 'export' | 'drawings' | 'keys' | 'caution' | null;
+  /** Whether the title block, which is loaded after the drawing, stands on the sheet. */
+  readonly hasTitleBlock: boolean;
   /** The last thing that was done or refused, for the eye and the screen reader. */
   readonly notice: Notice | null;
   /** When the drawing was last kept on the device, or why it could not be. */
@@ -45,6 +47,7 @@ export const FIRST_VIEW: ViewSlice = {
   finding: false,
   folded: false,
   dialog: null,
+  hasTitleBlock: false,
   notice: null,
   kept: null,
 };

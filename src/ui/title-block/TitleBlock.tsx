@@ -4,8 +4,8 @@
  */
 
 import './title-block.css';
-import { useRef } from 'react';
-import { type State, useStore } from '../store/index.ts';
+import { useEffect, useRef } from 'react';
+import { actions, type State, useStore } from '../store/index.ts';
 import { ParameterTable } from './ParameterTable.tsx';
 import { TitleFields, TitleNotes } from './TitleFields.tsx';
 import { useTitleBlockPlace } from './useTitleBlockPlace.ts';
@@ -15,6 +15,7 @@ const title = (state: State) => state.document.diagram.title;
 export function TitleBlock() {
   const section = useRef<HTMLElement>(null);
   const { corner, isFolded, fold } = useTitleBlockPlace(section);
+  useEffect(actions.showTitleBlock, []);
   return (
     <section ref={section} className={`title-block title-block-${corner}`} aria-label="Title block">
       <div className="title-block-row">
