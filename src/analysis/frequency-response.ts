@@ -41,18 +41,29 @@ export function frequencyResponse(
     re: new Float64Array(omega.length),
     im: new Float64Array(omega.length),
   };
-  const exact = exactModel(model, effort);
-  const factors = exact === null ? null : zeroPoleGain(exact, output, input);
-  const valueAt = factors === null ? byHessenberg(model, output, input) : byFactors(factors);
+  const { valueAt, route } = channelResponse(model, { input, output }, effort);
   result.omega.forEach((w, k) => {
     const value = valueAt(w);
     result.re[k] = value?.[0] ?? Number.NaN;
     result.im[k] = value?.[1] ?? Number.NaN;
   });
-  return { ...result, route: factors === null ? 'floating' : 'certified' };
+  return { ...result, route };
 }
 
-type Response = (omega: number) => readonly [number, number] | null;
+/** Real and imaginary part at an angular frequency in rad/s; null at a pole on the imaginary axis. */
+export type Response = (omega: number) => readonly [re: number, im: number] | null;
+
+/** G(jω) of a channel, by positions, as a function, and the route it takes. */
+export function channelResponse(
+  model: StateSpace,
+  { input, output }: { readonly input: number; readonly output: number },
+  effort: Effort = 'ordinary',
+): { readonly valueAt: Response; readonly route: FrequencyResponse['route'] } {
+  const exact = exactModel(model, effort);
+  const factors = exact === null ? null : zeroPoleGain(exact, output, input);
+  if (factors === null) return { valueAt: byHessenberg(model, output, input), route: 'floating' };
+  return { valueAt: byFactors(factors), route: 'certified' };
+}
 
 /** The certified factors of the reduced transfer function; null where they could not be separated. */
 function zeroPoleGain(exact: ExactModel, output: number, input: number): ZeroPoleGain | null {

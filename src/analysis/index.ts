@@ -4,12 +4,19 @@
  * answers, at free-response.ts for those in time.
  */
 
+export type { GainCrossover, PhaseCrossover } from './crossovers.ts';
 export type { Effort } from './exact-model.ts';
 export type { Excitation } from './excitation.ts';
+export type { ChannelFrequency, FrequencyCurve } from './frequency-curve.ts';
+export { channelFrequency, frequencyCurve, orderAtZero } from './frequency-curve.ts';
 export type { FrequencyResponse } from './frequency-response.ts';
 export { frequencyResponse } from './frequency-response.ts';
 export { hiddenModeWarnings } from './hidden-mode-warnings.ts';
 export type { Horizon, HorizonReason } from './horizon.ts';
+export type { LoopTransfer } from './loop-transfer.ts';
+export { loopTransfer } from './loop-transfer.ts';
+export type { DiskMargin, Margins, Peak } from './margins.ts';
+export { margins } from './margins.ts';
 export { dampingRatio, naturalFrequency, timeConstant } from './pole-figures.ts';
 export type { PoleSet, Root } from './poles.ts';
 export { poles } from './poles.ts';

@@ -33,13 +33,22 @@ export interface BlockBehaviour {
 const NO_STATES: StateReading = { x: [], derivative: [], size: [] };
 
 /** The behaviour of a law that may have states; null where s is a pole of the block. */
-export function behaviour(law: Rational | Matrices, setting: Setting): BlockBehaviour | null {
+export function behaviour(law: Rational | Matrices | DeadTimeLaw, setting: Setting): BlockBehaviour | null {
+  if (law.kind === 'dead-time') return setting === 'held' ? null : deadTimeAt(law, setting);
   if (law.kind === 'rational') return setting === 'held' ? rationalHeld(law) : rationalAt(law, setting);
   return setting === 'held' ? matricesHeld(law) : matricesAt(law, setting);
 }
 
+type DeadTimeLaw = Extract<RawLaw, { kind: 'dead-time' }>;
 type Rational = Extract<RawLaw, { kind: 'rational' }>;
 type Matrices = Extract<RawLaw, { kind: 'matrices' }>;
+
+/** y = e^(−sT) u; what is under way in a dead time is no finite state, so it starts empty. */
+function deadTimeAt({ seconds }: DeadTimeLaw, s: Complex): BlockBehaviour {
+  const size = Math.exp(-s.re * seconds);
+  const gain = { re: size * Math.cos(s.im * seconds), im: -size * Math.sin(s.im * seconds) };
+  return { gains: [[gain]], fromStates: () => [ZERO], readStates: () => NO_STATES };
+}
 
 /** Row of C and D of the controller companion form, for a proper law: c_i = b_i − b_n a_i, d = b_n. */
 function outputRow({ numerator, denominator }: Rational) {

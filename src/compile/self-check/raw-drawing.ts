@@ -5,7 +5,7 @@
 
 import type { Block, Diagram, GroupBlock, Sheet } from '../../diagram/index.ts';
 import type { Scope } from '../../expression/index.ts';
-import { isImproper, type RawLaw, rawLaw, stateCount } from './raw-laws.ts';
+import { type DeadTime, isImproper, type RawLaw, rawLaw, stateCount } from './raw-laws.ts';
 
 /** A block that is neither a group nor a model's input or output. */
 export interface RawBlock {
@@ -41,14 +41,15 @@ type WireEnd = { readonly node: Node } | { readonly inputs: readonly Node[]; rea
 
 interface Reading {
   readonly scope: Scope;
+  readonly deadTimes: DeadTime;
   readonly blocks: RawBlock[];
   unknowns: number;
   states: number;
 }
 
 /** Reads a drawing that compile found no fault with. Linear in blocks and wires. */
-export function rawDrawing(diagram: Diagram, scope: Scope): RawDrawing {
-  const reading: Reading = { scope, blocks: [], unknowns: 0, states: 0 };
+export function rawDrawing(diagram: Diagram, scope: Scope, deadTimes: DeadTime = 'approximated'): RawDrawing {
+  const reading: Reading = { scope, deadTimes, blocks: [], unknowns: 0, states: 0 };
   const ends = readSheet(diagram, reading, true);
   const { unknowns, blocks, states } = reading;
   return {
@@ -101,7 +102,7 @@ function readBlock(block: Exclude<Block, GroupBlock>, reading: Reading, isTop: b
     reading.unknowns += 1;
     return { fedBy: [], firstUnknown };
   }
-  const law = rawLaw(block, reading.scope);
+  const law = rawLaw(block, reading.scope, reading.deadTimes);
   const { inputs, outputs } = lawPorts(law);
   const node = { law, fedBy: new Array<number>(inputs).fill(-1), firstUnknown, firstState: reading.states };
   reading.blocks.push(node);
@@ -113,6 +114,7 @@ function readBlock(block: Exclude<Block, GroupBlock>, reading: Reading, isTop: b
 function lawPorts(law: RawLaw): { readonly inputs: number; readonly outputs: number } {
   switch (law.kind) {
     case 'rational':
+    case 'dead-time':
       return { inputs: 1, outputs: 1 };
     case 'static':
       return { inputs: law.gains[0]?.length ?? 0, outputs: law.gains.length };

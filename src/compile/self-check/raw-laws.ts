@@ -13,6 +13,7 @@ import type { Jitter } from './random.ts';
  */
 export type RawLaw =
   | { readonly kind: 'static'; readonly gains: readonly (readonly number[])[] }
+  | { readonly kind: 'dead-time'; readonly seconds: number }
   | { readonly kind: 'rational'; readonly numerator: readonly number[]; readonly denominator: readonly number[] }
   | {
       readonly kind: 'matrices';
@@ -24,8 +25,11 @@ export type RawLaw =
 
 const UNITY: RawLaw = { kind: 'static', gains: [[1]] };
 
+/** How a delay is read: as the approximant that the model holds, or as the dead time itself. */
+export type DeadTime = 'approximated' | 'true';
+
 /** The law of a block whose fields compile has already read without a problem. */
-export function rawLaw(block: Block, scope: Scope): RawLaw {
+export function rawLaw(block: Block, scope: Scope, deadTimes: DeadTime): RawLaw {
   switch (block.kind) {
     case 'gain':
       return { kind: 'static', gains: [[numberOf(block.gain, scope)]] };
@@ -38,7 +42,8 @@ export function rawLaw(block: Block, scope: Scope): RawLaw {
     case 'transfer-function':
       return quotient(block, scope);
     case 'delay':
-      return deadTime(block, scope);
+      if (deadTimes === 'true') return { kind: 'dead-time', seconds: numberOf(block.time, scope) };
+      return approximant(block, scope);
     case 'state-model':
       return ownMatrices(block, scope);
     case 'limiter':
@@ -53,7 +58,7 @@ export function rawLaw(block: Block, scope: Scope): RawLaw {
 
 /** How many states a law has. */
 export function stateCount(law: RawLaw): number {
-  if (law.kind === 'static') return 0;
+  if (law.kind === 'static' || law.kind === 'dead-time') return 0;
   return law.kind === 'rational' ? law.denominator.length - 1 : law.A.length;
 }
 
@@ -92,7 +97,7 @@ function coefficients(text: Quantity, scope: Scope): number[] {
  * The diagonal Padé approximant of exp(−sT) as θ_N(−x) / θ_N(x), x = sT/2, by the reverse Bessel polynomials
  * θ_k = (2k − 1) θ_{k−1} + x² θ_{k−2}, θ_0 = 1, θ_1 = x + 1 (Grosswald 1978, Bessel Polynomials, chapter 2).
  */
-function deadTime({ time, order = 2 }: DelayBlock, scope: Scope): RawLaw {
+function approximant({ time, order = 2 }: DelayBlock, scope: Scope): RawLaw {
   const half = numberOf(time, scope) / 2;
   if (half === 0) return UNITY;
   let before = [1];
@@ -123,6 +128,8 @@ export function jittered(law: RawLaw, jitter: Jitter): RawLaw {
   switch (law.kind) {
     case 'static':
       return { kind: 'static', gains: law.gains.map(row) };
+    case 'dead-time':
+      return law;
     case 'rational':
       return {
         kind: 'rational',
