@@ -19,7 +19,7 @@ export { portCounts } from './port-counts.ts';
 export { type QuantityField, quantityFields } from './quantities.ts';
 export { readDiagram } from './reading/index.ts';
 export { isSameModel } from './same-model.ts';
-export { startingDrawing } from './starting-drawings/index.ts';
+export { startingDrawing, type WorkedDrawing, workedDrawings } from './starting-drawings/index.ts';
 export { blockTitle, blockTitleAtStart, displayName } from './titles.ts';
 export type {
   Block,
