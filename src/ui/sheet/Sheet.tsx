@@ -12,11 +12,9 @@ import { BranchDots } from './BranchDots.tsx';
 import { DrawnWire } from './DrawnWire.tsx';
 import { DropTarget } from './DropTarget.tsx';
 import { SHEET_EVENTS } from './sheet-events.ts';
-import { useClipboard } from './useClipboard.ts';
 import { useDropPart } from './useDropPart.ts';
 import { useFitOnOpening } from './useFitOnOpening.ts';
 import { usePlacedSheet } from './usePlacedSheet.ts';
-import { useSheetKeys } from './useSheetKeys.ts';
 import { useSheetNodes } from './useSheetNodes.ts';
 import { useSheetView } from './useSheetView.ts';
 import { useSheetWires } from './useSheetWires.ts';
@@ -40,8 +38,6 @@ export function Sheet() {
   const edges = useSheetWires(placed);
   const drop = useDropPart();
   const far = useStore(isFar) ? ' sheet-far' : '';
-  useSheetKeys();
-  useClipboard();
   useFitOnOpening();
   useSheetView();
   return (

@@ -1,0 +1,22 @@
+/**
+ * What works on the drawing once it stands: the toolbar, keys and clipboard, the find field and the card of the block that is
+ * pointed at. Loaded right after the drawing, with the commands behind them.
+ */
+
+import { BlockCard } from './BlockCard.tsx';
+import { FindField } from './FindField.tsx';
+import { SheetToolbar } from './SheetToolbar.tsx';
+import { useClipboard } from './useClipboard.ts';
+import { useSheetKeys } from './useSheetKeys.ts';
+
+export function SheetAids() {
+  useSheetKeys();
+  useClipboard();
+  return (
+    <>
+      <SheetToolbar />
+      <FindField />
+      <BlockCard />
+    </>
+  );
+}
