@@ -4,13 +4,15 @@
  */
 
 import { writeDiagram } from '../../diagram/index.ts';
-import { keepDrawing } from '../../storage/index.ts';
+import { keepDrawing, keepVersion, readKept } from '../../storage/index.ts';
 import { actions, type State, store } from '../store/index.ts';
+import { newKey } from './new-key.ts';
 
 const DELAY_MILLISECONDS = 400;
 
 export function keepOnChange(): void {
   let timer: ReturnType<typeof setTimeout> | null = null;
+  let isAsked = false;
   let waiting: State['document'] | null = null;
   let writing: Promise<void> = Promise.resolve();
 
@@ -24,6 +26,10 @@ export function keepOnChange(): void {
 
   store.subscribe((now, before) => {
     if (now.document === before.document) return;
+    if (now.document.key === before.document.key && !isAsked) {
+      isAsked = true;
+      void askToPersist();
+    }
     if (waiting !== null && waiting.key !== now.document.key) write();
     waiting = now.document;
     timer ??= setTimeout(write, DELAY_MILLISECONDS);
@@ -32,15 +38,69 @@ export function keepOnChange(): void {
   window.document.addEventListener('visibilitychange', () => {
     if (window.document.visibilityState === 'hidden') write();
   });
+  keepVersionAtExport();
   waiting = store.getState().document;
   write();
 }
 
+/** What this tab read or wrote last under each key; null where there was nothing. */
+const known = new Map<string, string | null>();
+
 async function keep({ key, diagram }: State['document']): Promise<void> {
+  const text = writeDiagram(diagram);
+  if (!known.has(key)) {
+    const there = await readKept(key);
+    if (there.ok) known.set(key, there.value);
+    if (there.ok && there.value !== null) await keepVersionNow(key, diagram.blocks.length, text);
+  }
   const now = new Date();
   const line = { key, title: diagram.title, changed: now.toISOString(), blocks: diagram.blocks.length };
-  const answer = await keepDrawing(line, writeDiagram(diagram));
+  const answer = await keepDrawing(line, text, known.get(key) ?? null);
+  if (answer.ok && answer.value === 'changed elsewhere') return keepAsCopy(key);
+  if (answer.ok) {
+    known.set(key, text);
+    if (Date.now() - (versioned.get(key) ?? 0) > VERSION_MILLISECONDS) {
+      await keepVersionNow(key, diagram.blocks.length, text);
+    }
+  }
   if (store.getState().document.key !== key) return;
   const clock = now.toLocaleTimeString('en-GB', { hour: '2-digit', minute: '2-digit' });
   actions.setKept(answer.ok ? { at: clock } : { refused: answer.message });
+}
+
+/** Another tab has written the record: what is on this sheet goes on under a key of its own. */
+function keepAsCopy(key: string): void {
+  if (store.getState().document.key !== key) return;
+  actions.goOnAsCopy(
+    newKey(),
+    'Another tab has changed this drawing. Yours goes on as a copy of its own; both are under Drawings.',
+  );
+}
+
+/** How much time of change lies between two versions. */
+const VERSION_MILLISECONDS = 10 * 60 * 1000;
+const versioned = new Map<string, number>();
+
+async function keepVersionNow(key: string, blocks: number, text: string): Promise<void> {
+  versioned.set(key, Date.now());
+  const answer = await keepVersion(key, { at: new Date().toISOString(), blocks, text });
+  if (!answer.ok) actions.notify(`No version was kept. ${answer.message}`, 'refused');
+}
+
+/** Keeps a version of what is handed over. */
+function keepVersionAtExport(): void {
+  store.subscribe((now, before) => {
+    if (now.view.dialog !== 'export' || before.view.dialog === 'export') return;
+    const { key, diagram } = now.document;
+    void keepVersionNow(key, diagram.blocks.length, writeDiagram(diagram));
+  });
+}
+
+/** Asks once, with the first change, that the browser does not clear what is kept; a refusal changes nothing. */
+async function askToPersist(): Promise<void> {
+  try {
+    await navigator.storage?.persist?.();
+  } catch {
+    // Some browsers throw where they refuse; drawings are kept all the same.
+  }
 }
