@@ -3,7 +3,8 @@
  * damaged record costs one drawing, not all. Every failure of the store (full, refused, private window) is an answer.
  */
 
-import { createStore, del, get, getMany, set, update } from 'idb-keyval';
+import { createStore, delMany, get, getMany, set, update } from 'idb-keyval';
+import { type KeptVersion, thinned } from './thinned.ts';
 
 /** A line of the list. `changed` is ISO 8601, UTC. */
 export interface KeptDrawing {
@@ -13,6 +14,11 @@ export interface KeptDrawing {
   readonly blocks: number;
 }
 
+/** A line of the bin. `removed` is ISO 8601, UTC. */
+export interface BinnedDrawing extends KeptDrawing {
+  readonly removed: string;
+}
+
 /** What the store said: the value, or one sentence for the screen. */
 export type StorageAnswer<T> =
   | { readonly ok: true; readonly value: T }
@@ -20,22 +26,49 @@ export type StorageAnswer<T> =
 
 const LIST_KEY = 'list';
 const LAST_KEY = 'last';
+const BIN_KEY = 'bin';
 const DRAWING_PREFIX = 'drawing:';
+const VERSIONS_PREFIX = 'versions:';
+const MOST_VERSIONS = 50;
+const BIN_MILLISECONDS = 30 * 24 * 3600 * 1000;
 
 const store = () => createStore('poleward', 'drawings');
 
-/** Writes the drawing's text and its line in the list; the newest first when listed. */
-export function keepDrawing(line: KeptDrawing, text: string): Promise<StorageAnswer<void>> {
+/**
+ * Writes the drawing's text and its line in the list; the newest first when listed. Writes nothing, and says so, where the record is
+ * neither `expected` nor `text`: another tab has written it since. The comparison and the writing are one transaction.
+ *
+ * @param expected  what this tab read or wrote last; null where it knows of no record.
+ */
+export function keepDrawing(
+  line: KeptDrawing,
+  text: string,
+  expected: string | null,
+): Promise<StorageAnswer<'kept' | 'changed elsewhere'>> {
   return answering(async () => {
     const kept = store();
-    await set(DRAWING_PREFIX + line.key, text, kept);
-    await update<readonly KeptDrawing[]>(
-      LIST_KEY,
-      list => [line, ...(list ?? []).filter(({ key }) => key !== line.key)],
+    let isOurs = true;
+    await update<string>(
+      DRAWING_PREFIX + line.key,
+      there => {
+        isOurs = there === undefined || there === expected || there === text;
+        return isOurs || there === undefined ? text : there;
+      },
       kept,
     );
+    if (!isOurs) return 'changed elsewhere';
+    await putLine(line, kept);
     await set(LAST_KEY, line.key, kept);
+    return 'kept';
   });
+}
+
+function putLine(line: KeptDrawing, kept: ReturnType<typeof store>): Promise<void> {
+  return update<readonly KeptDrawing[]>(
+    LIST_KEY,
+    list => [line, ...(list ?? []).filter(({ key }) => key !== line.key)],
+    kept,
+  );
 }
 
 /** All lines, the one changed last first. */
@@ -64,13 +97,67 @@ export function setLastOpened(key: string): Promise<StorageAnswer<void>> {
   return answering(() => set(LAST_KEY, key, store()));
 }
 
-/** Takes a drawing and its line away. */
-export function removeKept(key: string): Promise<StorageAnswer<void>> {
+/** Puts a drawing into the bin, and takes what has lain there for more than 30 days away for good. */
+export function removeKept(line: KeptDrawing): Promise<StorageAnswer<void>> {
   return answering(async () => {
     const kept = store();
-    await update<readonly KeptDrawing[]>(LIST_KEY, list => (list ?? []).filter(line => line.key !== key), kept);
-    await del(DRAWING_PREFIX + key, kept);
+    const now = new Date().toISOString();
+    await update<readonly BinnedDrawing[]>(
+      BIN_KEY,
+      bin => [{ ...line, removed: now }, ...(bin ?? []).filter(({ key }) => key !== line.key)],
+      kept,
+    );
+    await update<readonly KeptDrawing[]>(LIST_KEY, list => (list ?? []).filter(({ key }) => key !== line.key), kept);
+    await emptyOldBin(kept);
   });
+}
+
+/** What lies in the bin, the one removed last first. */
+export function binnedDrawings(): Promise<StorageAnswer<readonly BinnedDrawing[]>> {
+  return answering(async () => (await get<readonly BinnedDrawing[]>(BIN_KEY, store())) ?? []);
+}
+
+/** Puts a drawing of the bin back into the list. */
+export function bringBack({ removed: _, ...line }: BinnedDrawing): Promise<StorageAnswer<void>> {
+  return answering(async () => {
+    const kept = store();
+    await putLine(line, kept);
+    await update<readonly BinnedDrawing[]>(BIN_KEY, bin => (bin ?? []).filter(({ key }) => key !== line.key), kept);
+  });
+}
+
+async function emptyOldBin(kept: ReturnType<typeof store>): Promise<void> {
+  const bin = (await get<readonly BinnedDrawing[]>(BIN_KEY, kept)) ?? [];
+  const listed = new Set(((await get<readonly KeptDrawing[]>(LIST_KEY, kept)) ?? []).map(({ key }) => key));
+  const oldest = Date.now() - BIN_MILLISECONDS;
+  const isOld = ({ removed }: BinnedDrawing) => Date.parse(removed) < oldest;
+  for (const { key } of bin.filter(line => isOld(line) && !listed.has(line.key))) {
+    await delMany([DRAWING_PREFIX + key, VERSIONS_PREFIX + key], kept);
+  }
+  await set(
+    BIN_KEY,
+    bin.filter(line => !isOld(line)),
+    kept,
+  );
+}
+
+/** Keeps a version of a drawing, unless the newest one reads the same. */
+export function keepVersion(key: string, version: KeptVersion): Promise<StorageAnswer<void>> {
+  return answering(() =>
+    update<readonly KeptVersion[]>(
+      VERSIONS_PREFIX + key,
+      list => {
+        const versions = list ?? [];
+        return versions.at(-1)?.text === version.text ? versions : thinned([...versions, version], MOST_VERSIONS);
+      },
+      store(),
+    ),
+  );
+}
+
+/** The versions of a drawing, the oldest first. */
+export function versionsOf(key: string): Promise<StorageAnswer<readonly KeptVersion[]>> {
+  return answering(async () => (await get<readonly KeptVersion[]>(VERSIONS_PREFIX + key, store())) ?? []);
 }
 
 async function answering<T>(request: () => Promise<T>): Promise<StorageAnswer<T>> {

@@ -6,7 +6,7 @@
 import type { Diagram, Edit, Point, Sheet } from '../../diagram/index.ts';
 import type { Problem } from '../../problem/index.ts';
 import type { Answer, Notation } from '../../worker/index.ts';
-import { type DocumentSlice, advanced, edited, opened, redone, undone } from './document.ts';
+import { advanced, type DocumentSlice, edited, opened, redone, undone } from './document.ts';
 import { moved } from './live.ts';
 import { answered } from './results.ts';
 import { NOTHING_SELECTED, type SelectionSlice, stillThere } from './selection.ts';
@@ -130,7 +130,7 @@ export function goOnAsCopy(key: string, said: string): void {
 /** Makes a former version the newest document, one undo step. */
 export function returnTo(diagram: Diagram, said: string): void {
   settleParameter();
-  replaceDocument(advanced(store.getState().document, placeUnplaced(diagram)));
+  replaceDocument(advanced(store.getState().document, diagram));
   notify(said);
 }
 
