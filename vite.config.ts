@@ -3,6 +3,8 @@
  * dist and the second into dist/cli. The same sources give the same bytes and names.
  */
 
+import { createHash } from 'node:crypto';
+import { readdirSync, readFileSync } from 'node:fs';
 import { resolve } from 'node:path';
 import react from '@vitejs/plugin-react';
 import type { Plugin } from 'vite';
@@ -72,6 +74,31 @@ function sharedWorker(): Plugin {
   };
 }
 
+/**
+ * Makes the page work without a network after the first visit: a service worker (W3C, Service Workers) that holds every file of the build.
+ * Its text is src/ui/offline/service-worker.js with the list of files and their fingerprint in front, so that it changes with them.
+ */
+function offline(): Plugin {
+  return {
+    name: 'offline',
+    apply: 'build',
+    enforce: 'post',
+    generateBundle(_, bundle) {
+      const shared = readdirSync('public').filter(name => name !== 'screenshot.png');
+      const files = [...Object.keys(bundle).filter(name => name !== 'index.html'), ...shared].sort();
+      const hash = createHash('sha256');
+      for (const part of Object.values(bundle)) hash.update(part.type === 'asset' ? part.source : part.code);
+      for (const name of shared) hash.update(readFileSync(resolve('public', name)));
+      const source = [
+        `const VERSION = '${hash.digest('hex').slice(0, 16)}';`,
+        `const FILES = ${JSON.stringify(['./', ...files.map(name => `./${name}`)])};`,
+        readFileSync('src/ui/offline/service-worker.js', 'utf8'),
+      ].join('\n');
+      this.emitFile({ type: 'asset', fileName: 'service-worker.js', source });
+    },
+  };
+}
+
 const page = {
   target: 'es2022',
   /** A font or an image inlined as a data address would be refused by the policy. */
@@ -90,7 +117,7 @@ const commandLine = {
 
 export default defineConfig(({ mode }) => ({
   base: './',
-  plugins: [react(), securityPolicy(), sharedWorker(), noColourTransitions()],
+  plugins: [react(), securityPolicy(), sharedWorker(), noColourTransitions(), ...(mode === 'cli' ? [] : [offline()])],
   build: mode === 'cli' ? commandLine : page,
   ...(mode === 'cli' ? { ssr: { noExternal: true as const } } : {}),
   worker: { format: 'es' as const },

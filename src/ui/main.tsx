@@ -11,6 +11,7 @@ import './theme/tokens.css';
 import './theme/controls.css';
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
+import { registerOffline } from './offline/new-version.ts';
 import { App } from './shell/App.tsx';
 import { begin } from './shell/begin.ts';
 
@@ -23,3 +24,4 @@ begin().then(() =>
     </StrictMode>,
   ),
 );
+registerOffline();

@@ -3,6 +3,7 @@
 import './shell.css';
 import { lazy, Suspense } from 'react';
 import { DialogHost } from '../dialogs/DialogHost.tsx';
+import { NewVersionLine } from '../offline/NewVersionLine.tsx';
 import { SheetArea } from '../sheet/SheetArea.tsx';
 import { Heading } from './Heading.tsx';
 import { NoticeLine } from './NoticeLine.tsx';
@@ -30,6 +31,7 @@ export function App() {
         </Suspense>
       </main>
       <VerdictLine />
+      <NewVersionLine />
       <NoticeLine />
       <DialogHost />
     </div>
