@@ -25,6 +25,8 @@ export interface LoopTransfer {
   readonly deadTimes: readonly number[];
   /** Poles and zeros that bend L and the closed loop: the drawing's with dead time approximated. */
   readonly features: readonly Root[];
+  /** Poles of L, those that it cancels among them where it is not exact. */
+  readonly openPoles: readonly Root[];
   /** Stability of the closed drawing's state-space model. */
   readonly closedLoop: Stability['verdict'];
 }
@@ -46,7 +48,9 @@ export function loopTransfer(diagram: Diagram, to: PortReference): Result<LoopTr
   const back = exact === null ? null : reducedFraction(exact, 0, 0);
   const fraction =
     back === null ? null : { numerator: back.numerator.map(negateRational), denominator: back.denominator };
+  const openPoles = (fraction === null ? null : rootsOf(fraction.denominator)) ?? poles(model).poles;
   const common = {
+    openPoles,
     deadTimes: direct.value.deadTimes,
     features: [...poles(closed.value.model).poles, ...featuresOf(fraction), ...poles(model).poles],
     closedLoop: stability(closed.value.model).verdict,

@@ -122,6 +122,13 @@ export interface Parameter {
   readonly range?: readonly [low: Quantity, high: Quantity];
 }
 
+/** Where a loop is opened to measure its margins: the wire of the top sheet that ends at an input port. */
+export interface Cut {
+  readonly to: PortReference;
+  /** `cut 1`, by its place in the list, where absent. */
+  readonly name?: string;
+}
+
 export interface Diagram extends Sheet {
   readonly format: 'poleward-diagram';
   readonly version: 1;
@@ -132,4 +139,6 @@ export interface Diagram extends Sheet {
   readonly date?: string;
   readonly author?: string;
   readonly parameters: readonly Parameter[];
+  /** Absent where there is none. */
+  readonly cuts?: readonly Cut[];
 }

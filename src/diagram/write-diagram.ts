@@ -1,6 +1,6 @@
 /** Documents to text: the fields in one order, so that the same document gives the same bytes and a change one line. */
 
-import type { Block, Diagram, Parameter, Sheet, Wire } from './types.ts';
+import type { Block, Cut, Diagram, Parameter, Sheet, Wire } from './types.ts';
 
 /** Keys of a block in the order they are written; a group's sheet comes last. */
 const BLOCK_KEYS = [
@@ -26,6 +26,7 @@ const BLOCK_KEYS = [
   'note',
 ] as const;
 const WIRE_KEYS = ['from', 'to', 'name', 'via'] as const;
+const CUT_KEYS = ['to', 'name'] as const;
 const PARAMETER_KEYS = ['name', 'value', 'unit', 'tolerance', 'note', 'range'] as const;
 const HEAD_KEYS = ['format', 'version', 'title', 'revision', 'date', 'author', 'notes'] as const;
 
@@ -33,7 +34,8 @@ const HEAD_KEYS = ['format', 'version', 'title', 'revision', 'date', 'author', '
 export function writeDiagram(diagram: Diagram): string {
   const head = HEAD_KEYS.flatMap(key => (diagram[key] === undefined ? [] : [`  ${member(key, diagram[key])}`]));
   const lists = [list('parameters', diagram.parameters.map(oneLine(PARAMETER_KEYS)), 1), ...sheetLists(diagram, 1)];
-  return `{\n${[...head, ...lists].join(',\n')}\n}\n`;
+  const cuts = diagram.cuts === undefined ? [] : [list('cuts', diagram.cuts.map(oneLine(CUT_KEYS)), 1)];
+  return `{\n${[...head, ...lists, ...cuts].join(',\n')}\n}\n`;
 }
 
 /** The same document without a space, for links. */
@@ -42,6 +44,7 @@ export function minifyDiagram(diagram: Diagram): string {
     ...inOrder(diagram, HEAD_KEYS),
     parameters: diagram.parameters.map(parameter => inOrder(parameter, PARAMETER_KEYS)),
     ...minifySheet(diagram),
+    ...(diagram.cuts === undefined ? {} : { cuts: diagram.cuts.map(cut => inOrder(cut, CUT_KEYS)) }),
   });
 }
 
@@ -76,7 +79,7 @@ function spaced(value: unknown): string {
   return JSON.stringify(value);
 }
 
-function oneLine(keys: readonly string[]): (fields: Parameter | Wire | Block) => string {
+function oneLine(keys: readonly string[]): (fields: Parameter | Wire | Block | Cut) => string {
   return fields => {
     const members = Object.entries(inOrder(fields, keys)).map(([key, value]) => member(key, value));
     return `{ ${members.join(', ')} }`;

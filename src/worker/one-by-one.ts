@@ -51,7 +51,7 @@ export function askOneByOne(send: (question: Derive) => void): Derivations {
     answered(answer) {
       if (underWay === null || answer.revision !== underWay.revision) return;
       if (answer.kind === 'model' && answer.outcome.ok) afterMatrices();
-      else if (answer.kind !== 'channel') sendNow(waiting);
+      else if (answer.kind === 'model' || answer.kind === 'poles') sendNow(waiting);
     },
     askAgain: () => sendNow(waiting ?? underWay),
     forget: () => sendNow(null),

@@ -3,9 +3,20 @@
  * `derive` makes every older question void; an answer for an older revision is dropped by whoever receives it.
  */
 
-import type { PoleSet, Stability, StepMetrics, StepResponse, TransferFunction, ZeroSet } from '../analysis/index.ts';
+import type {
+  ChannelFrequency,
+  FrequencyCurve,
+  LoopTransfer,
+  Margins,
+  PoleSet,
+  Stability,
+  StepMetrics,
+  StepResponse,
+  TransferFunction,
+  ZeroSet,
+} from '../analysis/index.ts';
 import type { Derivation } from '../compile/index.ts';
-import type { Diagram } from '../diagram/index.ts';
+import type { Diagram, PortReference } from '../diagram/index.ts';
 import type { Result, Warning } from '../problem/index.ts';
 
 /** Position of an input and an output in the model's lists. */
@@ -69,10 +80,38 @@ export interface ChannelAnswer {
   readonly metrics: StepMetrics;
 }
 
+export interface FrequencyAnswer {
+  readonly kind: 'frequency';
+  readonly revision: number;
+  readonly channel: Channel;
+  readonly response: ChannelFrequency;
+}
+
+/** What the loop does at one cut. */
+export interface CutAnswer {
+  readonly to: PortReference;
+  /** `cut 1`, or as the drawing names it. */
+  readonly name: string;
+  /** What the loop transfer is refused for where there is none. */
+  readonly outcome: Result<CutLoop>;
+}
+
+export interface CutLoop extends Pick<LoopTransfer, 'route' | 'closedLoop'> {
+  readonly curve: FrequencyCurve;
+  readonly margins: Margins;
+}
+
+export interface CutsAnswer {
+  readonly kind: 'cuts';
+  readonly revision: number;
+  /** In the drawing's order. */
+  readonly cuts: readonly CutAnswer[];
+}
+
 export interface FileAnswer {
   readonly kind: 'file';
   readonly id: number;
   readonly outcome: Result<string | Uint8Array<ArrayBuffer>>;
 }
 
-export type Answer = ModelAnswer | PolesAnswer | ChannelAnswer | FileAnswer;
+export type Answer = ModelAnswer | PolesAnswer | ChannelAnswer | FrequencyAnswer | CutsAnswer | FileAnswer;

@@ -5,6 +5,7 @@
  */
 
 import type { StateSpace } from '../compile/index.ts';
+import type { Diagram } from '../diagram/index.ts';
 import { modelAnswer } from './model-answer.ts';
 import type { Answer, Channel, Question } from './protocol.ts';
 
@@ -17,7 +18,7 @@ let exactElapsed = 0;
 let newest: Extract<Question, { kind: 'derive' }> | null = null;
 /** The channel chosen since that question. */
 let chosen: Channel | null = null;
-let latest: { readonly revision: number; readonly model: StateSpace } | null = null;
+let latest: { readonly revision: number; readonly diagram: Diagram; readonly model: StateSpace } | null = null;
 
 self.onmessage = ({ data }: MessageEvent<Question>) => {
   switch (data.kind) {
@@ -40,7 +41,7 @@ async function derive(question: Extract<Question, { kind: 'derive' }>): Promise<
   const field = question.isLive && exactElapsed > LIVE_LIMIT ? 'double' : 'auto';
   const answer = modelAnswer(question, field);
   if (field === 'auto') exactElapsed = answer.elapsed;
-  latest = answer.outcome.ok ? { revision: question.revision, model: answer.outcome.value.model } : null;
+  latest = answer.outcome.ok ? { ...question, model: answer.outcome.value.model } : null;
   send(answer);
   if (latest === null) return;
   const { model } = latest;
@@ -49,13 +50,31 @@ async function derive(question: Extract<Question, { kind: 'derive' }>): Promise<
   if (newest !== question) return;
   send(channelAnswer(question.revision, model, chosen ?? question.channel));
   await turn();
-  if (newest === question) send(polesAnswer(question.revision, model));
+  if (newest !== question) return;
+  send(polesAnswer(question.revision, model));
+  await turn();
+  if (newest === question) await frequencies(question, model);
+}
+
+/** The answers over frequency, the cuts first since the verdict line shows one. */
+async function frequencies(question: Extract<Question, { kind: 'derive' }>, model: StateSpace): Promise<void> {
+  const { revision, diagram } = question;
+  const { cutsAnswer, frequencyAnswer } = await import('./frequency-answers.ts');
+  if (newest !== question) return;
+  send(cutsAnswer(revision, diagram));
+  await turn();
+  if (newest === question) send(frequencyAnswer(revision, diagram, model, chosen ?? question.channel));
 }
 
 async function channel(question: Extract<Question, { kind: 'channel' }>): Promise<void> {
   const { channelAnswer } = await import('./analysis-answers.ts');
   chosen = question.channel;
-  if (latest !== null) send(channelAnswer(latest.revision, latest.model, question.channel));
+  if (latest === null) return;
+  send(channelAnswer(latest.revision, latest.model, question.channel));
+  const { frequencyAnswer } = await import('./frequency-answers.ts');
+  if (chosen === question.channel) {
+    send(frequencyAnswer(latest.revision, latest.diagram, latest.model, question.channel));
+  }
 }
 
 /** Resolves behind the messages already waiting, without the delay that timers have. */

@@ -18,6 +18,7 @@ import {
   renameBlock,
   reorderBlock,
 } from './block-edits.ts';
+import { addCut, removeCut, withCutsOnWires } from './cut-edits.ts';
 import type { Edit, SheetEdit } from './edit.ts';
 import { setField, setMatrices } from './field-edits.ts';
 import {
@@ -46,6 +47,10 @@ export function editDiagram(diagram: Diagram, edit: Edit): Result<Diagram> {
       return reorderParameters(diagram, edit);
     case 'setTitleFields':
       return setTitleFields(diagram, edit);
+    case 'addCut':
+      return addCut(diagram, edit);
+    case 'removeCut':
+      return removeCut(diagram, edit);
     default:
       return onSheet(diagram, edit);
   }
@@ -53,8 +58,9 @@ export function editDiagram(diagram: Diagram, edit: Edit): Result<Diagram> {
 
 function onSheet(diagram: Diagram, edit: SheetEdit): Result<Diagram> {
   const changed = changeSheet(diagram, edit.at ?? [], sheet => editSheet(sheet, edit));
-  if (!changed.ok || changed.value === diagram || !CAN_CLASH.has(edit.kind)) return changed;
-  return checked(changed.value);
+  if (!changed.ok || changed.value === diagram) return changed;
+  const whole = withCutsOnWires(changed.value, edit);
+  return CAN_CLASH.has(edit.kind) ? checked(whole) : ok(whole);
 }
 
 /** Edits that can bring a name twice or a block too many. */

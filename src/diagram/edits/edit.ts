@@ -166,6 +166,16 @@ export interface SetTitleFields {
   readonly author?: string;
 }
 
+/** A cut on a wire of the top sheet, known by the input port it leads to; last in the list. */
+export interface AddCut {
+  readonly kind: 'addCut';
+  readonly to: PortReference;
+}
+export interface RemoveCut {
+  readonly kind: 'removeCut';
+  readonly to: PortReference;
+}
+
 /** An edit of what stands on one sheet. */
 export type SheetEdit =
   | AddBlock
@@ -193,6 +203,8 @@ export type DrawingEdit =
   | RenameParameter
   | SetParameter
   | ReorderParameters
-  | SetTitleFields;
+  | SetTitleFields
+  | AddCut
+  | RemoveCut;
 
 export type Edit = SheetEdit | DrawingEdit;

@@ -119,6 +119,8 @@ export const wireSchema = v.object({
   via: v.exactOptional(v.array(pointSchema, 'bend points: [[x, y], ...]')),
 });
 
+export const cutSchema = v.object({ to: portReference, name: v.exactOptional(nameSchema) });
+
 export const parameterSchema = v.object({
   name: textSchema,
   value: quantitySchema,

@@ -14,6 +14,7 @@ import { note, pathOf, type Reading, type SheetPlace, TOP_SHEET } from './readin
 export function checkJoining(diagram: Diagram, reading: Reading): void {
   checkParameterNames(diagram, reading);
   checkSheet(diagram, TOP_SHEET, reading);
+  checkCuts(diagram, reading);
   if (reading.problems.length === 0) noteNameClashes(diagram, reading);
 }
 
@@ -30,6 +31,23 @@ function checkParameterNames({ parameters }: Diagram, reading: Reading): void {
       note(reading, 'duplicate-name', message, { parameter: name });
     }
   }
+}
+
+/** Each cut on a wire, no two on one. */
+function checkCuts({ cuts = [], wires }: Diagram, reading: Reading): void {
+  const wired = new Set(wires.map(({ to }) => to.join(' ')));
+  const taken = new Set<string>();
+  cuts.forEach(({ to }, i) => {
+    const key = to.join(' ');
+    const where = `input ${to[1]} of ${onOneLine(to[0])}`;
+    const fault = !wired.has(key)
+      ? `no wire leads to ${where}. Put it on a wire.`
+      : taken.has(key)
+        ? `the wire to ${where} has a cut already. Keep one of them.`
+        : null;
+    if (fault !== null) note(reading, 'bad-value', `The cut at place ${i + 1}: ${fault}`);
+    taken.add(key);
+  });
 }
 
 /** Recursion is as deep as groups are: at most 32. */

@@ -7,8 +7,8 @@ import * as v from 'valibot';
 import { onOneLine, quote } from '../../expression/index.ts';
 import { DEEPEST_GROUP, MOST_BLOCKS, MOST_PARAMETERS } from '../limits.ts';
 import { KIND_WORDS } from '../titles.ts';
-import type { Block, BlockKind, Diagram, Parameter, Sheet, Wire } from '../types.ts';
-import { blockSchemas, parameterSchema, textSchema, wireSchema } from './block-schemas.ts';
+import type { Block, BlockKind, Cut, Diagram, Parameter, Sheet, Wire } from '../types.ts';
+import { blockSchemas, cutSchema, parameterSchema, textSchema, wireSchema } from './block-schemas.ts';
 import { note, pathOf, type Reading, type SheetPlace, TOP_SHEET } from './reading.ts';
 import { matrixShapeFault } from './state-model-shape.ts';
 import { whatIsWrong } from './wording.ts';
@@ -33,8 +33,10 @@ export function readShape(value: unknown, reading: Reading): Diagram | null {
   const texts = readTexts(value, reading);
   const parameters = readParameters(own(value, 'parameters'), reading);
   const sheet = readSheet(value, TOP_SHEET, reading);
+  const cuts = readCuts(own(value, 'cuts') ?? [], reading);
   if (sheet === null || reading.problems.length > 0) return null;
-  return { format: 'poleward-diagram', version: 1, ...texts, parameters, ...sheet };
+  const drawing = { format: 'poleward-diagram', version: 1, ...texts, parameters, ...sheet } as const;
+  return cuts.length === 0 ? drawing : { ...drawing, cuts };
 }
 
 function otherFormat(value: unknown): string {
@@ -77,6 +79,15 @@ function readParameters(value: unknown, reading: Reading): readonly Parameter[] 
     const title =
       typeof name === 'string' && name !== '' ? `Parameter ${onOneLine(name)}` : `The parameter at place ${i + 1}`;
     note(reading, 'bad-value', `${title}: ${whatIsWrong(parsed.issues[0])}`);
+    return [];
+  });
+}
+
+function readCuts(value: unknown, reading: Reading): readonly Cut[] {
+  return readList(value, 'The diagram: "cuts" is not a list.', reading).flatMap((item, i) => {
+    const parsed = v.safeParse(cutSchema, item);
+    if (parsed.success) return [withoutBlanks(parsed.output, ['name'])];
+    note(reading, 'bad-value', `The cut at place ${i + 1}: ${whatIsWrong(parsed.issues[0])}`);
     return [];
   });
 }

@@ -33,7 +33,7 @@ export function followDocument(): void {
 }
 
 function needsDerivation(before: Diagram, now: Diagram): boolean {
-  return before !== now && !isSameModel(before, now);
+  return before !== now && (before.cuts !== now.cuts || !isSameModel(before, now));
 }
 
 function ask(state: State): void {

@@ -5,7 +5,14 @@
 
 import type { Derivation } from '../../compile/index.ts';
 import type { Problem } from '../../problem/index.ts';
-import type { Answer, ChannelAnswer, PolesAnswer, QuantityValues } from '../../worker/index.ts';
+import type {
+  Answer,
+  ChannelAnswer,
+  CutsAnswer,
+  FrequencyAnswer,
+  PolesAnswer,
+  QuantityValues,
+} from '../../worker/index.ts';
 
 export interface ResultsSlice {
   readonly status: 'pending' | 'failed' | 'derived';
@@ -16,6 +23,8 @@ export interface ResultsSlice {
   readonly values: QuantityValues;
   readonly poles: PolesAnswer | null;
   readonly channel: ChannelAnswer | null;
+  readonly frequency: FrequencyAnswer | null;
+  readonly cuts: CutsAnswer | null;
   /** Why there is no answer at all: the worker died twice on the same question. */
   readonly stopped: string | null;
 }
@@ -28,6 +37,8 @@ export const NO_RESULTS: ResultsSlice = {
   values: { parameters: {}, blocks: {} },
   poles: null,
   channel: null,
+  frequency: null,
+  cuts: null,
   stopped: null,
 };
 
@@ -57,6 +68,10 @@ export function answered(slice: ResultsSlice, answer: Exclude<Answer, { kind: 'f
       return { ...slice, poles: answer };
     case 'channel':
       return { ...slice, channel: answer };
+    case 'frequency':
+      return { ...slice, frequency: answer };
+    case 'cuts':
+      return { ...slice, cuts: answer };
     default:
       return answer satisfies never;
   }
