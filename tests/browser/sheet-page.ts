@@ -7,6 +7,12 @@ export async function openEmptySheet(page: Page): Promise<void> {
   await page.goto('./');
   await page.getByRole('button', { name: 'Empty sheet' }).click();
   await expect(blocks(page)).toHaveCount(0);
+  await expectReady(page);
+}
+
+/** Waits until the sheet takes keys: they come with its toolbar, right after the drawing. */
+async function expectReady(page: Page): Promise<void> {
+  await expect(page.getByRole('toolbar', { name: 'Sheet' })).toBeVisible();
 }
 
 /** Opens the page on its worked drawing. */
@@ -14,6 +20,7 @@ export async function openWorkedDrawing(page: Page): Promise<void> {
   await page.goto('./');
   await expect(block(page, 'gain K_p')).toBeVisible();
   await expect(matrixCell(page, 1, 1)).toBeVisible();
+  await expectReady(page);
 }
 
 /** Every block on the sheet. */
