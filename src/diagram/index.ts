@@ -24,6 +24,7 @@ export { blockTitle, blockTitleAtStart, displayName } from './titles.ts';
 export type {
   Block,
   BlockKind,
+  Cut,
   DelayBlock,
   Diagram,
   DifferentiatorBlock,
