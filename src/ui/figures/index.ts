@@ -20,6 +20,7 @@ export {
 } from './format.ts';
 export { MarkupView } from './MarkupView.tsx';
 export { MathName, singleLetter } from './MathName.tsx';
+export { degreesText, frequencyText, phaseMarginText } from './margin-text.ts';
 export type { Markup } from './markup.ts';
 export { element, markupText } from './markup.ts';
 export { Polynomial } from './Polynomial.tsx';

@@ -13,6 +13,8 @@ export interface Palette {
   readonly line: string;
   readonly curve: string;
   readonly wrong: string;
+  /** Margins at a cut. */
+  readonly cut: string;
   readonly face: string;
   readonly figures: string;
   readonly math: string;
@@ -26,6 +28,7 @@ export const SCREEN: Palette = {
   line: 'var(--line)',
   curve: 'var(--curve)',
   wrong: 'var(--wrong)',
+  cut: 'var(--proof)',
   face: 'var(--face)',
   figures: 'var(--figures)',
   math: 'var(--math)',
@@ -39,6 +42,7 @@ export const FILE: Palette = {
   line: '#c9cdc9',
   curve: '#1d5990',
   wrong: '#b02318',
+  cut: '#0a7166',
   face: 'B612, system-ui, sans-serif',
   figures: '"B612 Mono", ui-monospace, monospace',
   math: '"STIX Two Text", "Cambria Math", "Times New Roman", serif',

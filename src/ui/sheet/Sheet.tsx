@@ -4,8 +4,10 @@
  */
 
 import 'reactflow/dist/base.css';
+import { lazy, Suspense } from 'react';
 import { Background, BackgroundVariant, ConnectionMode, ReactFlow, type ReactFlowState, useStore } from 'reactflow';
 import { GRID } from '../../diagram/geometry/index.ts';
+import { type State, useStore as useDocument } from '../store/index.ts';
 import { AlignmentLines } from './AlignmentLines.tsx';
 import { BlockNode } from './BlockNode.tsx';
 import { BranchDots } from './BranchDots.tsx';
@@ -20,6 +22,9 @@ import { useSheetView } from './useSheetView.ts';
 import { useSheetWires } from './useSheetWires.ts';
 import { WireEdge } from './WireEdge.tsx';
 
+/** Loaded once a drawing has a cut. */
+const CutMarks = lazy(() => import('./CutMarks.tsx').then(file => ({ default: file.CutMarks })));
+
 const NODE_TYPES = { block: BlockNode };
 const EDGE_TYPES = { wire: WireEdge };
 const CENTRE: [number, number] = [0.5, 0.5];
@@ -32,11 +37,14 @@ const FAR = 0.35;
 
 const isFar = (flow: ReactFlowState) => flow.transform[2] < FAR;
 
+const hasCuts = (state: State) => state.document.diagram.cuts !== undefined;
+
 export function Sheet() {
   const placed = usePlacedSheet();
   const nodes = useSheetNodes(placed);
   const edges = useSheetWires(placed);
   const drop = useDropPart();
+  const isCut = useDocument(hasCuts);
   const far = useStore(isFar) ? ' sheet-far' : '';
   useFitOnOpening();
   useSheetView();
@@ -73,6 +81,7 @@ export function Sheet() {
       >
         <Background variant={BackgroundVariant.Lines} gap={GRID} lineWidth={1} color="var(--square)" />
         <BranchDots dots={placed.routes.dots} />
+        <Suspense>{isCut && <CutMarks {...placed} />}</Suspense>
         <AlignmentLines {...placed} />
         <DropTarget />
       </ReactFlow>

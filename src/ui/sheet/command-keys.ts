@@ -6,6 +6,7 @@ import { chosenWires, straightenWires } from '../commands/bend-chosen.ts';
 import { setSignOfWires, turnLastSign } from '../commands/change-sign.ts';
 import { chooseNextWire } from '../commands/choose-wire.ts';
 import { duplicateChosen } from '../commands/clipboard.ts';
+import { cutChosen } from '../commands/cut-chosen.ts';
 import { pullOutChosen } from '../commands/insert-in-wire.ts';
 import { actions, store } from '../store/index.ts';
 import { focusedBlock } from './focus-block.ts';
@@ -13,6 +14,8 @@ import { focusedBlock } from './focus-block.ts';
 /** Plain keys: whether one was a command's and did something. */
 export function commandKey({ key }: KeyboardEvent, fitDrawing: () => void): boolean {
   switch (key) {
+    case 'c':
+      return cutChosen();
     case 'h':
       return pullOutChosen();
     case 'l':

@@ -1,11 +1,11 @@
 /** What the analyses answered for the model on screen: step response, poles and zeros, transfer function. */
 
-import { useMemo } from 'react';
+import { lazy, Suspense, useMemo, useState } from 'react';
 import type { ChannelAnswer, Notation } from '../../worker/index.ts';
 import { saveFile } from '../dialogs/save-file.ts';
 import { TransferFunction } from '../figures/index.ts';
 import { PoleMap, type SavedPlot, StepPlot } from '../plots/index.ts';
-import { ChannelPicker, Panel, PanelEmpty, PanelPending, PoleTable } from '../results/index.ts';
+import { ChannelPicker, Panel, PanelEmpty, PanelPending, PoleTable, TabPanel, TabStrip } from '../results/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
 import { stepContentOf } from './step-content-of.ts';
 
@@ -17,7 +17,7 @@ const notation = (state: State) => state.view.notation;
 export function AnswerPanels() {
   return (
     <>
-      <StepPanel />
+      <ResponsePanel />
       <PolesPanel />
       <TransferPanel />
     </>
@@ -40,18 +40,41 @@ function Picker() {
   );
 }
 
-function StepPanel() {
+const TABS = [
+  { id: 'time', label: 'Time' },
+  { id: 'frequency', label: 'Frequency' },
+] as const;
+
+type TabId = (typeof TABS)[number]['id'];
+
+const FrequencyView = lazy(() => import('../frequency/index.ts').then(room => ({ default: room.FrequencyView })));
+
+function ResponsePanel() {
+  const [tab, setTab] = useState<TabId>('time');
+  return (
+    <Panel title={tab === 'time' ? 'Step response' : 'Frequency response'} aside={<Picker />}>
+      <TabStrip name="response" label="Response over" tabs={TABS} selected={tab} onSelect={setTab} />
+      <TabPanel name="response" id={tab}>
+        {tab === 'time' ? (
+          <StepView />
+        ) : (
+          <Suspense fallback={<PanelPending label="Frequency response" />}>
+            <FrequencyView onSave={savePlot} />
+          </Suspense>
+        )}
+      </TabPanel>
+    </Panel>
+  );
+}
+
+function StepView() {
   const known = useStore(model);
   const answer = useStore(channel);
   const content = useMemo(
     () => (known === null || answer === null ? null : stepContentOf(known, answer)),
     [known, answer],
   );
-  return (
-    <Panel title="Step response" aside={<Picker />}>
-      {content === null ? <ChannelAbsent answer={answer} /> : <StepPlot content={content} onSave={savePlot} />}
-    </Panel>
-  );
+  return content === null ? <ChannelAbsent answer={answer} /> : <StepPlot content={content} onSave={savePlot} />;
 }
 
 /** Why there is no channel to show: none in the drawing, or the answer is on its way. */

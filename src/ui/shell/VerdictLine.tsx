@@ -1,5 +1,6 @@
 /** The line at the bottom: stability, sizes, algebraic loops, the self-check, and the standing caution. */
 
+import { lazy, Suspense } from 'react';
 import type { Derivation } from '../../compile/index.ts';
 import type { Warning } from '../../problem/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
@@ -9,7 +10,7 @@ const theme = (state: State) => state.view.theme;
 const results = (state: State) => state.results;
 
 export function VerdictLine() {
-  const { status, derivation, poles, problems, stopped } = useStore(results);
+  const { status, derivation, poles, cuts, problems, stopped } = useStore(results);
   return (
     <footer className="verdict">
       {stopped !== null && <span className="verdict-stability verdict-wrong">{stopped}</span>}
@@ -22,6 +23,7 @@ export function VerdictLine() {
           <StabilityWord answer={poles} />
           <span>{sizesText(derivation.model)}</span>
           <LoopCount derivation={derivation} />
+          <FirstCut answer={cuts} />
           <WarningCount warnings={[...derivation.warnings, ...(poles?.warnings ?? [])]} />
           <CheckFigure derivation={derivation} />
         </>
@@ -52,6 +54,19 @@ function LoopCount({ derivation }: { readonly derivation: Derivation }) {
     >
       {text}
     </button>
+  );
+}
+
+/** Loaded once a drawing has a cut. */
+const CutMargin = lazy(() => import('../frequency/CutMargin.tsx').then(file => ({ default: file.CutMargin })));
+
+function FirstCut({ answer }: { readonly answer: State['results']['cuts'] }) {
+  const [first] = answer?.cuts ?? [];
+  if (first === undefined) return null;
+  return (
+    <Suspense>
+      <CutMargin cut={first} />
+    </Suspense>
   );
 }
 
