@@ -62,12 +62,19 @@ export function loopTransfer(diagram: Diagram, to: PortReference): Result<LoopTr
   return ok({ ...common, exact: route === 'certified' ? fraction : null, route, valueAt: inModel });
 }
 
-/** At rest a dead time changes nothing, and the model has no trouble with blocks whose pole is at zero. */
+/**
+ * At rest a dead time changes nothing, and the model has no trouble with blocks whose pole is at zero. Every frequency is
+ * solved once: crossings and peaks are looked for on the same grid.
+ */
 function trueDelays(direct: DirectResponse, inModel: Response): Response {
+  const known = new Map<number, ReturnType<Response>>();
   return omega => {
-    if (omega === 0) return inModel(0);
-    const [value] = direct.at({ re: 0, im: omega }, 0) ?? [];
-    return negated(value === undefined ? null : [value.re, value.im]);
+    const kept = known.get(omega);
+    if (kept !== undefined) return kept;
+    const [value] = omega === 0 ? [] : (direct.at({ re: 0, im: omega }, 0) ?? []);
+    const found = omega === 0 ? inModel(0) : negated(value === undefined ? null : [value.re, value.im]);
+    known.set(omega, found);
+    return found;
   };
 }
 

@@ -65,7 +65,7 @@ function CutButton() {
   const isOne = wires === 1 && blocks === 0;
   return (
     <p className="cut-line">
-      <button type="button" disabled={!isOne} onClick={cutChosen}>
+      <button type="button" className="button" disabled={!isOne} onClick={cutChosen}>
         Cut the selected wire
       </button>
       <span>

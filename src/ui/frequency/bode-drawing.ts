@@ -51,8 +51,8 @@ function grid({ left, right, x, decades, between }: BodeFrame, part: BodePart, p
 function axisTexts({ left, right, x, decades, magnitude, phase }: BodeFrame, palette: Palette): readonly Markup[] {
   const style = { fill: palette.soft, family: palette.face };
   return [
-    text(left - 40, magnitude.top - 9, 'magnitude / dB', style),
-    text(left - 40, phase.top - 9, 'phase / °', style),
+    text(left - 40, magnitude.top - 14, 'magnitude / dB', style),
+    text(left - 40, phase.top - 14, 'phase / °', style),
     ...decades.map(({ value, text: label }) => text(x(value), phase.bottom + 15, label, tickStyle(palette, 'middle'))),
     text(right, phase.bottom + 31, 'ω / rad/s', { ...style, anchor: 'end' }),
   ];
@@ -91,7 +91,7 @@ function marginMarks(
   return [
     line(x, y(from), x, y(to), palette.cut, 2),
     element('circle', { cx: round(x), cy: round(y(from)), r: 3, fill: palette.cut }),
-    text(x + (isLeft ? -7 : 7), (y(from) + y(to)) / 2 + 4, label, style),
+    text(x + (isLeft ? -7 : 7), y(to) + (y(to) > y(from) ? 14 : -6), label, style),
   ];
 }
 

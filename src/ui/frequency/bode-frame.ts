@@ -26,7 +26,7 @@ export interface BodeFrame extends Size {
 }
 
 /** CSS pixels: above each frame, below the last, and at the sides. */
-const TOP = 24;
+const TOP = 30;
 const BOTTOM = 36;
 const LEFT = 48;
 const RIGHT = 16;

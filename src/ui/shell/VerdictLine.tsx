@@ -58,7 +58,7 @@ function LoopCount({ derivation }: { readonly derivation: Derivation }) {
 }
 
 /** Loaded once a drawing has a cut. */
-const CutMargin = lazy(() => import('../frequency/CutMargin.tsx').then(file => ({ default: file.CutMargin })));
+const CutMargin = lazy(() => import('./CutMargin.tsx').then(file => ({ default: file.CutMargin })));
 
 function FirstCut({ answer }: { readonly answer: State['results']['cuts'] }) {
   const [first] = answer?.cuts ?? [];
