@@ -51,8 +51,8 @@ function grid({ left, right, x, decades, between }: BodeFrame, part: BodePart, p
 function axisTexts({ left, right, x, decades, magnitude, phase }: BodeFrame, palette: Palette): readonly Markup[] {
   const style = { fill: palette.soft, family: palette.face };
   return [
-    text(left - 40, magnitude.top - 14, 'magnitude / dB', style),
-    text(left - 40, phase.top - 14, 'phase / °', style),
+    text(left, magnitude.top - 10, 'magnitude / dB', style),
+    text(left, phase.top - 10, 'phase / °', style),
     ...decades.map(({ value, text: label }) => text(x(value), phase.bottom + 15, label, tickStyle(palette, 'middle'))),
     text(right, phase.bottom + 31, 'ω / rad/s', { ...style, anchor: 'end' }),
   ];

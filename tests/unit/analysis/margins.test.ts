@@ -173,6 +173,21 @@ test('the phase of four integrators runs on at −360° without a jump', () => {
   expect(bandwidth).toBeNull();
 });
 
+test('a channel of one dead time has magnitude 1 and the phase −ωT on every turn', () => {
+  const diagram = loopOf({ kind: 'delay', id: 'pipe', time: '0.25' });
+  const open: Diagram = { ...diagram, wires: diagram.wires.filter(({ to }) => to[1] === 0) };
+  const derived = compile(open);
+  if (!derived.ok) throw new Error('no model');
+  const { curve, route, bandwidth } = channelFrequency(open, derived.value.model, { input: 0, output: 0 });
+  expect(route).toBe('direct');
+  expect(bandwidth).toBeNull();
+  expect(Math.max(...curve.omega) * 0.25).toBeGreaterThan(4 * Math.PI);
+  curve.omega.forEach((omega, k) => {
+    expect(curve.magnitude[k]).toBeCloseTo(0, 12);
+    expect(curve.phase[k]).toBeCloseTo((-omega * 0.25) / RADIANS, 8);
+  });
+});
+
 test('a cut where no wire ends is refused and names the block', () => {
   const found = loopTransfer(loopOf(plant('1', 's')), ['plant', 3]);
   expect(found).toMatchObject({
