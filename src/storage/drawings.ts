@@ -126,6 +126,15 @@ export function bringBack({ removed: _, ...line }: BinnedDrawing): Promise<Stora
   });
 }
 
+/** Takes a drawing of the bin and its versions away for good, which makes room. */
+export function removeForGood(key: string): Promise<StorageAnswer<void>> {
+  return answering(async () => {
+    const kept = store();
+    await delMany([DRAWING_PREFIX + key, VERSIONS_PREFIX + key], kept);
+    await update<readonly BinnedDrawing[]>(BIN_KEY, bin => (bin ?? []).filter(line => line.key !== key), kept);
+  });
+}
+
 async function emptyOldBin(kept: ReturnType<typeof store>): Promise<void> {
   const bin = (await get<readonly BinnedDrawing[]>(BIN_KEY, kept)) ?? [];
   const listed = new Set(((await get<readonly KeptDrawing[]>(LIST_KEY, kept)) ?? []).map(({ key }) => key));
@@ -166,7 +175,7 @@ async function answering<T>(request: () => Promise<T>): Promise<StorageAnswer<T>
   } catch (error) {
     const full = error instanceof DOMException && error.name === 'QuotaExceededError';
     const message = full
-      ? 'The device has no room left for drawings. Save this one to a file and remove old ones.'
+      ? 'The device has no room left for drawings. Save this one to a file and remove old ones for good.'
       : 'This browser does not let the page keep drawings. Save this one to a file.';
     return { ok: false, message };
   }

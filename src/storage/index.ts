@@ -9,6 +9,7 @@ export {
   keptDrawings,
   lastOpened,
   readKept,
+  removeForGood,
   removeKept,
   setLastOpened,
   versionsOf,

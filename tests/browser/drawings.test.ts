@@ -1,5 +1,6 @@
 /** The list of drawings: pictures, names, the bin, versions, worked drawings, and two tabs on one drawing. */
 
+import { readFileSync } from 'node:fs';
 import { expect, type Page, test } from 'playwright/test';
 import { block, blocks, openEmptySheet, openWorkedDrawing, writeBlocks } from './sheet-page.ts';
 
@@ -98,4 +99,34 @@ test('two tabs on one drawing keep both works, and the later one says so', async
   await openList(other);
   await other.getByRole('button', { name: 'Open Ballast pump (from another tab)' }).click();
   await expect(block(other, 'integrator theirs')).toBeVisible();
+});
+
+test('what is removed for good is gone from the list and the bin', async ({ page }) => {
+  await pageWithTwoDrawings(page);
+  await openList(page);
+  await page.getByRole('button', { name: 'Remove Ballast pump', exact: true }).click();
+  await page.getByRole('button', { name: 'Remove for good: Ballast pump' }).click();
+  await expect(page.getByText('Removed, kept for 30 days')).toHaveCount(0);
+  await expect(page.getByRole('button', { name: 'Open Ballast pump' })).toHaveCount(0);
+});
+
+test('a full device is said and the drawing stays on the sheet', async ({ page }) => {
+  await openEmptySheet(page);
+  await page.waitForTimeout(700);
+  await page.evaluate(() => {
+    IDBObjectStore.prototype.put = () => {
+      throw new DOMException('full', 'QuotaExceededError');
+    };
+  });
+  await writeBlocks(page, 'u>', '1/s level');
+  await expect(page.getByText(/not kept: The device has no room left for drawings/)).toBeVisible();
+  await page.getByRole('button', { name: 'Export…' }).click();
+  await expect(page.getByText(/No version was kept/)).toBeAttached();
+  await page.getByRole('button', { name: 'Close' }).click();
+  await expect(blocks(page)).toHaveCount(2);
+  const download = page.waitForEvent('download');
+  await page.getByRole('button', { name: 'Save to a file' }).click();
+  const file = await (await download).path();
+  const saved = JSON.parse(readFileSync(file, 'utf8'));
+  expect(saved.blocks).toHaveLength(2);
 });

@@ -17,7 +17,7 @@ export function DrawingVersions() {
     return <p>None yet. One is kept when a drawing is opened, every ten minutes of change and at export.</p>;
   }
   return (
-    <table className="dialog-table" aria-label="Versions of this drawing">
+    <table className="dialog-table drawings-table" aria-label="Versions of this drawing">
       <tbody>
         {versions.map(version => (
           <VersionRow key={version.at} version={version} />
@@ -37,7 +37,12 @@ function VersionRow({ version }: { readonly version: KeptVersion }) {
       <th scope="row">{at}</th>
       <td>{version.blocks} blocks</td>
       <td>
-        <button type="button" className="button" aria-label={`Return to ${at}`} onClick={() => returnTo(version, at)}>
+        <button
+          type="button"
+          className="button"
+          aria-label={`Return to it: ${at}`}
+          onClick={() => returnTo(version, at)}
+        >
           Return to it
         </button>
       </td>

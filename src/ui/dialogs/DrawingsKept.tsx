@@ -8,6 +8,7 @@ import {
   type KeptDrawing,
   keptDrawings,
   readKept,
+  removeForGood,
   removeKept,
 } from '../../storage/index.ts';
 import { store } from '../store/index.ts';
@@ -36,7 +37,7 @@ export function DrawingsKept() {
       {shown.length === 0 && (
         <p>{search === '' ? 'None yet. A drawing is kept as soon as it changes.' : 'None with that in its title.'}</p>
       )}
-      <table className="dialog-table" aria-label="Drawings kept on this device">
+      <table className="dialog-table drawings-table" aria-label="Drawings kept on this device">
         <tbody>
           {shown.map(line => (
             <KeptRow key={`${line.key} ${line.title}`} line={line} onChanged={reload} />
@@ -57,6 +58,14 @@ export function DrawingsKept() {
                   onClick={() => void bringBack(line).then(reload)}
                 >
                   Bring back
+                </button>{' '}
+                <button
+                  type="button"
+                  className="button"
+                  aria-label={`Remove for good: ${line.title || 'untitled'}`}
+                  onClick={() => void removeForGood(line.key).then(reload)}
+                >
+                  Remove for good
                 </button>
               </li>
             ))}
@@ -110,7 +119,7 @@ function KeptRow({ line, onChanged }: { readonly line: KeptDrawing; readonly onC
         </div>
       </td>
       <td>
-        {isOpen ? 'open now' : action('Open', () => openKept(line))}
+        {isOpen ? <span className="drawings-open">open now</span> : action('Open', () => openKept(line))}
         {action('Duplicate', () => duplicateKept(line))}
         {!isOpen && action('Remove', () => removeKept(line))}
       </td>

@@ -46,7 +46,7 @@ export function keepOnChange(): void {
 /** What this tab read or wrote last under each key; null where there was nothing. */
 const known = new Map<string, string | null>();
 
-async function keep({ key, diagram }: State['document']): Promise<void> {
+async function keep({ key, diagram }: Pick<State['document'], 'key' | 'diagram'>): Promise<void> {
   const text = writeDiagram(diagram);
   if (!known.has(key)) {
     const there = await readKept(key);
@@ -56,7 +56,7 @@ async function keep({ key, diagram }: State['document']): Promise<void> {
   const now = new Date();
   const line = { key, title: diagram.title, changed: now.toISOString(), blocks: diagram.blocks.length };
   const answer = await keepDrawing(line, text, known.get(key) ?? null);
-  if (answer.ok && answer.value === 'changed elsewhere') return keepAsCopy(key);
+  if (answer.ok && answer.value === 'changed elsewhere') return keepAsCopy({ key, diagram });
   if (answer.ok) {
     known.set(key, text);
     if (Date.now() - (versioned.get(key) ?? 0) > VERSION_MILLISECONDS) {
@@ -68,12 +68,17 @@ async function keep({ key, diagram }: State['document']): Promise<void> {
   actions.setKept(answer.ok ? { at: clock } : { refused: answer.message });
 }
 
-/** Another tab has written the record: what is on this sheet goes on under a key of its own. */
-function keepAsCopy(key: string): void {
-  if (store.getState().document.key !== key) return;
-  actions.goOnAsCopy(
-    newKey(),
-    'Another tab has changed this drawing. Yours goes on as a copy of its own; both are under Drawings.',
+const COPY_SAID = 'Another tab has changed this drawing. Yours goes on as a copy of its own; both are under Drawings.';
+
+/** Another tab has written the record: what was on this sheet goes on, or is kept, under a key of its own. */
+async function keepAsCopy({ key, diagram }: Pick<State['document'], 'key' | 'diagram'>): Promise<void> {
+  if (store.getState().document.key === key) return actions.goOnAsCopy(newKey(), COPY_SAID);
+  const title = `${diagram.title || 'untitled'} (from another tab)`;
+  const line = { key: newKey(), title, changed: new Date().toISOString(), blocks: diagram.blocks.length };
+  const answer = await keepDrawing(line, writeDiagram({ ...diagram, title }), null);
+  actions.notify(
+    answer.ok ? `Another tab had changed that drawing. Yours is kept as ${title}.` : answer.message,
+    'refused',
   );
 }
 
@@ -82,6 +87,7 @@ const VERSION_MILLISECONDS = 10 * 60 * 1000;
 const versioned = new Map<string, number>();
 
 async function keepVersionNow(key: string, blocks: number, text: string): Promise<void> {
+  if (blocks === 0) return;
   versioned.set(key, Date.now());
   const answer = await keepVersion(key, { at: new Date().toISOString(), blocks, text });
   if (!answer.ok) actions.notify(`No version was kept. ${answer.message}`, 'refused');
