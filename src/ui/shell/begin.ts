@@ -26,5 +26,9 @@ async function reopen(): Promise<void> {
     actions.openDrawing(startingDrawing(), newKey(), 'The drawing kept last cannot be read; it stays in the list.');
     return;
   }
-  actions.openDrawing(startingDrawing(), newKey(), 'A worked drawing to start from. Drawings has an empty sheet.');
+  actions.openDrawing(
+    startingDrawing(),
+    newKey(),
+    'A worked drawing to start from. Empty sheet begins one of your own.',
+  );
 }
