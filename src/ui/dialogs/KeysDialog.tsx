@@ -36,6 +36,7 @@ const KEYS: readonly { readonly group: string; readonly keys: readonly (readonly
       ['S', 'turn the sign of the wire drawn last to a summing point'],
       ['L', 'arrange the selected blocks, or the whole drawing'],
       ['Ctrl+D', 'duplicate'],
+      ['C', 'cut the selected wire to measure margins there, or take the cut away; with no wire selected, a limiter'],
       ['Ctrl+C  Ctrl+X  Ctrl+V', 'copy, cut, paste: as a drawing in text, from window to window'],
       ['Alt+← → ↑ ↓', 'align the selected blocks at their edges'],
       ['Alt+C  Alt+Shift+C', 'align their centres in a row, in a column'],
