@@ -427,9 +427,9 @@ test('the whole drawing is arranged as one undo step, always the same, and the m
   const after = await entries();
   expect(after).not.toEqual(before);
   await page.keyboard.press('l');
-  expect(await entries()).toEqual(after);
+  await expect.poll(entries).toEqual(after);
   await page.keyboard.press('Control+z');
-  expect(await entries()).toEqual(before);
+  await expect.poll(entries).toEqual(before);
   expect(await matrix(page).textContent()).toBe(entriesBefore);
 });
 

@@ -11,7 +11,8 @@ export default defineConfig({
   fullyParallel: true,
   workers: 2,
   retries: 0,
-  timeout: 30_000,
+  timeout: 60_000,
+  expect: { timeout: 10_000 },
   reporter: 'list',
   use: {
     ...(process.env['POLEWARD_PAGE'] ? { baseURL: process.env['POLEWARD_PAGE'] } : {}),

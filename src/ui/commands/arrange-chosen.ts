@@ -11,8 +11,10 @@ import { countedBlocks } from './chosen-blocks.ts';
  * it is first asked for.
  */
 export async function arrangeChosen(): Promise<boolean> {
-  const { arrangeBlocks } = await import('../../diagram/arranging/index.ts');
   const { selection, document } = store.getState();
+  const { arrangeBlocks } = await import('../../diagram/arranging/index.ts');
+  // An undo or another edit in the meantime was meant for the drawing as it stood: it is not arranged over.
+  if (store.getState().document !== document) return false;
   const sheet = document.diagram;
   if (sheet.blocks.length === 0) {
     actions.notify('There is nothing to arrange yet.');
