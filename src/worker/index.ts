@@ -15,4 +15,6 @@ export type {
   PolesAnswer,
   QuantityValues,
   Question,
+  RevisionAnswer,
 } from './protocol.ts';
+export type { TopicAnswer, TopicName, TopicQuestion, TransferMatrix } from './topics/index.ts';

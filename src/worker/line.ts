@@ -5,19 +5,31 @@
  */
 
 import type { Diagram } from '../diagram/index.ts';
+import type { Result } from '../problem/index.ts';
 import { askOneByOne } from './one-by-one.ts';
-import type { Answer, Channel, FileAnswer, Notation, Question } from './protocol.ts';
+import type { Answer, AskAnswer, Channel, FileAnswer, Notation, Question, RevisionAnswer } from './protocol.ts';
+import type { TopicAnswer, TopicName, TopicQuestion } from './topics/index.ts';
 
 export interface AnalysisLine {
   /** @param isLive  the value is still moving: doubles will do, and every stage is answered before the next question. */
   derive(revision: number, diagram: Diagram, channel: Channel, isLive?: boolean): void;
   chooseChannel(revision: number, channel: Channel): void;
+  /**
+   * Asks on demand about the drawing of a revision that is derived or being derived. Null where the answer was dropped: a
+   * newer drawing or a newer question of the same asker came, there is no model, or the worker died on it.
+   */
+  ask<T extends TopicName>(
+    revision: number,
+    asker: number,
+    topic: T,
+    question: TopicQuestion<T>,
+  ): Promise<Result<TopicAnswer<T>> | null>;
   file(diagram: Diagram, format: string, notation: Notation): Promise<FileAnswer>;
   close(): void;
 }
 
 interface Listener {
-  readonly answer: (answer: Exclude<Answer, FileAnswer>) => void;
+  readonly answer: (answer: RevisionAnswer) => void;
   readonly dead: (message: string) => void;
 }
 
@@ -25,7 +37,8 @@ interface Listener {
 export function openLine(start: () => Worker, listener: Listener): AnalysisLine {
   const files = new Map<number, { question: Question; settle: (answer: FileAnswer) => void }>();
   const derivations = askOneByOne(ask);
-  let nextFile = 0;
+  const asks = new Map<number, (answer: AskAnswer | null) => void>();
+  let nextId = 0;
   let deaths = 0;
   let worker = connect();
 
@@ -33,17 +46,25 @@ export function openLine(start: () => Worker, listener: Listener): AnalysisLine 
     const fresh = start();
     fresh.onmessage = ({ data }: MessageEvent<Answer>) => {
       deaths = 0;
-      if (data.kind !== 'file') {
-        listener.answer(data);
-        return derivations.answered(data);
+      switch (data.kind) {
+        case 'file':
+          files.get(data.id)?.settle(data);
+          return void files.delete(data.id);
+        case 'ask':
+          asks.get(data.id)?.(data);
+          return void asks.delete(data.id);
+        default:
+          listener.answer(data);
+          return derivations.answered(data);
       }
-      files.get(data.id)?.settle(data);
-      files.delete(data.id);
     };
     fresh.onerror = event => {
       event.preventDefault?.();
       fresh.terminate();
       deaths += 1;
+      // What was asked on demand may be what it died of: it is dropped, the derivation asked again.
+      for (const settle of asks.values()) settle(null);
+      asks.clear();
       if (deaths > 1) {
         derivations.forget();
         return listener.dead('The derivation stopped unexpectedly. Undo the last edit to go on.');
@@ -67,8 +88,16 @@ export function openLine(start: () => Worker, listener: Listener): AnalysisLine 
     derive: (revision, diagram, channel, isLive = false) =>
       derivations.ask({ kind: 'derive', revision, diagram, channel, isLive }),
     chooseChannel: (revision, channel) => ask({ kind: 'channel', revision, channel }),
+    ask<T extends TopicName>(revision: number, asker: number, topic: T, question: TopicQuestion<T>) {
+      const id = nextId++;
+      return new Promise<Result<TopicAnswer<T>> | null>(settle => {
+        // The topic's own file made the answer: its type is the table's.
+        asks.set(id, answer => settle((answer?.outcome ?? null) as Result<TopicAnswer<T>> | null));
+        ask({ kind: 'ask', id, revision, asker, topic, question });
+      });
+    },
     file(diagram, format, notation) {
-      const id = nextFile++;
+      const id = nextId++;
       const question: Question = { kind: 'file', id, diagram, format, notation };
       return new Promise(settle => {
         files.set(id, { question, settle });

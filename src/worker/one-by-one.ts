@@ -4,7 +4,7 @@
  * there too, so that they move along, but no later than PATIENCE after the matrices.
  */
 
-import type { Answer, FileAnswer, Question } from './protocol.ts';
+import type { Question, RevisionAnswer } from './protocol.ts';
 
 type Derive = Extract<Question, { kind: 'derive' }>;
 
@@ -14,7 +14,7 @@ const PATIENCE = 120;
 export interface Derivations {
   ask(question: Derive): void;
   /** Takes note of an answer. */
-  answered(answer: Exclude<Answer, FileAnswer>): void;
+  answered(answer: RevisionAnswer): void;
   /** Asks the newest question of a worker just started. */
   askAgain(): void;
   /** Nothing is under way any more, and nothing waits. */

@@ -18,6 +18,7 @@ import type {
 import type { Derivation } from '../compile/index.ts';
 import type { Diagram, PortReference } from '../diagram/index.ts';
 import type { Result, Warning } from '../problem/index.ts';
+import type { TopicName } from './topics/index.ts';
 
 /** Position of an input and an output in the model's lists. */
 export interface Channel {
@@ -44,7 +45,19 @@ export type Question =
       readonly diagram: Diagram;
       readonly format: string;
       readonly notation: Notation;
-    };
+    }
+  | AskQuestion;
+
+/** A question on demand about the drawing of a revision; its topic says what `question` holds. */
+export interface AskQuestion {
+  readonly kind: 'ask';
+  readonly id: number;
+  readonly revision: number;
+  /** Who asks: a newer question of the same asker takes the older one's place. */
+  readonly asker: number;
+  readonly topic: TopicName;
+  readonly question: unknown;
+}
 
 /** Values of quantities for the screen, by parameter name and by block id (of the top sheet, `outer.inner.id` inside groups). */
 export interface QuantityValues {
@@ -114,4 +127,14 @@ export interface FileAnswer {
   readonly outcome: Result<string | Uint8Array<ArrayBuffer>>;
 }
 
-export type Answer = ModelAnswer | PolesAnswer | ChannelAnswer | FrequencyAnswer | CutsAnswer | FileAnswer;
+export interface AskAnswer {
+  readonly kind: 'ask';
+  readonly id: number;
+  /** Null where it was dropped, since a newer question or drawing came, or since there is no model. */
+  readonly outcome: Result<unknown> | null;
+}
+
+/** What an answer is that belongs to a revision and is not awaited by who asked. */
+export type RevisionAnswer = Exclude<Answer, FileAnswer | AskAnswer>;
+
+export type Answer = ModelAnswer | PolesAnswer | ChannelAnswer | FrequencyAnswer | CutsAnswer | FileAnswer | AskAnswer;

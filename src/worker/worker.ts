@@ -4,8 +4,9 @@
  * when they are first needed, after the first matrices. While a value moves, a drawing that takes long is derived in doubles.
  */
 
-import type { StateSpace } from '../compile/index.ts';
+import type { Derivation, StateSpace } from '../compile/index.ts';
 import type { Diagram } from '../diagram/index.ts';
+import { openAsks } from './asks.ts';
 import { modelAnswer } from './model-answer.ts';
 import type { Answer, Channel, Question } from './protocol.ts';
 
@@ -18,16 +19,21 @@ let exactElapsed = 0;
 let newest: Extract<Question, { kind: 'derive' }> | null = null;
 /** The channel chosen since that question. */
 let chosen: Channel | null = null;
-let latest: { readonly revision: number; readonly diagram: Diagram; readonly model: StateSpace } | null = null;
+let latest: { readonly revision: number; readonly diagram: Diagram; readonly derivation: Derivation } | null = null;
+
+const asks = openAsks(send, turn);
 
 self.onmessage = ({ data }: MessageEvent<Question>) => {
   switch (data.kind) {
     case 'derive':
       newest = data;
       chosen = null;
+      asks.overtake(data.revision);
       return void derive(data);
     case 'channel':
       return void channel(data);
+    case 'ask':
+      return asks.ask(data);
     case 'file':
       return void import('./file-answer.ts').then(({ fileAnswer }) => send(fileAnswer(data)));
     default:
@@ -41,10 +47,11 @@ async function derive(question: Extract<Question, { kind: 'derive' }>): Promise<
   const field = question.isLive && exactElapsed > LIVE_LIMIT ? 'double' : 'auto';
   const answer = modelAnswer(question, field);
   if (field === 'auto') exactElapsed = answer.elapsed;
-  latest = answer.outcome.ok ? { ...question, model: answer.outcome.value.model } : null;
+  latest = answer.outcome.ok ? { ...question, derivation: answer.outcome.value } : null;
   send(answer);
-  if (latest === null) return;
-  const { model } = latest;
+  if (latest === null) return asks.settle(question.revision, null);
+  const { derivation } = latest;
+  const { model } = derivation;
   const { channelAnswer, polesAnswer } = await import('./analysis-answers.ts');
   await turn();
   if (newest !== question) return;
@@ -54,6 +61,7 @@ async function derive(question: Extract<Question, { kind: 'derive' }>): Promise<
   send(polesAnswer(question.revision, model));
   await turn();
   if (newest === question) await frequencies(question, model);
+  if (newest === question) asks.settle(question.revision, { diagram: question.diagram, derivation });
 }
 
 /** The answers over frequency, the cuts first since the verdict line shows one. */
@@ -70,10 +78,10 @@ async function channel(question: Extract<Question, { kind: 'channel' }>): Promis
   const { channelAnswer } = await import('./analysis-answers.ts');
   chosen = question.channel;
   if (latest === null) return;
-  send(channelAnswer(latest.revision, latest.model, question.channel));
+  send(channelAnswer(latest.revision, latest.derivation.model, question.channel));
   const { frequencyAnswer } = await import('./frequency-answers.ts');
   if (chosen === question.channel) {
-    send(frequencyAnswer(latest.revision, latest.diagram, latest.model, question.channel));
+    send(frequencyAnswer(latest.revision, latest.diagram, latest.derivation.model, question.channel));
   }
 }
 

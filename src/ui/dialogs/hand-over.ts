@@ -2,8 +2,8 @@
 
 import type { Format } from '../../deliver/index.ts';
 import type { Notation } from '../../worker/index.ts';
+import { derivationLine } from '../answers/index.ts';
 import { copyText } from '../shell/copy-text.ts';
-import { makeFile } from '../shell/derive-on-change.ts';
 import { actions, store } from '../store/index.ts';
 import { fileName, saveFile } from './save-file.ts';
 
@@ -24,7 +24,7 @@ export async function copyFormat(format: Format, notation: Notation): Promise<vo
 }
 
 async function contentOf(format: Format, notation: Notation): Promise<string | Uint8Array<ArrayBuffer> | null> {
-  const { outcome } = await makeFile(store.getState().document.diagram, format.id, notation);
+  const { outcome } = await derivationLine.file(store.getState().document.diagram, format.id, notation);
   if (outcome.ok) return outcome.value;
   actions.notify(outcome.problems[0]?.message ?? 'The file could not be made.', 'refused');
   return null;

@@ -3,20 +3,11 @@
  * other channel when one is chosen. Moving a block or writing a note asks nothing.
  */
 
-import workerAddress from 'virtual:derivation-worker';
 import type { Diagram } from '../../diagram/index.ts';
 import { isSameModel } from '../../diagram/index.ts';
-import { openLine } from '../../worker/index.ts';
-import { actions, type State, store } from '../store/index.ts';
+import { derivationLine } from '../answers/index.ts';
+import { type State, store } from '../store/index.ts';
 import { chosenChannel } from './chosen-channel.ts';
-
-const line = openLine(() => new Worker(workerAddress, { type: 'module', name: 'derivation' }), {
-  answer: actions.takeAnswer,
-  dead: actions.stopResults,
-});
-
-/** Makes a file of the drawing on screen, in the worker. */
-export const makeFile = line.file;
 
 export function followDocument(): void {
   ask(store.getState());
@@ -27,7 +18,7 @@ export function followDocument(): void {
     } else if (now.document !== before.document) {
       if (needsDerivation(before.document.diagram, now.document.diagram)) ask(now);
     } else if (now.view.input !== before.view.input || now.view.output !== before.view.output) {
-      line.chooseChannel(now.document.revision, chosenChannel(now));
+      derivationLine.chooseChannel(now.document.revision, chosenChannel(now));
     }
   });
 }
@@ -39,6 +30,6 @@ function needsDerivation(before: Diagram, now: Diagram): boolean {
 function ask(state: State): void {
   const { document, live } = state;
   const channel = chosenChannel(state);
-  if (live === null) line.derive(document.revision, document.diagram, channel);
-  else line.derive(live.revision, live.diagram, channel, true);
+  if (live === null) derivationLine.derive(document.revision, document.diagram, channel);
+  else derivationLine.derive(live.revision, live.diagram, channel, true);
 }

@@ -5,7 +5,7 @@
 
 import type { Diagram, Edit, Point, Sheet } from '../../diagram/index.ts';
 import type { Problem } from '../../problem/index.ts';
-import type { Answer, Notation } from '../../worker/index.ts';
+import type { Notation, RevisionAnswer } from '../../worker/index.ts';
 import { advanced, type DocumentSlice, edited, opened, redone, undone } from './document.ts';
 import { moved } from './live.ts';
 import { answered } from './results.ts';
@@ -202,7 +202,7 @@ export function notify(text: string, tone: 'said' | 'refused' = 'said'): void {
 }
 
 /** Takes an answer of the worker in. */
-export function takeAnswer(answer: Exclude<Answer, { kind: 'file' }>): void {
+export function takeAnswer(answer: RevisionAnswer): void {
   store.setState(({ results }) => ({ results: answered(results, answer) }));
 }
 

@@ -6,12 +6,12 @@
 import type { Derivation } from '../../compile/index.ts';
 import type { Problem } from '../../problem/index.ts';
 import type {
-  Answer,
   ChannelAnswer,
   CutsAnswer,
   FrequencyAnswer,
   PolesAnswer,
   QuantityValues,
+  RevisionAnswer,
 } from '../../worker/index.ts';
 
 export interface ResultsSlice {
@@ -43,7 +43,7 @@ export const NO_RESULTS: ResultsSlice = {
 };
 
 /** The slice with an answer taken in; an answer for an older revision than the newest one is dropped. */
-export function answered(slice: ResultsSlice, answer: Exclude<Answer, { kind: 'file' }>): ResultsSlice {
+export function answered(slice: ResultsSlice, answer: RevisionAnswer): ResultsSlice {
   if (answer.revision < slice.answered) return slice;
   switch (answer.kind) {
     case 'model':

@@ -3,7 +3,7 @@ import { emptyDiagram } from '../../../src/diagram/index.ts';
 import { fail, problem } from '../../../src/problem/index.ts';
 import { modelAnswer } from '../../../src/worker/model-answer.ts';
 import { askOneByOne } from '../../../src/worker/one-by-one.ts';
-import type { Answer, FileAnswer, Question } from '../../../src/worker/protocol.ts';
+import type { Question, RevisionAnswer } from '../../../src/worker/protocol.ts';
 
 type Derive = Extract<Question, { kind: 'derive' }>;
 
@@ -17,7 +17,7 @@ const question = (revision: number, isLive = false): Derive => ({
 
 const matrices = (revision: number) => modelAnswer(question(revision));
 
-const poles = (revision: number): Exclude<Answer, FileAnswer> => ({
+const poles = (revision: number): RevisionAnswer => ({
   kind: 'poles',
   revision,
   poles: { route: 'floating', poles: [] },

@@ -1,0 +1,4 @@
+/** The line to the worker, and what it answers on demand. */
+
+export { derivationLine } from './derivation-line.ts';
+export { type Answered, useAnswer } from './useAnswer.ts';

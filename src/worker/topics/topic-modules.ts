@@ -1,0 +1,8 @@
+/** Where the worker loads each topic from, on its first question. */
+
+import type { TopicModule } from './topic.ts';
+import type { TopicName, Topics } from './topics.ts';
+
+export const TOPIC_MODULES: { readonly [T in TopicName]: () => Promise<TopicModule<Topics[T]>> } = {
+  'transfer-matrix': () => import('./transfer-matrix.ts'),
+};

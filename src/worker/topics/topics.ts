@@ -1,0 +1,11 @@
+/** The table of topics: their types for both ends of the line. Where each is loaded from stands in topic-modules.ts. */
+
+import type { TransferMatrixTopic } from './transfer-matrix.ts';
+
+export interface Topics {
+  readonly 'transfer-matrix': TransferMatrixTopic;
+}
+
+export type TopicName = keyof Topics;
+export type TopicQuestion<T extends TopicName> = Topics[T]['question'];
+export type TopicAnswer<T extends TopicName> = Topics[T]['answer'];
