@@ -18,6 +18,16 @@ export { MAXIMUM_BYTES } from './limits.ts';
 export { portCounts } from './port-counts.ts';
 export { type QuantityField, quantityFields } from './quantities.ts';
 export { readDiagram } from './reading/index.ts';
+export {
+  boundOf,
+  REQUIREMENT_KIND_NAMES,
+  type Requirement,
+  type RequirementKind,
+  type RequirementRule,
+  type RequirementSubject,
+  requirementRule,
+  requirementText,
+} from './requirements/index.ts';
 export { isSameModel } from './same-model.ts';
 export { startingDrawing, type WorkedDrawing, workedDrawings } from './starting-drawings/index.ts';
 export { blockTitle, blockTitleAtStart, displayName } from './titles.ts';

@@ -9,6 +9,9 @@ export const MOST_BLOCKS = 20_000;
 /** Parameters of a drawing. */
 export const MOST_PARAMETERS = 5_000;
 
+/** Requirements of a drawing. */
+export const MOST_REQUIREMENTS = 200;
+
 /** Groups inside one another (format.md: at most 32 deep). */
 export const DEEPEST_GROUP = 32;
 

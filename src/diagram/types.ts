@@ -3,6 +3,8 @@
  * pure function Diagram → Diagram that keeps the identity of what it did not change.
  */
 
+import type { Requirement } from './requirements/index.ts';
+
 /** Arithmetic as text, exact (format.md, Expressions). A JSON number in a file becomes its shortest decimal. */
 export type Quantity = string;
 
@@ -141,4 +143,6 @@ export interface Diagram extends Sheet {
   readonly parameters: readonly Parameter[];
   /** Absent where there is none. */
   readonly cuts?: readonly Cut[];
+  /** What the loop has to do; absent where nothing is asked of it. */
+  readonly requirements?: readonly Requirement[];
 }

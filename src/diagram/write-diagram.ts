@@ -1,5 +1,6 @@
 /** Documents to text: the fields in one order, so that the same document gives the same bytes and a change one line. */
 
+import type { Requirement } from './requirements/index.ts';
 import type { Block, Cut, Diagram, Parameter, Sheet, Wire } from './types.ts';
 
 /** Keys of a block in the order they are written; a group's sheet comes last. */
@@ -27,6 +28,7 @@ const BLOCK_KEYS = [
 ] as const;
 const WIRE_KEYS = ['from', 'to', 'name', 'via'] as const;
 const CUT_KEYS = ['to', 'name'] as const;
+const REQUIREMENT_KEYS = ['kind', 'input', 'output', 'cut', 'band', 'most', 'least', 'tolerances', 'note'] as const;
 const PARAMETER_KEYS = ['name', 'value', 'unit', 'tolerance', 'note', 'range'] as const;
 const HEAD_KEYS = ['format', 'version', 'title', 'revision', 'date', 'author', 'notes'] as const;
 
@@ -35,7 +37,11 @@ export function writeDiagram(diagram: Diagram): string {
   const head = HEAD_KEYS.flatMap(key => (diagram[key] === undefined ? [] : [`  ${member(key, diagram[key])}`]));
   const lists = [list('parameters', diagram.parameters.map(oneLine(PARAMETER_KEYS)), 1), ...sheetLists(diagram, 1)];
   const cuts = diagram.cuts === undefined ? [] : [list('cuts', diagram.cuts.map(oneLine(CUT_KEYS)), 1)];
-  return `{\n${[...head, ...lists, ...cuts].join(',\n')}\n}\n`;
+  const requirements =
+    diagram.requirements === undefined
+      ? []
+      : [list('requirements', diagram.requirements.map(oneLine(REQUIREMENT_KEYS)), 1)];
+  return `{\n${[...head, ...lists, ...cuts, ...requirements].join(',\n')}\n}\n`;
 }
 
 /** The same document without a space, for links. */
@@ -45,6 +51,9 @@ export function minifyDiagram(diagram: Diagram): string {
     parameters: diagram.parameters.map(parameter => inOrder(parameter, PARAMETER_KEYS)),
     ...minifySheet(diagram),
     ...(diagram.cuts === undefined ? {} : { cuts: diagram.cuts.map(cut => inOrder(cut, CUT_KEYS)) }),
+    ...(diagram.requirements === undefined
+      ? {}
+      : { requirements: diagram.requirements.map(requirement => inOrder(requirement, REQUIREMENT_KEYS)) }),
   });
 }
 
@@ -79,7 +88,7 @@ function spaced(value: unknown): string {
   return JSON.stringify(value);
 }
 
-function oneLine(keys: readonly string[]): (fields: Parameter | Wire | Block | Cut) => string {
+function oneLine(keys: readonly string[]): (fields: Parameter | Wire | Block | Cut | Requirement) => string {
   return fields => {
     const members = Object.entries(inOrder(fields, keys)).map(([key, value]) => member(key, value));
     return `{ ${members.join(', ')} }`;

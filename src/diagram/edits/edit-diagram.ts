@@ -29,6 +29,7 @@ import {
   setParameter,
   setTitleFields,
 } from './parameter-edits.ts';
+import { addRequirement, removeRequirement, setRequirement, withRequirementsOnNames } from './requirement-edits.ts';
 import { changeSheet } from './sheets.ts';
 import { connect, disconnect, insertOnWire, moveWireEnd, nameWire, setVia } from './wire-edits.ts';
 
@@ -51,6 +52,12 @@ export function editDiagram(diagram: Diagram, edit: Edit): Result<Diagram> {
       return addCut(diagram, edit);
     case 'removeCut':
       return removeCut(diagram, edit);
+    case 'addRequirement':
+      return addRequirement(diagram, edit);
+    case 'setRequirement':
+      return setRequirement(diagram, edit);
+    case 'removeRequirement':
+      return removeRequirement(diagram, edit);
     default:
       return onSheet(diagram, edit);
   }
@@ -59,7 +66,7 @@ export function editDiagram(diagram: Diagram, edit: Edit): Result<Diagram> {
 function onSheet(diagram: Diagram, edit: SheetEdit): Result<Diagram> {
   const changed = changeSheet(diagram, edit.at ?? [], sheet => editSheet(sheet, edit));
   if (!changed.ok || changed.value === diagram) return changed;
-  const whole = withCutsOnWires(changed.value, edit);
+  const whole = withRequirementsOnNames(diagram, withCutsOnWires(changed.value, edit));
   return CAN_CLASH.has(edit.kind) ? checked(whole) : ok(whole);
 }
 

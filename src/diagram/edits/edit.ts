@@ -1,5 +1,6 @@
 /** Every change that a hand can make to a drawing, as plain data. */
 
+import type { Requirement } from '../requirements/index.ts';
 import type { Block, Parameter, Point, PortReference, Quantity, Wire } from '../types.ts';
 
 /** Ids of the groups that lead to a sheet, outermost first; the top sheet where it is empty. */
@@ -176,6 +177,23 @@ export interface RemoveCut {
   readonly to: PortReference;
 }
 
+/** A requirement at a place in the list, last where none is given. */
+export interface AddRequirement {
+  readonly kind: 'addRequirement';
+  readonly requirement: Requirement;
+  readonly index?: number;
+}
+/** Another requirement in the place of one. */
+export interface SetRequirement {
+  readonly kind: 'setRequirement';
+  readonly index: number;
+  readonly requirement: Requirement;
+}
+export interface RemoveRequirement {
+  readonly kind: 'removeRequirement';
+  readonly index: number;
+}
+
 /** An edit of what stands on one sheet. */
 export type SheetEdit =
   | AddBlock
@@ -205,6 +223,9 @@ export type DrawingEdit =
   | ReorderParameters
   | SetTitleFields
   | AddCut
-  | RemoveCut;
+  | RemoveCut
+  | AddRequirement
+  | SetRequirement
+  | RemoveRequirement;
 
 export type Edit = SheetEdit | DrawingEdit;

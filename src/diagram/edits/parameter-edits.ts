@@ -13,6 +13,7 @@ import type {
   SetParameter,
   SetTitleFields,
 } from './edit.ts';
+import { renamedInBounds, withRequirements } from './requirement-edits.ts';
 
 function nameFault({ parameters }: Diagram, name: string): Problem | null {
   const fault = parameterNameFault(name);
@@ -70,11 +71,13 @@ export function renameParameter(diagram: Diagram, { from, to }: RenameParameter)
   const fault = nameFault(diagram, to);
   if (fault !== null) return fail(fault);
   const rename = (text: string) => renameIn(text, from, to);
-  return ok({
+  const changed = {
     ...diagram,
     parameters: keepSame(diagram.parameters, parameter => renamed(parameter, from, to)),
     blocks: keepSame(diagram.blocks, block => renamedBlock(block, rename)),
-  });
+  };
+  const { requirements } = diagram;
+  return ok(requirements === undefined ? changed : withRequirements(changed, renamedInBounds(requirements, rename)));
 }
 
 function renamed(parameter: Parameter, from: string, to: string): Parameter {

@@ -5,7 +5,8 @@
 
 import * as v from 'valibot';
 import { onOneLine, quote } from '../../expression/index.ts';
-import { DEEPEST_GROUP, MOST_BLOCKS, MOST_PARAMETERS } from '../limits.ts';
+import { DEEPEST_GROUP, MOST_BLOCKS, MOST_PARAMETERS, MOST_REQUIREMENTS } from '../limits.ts';
+import { type Requirement, readRequirement } from '../requirements/index.ts';
 import { KIND_WORDS } from '../titles.ts';
 import type { Block, BlockKind, Cut, Diagram, Parameter, Sheet, Wire } from '../types.ts';
 import { blockSchemas, cutSchema, parameterSchema, textSchema, wireSchema } from './block-schemas.ts';
@@ -34,9 +35,17 @@ export function readShape(value: unknown, reading: Reading): Diagram | null {
   const parameters = readParameters(own(value, 'parameters'), reading);
   const sheet = readSheet(value, TOP_SHEET, reading);
   const cuts = readCuts(own(value, 'cuts') ?? [], reading);
+  const requirements = readRequirements(own(value, 'requirements') ?? [], reading);
   if (sheet === null || reading.problems.length > 0) return null;
-  const drawing = { format: 'poleward-diagram', version: 1, ...texts, parameters, ...sheet } as const;
-  return cuts.length === 0 ? drawing : { ...drawing, cuts };
+  return {
+    format: 'poleward-diagram',
+    version: 1,
+    ...texts,
+    parameters,
+    ...sheet,
+    ...(cuts.length === 0 ? {} : { cuts }),
+    ...(requirements.length === 0 ? {} : { requirements }),
+  };
 }
 
 function otherFormat(value: unknown): string {
@@ -88,6 +97,20 @@ function readCuts(value: unknown, reading: Reading): readonly Cut[] {
     const parsed = v.safeParse(cutSchema, item);
     if (parsed.success) return [withoutBlanks(parsed.output, ['name'])];
     note(reading, 'bad-value', `The cut at place ${i + 1}: ${whatIsWrong(parsed.issues[0])}`);
+    return [];
+  });
+}
+
+function readRequirements(value: unknown, reading: Reading): readonly Requirement[] {
+  const items = readList(value, 'The diagram: "requirements" is not a list.', reading);
+  if (items.length > MOST_REQUIREMENTS) {
+    note(reading, 'too-large', `The diagram has ${items.length} requirements, ${MOST_REQUIREMENTS} at most are read.`);
+    return [];
+  }
+  return items.flatMap((item, i) => {
+    const { requirement, fault } = readRequirement(item);
+    if (requirement !== null) return [requirement];
+    note(reading, 'bad-value', `The requirement at place ${i + 1}: ${fault}`);
     return [];
   });
 }

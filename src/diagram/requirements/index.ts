@@ -1,0 +1,11 @@
+/** What a drawing is required to do: the list, its kinds, and how one is said and read. */
+
+export { boundOf, type Requirement, requirementText } from './requirement.ts';
+export {
+  REQUIREMENT_KIND_NAMES,
+  type RequirementKind,
+  type RequirementRule,
+  type RequirementSubject,
+  requirementRule,
+} from './requirement-kinds.ts';
+export { readRequirement } from './requirement-shape.ts';
