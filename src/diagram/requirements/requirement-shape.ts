@@ -12,12 +12,15 @@ import {
   requirementRule,
 } from './requirement-kinds.ts';
 
+const BAND = 'two quantities: ["1", "10"]';
+const bandEnd = v.union(quantitySchema.options, BAND);
+
 const schema = v.object({
   kind: textSchema,
   input: v.exactOptional(nameSchema),
   output: v.exactOptional(nameSchema),
   cut: v.exactOptional(nameSchema),
-  band: v.exactOptional(v.union([v.strictTuple([quantitySchema, quantitySchema])], 'two quantities: ["1", "10"]')),
+  band: v.exactOptional(v.strictTuple([bandEnd, bandEnd], BAND)),
   most: v.exactOptional(quantitySchema),
   least: v.exactOptional(quantitySchema),
   tolerances: v.exactOptional(v.boolean('true or false')),
