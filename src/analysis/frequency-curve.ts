@@ -10,15 +10,14 @@ import {
   scalePolynomial,
   subtractPolynomials,
 } from '../algebra/index.ts';
-import { directResponse, type StateSpace } from '../compile/index.ts';
+import type { StateSpace } from '../compile/index.ts';
 import type { Diagram } from '../diagram/index.ts';
 import { positiveFrequencies, squaredMagnitude } from './axis-polynomials.ts';
 import { zerosBetween } from './bracketing.ts';
-import { exactModel } from './exact-model.ts';
 import { frequencyGrid, type GridRequest } from './frequency-grid.ts';
-import { channelResponse, type Response } from './frequency-response.ts';
-import { poles, type Root, rootsOf } from './poles.ts';
-import { reducedFraction } from './transfer-functions.ts';
+import type { Response } from './frequency-response.ts';
+import type { Root } from './poles.ts';
+import { trueResponse } from './true-response.ts';
 
 export interface FrequencyCurve {
   /** rad/s, ascending. */
@@ -46,28 +45,13 @@ export function channelFrequency(
   model: StateSpace,
   channel: { readonly input: number; readonly output: number },
 ): ChannelFrequency {
-  const direct = directResponse(diagram);
-  const deadTimes = direct.ok ? direct.value.deadTimes : [];
-  const exact = exactModel(model, 'ordinary');
-  const fraction = exact === null ? null : reducedFraction(exact, channel.output, channel.input);
-  const features =
-    fraction === null
-      ? poles(model).poles
-      : [...(rootsOf(fraction.numerator) ?? []), ...(rootsOf(fraction.denominator) ?? [])];
-  const inModel = channelResponse(model, channel);
-  const isDirect = direct.ok && deadTimes.length > 0;
-  const valueAt: Response = isDirect
-    ? omega => {
-        if (omega === 0) return inModel.valueAt(0);
-        const value = direct.value.at({ re: 0, im: omega }, channel.input)?.[channel.output];
-        return value === undefined ? null : [value.re, value.im];
-      }
-    : inModel.valueAt;
+  const { valueAt, route, features, deadTimes, fraction } = trueResponse(diagram, model, channel);
   const grid = { features, deadTimes, margin: DRAWN };
+  const isExact = fraction !== null && route !== 'direct';
   return {
     curve: frequencyCurve(valueAt, grid, orderAtZero(features, fraction?.numerator)),
-    route: isDirect ? 'direct' : inModel.route,
-    bandwidth: fraction !== null && !isDirect ? exactBandwidth(fraction) : bandwidthOn(valueAt, grid),
+    route,
+    bandwidth: isExact ? exactBandwidth(fraction) : bandwidthOn(valueAt, grid),
   };
 }
 

@@ -20,6 +20,7 @@ export { margins } from './margins.ts';
 export { dampingRatio, naturalFrequency, timeConstant } from './pole-figures.ts';
 export type { PoleSet, Root } from './poles.ts';
 export { poles } from './poles.ts';
+export { type Assessment, assess } from './requirements/index.ts';
 export type { Stability } from './stability.ts';
 export { stability } from './stability.ts';
 export type { StepMetrics } from './step-metrics.ts';
