@@ -26,3 +26,4 @@ export type { ResponseFunction, ResponseSystem } from './hessenberg-response.ts'
 export { responseOf } from './hessenberg-response.ts';
 export type { LuFactors } from './lu.ts';
 export { luDeterminant, luFactors, luSolve } from './lu.ts';
+export { randomSigned } from './random.ts';

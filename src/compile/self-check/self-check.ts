@@ -5,10 +5,11 @@
 
 import type { Diagram } from '../../diagram/index.ts';
 import type { Scope } from '../../expression/index.ts';
+import { randomSigned } from '../../numeric/index.ts';
 import type { SelfCheck, StateSpace } from '../state-space.ts';
 import { type Complex, modulus } from './complex.ts';
 import { testFrequencies } from './frequencies.ts';
-import { awayFromZero, type Jitter, jitterOf, randomSigned } from './random.ts';
+import { awayFromZero, type Jitter, jitterOf } from './random.ts';
 import { type RawDrawing, rawDrawing } from './raw-drawing.ts';
 import { jittered, type RawLaw } from './raw-laws.ts';
 import { type Residual, residuals } from './residuals.ts';
