@@ -29,6 +29,23 @@ export type { HiddenMode, Structural } from './structure.ts';
 export { hiddenModes, isControllable, isObservable, kalmanRanks } from './structure.ts';
 export type { ResponseRequest, StepResponse, TimeResponse } from './time-response.ts';
 export { initialStateResponse, stepResponse, stepValuesAt, timeResponse } from './time-response.ts';
+export {
+  DEFAULT_SAMPLES,
+  type Envelope,
+  type EnvelopeRequest,
+  envelopeOf,
+  type JudgedPoint,
+  judgePoint,
+  MOST_SAMPLES,
+  type PointAssessment,
+  type TolerancePlan,
+  type TolerancePoint,
+  type ToleratedParameter,
+  tolerancePlan,
+  valuesAt,
+  type WorstCase,
+  worstCases,
+} from './tolerances/index.ts';
 export type { ReducedFraction, TransferFunction } from './transfer-functions.ts';
 export { allTransferFunctions, transferFunction } from './transfer-functions.ts';
 export type { ZeroSet } from './zeros.ts';

@@ -9,6 +9,7 @@ import { modelWarnings, oneLine } from '../deliver/index.ts';
 import type { Diagram } from '../diagram/index.ts';
 import { exitStatus, fail, ok, type Problem, problem, type Result, type Warning } from '../problem/index.ts';
 import { encodeLink } from '../share/index.ts';
+import { type CheckLine, checkDrawing } from './check.ts';
 import type { Io } from './io.ts';
 import { readDrawing } from './read-drawing.ts';
 import { type Request, readRequest } from './request.ts';
@@ -16,20 +17,23 @@ import { withSettings } from './settings.ts';
 import { usage } from './usage.ts';
 
 type Derive = Extract<Request, { command: 'derive' }>;
+type Check = Extract<Request, { command: 'check' }>;
 
-/** Exit status of a fault of the program itself; format.md gives 0, 2 and 3 to what a user can cause. */
+const DONE = 0;
+
+/** Exit status of a fault of the program itself; 0, 2, 3 and 4 are given to what a user can cause. */
 const FAULT = 1;
 
 /**
  * Answers the arguments (without the program's own name).
  *
- * @returns the exit status: 0 done, 2 the input cannot be used, 3 the drawing has no state-space model.
+ * @returns the exit status: 0 done, 2 the input cannot be used, 3 the drawing has no state-space model, 4 a requirement is missed.
  */
 export async function main(argv: readonly string[], io: Io): Promise<number> {
   try {
     const request = readRequest(argv);
     const outcome = request.ok ? await answer(request.value, io) : request;
-    if (outcome.ok) return 0;
+    if (outcome.ok) return outcome.value;
     for (const line of outcome.problems.map(lineOf)) io.complain(line);
     return exitStatus(outcome.problems);
   } catch (fault) {
@@ -39,7 +43,8 @@ export async function main(argv: readonly string[], io: Io): Promise<number> {
   }
 }
 
-async function answer(request: Request, io: Io): Promise<Result<null>> {
+/** The exit status of an answer that was given. */
+async function answer(request: Request, io: Io): Promise<Result<number>> {
   switch (request.command) {
     case 'help':
       return printed(usage(), io);
@@ -48,7 +53,7 @@ async function answer(request: Request, io: Io): Promise<Result<null>> {
     case 'derive':
       return derive(request, io);
     case 'check':
-      return check(await readDrawing(request.source, io), io);
+      return check(await readDrawing(request.source, io), request, io);
     case 'link':
       return link(await readDrawing(request.source, io), io);
     default:
@@ -56,7 +61,7 @@ async function answer(request: Request, io: Io): Promise<Result<null>> {
   }
 }
 
-async function derive(request: Derive, io: Io): Promise<Result<null>> {
+async function derive(request: Derive, io: Io): Promise<Result<number>> {
   const { format, out } = request;
   if (format.isBinary && out === null && io.isTerminal) {
     return fail(
@@ -67,7 +72,9 @@ async function derive(request: Derive, io: Io): Promise<Result<null>> {
   const set = drawing.ok ? withSettings(drawing.value, request.settings) : drawing;
   const content = set.ok ? written(set.value, request, io) : set;
   if (!content.ok) return content;
-  return out === null ? printed(content.value, io) : io.replaceFile(out, content.value);
+  if (out === null) return printed(content.value, io);
+  const replaced = await io.replaceFile(out, content.value);
+  return replaced.ok ? ok(DONE) : replaced;
 }
 
 function written(diagram: Diagram, { format, notation }: Derive, io: Io): Result<string | Uint8Array> {
@@ -81,23 +88,27 @@ function written(diagram: Diagram, { format, notation }: Derive, io: Io): Result
   return ok(format.write({ diagram, derivation: derivation.value, notation }));
 }
 
-async function check(drawing: Result<Diagram>, io: Io): Promise<Result<null>> {
-  const derivation = drawing.ok ? compile(drawing.value) : drawing;
-  if (!derivation.ok) return derivation;
-  const lines = modelWarnings(derivation.value).map(lineOf);
-  return printed(lines.map(line => `${line}\n`).join(''), io);
+/** Exit status where a requirement of the drawing is missed. */
+const MISSED = 4;
+
+async function check(drawing: Result<Diagram>, request: Check, io: Io): Promise<Result<number>> {
+  const checked = drawing.ok ? checkDrawing(drawing.value, request) : drawing;
+  if (!checked.ok) return checked;
+  const { lines, isMissed } = checked.value;
+  await io.print(lines.map(line => `${lineOf(line)}\n`).join(''));
+  return ok(isMissed ? MISSED : DONE);
 }
 
-async function link(drawing: Result<Diagram>, io: Io): Promise<Result<null>> {
+async function link(drawing: Result<Diagram>, io: Io): Promise<Result<number>> {
   return drawing.ok ? printed(`${encodeLink(drawing.value)}\n`, io) : drawing;
 }
 
-async function printed(content: string | Uint8Array, io: Io): Promise<Result<null>> {
+async function printed(content: string | Uint8Array, io: Io): Promise<Result<number>> {
   await io.print(content);
-  return ok(null);
+  return ok(DONE);
 }
 
 /** `poleward: WHAT: message` on one line, whatever a name in it may hold. */
-function lineOf({ code, message }: Problem | Warning): string {
+function lineOf({ code, message }: Problem | Warning | CheckLine): string {
   return `poleward: ${code}: ${oneLine(message)}`;
 }

@@ -3,6 +3,7 @@
  * `bad-option` that names the argument and what would do.
  */
 
+import { DEFAULT_SAMPLES, MOST_SAMPLES } from '../analysis/index.ts';
 import { FORMATS, type Format, type Notation } from '../deliver/index.ts';
 import { nearestName } from '../expression/index.ts';
 import { fail, ok, problem, type Result } from '../problem/index.ts';
@@ -11,7 +12,14 @@ import { isLink } from '../share/index.ts';
 export type Request =
   | { readonly command: 'help' }
   | { readonly command: 'version' }
-  | { readonly command: 'check'; readonly source: string }
+  | {
+      readonly command: 'check';
+      readonly source: string;
+      /** Whether every requirement is judged over the whole tolerance of the parameters. */
+      readonly tolerances: boolean;
+      readonly samples: number;
+      readonly seed: number;
+    }
   | { readonly command: 'link'; readonly source: string }
   | {
       readonly command: 'derive';
@@ -30,8 +38,13 @@ export interface Setting {
 }
 
 const COMMANDS = ['derive', 'check', 'link'] as const;
-const OPTIONS_WITH_VALUE = ['--as', '--out', '--notation', '--set'] as const;
-const OPTIONS = [...OPTIONS_WITH_VALUE, '--help', '--version'] as const;
+const OPTIONS_OF = {
+  derive: ['--as', '--out', '--notation', '--set'],
+  check: ['--tolerances', '--samples', '--seed'],
+  link: [],
+} as const;
+const WITHOUT_VALUE = ['--tolerances', '--help', '--version'] as const;
+const OPTIONS = [...OPTIONS_OF.derive, ...OPTIONS_OF.check, '--help', '--version'] as const;
 const NOTATIONS: readonly Notation[] = ['symbols', 'fractions', 'decimals'];
 
 /** Options in the order given, and what is no option. */
@@ -53,9 +66,13 @@ export function readRequest(argv: readonly string[]): Result<Request> {
   if (command === undefined) return refuse(`There is no command "${name}". ${suggestion(name, COMMANDS)}`);
   if (source === undefined) return refuse(`${command} needs a drawing. Write a file, a share link or - after it.`);
   if (more.length > 0) return refuse(`${command} takes one drawing, and "${more[0]}" is one too many. Leave it out.`);
+  const foreign = options.find(({ name: option }) => !OPTIONS_OF[command].some(known => known === option));
+  if (foreign !== undefined) {
+    const owner = COMMANDS.find(each => OPTIONS_OF[each].some(known => known === foreign.name)) ?? 'derive';
+    return refuse(`${command} takes no ${foreign.name}. Only ${owner} does.`);
+  }
   if (command === 'derive') return deriveRequest(source, options);
-  const [option] = options;
-  if (option !== undefined) return refuse(`${command} takes no ${option.name}. Only derive does.`);
+  if (command === 'check') return checkRequest(source, options);
   if (command === 'link' && isLink(source))
     return refuse('link makes a link of a file or of -, and this is one already.');
   return ok({ command, source });
@@ -76,9 +93,13 @@ function splitArguments(argv: readonly string[]): Result<Split> {
     }
     const [written = '', ...rest] = argument.split('=');
     const name = OPTIONS.find(known => known === written);
-    if (name === undefined) return refuse(`There is no option ${written}. ${suggestion(written, OPTIONS)}`);
+    if (name === undefined) {
+      const nearest = nearestName(written, OPTIONS);
+      const way = nearest === null ? '--help lists them.' : `Did you mean ${nearest}?`;
+      return refuse(`There is no option ${written}. ${way}`);
+    }
     const attached = rest.length > 0 ? rest.join('=') : null;
-    const takesValue = OPTIONS_WITH_VALUE.some(known => known === name);
+    const takesValue = !WITHOUT_VALUE.some(known => known === name);
     if (!takesValue && attached !== null) return refuse(`${name} takes no value. Leave out "=${attached}".`);
     const value = !takesValue ? '' : (attached ?? argv[++i]);
     if (value === undefined) return refuse(`${name} needs a value after it. ${VALUES_OF[name] ?? ''}`.trim());
@@ -92,7 +113,35 @@ const VALUES_OF: Readonly<Partial<Record<string, string>>> = {
   '--out': 'Write the path of the file to write.',
   '--notation': `Write ${alternatives(NOTATIONS)}.`,
   '--set': 'Write NAME=EXPR, for instance Kp=2/3.',
+  '--samples': 'Write how many points to draw at random.',
+  '--seed': 'Write a whole number; the same one gives the same points.',
 };
+
+/** Seeds that the generator takes: 1 to 2³¹ − 2. */
+const LARGEST_SEED = 2 ** 31 - 2;
+
+function checkRequest(source: string, options: Split['options']): Result<Request> {
+  const samples = wholeNumber(options, '--samples', DEFAULT_SAMPLES, 0, MOST_SAMPLES);
+  if (!samples.ok) return samples;
+  const seed = wholeNumber(options, '--seed', 1, 1, LARGEST_SEED);
+  if (!seed.ok) return seed;
+  const tolerances = options.some(({ name }) => name === '--tolerances');
+  return ok({ command: 'check', source, tolerances, samples: samples.value, seed: seed.value });
+}
+
+function wholeNumber(
+  options: Split['options'],
+  option: string,
+  absent: number,
+  least: number,
+  most: number,
+): Result<number> {
+  const text = options.findLast(({ name }) => name === option)?.value;
+  if (text === undefined) return ok(absent);
+  const value = /^\d+$/.test(text) ? Number(text) : Number.NaN;
+  if (value >= least && value <= most) return ok(value);
+  return refuse(`${option} "${text}" is no whole number from ${least} to ${most}.`);
+}
 
 function deriveRequest(source: string, options: Split['options']): Result<Request> {
   const last = (name: string) => options.findLast(option => option.name === name)?.value;

@@ -17,7 +17,13 @@ function requestOf(...argv: string[]) {
 
 describe('arguments', () => {
   test('name a command and a drawing', () => {
-    expect(requestOf('check', 'loop.poleward.json')).toEqual({ command: 'check', source: 'loop.poleward.json' });
+    expect(requestOf('check', 'loop.poleward.json')).toEqual({
+      command: 'check',
+      source: 'loop.poleward.json',
+      tolerances: false,
+      samples: 200,
+      seed: 1,
+    });
     expect(requestOf('link', '-')).toEqual({ command: 'link', source: '-' });
     expect(requestOf('derive', '#d1=abc')).toMatchObject({
       command: 'derive',
@@ -42,8 +48,16 @@ describe('arguments', () => {
     });
   });
 
+  test('say of check how tolerances are sampled', () => {
+    expect(requestOf('check', 'a', '--tolerances', '--samples', '0', '--seed=7')).toMatchObject({
+      tolerances: true,
+      samples: 0,
+      seed: 7,
+    });
+  });
+
   test('after -- are no options', () => {
-    expect(requestOf('check', '--', '--odd.json')).toEqual({ command: 'check', source: '--odd.json' });
+    expect(requestOf('check', '--', '--odd.json')).toMatchObject({ command: 'check', source: '--odd.json' });
   });
 
   test('ask for help and version whatever else they hold', () => {
@@ -61,7 +75,7 @@ describe('arguments are refused', () => {
     [['derive'], 'derive needs a drawing. Write a file, a share link or - after it.'],
     [['check', 'a', 'b'], 'check takes one drawing, and "b" is one too many. Leave it out.'],
     [['derive', 'a', '--otu', 'b'], 'There is no option --otu. Did you mean --out?'],
-    [['derive', 'a', '-x'], 'There is no option -x. Write --as, --out, --notation, --set, --help or --version.'],
+    [['derive', 'a', '-x'], 'There is no option -x. --help lists them.'],
     [['derive', 'a', '--out'], '--out needs a value after it. Write the path of the file to write.'],
     [['derive', 'a', '--as'], `--as needs a value after it. Write one of ${formats} or diagram.`],
     [['derive', 'a', '--set'], '--set needs a value after it. Write NAME=EXPR, for instance Kp=2/3.'],
@@ -73,6 +87,11 @@ describe('arguments are refused', () => {
     [['derive', 'a', '--set', '=1'], '--set "=1" sets nothing. Write NAME=EXPR, for instance Kp=2/3.'],
     [['derive', 'a', '--help=yes'], '--help takes no value. Leave out "=yes".'],
     [['check', 'a', '--as', 'csv'], 'check takes no --as. Only derive does.'],
+    [['link', 'a', '--tolerances'], 'link takes no --tolerances. Only check does.'],
+    [['derive', 'a', '--seed', '1'], 'derive takes no --seed. Only check does.'],
+    [['check', 'a', '--samples'], '--samples needs a value after it. Write how many points to draw at random.'],
+    [['check', 'a', '--samples', '1e3'], '--samples "1e3" is no whole number from 0 to 100000.'],
+    [['check', 'a', '--seed', '0'], '--seed "0" is no whole number from 1 to 2147483646.'],
     [['link', '#d1=abc'], 'link makes a link of a file or of -, and this is one already.'],
   ])('%j', (argv, message) => {
     expect(refusals(...argv)).toEqual([`bad-option: ${message}`]);
