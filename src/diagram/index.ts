@@ -32,6 +32,7 @@ export { isSameModel } from './same-model.ts';
 export { startingDrawing, type WorkedDrawing, workedDrawings } from './starting-drawings/index.ts';
 export { blockTitle, blockTitleAtStart, displayName } from './titles.ts';
 export type {
+  Annotation,
   Block,
   BlockKind,
   Cut,

@@ -33,5 +33,15 @@ export const FARTHEST_PLACE = 1_000_000;
 /** Characters of a block's or signal's name. */
 export const LONGEST_NAME = 200;
 
+/** Annotations of one sheet. */
+export const MOST_ANNOTATIONS = 2_000;
+
+/** Characters of an annotation's text: some three pages. */
+export const LONGEST_ANNOTATION = 10_000;
+
+/** An annotation's width and height, sheet units: from one square to what the farthest places are apart. */
+export const SMALLEST_ANNOTATION = 20;
+export const LARGEST_ANNOTATION = 2 * FARTHEST_PLACE;
+
 /** Problems that one reading reports; after a hundred, more are no help. */
 export const MOST_PROBLEMS = 100;

@@ -107,10 +107,25 @@ export interface Wire {
   readonly via?: readonly Point[];
 }
 
+/** What stands on a sheet for the reader alone: a text, or a frame around blocks with its title. */
+export interface Annotation {
+  /** As a block's id, unique among the sheet's annotations. */
+  readonly id: string;
+  readonly kind: 'text' | 'frame';
+  /** The upper left corner. */
+  readonly at: Point;
+  /** Sheet units. A text is set in its width, and takes more height where it needs it. */
+  readonly size: readonly [width: number, height: number];
+  /** The text, or the title of the frame; may be empty. */
+  readonly text: string;
+}
+
 /** Blocks and wires in document order: states, inputs and outputs take theirs from it. */
 export interface Sheet {
   readonly blocks: readonly Block[];
   readonly wires: readonly Wire[];
+  /** From the lowest to the uppermost, all behind wires and blocks. Absent where there is none. */
+  readonly annotations?: readonly Annotation[];
 }
 
 export interface Parameter {

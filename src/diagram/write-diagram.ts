@@ -1,7 +1,7 @@
 /** Documents to text: the fields in one order, so that the same document gives the same bytes and a change one line. */
 
 import type { Requirement } from './requirements/index.ts';
-import type { Block, Cut, Diagram, Parameter, Sheet, Wire } from './types.ts';
+import type { Annotation, Block, Cut, Diagram, Parameter, Sheet, Wire } from './types.ts';
 
 /** Keys of a block in the order they are written; a group's sheet comes last. */
 const BLOCK_KEYS = [
@@ -27,6 +27,7 @@ const BLOCK_KEYS = [
   'note',
 ] as const;
 const WIRE_KEYS = ['from', 'to', 'name', 'via'] as const;
+const ANNOTATION_KEYS = ['id', 'kind', 'at', 'size', 'text'] as const;
 const CUT_KEYS = ['to', 'name'] as const;
 const REQUIREMENT_KEYS = ['kind', 'input', 'output', 'cut', 'band', 'most', 'least', 'tolerances', 'note'] as const;
 const PARAMETER_KEYS = ['name', 'value', 'unit', 'tolerance', 'note', 'range'] as const;
@@ -60,6 +61,7 @@ export function minifyDiagram(diagram: Diagram): string {
 interface MinifiedSheet {
   readonly blocks: readonly object[];
   readonly wires: readonly object[];
+  readonly annotations?: readonly object[];
 }
 
 function minifySheet(sheet: Sheet): MinifiedSheet {
@@ -69,6 +71,9 @@ function minifySheet(sheet: Sheet): MinifiedSheet {
       return block.kind === 'group' ? { ...fields, sheet: minifySheet(block.sheet) } : fields;
     }),
     wires: sheet.wires.map(wire => inOrder(wire, WIRE_KEYS)),
+    ...(sheet.annotations === undefined
+      ? {}
+      : { annotations: sheet.annotations.map(annotation => inOrder(withoutBlank(annotation), ANNOTATION_KEYS)) }),
   };
 }
 
@@ -88,7 +93,9 @@ function spaced(value: unknown): string {
   return JSON.stringify(value);
 }
 
-function oneLine(keys: readonly string[]): (fields: Parameter | Wire | Block | Cut | Requirement) => string {
+type Fields = Parameter | Wire | Block | Cut | Requirement | Partial<Annotation>;
+
+function oneLine(keys: readonly string[]): (fields: Fields) => string {
   return fields => {
     const members = Object.entries(inOrder(fields, keys)).map(([key, value]) => member(key, value));
     return `{ ${members.join(', ')} }`;
@@ -110,5 +117,12 @@ function sheetLists(sheet: Sheet, level: number): readonly string[] {
     const indent = '  '.repeat(level + 1);
     return `${line.slice(0, -2)}, "sheet": {\n${inside}\n${indent}} }`;
   });
-  return [list('blocks', blocks, level), list('wires', sheet.wires.map(oneLine(WIRE_KEYS)), level)];
+  const lists = [list('blocks', blocks, level), list('wires', sheet.wires.map(oneLine(WIRE_KEYS)), level)];
+  if (sheet.annotations === undefined) return lists;
+  return [...lists, list('annotations', sheet.annotations.map(withoutBlank).map(oneLine(ANNOTATION_KEYS)), level)];
+}
+
+/** The annotation without a text that says nothing. */
+function withoutBlank({ text, ...place }: Annotation): Partial<Annotation> {
+  return text === '' ? place : { ...place, text };
 }

@@ -2,6 +2,7 @@
 
 import fc from 'fast-check';
 import {
+  type Annotation,
   type Block,
   type Diagram,
   type Edit,
@@ -106,7 +107,16 @@ function sheetOf({ bodies, places, named, picks, prefix }: Recipe): Sheet {
       { from, to, ...(pick % 5 === 1 ? { name: `signal ${i}` } : {}), ...(pick % 7 === 1 ? { via: [[pick, 0]] } : {}) },
     ];
   });
-  return { blocks, wires };
+  const annotations = picks.slice(0, (picks[0] ?? 0) % 3).map(
+    (pick, i): Annotation => ({
+      id: `${prefix}note${i}`,
+      kind: pick % 2 === 0 ? 'frame' : 'text',
+      at: [pick - 9, 20 * pick],
+      size: [40 + pick, 20 + 20 * pick],
+      text: pick % 4 === 0 ? '' : `the ${pick} of K_p`,
+    }),
+  );
+  return { blocks, wires, ...(annotations.length === 0 ? {} : { annotations }) };
 }
 
 const innerSheet = recipe(simpleBody, 'in').map(sheetOf);
@@ -145,6 +155,7 @@ const KINDS: readonly Edit['kind'][] = [
   ...(['addBlock', 'addBlocks', 'moveBlocks', 'placeBlocks', 'removeBlocks', 'removeBlocksHealing'] as const),
   ...(['mirrorBlocks', 'reorderBlock', 'renameBlock', 'setField', 'setMatrices', 'connect', 'disconnect'] as const),
   ...(['moveWireEnd', 'setVia', 'nameWire', 'insertOnWire', 'addParameter', 'removeParameter'] as const),
+  ...(['addAnnotations', 'removeAnnotations', 'moveAnnotations', 'setAnnotation'] as const),
   ...(['renameParameter', 'setParameter', 'reorderParameters', 'setTitleFields'] as const),
 ];
 
@@ -265,9 +276,27 @@ function sheetEditOf(wish: Wish, sheet: Sheet, at: readonly string[]): Edit {
       return { kind: 'nameWire', at, to, name: text };
     case 'insertOnWire':
       return { kind: 'insertOnWire', at, to, block };
+    case 'addAnnotations':
+      return { kind: 'addAnnotations', at, annotations: [annotationOf(wish)], dx: 20 * second, dy: 20 };
+    case 'removeAnnotations':
+      return { kind: 'removeAnnotations', at, ids: annotationIds(sheet, first) };
+    case 'moveAnnotations':
+      return { kind: 'moveAnnotations', at, ids: annotationIds(sheet, first), dx: isBold ? 2e6 : 20 * second, dy: 0 };
+    case 'setAnnotation': {
+      const [chosen = 'note'] = annotationIds(sheet, first);
+      return { kind: 'setAnnotation', at, id: chosen, text, size: [20 * second, 40 + third] };
+    }
     default:
       throw new Error(`${wish.kind} is an edit of the whole drawing`);
   }
+}
+
+function annotationOf({ picks: [first, second], text, isBold }: Wish): Annotation {
+  return { id: 'note', kind: isBold ? 'frame' : 'text', at: [20 * first, 0], size: [20 + second, 40], text };
+}
+
+function annotationIds({ annotations = [] }: Sheet, pick: number): readonly string[] {
+  return [pickFrom(annotations, pick)?.id ?? 'note'];
 }
 
 /** The object and all that hangs on it, frozen: writing to it throws. */

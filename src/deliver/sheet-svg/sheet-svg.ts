@@ -4,6 +4,8 @@
  */
 
 import {
+  annotationArea,
+  annotationDrawing,
   blockDrawing,
   blockRectangle,
   enclosing,
@@ -29,6 +31,8 @@ export interface SheetSvgOptions {
   readonly titleBlock?: boolean;
   /** Ids of the blocks that are drawn, with the wires between them; all where left out. */
   readonly selection?: ReadonlySet<string>;
+  /** Ids of the annotations that are drawn where `selection` is given; none where left out. */
+  readonly annotations?: ReadonlySet<string>;
   /** The number behind a symbol, by block id, as it is shown under the block. */
   readonly values?: ReadonlyMap<string, string>;
 }
@@ -47,10 +51,10 @@ const EMPTY: Rectangle = { left: 0, top: 0, right: 20 * GRID, bottom: 10 * GRID 
  * title block unless asked otherwise. Blocks without a place are drawn at the origin: arrange the sheet first.
  */
 export function sheetSvg(diagram: Diagram, options: SheetSvgOptions = {}): string {
-  const sheet = selectedSheet(diagram, options.selection);
+  const sheet = selectedSheet(diagram, options);
   const geometry = sheetGeometry(sheet);
   const routes = routeWires(sheet, geometry);
-  const content = enclosing([sheetBounds(sheet, geometry) ?? EMPTY, ...wirePieces(routes)]) ?? EMPTY;
+  const content = drawnArea(sheet, geometry, routes);
   const block = options.titleBlock === false ? null : titleBlock(diagram);
   const corner = block === null ? null : titleBlockCorner(block, content, obstacles(sheet, geometry, routes));
   const paper = paperAround(content, block, corner);
@@ -60,6 +64,7 @@ export function sheetSvg(diagram: Diagram, options: SheetSvgOptions = {}): strin
     element('style', {}, styleRules(theme)),
     element('rect', { fill: INKS[theme].paper, ...box(paper) }),
     options.grid === true ? squares(paper) : '',
+    ...annotationsMarkup(sheet),
     ...ownParts(sheet, routes).map(wireMarkup),
     ...routes.dots.map(dotMarkup),
     ...blocksMarkup(sheet, geometry, options.values),
@@ -76,12 +81,33 @@ export function sheetSvg(diagram: Diagram, options: SheetSvgOptions = {}): strin
   return `<?xml version="1.0" encoding="UTF-8"?>\n${element('svg', root, parts.filter(part => part !== '').join('\n'))}\n`;
 }
 
-function selectedSheet({ blocks, wires }: Diagram, selection: ReadonlySet<string> | undefined): Sheet {
-  if (selection === undefined) return { blocks, wires };
+function selectedSheet(
+  { blocks, wires, annotations = [] }: Diagram,
+  { selection, annotations: chosen }: SheetSvgOptions,
+): Sheet {
+  if (selection === undefined) return { blocks, wires, annotations };
   return {
     blocks: blocks.filter(({ id }) => selection.has(id)),
     wires: wires.filter(({ from, to }) => selection.has(from[0]) && selection.has(to[0])),
+    annotations: annotations.filter(({ id }) => chosen?.has(id) === true),
   };
+}
+
+/** Blocks, labels, annotations and wires together. */
+function drawnArea(sheet: Sheet, geometry: SheetGeometry, routes: Routes): Rectangle {
+  const bounds = sheetBounds(sheet, geometry) ?? EMPTY;
+  return enclosing([bounds, ...(sheet.annotations ?? []).map(annotationArea), ...wirePieces(routes)]) ?? EMPTY;
+}
+
+function annotationsMarkup({ annotations = [] }: Sheet): readonly string[] {
+  return annotations.map(annotation => {
+    const [x, y] = annotation.at;
+    const shapes = annotationDrawing(annotation)
+      .map(shape => shapeMarkup(shape))
+      .join('');
+    const place = `translate(${coordinate(x)} ${coordinate(y)})`;
+    return shapes === '' ? '' : element('g', { class: annotation.kind, transform: place }, shapes);
+  });
 }
 
 function wirePieces({ wires }: Routes): readonly Rectangle[] {
@@ -106,7 +132,7 @@ function obstacles(sheet: Sheet, geometry: SheetGeometry, routes: Routes): reado
     }));
     return [blockRectangle(block, placed), ...labels];
   });
-  return [...blocks, ...wirePieces(routes)];
+  return [...blocks, ...(sheet.annotations ?? []).map(annotationArea), ...wirePieces(routes)];
 }
 
 /** Lower right: as high beside the drawing as it hides nothing, under it otherwise. */

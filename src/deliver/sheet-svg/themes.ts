@@ -39,6 +39,7 @@ export function styleRules(theme: Theme): string {
     ['.thin', 'stroke-width:1'],
     ['.line', 'stroke-width:1.4'],
     ['.state', 'stroke-width:2.6'],
+    ['.frame .thin', 'stroke-dasharray:12 3 2 3'],
     ['.solid', `fill:${ink};stroke:none`],
     ['.squares', `fill:none;stroke:${square};stroke-width:1`],
     ['.rule', `fill:none;stroke:${line};stroke-width:1`],

@@ -7,6 +7,7 @@ import { fail, ok, problem, type Result } from '../../problem/index.ts';
 import { DEEPEST_GROUP, MOST_BLOCKS } from '../limits.ts';
 import { beginReading, noteNameClashes } from '../reading/index.ts';
 import type { Diagram, Sheet } from '../types.ts';
+import { addAnnotations, moveAnnotations, removeAnnotations, setAnnotation } from './annotation-edits.ts';
 import {
   addBlock,
   addBlocks,
@@ -141,6 +142,14 @@ function editSheet(sheet: Sheet, edit: SheetEdit): Result<Sheet> {
       return nameWire(sheet, edit);
     case 'insertOnWire':
       return insertOnWire(sheet, edit);
+    case 'addAnnotations':
+      return addAnnotations(sheet, edit);
+    case 'removeAnnotations':
+      return removeAnnotations(sheet, edit);
+    case 'moveAnnotations':
+      return moveAnnotations(sheet, edit);
+    case 'setAnnotation':
+      return setAnnotation(sheet, edit);
     default:
       return edit satisfies never;
   }

@@ -1,7 +1,7 @@
 /** Every change that a hand can make to a drawing, as plain data. */
 
 import type { Requirement } from '../requirements/index.ts';
-import type { Block, Parameter, Point, PortReference, Quantity, Wire } from '../types.ts';
+import type { Annotation, Block, Parameter, Point, PortReference, Quantity, Wire } from '../types.ts';
 
 /** Ids of the groups that lead to a sheet, outermost first; the top sheet where it is empty. */
 export type SheetPath = readonly string[];
@@ -124,6 +124,33 @@ export interface InsertOnWire extends OnSheet {
   readonly to: PortReference;
   readonly block: Block;
 }
+/** Annotations on top of those of the sheet, under ids of their own. */
+export interface AddAnnotations extends OnSheet {
+  readonly kind: 'addAnnotations';
+  readonly annotations: readonly Annotation[];
+  /** Moves them, sheet units. */
+  readonly dx?: number;
+  readonly dy?: number;
+}
+export interface RemoveAnnotations extends OnSheet {
+  readonly kind: 'removeAnnotations';
+  readonly ids: readonly string[];
+}
+export interface MoveAnnotations extends OnSheet {
+  readonly kind: 'moveAnnotations';
+  readonly ids: readonly string[];
+  /** Sheet units. */
+  readonly dx: number;
+  readonly dy: number;
+}
+/** Another text, place or size of an annotation; what is absent stays. */
+export interface SetAnnotation extends OnSheet {
+  readonly kind: 'setAnnotation';
+  readonly id: string;
+  readonly text?: string;
+  readonly place?: Point;
+  readonly size?: readonly [width: number, height: number];
+}
 export interface AddParameter {
   readonly kind: 'addParameter';
   readonly parameter: Parameter;
@@ -212,7 +239,11 @@ export type SheetEdit =
   | MoveWireEnd
   | SetVia
   | NameWire
-  | InsertOnWire;
+  | InsertOnWire
+  | AddAnnotations
+  | RemoveAnnotations
+  | MoveAnnotations
+  | SetAnnotation;
 
 /** An edit of what belongs to the whole drawing. */
 export type DrawingEdit =

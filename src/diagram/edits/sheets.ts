@@ -29,8 +29,11 @@ export function changeSheet<S extends Sheet>(
 
 function withSheet<S extends Sheet>(root: S, sheet: Result<Sheet>): Result<S> {
   if (!sheet.ok) return sheet;
-  const { blocks, wires } = sheet.value;
-  return ok(blocks === root.blocks && wires === root.wires ? root : { ...root, blocks, wires });
+  const { blocks, wires, annotations } = sheet.value;
+  if (blocks === root.blocks && wires === root.wires && annotations === root.annotations) return ok(root);
+  const changed = { ...root, blocks, wires, ...(annotations === undefined ? {} : { annotations }) };
+  if (annotations === undefined) Reflect.deleteProperty(changed, 'annotations');
+  return ok(changed);
 }
 
 /** The sheet with a group in its new form, the wires at it led to the ports' new numbers or gone with their ports. */

@@ -3,6 +3,7 @@
  * and the sheet's SVG all start here. Everything is a pure function of the document.
  */
 
+export { annotationArea, annotationDrawing, FRAME_TITLE, textHeight } from './annotation-drawing.ts';
 export { blockBox, blockOutline } from './block-box.ts';
 export { blockDrawing, holdsState } from './block-drawing.ts';
 export { SCRIPT_SCALE, SCRIPT_SHIFT, textWidth } from './character-widths.ts';

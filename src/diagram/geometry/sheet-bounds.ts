@@ -33,8 +33,8 @@ export function enclosing(rectangles: readonly Rectangle[]): Rectangle | null {
 }
 
 /**
- * The smallest rectangle around every block of the sheet, with its labels and the bend points of its wires; null for an
- * empty sheet.
+ * The smallest rectangle around every block of the sheet, with its labels and the bend points of its wires, and around
+ * its annotations; null for an empty sheet.
  *
  * @param geometry  that of the same sheet, where it is at hand.
  */
@@ -51,6 +51,9 @@ export function sheetBounds(sheet: Sheet, geometry: SheetGeometry = sheetGeometr
   }
   for (const { via } of sheet.wires) {
     for (const [x, y] of via ?? []) rectangles.push({ left: x, right: x, top: y, bottom: y });
+  }
+  for (const { at, size } of sheet.annotations ?? []) {
+    rectangles.push({ left: at[0], right: at[0] + size[0], top: at[1], bottom: at[1] + size[1] });
   }
   return enclosing(rectangles);
 }

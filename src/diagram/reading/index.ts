@@ -1,5 +1,6 @@
 /** Reading documents from text, stage by stage, and the rules that edits share with it. */
 
+export { annotationFault } from './annotation-shape.ts';
 export { blockSchemas } from './block-schemas.ts';
 export { wireTitle } from './joining.ts';
 export { noteNameClashes } from './names.ts';

@@ -9,6 +9,7 @@ import { DEEPEST_GROUP, MOST_BLOCKS, MOST_PARAMETERS, MOST_REQUIREMENTS } from '
 import { type Requirement, readRequirement } from '../requirements/index.ts';
 import { KIND_WORDS } from '../titles.ts';
 import type { Block, BlockKind, Cut, Diagram, Parameter, Sheet, Wire } from '../types.ts';
+import { readAnnotations } from './annotation-shape.ts';
 import { blockSchemas, cutSchema, parameterSchema, textSchema, wireSchema } from './block-schemas.ts';
 import { note, pathOf, type Reading, type SheetPlace, TOP_SHEET } from './reading.ts';
 import { matrixShapeFault } from './state-model-shape.ts';
@@ -133,7 +134,8 @@ function readSheet(fields: Fields, place: SheetPlace, reading: Reading): Sheet |
   }
   const blocks = items.flatMap((item, i) => readBlock(item, i, place, title, reading) ?? []);
   const wires = readWires(own(fields, 'wires') ?? [], title, reading);
-  return { blocks, wires };
+  const annotations = readAnnotations(own(fields, 'annotations') ?? [], title, reading);
+  return { blocks, wires, ...(annotations.length === 0 ? {} : { annotations }) };
 }
 
 function readWires(value: unknown, title: string, reading: Reading): readonly Wire[] {

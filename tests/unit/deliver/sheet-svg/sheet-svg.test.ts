@@ -100,3 +100,35 @@ describe('the SVG of a sheet', () => {
     expect(Number(corner?.[2])).toBeGreaterThanOrEqual(100);
   });
 });
+
+describe('annotations in the SVG of a sheet', () => {
+  const noted: Diagram = {
+    ...small,
+    annotations: [
+      { id: 'f', kind: 'frame', at: [120, 0], size: [120, 120], text: 'plant & <drive>' },
+      { id: 'n', kind: 'text', at: [40, 300], size: [200, 20], text: 'first line\nsecond line' },
+    ],
+  };
+
+  test('stand behind the wires, each line of a text by itself', () => {
+    const svg = sheetSvg(noted);
+    checkWellFormed(svg);
+    expect(svg).toContain('>plant &amp; &lt;drive&gt;</text>');
+    expect(svg).toMatch(/>first line<\/text>.*>second line<\/text>/);
+    expect(svg.indexOf('plant')).toBeLessThan(svg.indexOf('class="ink line"'));
+  });
+
+  test('lie on the paper whole, beside the title block', () => {
+    const [, , top, , height] =
+      /viewBox="(\S+) (\S+) (\S+) (\S+)"/.exec(sheetSvg(noted, { titleBlock: false }))?.map(Number) ?? [];
+    expect((top ?? 0) + (height ?? 0)).toBeGreaterThanOrEqual(340);
+  });
+
+  test('are drawn with a selection where they are chosen', () => {
+    const selection = new Set(['k']);
+    expect(sheetSvg(noted, { selection })).not.toContain('plant');
+    const chosen = sheetSvg(noted, { selection, annotations: new Set(['f']) });
+    expect(chosen).toContain('plant');
+    expect(chosen).not.toContain('first line');
+  });
+});
