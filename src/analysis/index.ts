@@ -31,6 +31,7 @@ export type { ResponseRequest, StepResponse, TimeResponse } from './time-respons
 export { initialStateResponse, stepResponse, stepValuesAt, timeResponse } from './time-response.ts';
 export {
   DEFAULT_SAMPLES,
+  diagramAt,
   type Envelope,
   type EnvelopeRequest,
   envelopeOf,

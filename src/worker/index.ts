@@ -1,5 +1,6 @@
 /** The messages between the tab and the analyses, the switch that answers them, and the tab's end of the line. */
 
+export { type JudgeRequest, type Judging, judgePoints } from './judge-points.ts';
 export { type AnalysisLine, openLine } from './line.ts';
 export type {
   Answer,

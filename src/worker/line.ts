@@ -53,6 +53,8 @@ export function openLine(start: () => Worker, listener: Listener): AnalysisLine 
         case 'ask':
           asks.get(data.id)?.(data);
           return void asks.delete(data.id);
+        case 'judge':
+          return; // asked of the pool's workers, never of this one
         default:
           listener.answer(data);
           return derivations.answered(data);

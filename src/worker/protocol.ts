@@ -5,13 +5,17 @@
 
 import type {
   ChannelFrequency,
+  EnvelopeRequest,
   FrequencyCurve,
+  JudgedPoint,
   LoopTransfer,
   Margins,
   PoleSet,
   Stability,
   StepMetrics,
   StepResponse,
+  TolerancePoint,
+  ToleratedParameter,
   TransferFunction,
   ZeroSet,
 } from '../analysis/index.ts';
@@ -46,7 +50,8 @@ export type Question =
       readonly format: string;
       readonly notation: Notation;
     }
-  | AskQuestion;
+  | AskQuestion
+  | JudgeQuestion;
 
 /** A question on demand about the drawing of a revision; its topic says what `question` holds. */
 export interface AskQuestion {
@@ -57,6 +62,16 @@ export interface AskQuestion {
   readonly asker: number;
   readonly topic: TopicName;
   readonly question: unknown;
+}
+
+/** Points of a tolerance plan, for a worker of the pool: it is about this diagram and no revision. */
+export interface JudgeQuestion {
+  readonly kind: 'judge';
+  readonly id: number;
+  readonly diagram: Diagram;
+  readonly parameters: readonly ToleratedParameter[];
+  readonly points: readonly TolerancePoint[];
+  readonly envelope: EnvelopeRequest | null;
 }
 
 /** Values of quantities for the screen, by parameter name and by block id (of the top sheet, `outer.inner.id` inside groups). */
@@ -134,7 +149,22 @@ export interface AskAnswer {
   readonly outcome: Result<unknown> | null;
 }
 
-/** What an answer is that belongs to a revision and is not awaited by who asked. */
-export type RevisionAnswer = Exclude<Answer, FileAnswer | AskAnswer>;
+export interface JudgeAnswer {
+  readonly kind: 'judge';
+  readonly id: number;
+  /** In the order of the points. */
+  readonly judged: readonly JudgedPoint[];
+}
 
-export type Answer = ModelAnswer | PolesAnswer | ChannelAnswer | FrequencyAnswer | CutsAnswer | FileAnswer | AskAnswer;
+/** What an answer is that belongs to a revision and is not awaited by who asked. */
+export type RevisionAnswer = Exclude<Answer, FileAnswer | AskAnswer | JudgeAnswer>;
+
+export type Answer =
+  | ModelAnswer
+  | PolesAnswer
+  | ChannelAnswer
+  | FrequencyAnswer
+  | CutsAnswer
+  | FileAnswer
+  | AskAnswer
+  | JudgeAnswer;

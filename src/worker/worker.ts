@@ -34,6 +34,8 @@ self.onmessage = ({ data }: MessageEvent<Question>) => {
       return void channel(data);
     case 'ask':
       return asks.ask(data);
+    case 'judge':
+      return void import('./judge-answer.ts').then(({ judgeAnswer }) => send(judgeAnswer(data)));
     case 'file':
       return void import('./file-answer.ts').then(({ fileAnswer }) => send(fileAnswer(data)));
     default:

@@ -118,7 +118,7 @@ export function diagramAt(
   return { ...diagram, parameters: diagram.parameters.map(moved) };
 }
 
-/** The parameters' values at a point, in the order of the plan. */
+/** The parameters' values at a point, in the order of the plan, to 15 digits: the last bit of a sum is noise to the eye. */
 export function valuesAt(parameters: readonly ToleratedParameter[], { at }: TolerancePoint): readonly number[] {
-  return parameters.map(({ nominal, amount }, i) => nominal + (at[i] ?? 0) * amount);
+  return parameters.map(({ nominal, amount }, i) => Number((nominal + (at[i] ?? 0) * amount).toPrecision(15)));
 }

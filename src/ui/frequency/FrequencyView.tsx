@@ -1,6 +1,7 @@
 import { useMemo, useState } from 'react';
 import { cutChosen } from '../commands/cut-chosen.ts';
 import type { SavedPlot } from '../plots/index.ts';
+import { useEnvelope } from '../requirements/useEnvelope.ts';
 import { PanelEmpty, PanelPending, ShortChoice } from '../results/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
 import { BodePlot } from './BodePlot.tsx';
@@ -44,13 +45,19 @@ export function FrequencyView({ onSave }: { readonly onSave: (plot: SavedPlot) =
 function Plot({ shown, onSave }: { readonly shown: string; readonly onSave: (plot: SavedPlot) => void }) {
   const known = useStore(model);
   const answer = useStore(frequency);
+  const envelope = useEnvelope('magnitude');
   const cut = useStore(answers)?.cuts.find(({ to }) => to.join(':') === shown);
   const content = useMemo((): BodeContent | null => {
     if (cut !== undefined) return cut.outcome.ok ? cutContent(cut.name, cut.outcome.value) : null;
     if (known === null || answer === null) return null;
     const { input, output } = answer.channel;
-    return channelContent(known.inputs[input]?.name ?? '', known.outputs[output]?.name ?? '', answer.response);
-  }, [cut, known, answer]);
+    return channelContent(
+      known.inputs[input]?.name ?? '',
+      known.outputs[output]?.name ?? '',
+      answer.response,
+      envelope,
+    );
+  }, [cut, known, answer, envelope]);
   if (content !== null) return <BodePlot content={content} onSave={onSave} />;
   if (cut !== undefined && !cut.outcome.ok) return <PanelEmpty>{cut.outcome.problems[0]?.message}</PanelEmpty>;
   if (known !== null && (known.inputs.length === 0 || known.outputs.length === 0)) {

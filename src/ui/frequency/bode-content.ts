@@ -4,6 +4,7 @@ import type { FrequencyCurve, Margins } from '../../analysis/index.ts';
 import { plainName } from '../../expression/index.ts';
 import type { CutLoop, FrequencyAnswer } from '../../worker/index.ts';
 import { degreesText, formatNumber, frequencyText, phaseMarginText } from '../figures/index.ts';
+import type { Band } from '../plots/index.ts';
 
 /** A margin drawn where it is read. */
 export interface MarginMark {
@@ -23,6 +24,8 @@ export interface BodeContent {
   readonly curve: FrequencyCurve;
   readonly summary: string;
   readonly marks: readonly MarginMark[];
+  /** Where the magnitude runs over the tolerances of the parameters, dB; absent where that was not judged. */
+  readonly envelope?: Band | undefined;
 }
 
 const DIGITS = 3;
@@ -32,12 +35,14 @@ export function channelContent(
   input: string,
   output: string,
   { curve, bandwidth, route }: FrequencyAnswer['response'],
+  envelope?: Band,
 ): BodeContent {
   const [from, to] = [plainName(input), plainName(output)];
   const parts = [
     bandwidth === null ? 'no bandwidth to speak of' : `bandwidth (−3 dB) ${frequencyText(bandwidth)}`,
     peakText(curve),
     ...(route === 'direct' ? ['dead time as it is'] : []),
+    ...(envelope === undefined ? [] : ['the band: over the tolerances']),
   ];
   return {
     title: `Frequency response, ${from} to ${to}`,
@@ -45,6 +50,7 @@ export function channelContent(
     curve,
     summary: `${from} → ${to}: ${parts.join(' · ')}`,
     marks: [],
+    envelope,
   };
 }
 

@@ -2,6 +2,7 @@
 
 import { element, formatNumber, frequencyText, type Markup } from '../figures/index.ts';
 import {
+  bandPath,
   curvePath,
   type Drawing,
   line,
@@ -29,6 +30,7 @@ export function bodeDrawing(content: BodeContent, size: Size, palette: Palette):
       ...grid(frame, frame.magnitude, palette),
       ...grid(frame, frame.phase, palette),
       ...axisTexts(frame, palette),
+      ...envelopeBand(content, frame, palette),
       curve(frame, frame.magnitude, { time: omega, values: magnitude }, palette),
       curve(frame, frame.phase, { time: omega, values: phase }, palette),
       ...content.marks.flatMap(mark => marginMarks(frame, mark, palette)),
@@ -69,6 +71,20 @@ function curve({ x, left, right }: BodeFrame, { y, top, bottom }: BodePart, valu
     'stroke-width': 1.8,
     'stroke-linejoin': 'round',
   });
+}
+
+/** Where the magnitude runs over the tolerances of the parameters. */
+function envelopeBand(
+  { envelope }: BodeContent,
+  { x, left, right, magnitude: { y, top, bottom } }: BodeFrame,
+  palette: Palette,
+): readonly Markup[] {
+  if (envelope === undefined) return [];
+  const across = (omega: number) => Math.max(left, Math.min(right, x(omega)));
+  const d = bandPath(envelope, across, value => Math.max(top, Math.min(bottom, y(value))));
+  return [
+    element('path', { d, fill: palette.curve, 'fill-opacity': 0.16, stroke: palette.curve, 'stroke-width': 0.5 }),
+  ];
 }
 
 /** Pixels that the text of a margin needs at its right. */

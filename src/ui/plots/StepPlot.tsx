@@ -80,6 +80,7 @@ export function StepPlot({ content, onSave }: StepPlotProps) {
       <p className="step-plot-summary" id={summaryId}>
         step in <MathName name={content.input} /> → <MathName name={content.output} />:{' '}
         <RaisedText text={stepSummary(content.metrics)} />
+        {content.envelope !== undefined && ' · the band: over the tolerances'}
       </p>
       <div className="plot-more">
         <StepTable content={content} horizon={frame.horizon} />

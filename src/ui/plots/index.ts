@@ -7,6 +7,7 @@ import './plots.css';
 
 export type { Axis, Tick } from './axis.ts';
 export { axisMeasure, axisOver, steadyDomain } from './axis.ts';
+export { type Band, bandPath } from './band-path.ts';
 export type { Samples } from './curve-path.ts';
 export { curvePath, nearestSample } from './curve-path.ts';
 export type { Drawing, Size } from './drawing.ts';

@@ -3,6 +3,7 @@
 import type { StepMetrics } from '../../analysis/index.ts';
 import { plainName } from '../../expression/index.ts';
 import { formatNumber, formatPadded, formatUnit } from '../figures/index.ts';
+import type { Band } from './band-path.ts';
 import type { Samples } from './curve-path.ts';
 
 /** One answer to the step. */
@@ -21,6 +22,8 @@ export interface StepContent {
   readonly curves: readonly StepCurve[];
   /** null: not computed. */
   readonly metrics: StepMetrics | null;
+  /** Where the response runs over the tolerances of the parameters; absent where that was not judged. */
+  readonly envelope?: Band | undefined;
 }
 
 const DIGITS = 3;

@@ -5,6 +5,7 @@
 
 import { element, formatUnit, type Markup } from '../figures/index.ts';
 import { axisMeasure } from './axis.ts';
+import { bandPath } from './band-path.ts';
 import { curvePath } from './curve-path.ts';
 import { type Drawing, line, namedText, round, type Size, text, tickStyle } from './drawing.ts';
 import type { Palette } from './palette.ts';
@@ -26,6 +27,7 @@ export function stepDrawing(content: StepContent, size: Size, palette: Palette):
       ...grid(frame, palette),
       ...finalBand(content, frame, palette),
       ...axisNames(content, frame, palette),
+      ...envelopeBand(content, frame, palette),
       ...legend(content, frame, palette),
       ...curveMarks(content, frame, palette),
       ...peakMark(content, frame, palette),
@@ -54,6 +56,16 @@ function finalBand({ metrics }: StepContent, frame: StepFrame, palette: Palette)
   const half = Math.max(1, Math.abs(y(final * (1 + BAND)) - y(final)));
   const place = { x: left, y: round(y(final) - half), width: right - left, height: round(2 * half) };
   return [element('rect', { ...place, fill: palette.line, 'fill-opacity': 0.6 })];
+}
+
+/** Where the response runs over the tolerances; what lies beyond the plot's last time is drawn on its edge. */
+function envelopeBand({ envelope }: StepContent, frame: StepFrame, palette: Palette): readonly Markup[] {
+  if (envelope === undefined) return [];
+  const { x, y, right } = frame;
+  const d = bandPath(envelope, time => Math.min(right, x(time)), y);
+  return [
+    element('path', { d, fill: palette.curve, 'fill-opacity': 0.16, stroke: palette.curve, 'stroke-width': 0.5 }),
+  ];
 }
 
 function axisNames(content: StepContent, frame: StepFrame, palette: Palette): readonly Markup[] {

@@ -70,10 +70,11 @@ function lastMoment({ curves }: StepContent): number {
 const PEAK_ROOM = 0.08;
 
 function valueRange(content: StepContent): readonly [number, number] {
-  const { metrics, curves } = content;
+  const { metrics, curves, envelope } = content;
   let low = Math.min(0, metrics?.finalValue ?? 0);
   let high = Math.max(0, metrics?.finalValue ?? 0);
-  for (const { values } of curves) {
+  const bands = envelope === undefined ? [] : [{ values: envelope.low }, { values: envelope.high }];
+  for (const { values } of [...curves, ...bands]) {
     for (let index = 0; index < values.length; index++) {
       const value = values[index] ?? Number.NaN;
       if (!Number.isFinite(value)) continue;

@@ -3,6 +3,7 @@
 import { useMemo } from 'react';
 import type { ChannelAnswer } from '../../worker/index.ts';
 import { StepPlot } from '../plots/index.ts';
+import { useEnvelope } from '../requirements/useEnvelope.ts';
 import { PanelEmpty, PanelPending } from '../results/index.ts';
 import { type State, useStore } from '../store/index.ts';
 import { savePlot } from './save-plot.ts';
@@ -14,10 +15,11 @@ const channel = (state: State) => state.results.channel;
 export function StepView() {
   const known = useStore(model);
   const answer = useStore(channel);
-  const content = useMemo(
-    () => (known === null || answer === null ? null : stepContentOf(known, answer)),
-    [known, answer],
-  );
+  const envelope = useEnvelope('step');
+  const content = useMemo(() => {
+    const content = known === null || answer === null ? null : stepContentOf(known, answer);
+    return content === null ? null : { ...content, envelope };
+  }, [known, answer, envelope]);
   return content === null ? <ChannelAbsent answer={answer} /> : <StepPlot content={content} onSave={savePlot} />;
 }
 

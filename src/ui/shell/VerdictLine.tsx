@@ -8,6 +8,7 @@ import { selfCheckText, sizesText, stabilityText } from './verdict-texts.ts';
 
 const theme = (state: State) => state.view.theme;
 const results = (state: State) => state.results;
+const isRequiring = (state: State) => state.document.diagram.requirements !== undefined;
 
 export function VerdictLine() {
   const { status, derivation, poles, cuts, problems, stopped } = useStore(results);
@@ -24,6 +25,7 @@ export function VerdictLine() {
           <span>{sizesText(derivation.model)}</span>
           <LoopCount derivation={derivation} />
           <FirstCut answer={cuts} />
+          <RequirementCount />
           <WarningCount warnings={[...derivation.warnings, ...(poles?.warnings ?? [])]} />
           <CheckFigure derivation={derivation} />
         </>
@@ -66,6 +68,20 @@ function FirstCut({ answer }: { readonly answer: State['results']['cuts'] }) {
   return (
     <Suspense>
       <CutMargin cut={first} />
+    </Suspense>
+  );
+}
+
+/** Loaded once a drawing requires something. */
+const RequirementVerdict = lazy(() =>
+  import('../requirements/RequirementVerdict.tsx').then(file => ({ default: file.RequirementVerdict })),
+);
+
+function RequirementCount() {
+  if (!useStore(isRequiring)) return null;
+  return (
+    <Suspense>
+      <RequirementVerdict />
     </Suspense>
   );
 }

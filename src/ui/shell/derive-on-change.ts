@@ -24,7 +24,8 @@ export function followDocument(): void {
 }
 
 function needsDerivation(before: Diagram, now: Diagram): boolean {
-  return before !== now && (before.cuts !== now.cuts || !isSameModel(before, now));
+  const isAsked = before.cuts !== now.cuts || before.requirements !== now.requirements;
+  return before !== now && (isAsked || !isSameModel(before, now));
 }
 
 function ask(state: State): void {

@@ -33,4 +33,11 @@ export const RESULT_TABS: readonly [ResultTab, ...ResultTab[]] = [
     isOfChannel: false,
     View: lazy(() => import('./TransferMatrixTab.tsx').then(file => ({ default: file.TransferMatrixTab }))),
   },
+  {
+    id: 'requirements',
+    label: 'Requirements',
+    title: 'Requirements',
+    isOfChannel: false,
+    View: lazy(() => import('../requirements/index.ts').then(room => ({ default: room.RequirementsTab }))),
+  },
 ];

@@ -11,6 +11,7 @@ import { moved } from './live.ts';
 import { answered } from './results.ts';
 import { NOTHING_SELECTED, type SelectionSlice, stillThere } from './selection.ts';
 import { store } from './store.ts';
+import type { TolerancesSlice } from './tolerances.ts';
 import type { ViewSlice } from './view.ts';
 
 /** Makes one edit, one undo step. Returns the problems where it is refused, none where it is done. */
@@ -179,6 +180,11 @@ export function chooseChannel(input: string, output: string): void {
   changeView({ input, output });
 }
 
+/** Opens a tab under the system matrix. */
+export function openResultTab(resultTab: string): void {
+  changeView({ resultTab });
+}
+
 export function foldTitleBlock(folded: boolean): void {
   changeView({ folded });
 }
@@ -209,6 +215,11 @@ export function takeAnswer(answer: RevisionAnswer): void {
 /** Says that no answer can be had. */
 export function stopResults(stopped: string): void {
   store.setState(({ results }) => ({ results: { ...results, stopped } }));
+}
+
+/** Takes in how far a judgement over tolerances has come, or what it found. */
+export function setTolerances(tolerances: TolerancesSlice | null): void {
+  store.setState({ tolerances });
 }
 
 function changeView(change: Partial<ViewSlice>): void {

@@ -7,5 +7,6 @@ export type { LiveSlice } from './live.ts';
 export type { ResultsSlice } from './results.ts';
 export type { SelectionSlice } from './selection.ts';
 export { type State, store, useStore } from './store.ts';
+export type { TolerancesSlice } from './tolerances.ts';
 export type { Notice, ViewSlice } from './view.ts';
 export { actions };

@@ -10,6 +10,7 @@ import type { DocumentSlice } from './document.ts';
 import type { LiveSlice } from './live.ts';
 import { NO_RESULTS, type ResultsSlice } from './results.ts';
 import { NOTHING_SELECTED, type SelectionSlice } from './selection.ts';
+import type { TolerancesSlice } from './tolerances.ts';
 import { FIRST_VIEW, type ViewSlice } from './view.ts';
 
 export interface State {
@@ -21,6 +22,8 @@ export interface State {
   readonly live: LiveSlice | null;
   readonly view: ViewSlice;
   readonly results: ResultsSlice;
+  /** Null before the first judgement. */
+  readonly tolerances: TolerancesSlice | null;
 }
 
 export const store = createStore<State>()(() => ({
@@ -30,6 +33,7 @@ export const store = createStore<State>()(() => ({
   live: null,
   view: FIRST_VIEW,
   results: NO_RESULTS,
+  tolerances: null,
 }));
 
 /** What a selector takes from the state; the component is drawn again when that changes. */

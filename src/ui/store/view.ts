@@ -8,6 +8,8 @@ export interface ViewSlice {
   /** Names of the input and output whose transfer function and step response are shown; null: the first there is. */
   readonly input: string | null;
   readonly output: string | null;
+  /** The tab under the system matrix that is open, by its id; null: the first. */
+  readonly resultTab: string | null;
   /** Follows the system where null. */
   readonly theme: 'light' | 'dark' | null;
   /** The block whose fields are open on the sheet. */
@@ -40,6 +42,7 @@ export const FIRST_VIEW: ViewSlice = {
   notation: 'fractions',
   input: null,
   output: null,
+  resultTab: null,
   theme: null,
   editing: null,
   wiringFrom: null,

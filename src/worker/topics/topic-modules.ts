@@ -4,5 +4,6 @@ import type { TopicModule } from './topic.ts';
 import type { TopicName, Topics } from './topics.ts';
 
 export const TOPIC_MODULES: { readonly [T in TopicName]: () => Promise<TopicModule<Topics[T]>> } = {
+  requirements: () => import('./requirements.ts'),
   'transfer-matrix': () => import('./transfer-matrix.ts'),
 };

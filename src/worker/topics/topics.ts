@@ -1,8 +1,10 @@
 /** The table of topics: their types for both ends of the line. Where each is loaded from stands in topic-modules.ts. */
 
+import type { RequirementsTopic } from './requirements.ts';
 import type { TransferMatrixTopic } from './transfer-matrix.ts';
 
 export interface Topics {
+  readonly requirements: RequirementsTopic;
   readonly 'transfer-matrix': TransferMatrixTopic;
 }
 
