@@ -3,7 +3,8 @@
 import { fail, ok, problem, type Result } from '../../problem/index.ts';
 import { MOST_REQUIREMENTS } from '../limits.ts';
 import { keepSame } from '../quantities.ts';
-import { type Requirement, readRequirement } from '../requirements/index.ts';
+import { readRequirement } from '../reading/index.ts';
+import type { Requirement } from '../requirements/index.ts';
 import { displayName } from '../titles.ts';
 import type { Block, Diagram } from '../types.ts';
 import type { AddRequirement, RemoveRequirement, SetRequirement } from './edit.ts';

@@ -6,5 +6,6 @@ export { wireTitle } from './joining.ts';
 export { noteNameClashes } from './names.ts';
 export { readDiagram } from './read-diagram.ts';
 export { beginReading, pathOf, type SheetPlace, TOP_SHEET } from './reading.ts';
+export { readRequirement } from './requirement-shape.ts';
 export { matrixShapeFault } from './state-model-shape.ts';
 export { whatIsWrong } from './wording.ts';

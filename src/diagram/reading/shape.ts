@@ -6,12 +6,13 @@
 import * as v from 'valibot';
 import { onOneLine, quote } from '../../expression/index.ts';
 import { DEEPEST_GROUP, MOST_BLOCKS, MOST_PARAMETERS, MOST_REQUIREMENTS } from '../limits.ts';
-import { type Requirement, readRequirement } from '../requirements/index.ts';
+import type { Requirement } from '../requirements/index.ts';
 import { KIND_WORDS } from '../titles.ts';
 import type { Block, BlockKind, Cut, Diagram, Parameter, Sheet, Wire } from '../types.ts';
 import { readAnnotations } from './annotation-shape.ts';
 import { blockSchemas, cutSchema, parameterSchema, textSchema, wireSchema } from './block-schemas.ts';
 import { note, pathOf, type Reading, type SheetPlace, TOP_SHEET } from './reading.ts';
+import { readRequirement } from './requirement-shape.ts';
 import { matrixShapeFault } from './state-model-shape.ts';
 import { whatIsWrong } from './wording.ts';
 

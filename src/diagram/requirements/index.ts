@@ -1,4 +1,4 @@
-/** What a drawing is required to do: the list, its kinds, and how one is said and read. */
+/** What a drawing is required to do: the list, its kinds, and how one is said. */
 
 export { boundOf, type Requirement, requirementText } from './requirement.ts';
 export {
@@ -8,4 +8,3 @@ export {
   type RequirementSubject,
   requirementRule,
 } from './requirement-kinds.ts';
-export { readRequirement } from './requirement-shape.ts';

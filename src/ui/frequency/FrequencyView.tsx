@@ -1,7 +1,7 @@
 import { useMemo, useState } from 'react';
+import { useEnvelope } from '../answers/index.ts';
 import { cutChosen } from '../commands/cut-chosen.ts';
 import type { SavedPlot } from '../plots/index.ts';
-import { useEnvelope } from '../requirements/useEnvelope.ts';
 import { PanelEmpty, PanelPending, ShortChoice } from '../results/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
 import { BodePlot } from './BodePlot.tsx';

@@ -2,9 +2,9 @@
 
 import { useId, useState } from 'react';
 import { DEFAULT_SAMPLES, MOST_SAMPLES, tolerancePlan } from '../../analysis/index.ts';
+import { isJudgedDrawing } from '../answers/index.ts';
 import { PanelEmpty } from '../results/index.ts';
 import { type State, type TolerancesSlice, useStore } from '../store/index.ts';
-import { isJudgedDrawing } from './judged-drawing.ts';
 import { LabelledField } from './LabelledField.tsx';
 import { judge, stopJudging } from './run-judgement.ts';
 import { ToleranceTable } from './ToleranceTable.tsx';

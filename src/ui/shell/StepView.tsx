@@ -2,8 +2,8 @@
 
 import { useMemo } from 'react';
 import type { ChannelAnswer } from '../../worker/index.ts';
+import { useEnvelope } from '../answers/index.ts';
 import { StepPlot } from '../plots/index.ts';
-import { useEnvelope } from '../requirements/useEnvelope.ts';
 import { PanelEmpty, PanelPending } from '../results/index.ts';
 import { type State, useStore } from '../store/index.ts';
 import { savePlot } from './save-plot.ts';

@@ -74,7 +74,7 @@ function FirstCut({ answer }: { readonly answer: State['results']['cuts'] }) {
 
 /** Loaded once a drawing requires something. */
 const RequirementVerdict = lazy(() =>
-  import('../requirements/RequirementVerdict.tsx').then(file => ({ default: file.RequirementVerdict })),
+  import('../requirements/index.ts').then(room => ({ default: room.RequirementVerdict })),
 );
 
 function RequirementCount() {

@@ -2,15 +2,14 @@
 
 import * as v from 'valibot';
 import { quote } from '../../expression/index.ts';
-import { nameSchema, quantitySchema, textSchema } from '../reading/block-schemas.ts';
-import { whatIsWrong } from '../reading/wording.ts';
-import type { Requirement } from './requirement.ts';
 import {
   REQUIREMENT_KIND_NAMES,
-  REQUIREMENT_KINDS,
+  type Requirement,
   type RequirementKind,
   requirementRule,
-} from './requirement-kinds.ts';
+} from '../requirements/index.ts';
+import { nameSchema, quantitySchema, textSchema } from './block-schemas.ts';
+import { whatIsWrong } from './wording.ts';
 
 const BAND = 'two quantities: ["1", "10"]';
 const bandEnd = v.union(quantitySchema.options, BAND);
@@ -55,7 +54,7 @@ export function readRequirement(value: unknown): RequirementReading {
   };
 }
 
-const isKind = (kind: string): kind is RequirementKind => Object.hasOwn(REQUIREMENT_KINDS, kind);
+const isKind = (kind: string): kind is RequirementKind => REQUIREMENT_KIND_NAMES.some(name => name === kind);
 
 type Fields = Pick<Requirement, 'input' | 'output' | 'cut' | 'band' | 'most' | 'least'>;
 
