@@ -1,4 +1,5 @@
 /** The sheet as a standalone SVG file. */
 
+export { paperSvg } from './paper-svg.ts';
 export { type SheetSvgOptions, sheetSvg } from './sheet-svg.ts';
 export type { Theme } from './themes.ts';

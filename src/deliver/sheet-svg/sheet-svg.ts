@@ -51,12 +51,9 @@ const EMPTY: Rectangle = { left: 0, top: 0, right: 20 * GRID, bottom: 10 * GRID 
  * title block unless asked otherwise. Blocks without a place are drawn at the origin: arrange the sheet first.
  */
 export function sheetSvg(diagram: Diagram, options: SheetSvgOptions = {}): string {
-  const sheet = selectedSheet(diagram, options);
-  const geometry = sheetGeometry(sheet);
-  const routes = routeWires(sheet, geometry);
-  const content = drawnArea(sheet, geometry, routes);
+  const { area: content, taken, markup } = drawnSheet(selectedSheet(diagram, options), options.values);
   const block = options.titleBlock === false ? null : titleBlock(diagram);
-  const corner = block === null ? null : titleBlockCorner(block, content, obstacles(sheet, geometry, routes));
+  const corner = block === null ? null : titleBlockCorner(block, content, taken);
   const paper = paperAround(content, block, corner);
   const theme = options.theme ?? 'light';
   const parts = [
@@ -64,11 +61,7 @@ export function sheetSvg(diagram: Diagram, options: SheetSvgOptions = {}): strin
     element('style', {}, styleRules(theme)),
     element('rect', { fill: INKS[theme].paper, ...box(paper) }),
     options.grid === true ? squares(paper) : '',
-    ...annotationsMarkup(sheet),
-    ...ownParts(sheet, routes).map(wireMarkup),
-    ...routes.dots.map(dotMarkup),
-    ...blocksMarkup(sheet, geometry, options.values),
-    ...sheet.wires.map((wire, index) => wireNameMarkup(wire, routes.wires[index]?.points ?? [])),
+    ...markup,
   ];
   if (block !== null && corner !== null) {
     parts.push(
@@ -79,6 +72,32 @@ export function sheetSvg(diagram: Diagram, options: SheetSvgOptions = {}): strin
   const viewBox = [x, y, width, height].map(coordinate).join(' ');
   const root = { xmlns: 'http://www.w3.org/2000/svg', viewBox, width, height, role: 'img', class: themeClass(theme) };
   return `<?xml version="1.0" encoding="UTF-8"?>\n${element('svg', root, parts.filter(part => part !== '').join('\n'))}\n`;
+}
+
+/** What is drawn of a sheet, in its own units. */
+interface DrawnSheet {
+  /** What all of it takes. */
+  readonly area: Rectangle;
+  /** What its parts take. */
+  readonly taken: readonly Rectangle[];
+  readonly markup: readonly string[];
+}
+
+/** Annotations, wires and blocks of a sheet, in the order in which they lie on the paper. */
+export function drawnSheet(sheet: Sheet, values: SheetSvgOptions['values']): DrawnSheet {
+  const geometry = sheetGeometry(sheet);
+  const routes = routeWires(sheet, geometry);
+  return {
+    area: drawnArea(sheet, geometry, routes),
+    taken: obstacles(sheet, geometry, routes),
+    markup: [
+      ...annotationsMarkup(sheet),
+      ...ownParts(sheet, routes).map(wireMarkup),
+      ...routes.dots.map(dotMarkup),
+      ...blocksMarkup(sheet, geometry, values),
+      ...sheet.wires.map((wire, index) => wireNameMarkup(wire, routes.wires[index]?.points ?? [])),
+    ],
+  };
 }
 
 function selectedSheet(

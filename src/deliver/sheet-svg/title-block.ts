@@ -22,6 +22,7 @@ const WIDEST_TITLE = 400;
 /** Parameters shown; the table of a larger drawing says how many more there are. */
 const MOST_ROWS = 40;
 
+/** A part of the title block, sheet units. */
 export interface TitleBlock {
   readonly width: number;
   readonly height: number;
@@ -52,19 +53,27 @@ const cellWidth = ({ spans, face }: Cell): number => textWidth(spans, SIZE, face
 
 /** The title block of a diagram. Its columns are as wide as what stands in them. */
 export function titleBlock(diagram: Diagram): TitleBlock {
-  const rows = parameterRows(diagram.parameters);
-  const columns = (rows[0] ?? []).map((_, column) => Math.max(...rows.map(row => cellWidth(row[column] ?? plain('')))));
   const title: Cell = { ...plain(oneLine(diagram.title) || 'untitled', 'plain', WIDEST_TITLE), isStrong: true };
   const issue = plain(issueText(diagram));
   const head = cellWidth(title) * BOLD + GRID + cellWidth(issue);
-  const table = columns.reduce((sum, width) => sum + width, 0);
-  const width = Math.ceil(Math.max(head, table, 200));
-  const last = columns.length - 1;
-  const widths = columns.map((column, index) => (index === last ? column + width - table : column));
-  const height = HEAD + rows.length * ROW;
+  const table = parameterTable(diagram.parameters, Math.max(head, 200));
+  const { width } = table;
+  const height = HEAD + table.height;
   const frame = element('rect', { class: 'ink paper line', x: 0, y: 0, width, height });
   const heading = cellMarkup(title, PADDING, HEAD - 10) + cellMarkup(issue, width - PADDING, HEAD - 10, 'end');
-  return { width, height, markup: frame + heading + tableMarkup(rows, widths, width) };
+  const under = table.height === 0 ? '' : element('g', { transform: `translate(0 ${HEAD})` }, table.markup);
+  return { width, height, markup: frame + heading + under };
+}
+
+/** The table of parameters alone, `least` wide or wider, without a frame; of no height where there are none. */
+export function parameterTable(parameters: readonly Parameter[], least: number): TitleBlock {
+  const rows = parameterRows(parameters);
+  const columns = (rows[0] ?? []).map((_, column) => Math.max(...rows.map(row => cellWidth(row[column] ?? plain('')))));
+  const table = columns.reduce((sum, width) => sum + width, 0);
+  const width = Math.ceil(Math.max(table, least));
+  const last = columns.length - 1;
+  const widths = columns.map((column, index) => (index === last ? column + width - table : column));
+  return { width, height: rows.length * ROW, markup: tableMarkup(rows, widths, width) };
 }
 
 function issueText({ revision, date, author }: Diagram): string {
@@ -113,7 +122,7 @@ const SUPERSCRIPTS: Readonly<Record<string, string>> = {
 function tableMarkup(rows: readonly (readonly Cell[])[], widths: readonly number[], width: number): string {
   const parts: string[] = [];
   rows.forEach((row, index) => {
-    const top = HEAD + index * ROW;
+    const top = index * ROW;
     parts.push(element('path', { class: index === 0 ? 'ink thin' : 'rule', d: `M0 ${top}H${width}` }));
     let x = 0;
     row.forEach((cell, column) => {
@@ -124,7 +133,7 @@ function tableMarkup(rows: readonly (readonly Cell[])[], widths: readonly number
   let x = 0;
   for (const column of widths.slice(0, -1)) {
     x += column;
-    parts.push(element('path', { class: 'rule', d: `M${x} ${HEAD}V${HEAD + rows.length * ROW}` }));
+    parts.push(element('path', { class: 'rule', d: `M${x} 0V${rows.length * ROW}` }));
   }
   return parts.join('');
 }

@@ -1,4 +1,4 @@
-/** Everything that can be handed over: the matrices in each format, the drawing as its file, as SVG and as PNG. */
+/** Everything that can be handed over: the matrices in each format, the drawing as its file, as a picture and on paper. */
 
 import { useState } from 'react';
 import { CAUTION, FORMATS, type Format } from '../../deliver/index.ts';
@@ -6,7 +6,7 @@ import type { Notation } from '../../worker/index.ts';
 import { type State, useStore } from '../store/index.ts';
 import { Dialog } from './Dialog.tsx';
 import { copyFormat, saveFormat } from './hand-over.ts';
-import { savePng, saveSvg } from './save-picture.ts';
+import { PictureTable } from './PictureTable.tsx';
 
 const notationOnScreen = (state: State) => state.view.notation;
 const hasModel = (state: State) => state.results.derivation !== null;
@@ -88,33 +88,6 @@ function FormatTable({ scope, notation, isDisabled }: FormatTableProps) {
             </td>
           </tr>
         ))}
-      </tbody>
-    </table>
-  );
-}
-
-function PictureTable() {
-  return (
-    <table className="dialog-table dialog-formats" aria-label="Pictures of the drawing">
-      <tbody>
-        <tr>
-          <th scope="row">Picture, lines (SVG)</th>
-          <td>.svg</td>
-          <td>
-            <button type="button" className="button" aria-label="Save SVG" onClick={saveSvg}>
-              Save
-            </button>
-          </td>
-        </tr>
-        <tr>
-          <th scope="row">Picture, points (PNG)</th>
-          <td>.png</td>
-          <td>
-            <button type="button" className="button" aria-label="Save PNG" onClick={() => void savePng()}>
-              Save
-            </button>
-          </td>
-        </tr>
       </tbody>
     </table>
   );

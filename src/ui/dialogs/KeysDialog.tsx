@@ -70,6 +70,7 @@ const KEYS: readonly { readonly group: string; readonly keys: readonly (readonly
       ['Ctrl+Z', 'undo'],
       ['Ctrl+Y  Ctrl+Shift+Z', 'redo'],
       ['Ctrl+E', 'export'],
+      ['P  Ctrl+P', 'print the sheet on one page, with its title block; P over the sheet'],
       ['?', 'this page'],
     ],
   },

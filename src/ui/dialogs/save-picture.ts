@@ -3,7 +3,8 @@
 import mathItalic from '@fontsource/stix-two-text/files/stix-two-text-latin-400-italic.woff2?url';
 import mathUpright from '@fontsource/stix-two-text/files/stix-two-text-latin-400-normal.woff2?url';
 import { sheetSvg } from '../../deliver/sheet-svg/index.ts';
-import { actions, store } from '../store/index.ts';
+import { copyText } from '../shell/copy-text.ts';
+import { actions, type State, store } from '../store/index.ts';
 import { formatValue } from '../title-block/format-value.ts';
 import { fileName, saveFile } from './save-file.ts';
 
@@ -13,26 +14,58 @@ const PNG_SCALE = 2;
 /** Canvases wider or taller than this fail in some browsers (common practice). */
 const LARGEST_SIDE = 8000;
 
-export function saveSvg(): void {
-  const { diagram } = store.getState().document;
-  const name = fileName(diagram.title, 'svg');
-  saveFile(name, new Blob([picture()], { type: 'image/svg+xml' }));
+/** What a picture shows: the whole sheet with its title block, or what is selected on it by itself. */
+export type PictureScope = 'whole' | 'selected';
+
+export function saveSvg(scope: PictureScope): void {
+  const name = fileName(store.getState().document.diagram.title, 'svg');
+  saveFile(name, new Blob([picture(scope)], { type: 'image/svg+xml' }));
   actions.notify(`Saved ${name}.`);
 }
 
-export async function savePng(): Promise<void> {
+export async function savePng(scope: PictureScope): Promise<void> {
   const name = fileName(store.getState().document.diagram.title, 'png');
-  const rules = await faces();
-  const png = await drawn(picture().replace(/<svg[^>]*>/, start => start + rules));
+  const png = await pngOf(scope);
   if (png === null) return actions.notify('This browser could not draw the picture. Save it as SVG.', 'refused');
   saveFile(name, png);
   actions.notify(`Saved ${name}.`);
 }
 
-function picture(): string {
-  const { document, results } = store.getState();
-  const values = Object.entries(results.values.blocks).map(([id, value]) => [id, formatValue(value)] as const);
-  return sheetSvg(document.diagram, { theme: 'print', values: new Map(values) });
+export async function copySvg(scope: PictureScope): Promise<void> {
+  if (await copyText(picture(scope))) actions.notify('Copied the picture as SVG text.');
+  else actions.notify('This browser does not let the page copy. Save the picture instead.', 'refused');
+}
+
+/** Whether the browser knows pictures on the clipboard at all. */
+export const canCopyPng = (): boolean => typeof ClipboardItem === 'function' && 'clipboard' in navigator;
+
+/** The item is handed over at once, while the click still counts, and holds the promise of its picture. */
+export async function copyPng(scope: PictureScope): Promise<void> {
+  const png = pngOf(scope).then(made => made ?? Promise.reject(new Error('no picture could be drawn')));
+  try {
+    await navigator.clipboard.write([new ClipboardItem({ 'image/png': png })]);
+    actions.notify('Copied the picture.');
+  } catch {
+    actions.notify('This browser does not let the page copy pictures. Save the picture instead.', 'refused');
+  }
+}
+
+/** Whether something is selected that has a picture. */
+export function hasPictureSelected({ selection }: Pick<State, 'selection'>): boolean {
+  return selection.blocks.size > 0 || (selection.annotations?.size ?? 0) > 0;
+}
+
+async function pngOf(scope: PictureScope): Promise<Blob | null> {
+  const rules = await faces();
+  return drawn(picture(scope).replace(/<svg[^>]*>/, start => start + rules));
+}
+
+function picture(scope: PictureScope): string {
+  const { document, results, selection } = store.getState();
+  const values = new Map(Object.entries(results.values.blocks).map(([id, value]) => [id, formatValue(value)]));
+  if (scope === 'whole') return sheetSvg(document.diagram, { theme: 'print', values });
+  const { blocks, annotations = new Set<string>() } = selection;
+  return sheetSvg(document.diagram, { theme: 'print', values, titleBlock: false, selection: blocks, annotations });
 }
 
 /** A style element that carries the maths face: a picture is drawn with no access to the page's files. */

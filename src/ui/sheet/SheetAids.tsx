@@ -3,6 +3,8 @@
  * pointed at. Loaded right after the drawing, with the commands behind them.
  */
 
+import { useEffect } from 'react';
+import { followPrinting } from '../printing/printed-sheet.ts';
 import { BlockCard } from './BlockCard.tsx';
 import { FindField } from './FindField.tsx';
 import { SheetToolbar } from './SheetToolbar.tsx';
@@ -12,6 +14,7 @@ import { useSheetKeys } from './useSheetKeys.ts';
 export function SheetAids() {
   useSheetKeys();
   useClipboard();
+  useEffect(followPrinting, []);
   return (
     <>
       <SheetToolbar />

@@ -118,6 +118,7 @@ export function writingKey(key: string): boolean {
 /** Whether the key changed what is seen. */
 export function viewKey(key: string, fitDrawing: () => void): boolean {
   if (key === 'z') fitDrawing();
+  else if (key === 'p') window.print();
   else if (key === '?') actions.openDialog('keys');
   else return false;
   return true;
