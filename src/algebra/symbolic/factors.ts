@@ -7,18 +7,21 @@ import { subtractPolynomials } from './add.ts';
 import { collectIn, spreadIn } from './coefficients.ts';
 import { splitContent } from './content.ts';
 import { exactQuotient, knownQuotient } from './divide.ts';
-import type { Effort } from './effort.ts';
+import { DEFAULT_LIMITS, Effort, withinEffort } from './effort.ts';
 import { commonDivisor, commonDivisorOfAll, withPositiveSign } from './gcd.ts';
 import {
   degreesOf,
   equalPolynomials,
   isConstantPolynomial,
   isOnePolynomial,
+  ONE_POLYNOMIAL,
   type SymbolicPolynomial,
   scalePolynomial,
   signOf,
+  variablePolynomial,
 } from './polynomial.ts';
 import { isProvenIrreducible } from './probe.ts';
+import type { RationalFunction } from './rational-function.ts';
 
 /** A factor of positive sign and content one, with how often it divides. */
 export interface RepeatedFactor {
@@ -143,4 +146,18 @@ function record(polynomial: SymbolicPolynomial, multiplicity: number, found: Rep
   const present = found[at];
   if (present === undefined) found.push({ polynomial, multiplicity });
   else found[at] = { polynomial, multiplicity: present.multiplicity + multiplicity };
+}
+
+/** The factors of a function's denominator, numbers left out, each as a function of its own. */
+export function denominatorFactors(
+  { denominator }: RationalFunction,
+  effort = new Effort(DEFAULT_LIMITS),
+): RationalFunction[] {
+  if (isConstantPolynomial(denominator)) return [];
+  const outcome = withinEffort(() => factorsOf(denominator, [], effort));
+  const { monomial, polynomials } = outcome.finished ? outcome.value : contentFactors(denominator);
+  return [
+    ...monomial.map(({ name }) => variablePolynomial(name)),
+    ...polynomials.map(({ polynomial }) => polynomial),
+  ].map(numerator => ({ numerator, denominator: ONE_POLYNOMIAL }));
 }

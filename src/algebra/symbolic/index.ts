@@ -13,6 +13,7 @@ export {
   withinEffort,
 } from './effort.ts';
 export { evaluateAt, substitute } from './evaluate.ts';
+export { denominatorFactors } from './factors.ts';
 export type { Formula } from './formula.ts';
 export { formulaLatex } from './formula-latex.ts';
 export { formulaMathML } from './formula-mathml.ts';

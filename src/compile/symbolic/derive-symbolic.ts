@@ -16,7 +16,9 @@ import { ok, type Result } from '../../problem/index.ts';
 import { derive } from '../derive.ts';
 import { flatten } from '../flatten/index.ts';
 import type { SignalName, SystemMatrices } from '../state-space.ts';
+import { expandedParameters } from './expanded-parameters.ts';
 import { symbolicReader } from './symbolic-reader.ts';
+import { vanishingFactors } from './undefined-at.ts';
 
 /** A model whose entries are rational functions of the parameters. */
 export interface SymbolicModel {
@@ -26,6 +28,18 @@ export interface SymbolicModel {
   readonly matrices: SystemMatrices<RationalFunction>;
   /** Names, as in `StateSpace`. */
   readonly shiftedStates: readonly string[];
+  /**
+   * Factors of denominators that are zero at the values that the parameters have: there the general expressions have no value, and
+   * the numeric model is another one, perhaps with fewer states. Empty where the general model holds.
+   */
+  readonly vanishing: readonly string[];
+}
+
+export interface SymbolicOptions {
+  /** Of the symbolic field; its own where none are given. */
+  readonly limits?: Partial<EffortLimits>;
+  /** Whether derived parameters, `wn` with the value `sqrt(k/m)`, are written out; otherwise they keep their names. */
+  readonly expanded?: boolean;
 }
 
 /**
@@ -33,20 +47,23 @@ export interface SymbolicModel {
  * parameter is a symbol, whatever it is defined by; `sqrt(k)`, `pi` and the like stay as they were written. Problems are
  * those of `compile`. Its states are those of `compile`, except where a differentiating drawing is singular for just the
  * values that its parameters have: compare the names.
- *
- * @param limits  Of the symbolic field; its own where none are given.
  */
 export function deriveSymbolic(
   diagram: Diagram,
-  limits: Partial<EffortLimits> = {},
+  { limits = {}, expanded = false }: SymbolicOptions = {},
 ): Result<EffortOutcome<SymbolicModel>> {
   const parameters = evaluateParameters(diagram.parameters);
   if (!parameters.ok) return parameters;
   const drawing = flatten(diagram);
-  const outcome = withinEffort(() => derive(drawing, symbolicReader(createSymbolicField(limits), parameters.value)));
+  const field = createSymbolicField(limits);
+  const outcome = withinEffort(() => {
+    const meanings = expanded ? expandedParameters(diagram.parameters, field) : new Map<string, RationalFunction>();
+    return derive(drawing, symbolicReader(field, parameters.value, meanings));
+  });
   if (!outcome.finished) return ok(outcome);
   if (!outcome.value.ok) return outcome.value;
   const { states, inputs, outputs, matrices, shiftedStates } = outcome.value.value;
+  const vanishing = vanishingFactors(matrices, parameters.value);
   const names = states.map(({ initial: _, ...name }) => name);
-  return ok({ finished: true, value: { states: names, inputs, outputs, matrices, shiftedStates } });
+  return ok({ finished: true, value: { states: names, inputs, outputs, matrices, shiftedStates, vanishing } });
 }

@@ -24,15 +24,21 @@ import { withOpaqueAtoms } from './opaque-atoms.ts';
  * A reader whose elements are rational functions: each parameter a variable of its own, whatever its value is made of, and
  * each irrational part the variable that its text names. Whether a polynomial's leading coefficients are zero goes by the
  * parameters' values, so that the model has the states of the numeric one.
+ *
+ * @param meanings  Functions that stand in for some of the parameters.
  */
-export function symbolicReader(field: SymbolicField, scope: Scope): QuantityReader<RationalFunction> {
+export function symbolicReader(
+  field: SymbolicField,
+  scope: Scope,
+  meanings: ReadonlyMap<string, RationalFunction>,
+): QuantityReader<RationalFunction> {
   const numbers = numericReader(rationalArithmetic, scope);
   const read = <V>(text: string, evaluate: (expression: Expression) => V | null, otherwise: () => V): Result<V> => {
     const parsed = parseExpression(text);
     if (!parsed.ok) return parsed;
     return ok(evaluate(withOpaqueAtoms(parsed.value)) ?? otherwise());
   };
-  const variable = (name: string) => field.variable(name);
+  const variable = (name: string) => meanings.get(name) ?? field.variable(name);
   return {
     arithmetic: symbolicArithmetic(field, scope),
     double: numbers.double,

@@ -102,6 +102,37 @@ test('formulas beyond the effort are given up with the limit that they met', () 
     [...names.flatMap((name, i) => [`x -> g${name}`, `g${name} -> s:${i}`]), 's -> x', 'x -> y'],
     Object.fromEntries(names.map(name => [name, '1'])),
   );
-  expect(valueOf(deriveSymbolic(drawing, { maximumTerms: 100 }))).toEqual({ finished: false, limit: 'terms' });
+  expect(valueOf(deriveSymbolic(drawing, { limits: { maximumTerms: 100 } }))).toEqual({
+    finished: false,
+    limit: 'terms',
+  });
   expect(valueOf(deriveSymbolic(drawing)).finished).toBe(true);
+});
+
+test('derived parameters are written out where that is asked for, in any order of the list', () => {
+  const drawing = draw([integrator('x'), gain('k', '-w2*g')], ['x -> k', 'k -> x'], {
+    w2: 'c/m',
+    g: 'h + w2',
+    c: '4',
+    m: '1',
+    h: '2',
+  });
+  const outcome = valueOf(deriveSymbolic(drawing, { expanded: true }));
+  const A = outcome.finished ? toRows(outcome.value.matrices.A, field.zero) : [];
+  expect(A).toEqual([[formula('-(c/m)*(h + c/m)')]]);
+  expect(entry(drawing, 'A', 0, 0)).toEqual(formula('-w2*g'));
+});
+
+/** y = u − L dy/dt: in general a lag with the state of the differentiator, at L = 0 the input itself. */
+const lagOrNone = (L: string) =>
+  draw(
+    [input('u'), sum('e', '+-'), output('y'), differentiator('d'), gain('g', 'L')],
+    ['u -> e', 'e -> y', 'e -> d', 'd -> g', 'g -> e:1'],
+    { L },
+  );
+
+test('a factor that is zero at the values of the parameters is named, where a general expression divides by it', () => {
+  expect(modelOf(lagOrNone('0'))).toMatchObject({ states: [{ name: 'd' }], vanishing: ['L'] });
+  expect(valueOf(compile(lagOrNone('0'))).model.states).toEqual([]);
+  expect(modelOf(lagOrNone('2'))).toMatchObject({ states: [{ name: 'd' }], vanishing: [] });
 });
