@@ -77,7 +77,7 @@ async function derive(request: Derive, io: Io): Promise<Result<number>> {
   return replaced.ok ? ok(DONE) : replaced;
 }
 
-function written(diagram: Diagram, { format, notation }: Derive, io: Io): Result<string | Uint8Array> {
+function written(diagram: Diagram, { format, notation, expanded }: Derive, io: Io): Result<string | Uint8Array> {
   if (format.scope === 'drawing') return ok(format.write(diagram));
   const derivation = compile(diagram);
   if (!derivation.ok) return derivation;
@@ -85,7 +85,7 @@ function written(diagram: Diagram, { format, notation }: Derive, io: Io): Result
   if (format.id !== 'model') {
     for (const line of modelWarnings(derivation.value).map(lineOf)) io.complain(line);
   }
-  return ok(format.write({ diagram, derivation: derivation.value, notation }));
+  return ok(format.write({ diagram, derivation: derivation.value, notation, expanded }));
 }
 
 /** Exit status where a requirement of the drawing is missed. */

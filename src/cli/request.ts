@@ -26,6 +26,8 @@ export type Request =
       readonly source: string;
       readonly format: Format;
       readonly notation: Notation;
+      /** Whether symbols write derived parameters out. */
+      readonly expanded: boolean;
       /** A path; null for standard output. */
       readonly out: string | null;
       /** Parameters to replace, in the order given; the last one of a name holds. */
@@ -39,11 +41,11 @@ export interface Setting {
 
 const COMMANDS = ['derive', 'check', 'link'] as const;
 const OPTIONS_OF = {
-  derive: ['--as', '--out', '--notation', '--set'],
+  derive: ['--as', '--out', '--notation', '--expand', '--set'],
   check: ['--tolerances', '--samples', '--seed'],
   link: [],
 } as const;
-const WITHOUT_VALUE = ['--tolerances', '--help', '--version'] as const;
+const WITHOUT_VALUE = ['--expand', '--tolerances', '--help', '--version'] as const;
 const OPTIONS = [...OPTIONS_OF.derive, ...OPTIONS_OF.check, '--help', '--version'] as const;
 const NOTATIONS: readonly Notation[] = ['symbols', 'fractions', 'decimals'];
 
@@ -162,7 +164,8 @@ function deriveRequest(source: string, options: Split['options']): Result<Reques
     }
     settings.push({ name, value: expression });
   }
-  return ok({ command: 'derive', source, format, notation, out: last('--out') ?? null, settings });
+  const expanded = options.some(option => option.name === '--expand');
+  return ok({ command: 'derive', source, format, notation, expanded, out: last('--out') ?? null, settings });
 }
 
 /** What stands before and after the first equals sign; the second is empty where there is none. */

@@ -10,7 +10,8 @@ export function usage(): string {
 }
 
 const HEAD = `Usage:
-  poleward derive FILE|LINK|-   [--as FORMAT] [--out PATH] [--notation NOTATION] [--set NAME=EXPR]...
+  poleward derive FILE|LINK|-   [--as FORMAT] [--out PATH] [--notation NOTATION] [--expand]
+                                [--set NAME=EXPR]...
   poleward check  FILE|LINK|-   [--tolerances] [--samples N] [--seed N]
   poleward link   FILE|-
 
@@ -25,6 +26,7 @@ FILE is a drawing (*.poleward.json), LINK a share link or its #d1=... part, - st
 const TAIL = `  --out PATH               writes a file instead of standard output
   --notation NOTATION      matrix entries of text, LaTeX and MathML: symbols (of the parameters), fractions (where none is
                            given) or decimals
+  --expand                 writes derived parameters out in symbols, wn as sqrt(k/m), where else they keep their names
   --set NAME=EXPR          gives a parameter another value; may be repeated
   --tolerances             check judges every requirement over the whole tolerance of the parameters: every corner, and points
                            drawn at random

@@ -7,7 +7,7 @@ import { type Rational, type SparseMatrix, toRows, ZERO } from '../algebra/index
 import type { Formula } from '../algebra/symbolic/index.ts';
 import type { StateSpace } from '../compile/index.ts';
 import type { ModelContext } from './format.ts';
-import { formulaRows } from './formulas.ts';
+import { formulasOf } from './formulas.ts';
 import { type MatrixRows, mapMatrices } from './matrix-rows.ts';
 
 /** How a format prints an entry. */
@@ -36,20 +36,20 @@ export function exactRows(model: StateSpace): MatrixRows<Rational> | null {
 /** Each entry in the notation that is asked for, or where the model has none in that, in the next plainer one. */
 export function printedRows<T>(context: ModelContext, printer: Printer<T>): PrintedRows<T> {
   const { notation, derivation } = context;
-  const formulas = notation === 'symbols' ? formulaRows(context) : null;
-  if (formulas !== null) return { ...printed(formulas, printer.formula), note: null };
+  const formulas = notation === 'symbols' ? formulasOf(context) : null;
+  if (formulas !== null && formulas.rows !== null) {
+    return { ...printed(formulas.rows, printer.formula), note: formulas.note || null };
+  }
   const exact = notation === 'decimals' ? null : exactRows(derivation.model);
   if (exact !== null) {
-    const note = notation === 'symbols' ? `Entries are fractions: ${NO_FORMULAS}` : null;
+    const note = formulas === null ? null : `Entries are fractions. ${formulas.note}`;
     return { ...printed(exact, printer.fraction), note };
   }
-  const note =
-    notation === 'decimals' ? null : `Entries are decimals: ${notation === 'symbols' ? NO_FORMULAS : NOT_EXACT}`;
+  const note = notation === 'decimals' ? null : `Entries are decimals. ${formulas?.note || NOT_EXACT}`;
   return { ...printed(numericRows(derivation.model), printer.decimal), note };
 }
 
-const NO_FORMULAS = 'the formulas are too long to be of use.';
-const NOT_EXACT = 'the model is not exact, see its warnings.';
+const NOT_EXACT = 'The model is not exact, see its warnings.';
 
 function printed<S, T>(rows: MatrixRows<S>, print: (value: S) => T): MatrixRows<T> {
   return mapMatrices(rows, matrix => matrix.map(row => row.map(print)));

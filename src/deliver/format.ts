@@ -13,6 +13,8 @@ export type Notation = 'symbols' | 'fractions' | 'decimals';
 export interface Derived {
   readonly diagram: Diagram;
   readonly derivation: Derivation;
+  /** Whether symbols write derived parameters out; otherwise they keep their names. */
+  readonly expanded?: boolean;
 }
 
 /** What a format of scope `model` writes from. */

@@ -1,6 +1,7 @@
 /** The table of export formats: the screen's list, and what the command line's `--as` takes. One file here for each. */
 
 import { writeDiagram } from '../diagram/index.ts';
+import { writeC, writePython } from './code/index.ts';
 import { writeCsv } from './csv.ts';
 import type { Format } from './format.ts';
 import { writeLatex } from './latex.ts';
@@ -47,6 +48,24 @@ export const FORMATS: readonly Format[] = [
     isBinary: true,
     scope: 'model',
     write: writeNpz,
+  },
+  {
+    id: 'python',
+    label: 'Python module (NumPy)',
+    extension: 'py',
+    mime: 'text/x-python;charset=utf-8',
+    isBinary: false,
+    scope: 'model',
+    write: writePython,
+  },
+  {
+    id: 'c',
+    label: 'C source',
+    extension: 'c',
+    mime: 'text/x-csrc;charset=utf-8',
+    isBinary: false,
+    scope: 'model',
+    write: writeC,
   },
   {
     id: 'latex',

@@ -21,7 +21,7 @@ import type { Derivation, SelfCheck, SignalName, StateSpace } from '../compile/i
 import type { Warning } from '../problem/index.ts';
 import { exactRows, numericRows } from './entries.ts';
 import type { Derived } from './format.ts';
-import { formulaRows } from './formulas.ts';
+import { type Formulas, formulasOf } from './formulas.ts';
 import { layOutJson } from './json-layout.ts';
 import { type MatrixRows, mapMatrices } from './matrix-rows.ts';
 
@@ -81,6 +81,7 @@ export function modelFile(derived: Derived): ModelFile {
   const { title, states, inputs, outputs, initialState, shiftedStates } = model;
   const poleSet = poles(model, EFFORT);
   const zeroSet = zeros(model, EFFORT);
+  const formulas = formulasOf(derived);
   return {
     format: 'poleward-model',
     version: 1,
@@ -92,7 +93,7 @@ export function modelFile(derived: Derived): ModelFile {
     ...numericRows(model),
     initialState,
     exact: exactFractions(model),
-    symbolic: symbolicTexts(derived),
+    symbolic: symbolicTexts(formulas),
     poles: poleSet.route === 'not-converged' ? null : poleSet.poles,
     zeros: zeroSet.route === 'certified' ? zeroSet.zeros : null,
     transferFunctions: transferFunctionEntries(allTransferFunctions(model, EFFORT)),
@@ -100,7 +101,7 @@ export function modelFile(derived: Derived): ModelFile {
     controllable: isControllable(model, EFFORT).holds,
     observable: isObservable(model, EFFORT).holds,
     shiftedStates,
-    warnings: modelWarnings(derivation),
+    warnings: [...modelWarnings(derivation), ...undefinedExpressions(formulas)],
     selfCheck,
   };
 }
@@ -118,9 +119,13 @@ function exactFractions(model: StateSpace): MatrixRows<string> | null {
   return exact === null ? null : mapMatrices(exact, fractions);
 }
 
-function symbolicTexts(derived: Derived): MatrixRows<string> | null {
-  const formulas = formulaRows(derived);
-  return formulas === null ? null : mapMatrices(formulas, rows => rows.map(row => row.map(formulaText)));
+function symbolicTexts({ rows }: Formulas): MatrixRows<string> | null {
+  return rows === null ? null : mapMatrices(rows, matrix => matrix.map(row => row.map(formulaText)));
+}
+
+/** Said where the general expressions have no value at the values of the parameters. */
+function undefinedExpressions({ vanishing, note }: Formulas): readonly Warning[] {
+  return vanishing.length === 0 ? [] : [{ code: 'expression-undefined', blocks: [], message: note }];
 }
 
 function transferFunctionEntries(all: readonly TransferFunction[]): TransferFunctionEntry[] | null {

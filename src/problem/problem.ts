@@ -31,7 +31,8 @@ export type WarningCode =
   | 'irrational-value'
   | 'hidden-mode'
   | 'nearly-singular-loop'
-  | 'order-lowered';
+  | 'order-lowered'
+  | 'expression-undefined';
 
 /** One refusal, ready for the screen. */
 export interface Problem {

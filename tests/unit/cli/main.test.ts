@@ -4,6 +4,7 @@ import { describe, expect, test } from 'vitest';
 import packageFile from '../../../package.json';
 import { CAUTION } from '../../../src/deliver/index.ts';
 import { decodeLink } from '../../../src/share/index.ts';
+import { differentiator, draw, gain, input, integrator, output, sum } from '../../arbitraries/draw.ts';
 import { drawingOf, referenceCase } from './cases.ts';
 import { type Outcome, runOn } from './machine.ts';
 
@@ -29,6 +30,30 @@ describe('derive', () => {
     expect((await runOn({ files: {}, standardInput: MOTOR.files.motor }, 'derive', '-')).printed).toBe(printed);
     expect((await runOn({ files: {} }, 'derive', link)).printed).toBe(printed);
     expect((await runOn({ files: {} }, 'derive', `https://example.org/${link}`)).printed).toBe(printed);
+  });
+
+  test('keeps the names of derived parameters, and writes them out with --expand', async () => {
+    const loop = draw([integrator('x'), gain('g', '-wn2')], ['x -> g', 'g -> x'], { wn2: 'k/m', k: '4', m: '2' });
+    const machine = { files: { loop: JSON.stringify(loop) } };
+    expect(json(await runOn(machine, 'derive', 'loop'))).toMatchObject({ symbolic: { A: [['-wn2']] } });
+    expect(json(await runOn(machine, 'derive', 'loop', '--expand'))).toMatchObject({ symbolic: { A: [['-k/m']] } });
+  });
+
+  test('says where the general expression divides by zero', async () => {
+    const lag = draw(
+      [input('u'), sum('e', '+-'), output('y'), differentiator('d'), gain('g', 'L')],
+      ['u -> e', 'e -> y', 'e -> d', 'd -> g', 'g -> e:1'],
+      { L: '0' },
+    );
+    const outcome = json(await runOn({ files: { lag: JSON.stringify(lag) } }, 'derive', 'lag'));
+    expect(outcome).toMatchObject({ states: [], D: [[1]], symbolic: null });
+    expect(outcome['warnings']).toContainEqual({
+      code: 'expression-undefined',
+      blocks: [],
+      message:
+        'The general expressions divide by L, which is zero at the present values, so the numbers were derived on their own. ' +
+        'In general the states are d; here they are none.',
+    });
   });
 
   test('takes parameters from --set', async () => {

@@ -37,7 +37,7 @@ ${CAUTION}`);
 
 test('fractions are decimals where an entry is irrational, and that is said', () => {
   const text = textIn('text', derivationOf({ ...STATIC, irrational: ['k = sqrt(2)'] }), 'fractions');
-  expect(text).toContain('y  |  0.3125\n\nEntries are decimals: the model is not exact, see its warnings.\n');
+  expect(text).toContain('y  |  0.3125\n\nEntries are decimals. The model is not exact, see its warnings.\n');
 });
 
 test('an empty sheet leaves an empty table', () => {

@@ -79,11 +79,13 @@ describe('entries in symbols', () => {
     expect(modelFile({ diagram, derivation }).symbolic?.B).toEqual([['omega_n^2/k']]);
   });
 
-  test('are fractions, and that is said, where the drawing has no formulas of a length to read', () => {
+  test('are fractions, and that is said, where the formulas are of another model', () => {
     const { derivation } = derived(motor.diagram);
     const other = derived(ROOTED).diagram;
     const text = textIn('text', derivation, 'symbols', other);
     expect(text).toContain('-50/3');
-    expect(text).toContain('\nEntries are fractions: the formulas are too long to be of use.\n');
+    expect(text).toContain(
+      '\nEntries are fractions. The general model has other states than the one at the present values.\n',
+    );
   });
 });

@@ -1,0 +1,4 @@
+/** The model as source code in the parameters. */
+
+export { writeC } from './c-source.ts';
+export { writePython } from './python-module.ts';
