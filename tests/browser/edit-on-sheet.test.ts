@@ -411,7 +411,7 @@ test('a block is found by a parameter and gone to', async ({ page }) => {
   await expect(block(page, 'gain 1/tau')).toBeFocused();
   await page.getByRole('button', { name: 'Find' }).click();
   await field.fill('nowhere');
-  await expect(page.locator('.find-count')).toHaveText('No block holds “nowhere”.');
+  await expect(page.locator('.find-count')).toHaveText('Nothing holds “nowhere”.');
   await field.press('Escape');
   await expect(field).toHaveCount(0);
 });

@@ -2,6 +2,7 @@
 
 import type { Place } from '../../diagram/arranging/index.ts';
 import type { Edit, Sheet } from '../../diagram/index.ts';
+import { framesFollowing } from '../annotations/inside-frame.ts';
 import { glide } from '../sheet/glide.ts';
 import { actions, store } from '../store/index.ts';
 import { countedBlocks } from './chosen-blocks.ts';
@@ -27,7 +28,7 @@ export async function arrangeChosen(): Promise<boolean> {
   return actions.editTogether(edits, said).length === 0 && isWhole;
 }
 
-/** Places, directions, and the bend points that then lead nowhere taken out. */
+/** Places, directions, the bend points that then lead nowhere taken out, and frames around what they stood around. */
 export function arrangingEdits(sheet: Sheet, places: readonly Place[]): readonly Edit[] {
   const moved = new Set(places.map(({ id }) => id));
   const isMirrored = new Set(sheet.blocks.filter(({ mirrored }) => mirrored === true).map(({ id }) => id));
@@ -39,5 +40,6 @@ export function arrangingEdits(sheet: Sheet, places: readonly Place[]): readonly
     { kind: 'placeBlocks', places: places.map(({ id, at }) => [id, at]) },
     { kind: 'mirrorBlocks', ids: turned },
     ...bent.map(({ to }): Edit => ({ kind: 'setVia', to, via: [] })),
+    ...framesFollowing(sheet, new Map(places.map(({ id, at }) => [id, at]))),
   ];
 }

@@ -15,11 +15,22 @@ import {
 import { namesIn, parseExpression } from '../../expression/index.ts';
 import { fail, ok, problem, type Result } from '../../problem/index.ts';
 
-/** The drawing of these blocks alone, in document order, as text. */
-export function clipboardText(diagram: Diagram, ids: ReadonlySet<string>): string {
+/** The drawing of these blocks and annotations alone, in document order, as text. */
+export function clipboardText(
+  diagram: Diagram,
+  ids: ReadonlySet<string>,
+  annotationIds: ReadonlySet<string> = new Set(),
+): string {
   const blocks = diagram.blocks.filter(({ id }) => ids.has(id));
   const wires = diagram.wires.filter(({ from, to }) => ids.has(from[0]) && ids.has(to[0]));
-  return writeDiagram({ ...emptyDiagram(), parameters: parametersUsed(diagram, blocks), blocks, wires });
+  const annotations = (diagram.annotations ?? []).filter(({ id }) => annotationIds.has(id));
+  return writeDiagram({
+    ...emptyDiagram(),
+    parameters: parametersUsed(diagram, blocks),
+    blocks,
+    wires,
+    ...(annotations.length === 0 ? {} : { annotations }),
+  });
 }
 
 /** The drawing that a text holds, or a sentence that says why it cannot be pasted. */
@@ -29,7 +40,7 @@ export function readClipboard(text: string): Result<Diagram> {
   if (!read.ok && /^\s*\{[\s\S]*"poleward-diagram"/.test(text)) return read;
   if (!read.ok)
     return fail(problem('not-a-diagram', 'The clipboard holds no blocks but other text. Copy some blocks first.'));
-  return read.value.blocks.length > 0
+  return read.value.blocks.length > 0 || read.value.annotations !== undefined
     ? ok(read.value)
     : fail(problem('not-a-diagram', 'The copied drawing is empty. Copy some blocks first.'));
 }

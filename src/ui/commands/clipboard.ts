@@ -8,10 +8,12 @@ import {
   sheetGeometry,
   snap,
 } from '../../diagram/geometry/index.ts';
-import type { Block, Diagram, Edit, Point, Sheet, Wire } from '../../diagram/index.ts';
+import type { Diagram, Edit, Point, Sheet, Wire } from '../../diagram/index.ts';
+import { chosenAnnotations } from '../annotations/annotation-commands.ts';
+import { countedThings } from '../annotations/annotation-texts.ts';
 import { focusSheet } from '../sheet/focus-block.ts';
 import { actions, store } from '../store/index.ts';
-import { chosenBlocks, chosenIds, countedBlocks } from './chosen-blocks.ts';
+import { chosenBlocks, chosenIds } from './chosen-blocks.ts';
 import { broughtParameters, clipboardText, readClipboard } from './clipboard-text.ts';
 
 /** How far beside the original a copy goes. */
@@ -20,17 +22,23 @@ const ASIDE = 2 * GRID;
 /** The chosen blocks as text; null, and said, where none is chosen. */
 export function copyChosen(): string | null {
   const ids = chosenIds();
-  if (ids.size === 0) return null;
-  actions.notify(`Copied ${countedBlocks(ids.size)}.`);
-  return clipboardText(store.getState().document.diagram, ids);
+  const annotations = chosenAnnotations();
+  if (ids.size + annotations.size === 0) return null;
+  actions.notify(`Copied ${countedThings(ids.size, annotations.size)}.`);
+  return clipboardText(store.getState().document.diagram, ids, annotations);
 }
 
 /** The same, and the blocks are removed. */
 export function cutChosen(): string | null {
   const ids = chosenIds();
-  if (ids.size === 0) return null;
-  const text = clipboardText(store.getState().document.diagram, ids);
-  actions.edit({ kind: 'removeBlocks', ids: [...ids] }, `Cut ${countedBlocks(ids.size)}.`);
+  const annotations = chosenAnnotations();
+  if (ids.size + annotations.size === 0) return null;
+  const text = clipboardText(store.getState().document.diagram, ids, annotations);
+  const edits: Edit[] = [
+    { kind: 'removeBlocks', ids: [...ids] },
+    { kind: 'removeAnnotations', ids: [...annotations] },
+  ];
+  actions.editTogether(edits, `Cut ${countedThings(ids.size, annotations.size)}.`);
   focusSheet();
   return text;
 }
@@ -49,7 +57,7 @@ export async function pasteText(text: string, at: Point | null): Promise<boolean
   const { placeUnplaced } = await import('../../diagram/arranging/index.ts');
   const pasted = placeUnplaced(read.value);
   const { missing, kept } = broughtParameters(store.getState().document.diagram.parameters, pasted.parameters);
-  const said = [`Pasted ${countedBlocks(pasted.blocks.length)}.`];
+  const said = [`Pasted ${countedThings(pasted.blocks.length, pasted.annotations?.length ?? 0)}.`];
   if (missing.length > 0) said.push(`Brought ${missing.map(({ name }) => name).join(', ')}.`);
   if (kept.length > 0)
     said.push(`${kept.join(', ')} ${kept.length === 1 ? 'keeps its value' : 'keep their values'} here.`);
@@ -60,26 +68,35 @@ export async function pasteText(text: string, at: Point | null): Promise<boolean
 /** Copies the chosen blocks, with the wires between them, a little beside themselves. */
 export function duplicateChosen(): boolean {
   const blocks = chosenBlocks();
-  if (blocks.length === 0) return false;
-  const { wires } = store.getState().document.diagram;
-  return addCopies({ blocks }, wires, [], [ASIDE, ASIDE], `Duplicated ${countedBlocks(blocks.length)}.`);
+  const marked = chosenAnnotations();
+  const { wires, annotations: all = [] } = store.getState().document.diagram;
+  const annotations = all.filter(({ id }) => marked.has(id));
+  if (blocks.length + annotations.length === 0) return false;
+  const said = `Duplicated ${countedThings(blocks.length, annotations.length)}.`;
+  return addCopies({ blocks, annotations }, wires, [], [ASIDE, ASIDE], said);
 }
 
 function addCopies(
-  { blocks }: { readonly blocks: readonly Block[] },
+  { blocks, annotations = [] }: Pick<Sheet, 'blocks' | 'annotations'>,
   wires: readonly Wire[],
   before: readonly Edit[],
   [dx, dy]: Point,
   said: string,
 ): boolean {
-  const edits: Edit[] = [...before, { kind: 'addBlocks', blocks, wires, dx, dy }];
+  const edits: Edit[] = [
+    ...before,
+    { kind: 'addBlocks', blocks, wires, dx, dy },
+    { kind: 'addAnnotations', annotations, dx, dy },
+  ];
   if (actions.editTogether(edits, said).length > 0) return false;
-  actions.selectBlocks(
-    store
-      .getState()
-      .document.diagram.blocks.slice(-blocks.length)
-      .map(({ id }) => id),
-  );
+  const { diagram } = store.getState().document;
+  const last = (items: readonly { readonly id: string }[] = [], count: number) =>
+    new Set(items.slice(items.length - count).map(({ id }) => id));
+  actions.select({
+    blocks: last(diagram.blocks, blocks.length),
+    wires: new Set(),
+    annotations: last(diagram.annotations, annotations.length),
+  });
   return true;
 }
 
@@ -88,7 +105,9 @@ function offsetTo(pasted: Diagram, at: Point | null): Point {
   const bounds = sheetBounds(pasted);
   const start: Point =
     at === null || bounds === null
-      ? [0, 0]
+      ? pasted.blocks.length === 0
+        ? [ASIDE, ASIDE]
+        : [0, 0]
       : snap([at[0] - (bounds.left + bounds.right) / 2, at[1] - (bounds.top + bounds.bottom) / 2]);
   const own = framesOf(pasted);
   const others = framesOf(store.getState().document.diagram);

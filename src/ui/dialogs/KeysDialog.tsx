@@ -47,6 +47,17 @@ const KEYS: readonly { readonly group: string; readonly keys: readonly (readonly
     ],
   },
   {
+    group: 'Texts and frames',
+    keys: [
+      ['T  double click on paper', 'write a text: Enter keeps it, Shift+Enter begins a line, Escape leaves it'],
+      ['B', 'a frame around the selected blocks'],
+      ['" in the line', 'a text in quotes goes onto the sheet'],
+      ['Enter  double click', 'write the selected one anew'],
+      ['← → ↑ ↓  with Shift', 'move it by one square, by five; a frame with all that stands in it'],
+      ['Alt+← → ↑ ↓', 'make it narrower, wider, lower, higher'],
+    ],
+  },
+  {
     group: 'On a wire',
     keys: [
       ['N', 'select the next wire at the selected block or wire'],

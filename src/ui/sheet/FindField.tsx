@@ -1,6 +1,10 @@
 /** Finds a block by name, value or parameter: written above, the matches below it, Enter goes to the marked one. */
 
 import { type KeyboardEvent, useMemo, useState } from 'react';
+import type { Annotation } from '../../diagram/index.ts';
+import { focusAnnotation } from '../annotations/annotation-commands.ts';
+import { annotationTitle, shortTitle } from '../annotations/annotation-texts.ts';
+import { findAnnotations } from '../annotations/find-annotations.ts';
 import { type Found, findBlocks } from '../commands/find-blocks.ts';
 import { actions, type State, useStore } from '../store/index.ts';
 import { formatValue } from '../title-block/format-value.ts';
@@ -27,7 +31,7 @@ function OpenFindField() {
   const [marked, setMarked] = useState(0);
   const found = useMemo(() => {
     const shown = new Map(Object.entries(values).map(([id, value]) => [id, formatValue(value)]));
-    return findBlocks(sheet, text, shown);
+    return [...findBlocks(sheet, text, shown).map(foundBlock), ...findAnnotations(sheet, text).map(foundAnnotation)];
   }, [sheet, text, values]);
   const shown = found.slice(0, MOST_SHOWN);
   const close = () => {
@@ -40,7 +44,7 @@ function OpenFindField() {
     const choice = found[marked];
     if (event.key === 'Escape') close();
     else if (step !== 0) setMarked(Math.max(0, Math.min(shown.length - 1, marked + step)));
-    else if (event.key === 'Enter' && choice !== undefined) goToFound(choice);
+    else if (event.key === 'Enter' && choice !== undefined) choice.go();
     else return;
     event.preventDefault();
   };
@@ -74,20 +78,38 @@ function OpenFindField() {
   );
 }
 
-function FoundList({ found, marked }: { readonly found: readonly Found[]; readonly marked: number }) {
+/** One line of the list and what it leads to. */
+interface Choice {
+  readonly key: string;
+  readonly title: string;
+  readonly because: string;
+  readonly go: () => void;
+}
+
+function foundBlock(found: Found): Choice {
+  const { block, because } = found;
+  return { key: `block ${block.id}`, title: shownTitle(block), because, go: () => goToFound(found) };
+}
+
+function foundAnnotation(annotation: Annotation): Choice {
+  const title = annotationTitle(annotation);
+  return { key: `annotation ${annotation.id}`, title, because: '', go: () => goToAnnotation(annotation) };
+}
+
+function FoundList({ found, marked }: { readonly found: readonly Choice[]; readonly marked: number }) {
   return (
     <div id="find-list" role="listbox" aria-label="Blocks found" className="find-list">
       {found.map((item, place) => (
         // biome-ignore lint/a11y/useKeyWithClickEvents: the field above takes the keys for the whole list
         <div
-          key={item.block.id}
+          key={item.key}
           id={`find-${place}`}
           role="option"
           aria-selected={place === marked}
           tabIndex={-1}
-          onClick={() => goToFound(item)}
+          onClick={item.go}
         >
-          {shownTitle(item.block)}
+          {item.title}
           {item.because !== '' && <span className="find-because"> {item.because}</span>}
         </div>
       ))}
@@ -97,8 +119,8 @@ function FoundList({ found, marked }: { readonly found: readonly Found[]; readon
 
 function countSentence(text: string, found: number, shown: number): string {
   if (text.trim() === '') return '';
-  if (found === 0) return `No block holds “${text.trim()}”.`;
-  return found > shown ? `${found} blocks, the first ${shown} shown.` : '';
+  if (found === 0) return `Nothing holds “${text.trim()}”.`;
+  return found > shown ? `${found} found, the first ${shown} shown.` : '';
 }
 
 function goToFound({ block }: Found): void {
@@ -107,4 +129,13 @@ function goToFound({ block }: Found): void {
   sheetView().reveal(block.at ?? [0, 0]);
   actions.notify(`Found ${shownTitle(block)}.`);
   focusBlock(block.id);
+}
+
+function goToAnnotation(annotation: Annotation): void {
+  const { id, at, size } = annotation;
+  actions.openFinding(false);
+  actions.selectAnnotations([id]);
+  sheetView().reveal([at[0] + size[0] / 2, at[1]]);
+  actions.notify(`Found ${shortTitle(annotation)}.`);
+  focusAnnotation(id);
 }

@@ -25,6 +25,9 @@ import { WireEdge } from './WireEdge.tsx';
 /** Loaded once a drawing has a cut. */
 const CutMarks = lazy(() => import('./CutMarks.tsx').then(file => ({ default: file.CutMarks })));
 
+/** Loaded once a drawing has a text or frame, or one is being written. */
+const AnnotationLayer = lazy(() => import('../annotations/AnnotationLayer.tsx'));
+
 const NODE_TYPES = { block: BlockNode };
 const EDGE_TYPES = { wire: WireEdge };
 const CENTRE: [number, number] = [0.5, 0.5];
@@ -39,12 +42,16 @@ const isFar = (flow: ReactFlowState) => flow.transform[2] < FAR;
 
 const hasCuts = (state: State) => state.document.diagram.cuts !== undefined;
 
+const hasAnnotations = ({ document, view }: State) =>
+  document.diagram.annotations !== undefined || (view.annotating ?? null) !== null;
+
 export function Sheet() {
   const placed = usePlacedSheet();
   const nodes = useSheetNodes(placed);
   const edges = useSheetWires(placed);
   const drop = useDropPart();
   const isCut = useDocument(hasCuts);
+  const isAnnotated = useDocument(hasAnnotations);
   const far = useStore(isFar) ? ' sheet-far' : '';
   useFitOnOpening();
   useSheetView();
@@ -81,6 +88,7 @@ export function Sheet() {
       >
         <Background variant={BackgroundVariant.Lines} gap={GRID} lineWidth={1} color="var(--square)" />
         <BranchDots dots={placed.routes.dots} />
+        <Suspense>{isAnnotated && <AnnotationLayer />}</Suspense>
         <Suspense>{isCut && <CutMarks {...placed} />}</Suspense>
         <AlignmentLines {...placed} />
         <DropTarget />

@@ -4,6 +4,7 @@
  */
 
 import { useEffect } from 'react';
+import { useNewText } from '../annotations/useNewText.ts';
 import { followPrinting } from '../printing/printed-sheet.ts';
 import { BlockCard } from './BlockCard.tsx';
 import { FindField } from './FindField.tsx';
@@ -14,6 +15,7 @@ import { useSheetKeys } from './useSheetKeys.ts';
 export function SheetAids() {
   useSheetKeys();
   useClipboard();
+  useNewText();
   useEffect(followPrinting, []);
   return (
     <>

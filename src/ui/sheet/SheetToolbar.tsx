@@ -1,6 +1,7 @@
 /** The commands at the sheet's upper left that have no other button: fit, arrange, find, zoom. */
 
 import { useReactFlow } from 'reactflow';
+import { beginFrame, beginText } from '../annotations/annotation-commands.ts';
 import { arrangeChosen } from '../commands/arrange-chosen.ts';
 import { actions } from '../store/index.ts';
 import { focusSheet } from './focus-block.ts';
@@ -37,6 +38,12 @@ export function SheetToolbar() {
         onClick={() => actions.openFinding(true)}
       >
         Find
+      </button>
+      <button type="button" aria-keyshortcuts="T" title="Write a text on the sheet: T" onClick={() => beginText(null)}>
+        Text
+      </button>
+      <button type="button" aria-keyshortcuts="B" title="Frame the selected blocks: B" onClick={beginFrame}>
+        Frame
       </button>
       <button type="button" aria-label="Zoom out" title="Zoom out" onClick={() => void flow.zoomOut(glide())}>
         −

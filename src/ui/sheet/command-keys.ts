@@ -40,8 +40,7 @@ export function controlKey({ key, shiftKey }: KeyboardEvent): boolean {
   if (shiftKey) return false;
   switch (key.toLowerCase()) {
     case 'a':
-      actions.selectBlocks(store.getState().document.diagram.blocks.map(({ id }) => id));
-      return true;
+      return selectAll();
     case 'd':
       return duplicateChosen();
     case 'f':
@@ -71,6 +70,13 @@ export function altKey({ code, shiftKey, ctrlKey, metaKey }: KeyboardEvent): boo
     default:
       return false;
   }
+}
+
+function selectAll(): boolean {
+  const { blocks, annotations = [] } = store.getState().document.diagram;
+  const ids = (items: readonly { readonly id: string }[]) => new Set(items.map(({ id }) => id));
+  actions.select({ blocks: ids(blocks), wires: new Set(), annotations: ids(annotations) });
+  return true;
 }
 
 /** The one block that is selected or has the focus; null while wires are selected, so that they can be gone through. */

@@ -102,7 +102,12 @@ function dropHeld(id: string | undefined, isPulled: boolean): void {
   if (held !== null && block !== undefined && to !== undefined && from !== undefined) {
     const [dx, dy] = [to[0] - from[0], to[1] - from[1]];
     const isMoved = dx !== 0 || dy !== 0;
-    if (isMoved && held.size === 1) dropBlock(block, [dx, dy], isPulled);
+    const { annotations } = store.getState().selection;
+    if (isMoved && annotations !== undefined && annotations.size > 0 && held.has(block.id)) {
+      void import('../annotations/annotation-commands.ts').then(({ moveTogether }) =>
+        moveTogether(annotations, new Set(held.keys()), [dx, dy]),
+      );
+    } else if (isMoved && held.size === 1) dropBlock(block, [dx, dy], isPulled);
     else if (isMoved) actions.edit({ kind: 'moveBlocks', ids: [...held.keys()], dx, dy });
   }
   actions.hold(null);

@@ -108,7 +108,7 @@ function beginWire(): boolean {
  * where the pointer is, unless it is chained to a selected one.
  */
 export function writingKey(key: string): boolean {
-  if (!/^[0-9A-Z([+\->.@]$/.test(key)) return false;
+  if (!/^[0-9A-Z([+\->.@"]$/.test(key)) return false;
   const at = pointerPlace();
   if (at !== null && store.getState().selection.blocks.size !== 1) actions.beginWritingAt({ at, from: null });
   beginWriting(key);

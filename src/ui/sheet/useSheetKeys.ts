@@ -1,6 +1,7 @@
 /** Keys on the sheet: handed to the commands while the focus is on it, or nowhere in particular. */
 
 import { useEffect } from 'react';
+import { annotationKey } from '../annotations/annotation-keys.ts';
 import { isTextField } from '../shell/usePageKeys.ts';
 import { altKey, commandKey, controlKey } from './command-keys.ts';
 import { blockKey, viewKey, writingKey } from './sheet-keys.ts';
@@ -21,6 +22,7 @@ export function useSheetKeys(): void {
 /** Whether the key did something. */
 function isDone(event: KeyboardEvent, fitDrawing: (glide: boolean) => void): boolean {
   const fitGliding = () => fitDrawing(true);
+  if (annotationKey(event)) return true;
   if (event.altKey) return altKey(event);
   if (event.ctrlKey || event.metaKey) return controlKey(event);
   return commandKey(event, fitGliding) || blockKey(event) || writingKey(event.key) || viewKey(event.key, fitGliding);

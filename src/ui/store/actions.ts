@@ -143,6 +143,15 @@ export function selectBlocks(ids: Iterable<string>): void {
   store.setState({ selection: { blocks: new Set(ids), wires: new Set() } });
 }
 
+export function selectAnnotations(ids: Iterable<string>): void {
+  store.setState({ selection: { ...NOTHING_SELECTED, annotations: new Set(ids) } });
+}
+
+/** Opens a text or frame for writing, or closes what is open. */
+export function annotate(annotating: ViewSlice['annotating']): void {
+  changeView(annotating === undefined ? {} : { annotating });
+}
+
 /** Shows blocks where the hand has them while a drag lasts. */
 export function hold(held: ReadonlyMap<string, Point> | null): void {
   store.setState({ held });

@@ -1,6 +1,6 @@
 /** The view slice: what is shown and how, nothing of it part of the document. */
 
-import type { Point, PortReference } from '../../diagram/index.ts';
+import type { Annotation, Point, PortReference } from '../../diagram/index.ts';
 import type { Notation } from '../../worker/index.ts';
 
 export interface ViewSlice {
@@ -14,6 +14,8 @@ export interface ViewSlice {
   readonly theme: 'light' | 'dark' | null;
   /** The block whose fields are open on the sheet. */
   readonly editing: string | null;
+  /** The text or frame that is being written, with an empty id while it is new. */
+  readonly annotating?: Annotation | null;
   /** The block that a wire was begun from by key. */
   readonly wiringFrom: string | null;
   /** Where the block that is being written goes and the port that its wire starts at; null: where it falls. */

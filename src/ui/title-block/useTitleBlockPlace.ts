@@ -19,6 +19,7 @@ const START: TitleBlockPlace = { corner: 'lower-right', isFolded: false };
 
 const drawing = (state: State) => state.document.key;
 const blocks = (state: State) => state.document.diagram.blocks;
+const annotations = (state: State) => state.document.diagram.annotations;
 const folded = (state: State) => state.view.folded;
 
 export function useTitleBlockPlace(section: RefObject<HTMLElement | null>) {
@@ -26,6 +27,7 @@ export function useTitleBlockPlace(section: RefObject<HTMLElement | null>) {
   const [isHeldOpen, holdOpen] = useState(false);
   const key = useStore(drawing);
   const placed = useStore(blocks);
+  const noted = useStore(annotations);
   const isFoldedByHand = useStore(folded);
   const open = useRef<Size | null>(null);
   const timer = useRef<ReturnType<typeof setTimeout>>(undefined);
@@ -55,7 +57,7 @@ export function useTitleBlockPlace(section: RefObject<HTMLElement | null>) {
     setPlace(START);
   }, [key]);
   // biome-ignore lint/correctness/useExhaustiveDependencies: blocks that were placed or moved ask for a look
-  useEffect(settleSoon, [settleSoon, placed, key]);
+  useEffect(settleSoon, [settleSoon, placed, noted, key]);
   useEffect(() => () => clearTimeout(timer.current), []);
   useOnViewportChange({ onEnd: settleSoon });
   useEffect(() => {
@@ -98,5 +100,5 @@ function freeArea(own: HTMLElement): Rectangle {
 }
 
 function blockBoxes(): readonly Rectangle[] {
-  return [...document.querySelectorAll('.react-flow__node')].map(node => node.getBoundingClientRect());
+  return [...document.querySelectorAll('.react-flow__node, .annotation')].map(node => node.getBoundingClientRect());
 }

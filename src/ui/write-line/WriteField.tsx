@@ -5,9 +5,11 @@
 
 import { type CSSProperties, type KeyboardEvent, useEffect, useState } from 'react';
 import { readWiring, readWrittenBlock } from '../../diagram/write-a-block/index.ts';
+import { writeText } from '../annotations/annotation-commands.ts';
 import { shownTitle } from '../sheet/block-sentence.ts';
 import { actions, type State, store, useStore } from '../store/index.ts';
 import { chainedFrom, placeBlock } from './place-block.ts';
+import { readQuoted } from './read-quoted.ts';
 import { completed, completions, sayBefore } from './say-before.ts';
 import { sheetView } from './sheet-view.ts';
 import { wireToNamed } from './wire-to-named.ts';
@@ -120,6 +122,8 @@ function NameOption({ id, name, isActive, onPick }: NameOptionProps) {
 
 /** Does what the line says. Why it cannot be done, null where it is. */
 function done(text: string): string | null {
+  const note = readQuoted(text);
+  if (note !== null) return writeText(note);
   const wiring = readWiring(text);
   if (wiring !== null) return wireToNamed(wiring);
   const read = readWrittenBlock(text);

@@ -3,6 +3,7 @@
 import { displayName, type Sheet } from '../../diagram/index.ts';
 import { readWiring, readWrittenBlock, wiredBlock } from '../../diagram/write-a-block/index.ts';
 import { shownTitle } from '../sheet/block-sentence.ts';
+import { readQuoted } from './read-quoted.ts';
 
 interface Surroundings {
   readonly sheet: Sheet;
@@ -14,6 +15,7 @@ interface Surroundings {
 /** `Enter places gain K_p = 0.5, wired from integrator q`; empty while nothing can be said. */
 export function sayBefore(text: string, { sheet, parameters, from }: Surroundings): string {
   if (text.trim() === '') return '';
+  if (readQuoted(text) !== null) return 'Enter places this text on the sheet';
   const wiring = readWiring(text);
   if (wiring !== null) {
     const block = wiredBlock(sheet, wiring);
@@ -41,7 +43,7 @@ const MOST = 6;
 
 /** Names that the end of the text can go on to: blocks after `@`, else parameters; none where it is one already. */
 export function completions(text: string, { sheet, parameters }: Surroundings): readonly string[] {
-  const stem = stemOf(text);
+  const stem = readQuoted(text) === null ? stemOf(text) : null;
   if (stem === null) return [];
   const names = text.trimStart().startsWith('@') ? sheet.blocks.map(displayName) : parameters.map(({ name }) => name);
   const small = stem.toLowerCase();
