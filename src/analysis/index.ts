@@ -27,6 +27,7 @@ export type { StepMetrics } from './step-metrics.ts';
 export { stepMetrics } from './step-metrics.ts';
 export type { HiddenMode, Structural } from './structure.ts';
 export { hiddenModes, isControllable, isObservable, kalmanRanks } from './structure.ts';
+export { type SymbolicTransfer, symbolicTransfer } from './symbolic-transfer.ts';
 export type { ResponseRequest, StepResponse, TimeResponse } from './time-response.ts';
 export { initialStateResponse, stepResponse, stepValuesAt, timeResponse } from './time-response.ts';
 export {

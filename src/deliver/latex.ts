@@ -4,7 +4,6 @@
  */
 
 import { toFraction } from '../algebra/index.ts';
-import { formulaLatex } from '../algebra/symbolic/index.ts';
 import type { SignalName, StateSpace } from '../compile/index.ts';
 import { nameToLatex, toLatex } from '../expression/index.ts';
 import { CAUTION } from './caution.ts';
@@ -12,6 +11,7 @@ import { type Printer, printedRows } from './entries.ts';
 import type { ModelContext } from './format.ts';
 import type { MatrixRows } from './matrix-rows.ts';
 import { oneLine, wrapped } from './one-line.ts';
+import { symbolLatex } from './written-symbols.ts';
 
 const COMMENT_WIDTH = 100;
 
@@ -71,12 +71,7 @@ function latexDecimal(value: number): string {
 }
 
 const PRINTER: Printer<string> = {
-  formula: formula => formulaLatex(formula, latexSymbol),
+  formula: symbolLatex,
   fraction: value => toLatex(toFraction(value)),
   decimal: latexDecimal,
 };
-
-/** A parameter, or an irrational part as it was written; parentheses that it came with stay. */
-function latexSymbol(text: string): string {
-  return text.startsWith('(') ? `\\left(${toLatex(text)}\\right)` : toLatex(text);
-}

@@ -4,7 +4,6 @@
  */
 
 import { toFraction } from '../algebra/index.ts';
-import { formulaMathML } from '../algebra/symbolic/index.ts';
 import type { SignalName, StateSpace } from '../compile/index.ts';
 import { mathElement, nameToMathML, toMathML } from '../expression/index.ts';
 import { CAUTION } from './caution.ts';
@@ -12,6 +11,7 @@ import { type Printer, printedRows } from './entries.ts';
 import type { ModelContext } from './format.ts';
 import type { MatrixRows } from './matrix-rows.ts';
 import { oneLine } from './one-line.ts';
+import { symbolMathml } from './written-symbols.ts';
 
 /** The d of a derivative is upright (ISO 80000-2). */
 const UPRIGHT_D = '<mi mathvariant="normal">d</mi>';
@@ -75,12 +75,7 @@ function mathmlDecimal(value: number): string {
 }
 
 const PRINTER: Printer<string> = {
-  formula: formula => formulaMathML(formula, mathmlSymbol),
+  formula: symbolMathml,
   fraction: value => toMathML(toFraction(value)),
   decimal: mathmlDecimal,
 };
-
-/** A parameter, or an irrational part as it was written; parentheses that it came with stay. */
-function mathmlSymbol(text: string): string {
-  return text.startsWith('(') ? row(operator('('), toMathML(text), operator(')')) : toMathML(text);
-}

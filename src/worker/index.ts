@@ -18,4 +18,4 @@ export type {
   Question,
   RevisionAnswer,
 } from './protocol.ts';
-export type { TopicAnswer, TopicName, TopicQuestion, TransferMatrix } from './topics/index.ts';
+export type { SymbolEntry, Symbols, TopicAnswer, TopicName, TopicQuestion, TransferMatrix } from './topics/index.ts';

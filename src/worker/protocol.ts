@@ -20,6 +20,7 @@ import type {
   ZeroSet,
 } from '../analysis/index.ts';
 import type { Derivation } from '../compile/index.ts';
+import type { Notation } from '../deliver/index.ts';
 import type { Diagram, PortReference } from '../diagram/index.ts';
 import type { Result, Warning } from '../problem/index.ts';
 import type { TopicName } from './topics/index.ts';
@@ -30,8 +31,7 @@ export interface Channel {
   readonly output: number;
 }
 
-/** How matrix entries are written in a file. */
-export type Notation = 'fractions' | 'decimals';
+export type { Notation } from '../deliver/index.ts';
 
 export type Question =
   | {

@@ -84,3 +84,10 @@ export function collectIn(parts: ReadonlyMap<number, SymbolicPolynomial>, name: 
     rows.map(row => row.coefficient),
   );
 }
+
+/** The coefficients of the powers of one variable in descending order, none left out; empty for the zero polynomial. */
+export function coefficientsIn(p: SymbolicPolynomial, name: string): SymbolicPolynomial[] {
+  const spread = spreadIn(p, name);
+  const degree = Math.max(-1, ...spread.keys());
+  return Array.from({ length: degree + 1 }, (_, k) => spread.get(degree - k) ?? ZERO_POLYNOMIAL);
+}

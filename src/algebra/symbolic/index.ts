@@ -3,6 +3,7 @@
  * and formulas on paper. Start at `createSymbolicField`; run what uses it in `withinEffort`.
  */
 
+export { coefficientsIn } from './coefficients.ts';
 export {
   DEFAULT_LIMITS,
   Effort,

@@ -37,7 +37,7 @@ function NotationChoice({ notation, onChoose }: NotationChoiceProps) {
   return (
     <fieldset className="dialog-choices">
       <legend>Entries as</legend>
-      {(['fractions', 'decimals'] as const).map(choice => (
+      {(['fractions', 'decimals', 'symbols'] as const).map(choice => (
         <label key={choice}>
           <input type="radio" name="notation" checked={notation === choice} onChange={() => onChoose(choice)} />{' '}
           {choice}

@@ -5,6 +5,8 @@
 
 import './figures.css';
 
+export { CopyFormula } from './CopyFormula.tsx';
+export { FormulaView } from './FormulaView.tsx';
 export type { Figure } from './figure.ts';
 export { figureOf, rightDigits } from './figure.ts';
 export type { TextRun } from './format.ts';

@@ -1,7 +1,7 @@
 /** One row of the system matrix. Made anew only when what it shows changes, not when another row is pointed at. */
 
 import { memo } from 'react';
-import { MathName, RaisedText, singleLetter } from '../figures/index.ts';
+import { FormulaView, MathName, RaisedText, singleLetter } from '../figures/index.ts';
 import type { EntryAt, MatrixEntry } from './matrix-entries.ts';
 import type { Span } from './matrix-window.ts';
 
@@ -58,6 +58,7 @@ function cellClass({ states, pointedColumn, litColumns }: MatrixRowProps, column
 
 function Entry({ entry }: { readonly entry: MatrixEntry }) {
   if (entry.isZero) return <span className="system-matrix-zero">0</span>;
+  if (entry.mathml !== undefined) return <FormulaView mathml={entry.mathml} text={entry.text} />;
   return (
     <span title={entry.whole ?? undefined}>
       {entry.isRounded && <span className="system-matrix-rounded">≈</span>}

@@ -9,7 +9,7 @@ import type { Notation } from '../figures/index.ts';
 import { MatrixHead } from './MatrixHead.tsx';
 import { MatrixNote } from './MatrixNote.tsx';
 import { MatrixRow } from './MatrixRow.tsx';
-import { entriesOf } from './matrix-entries.ts';
+import { entriesOf, type SymbolCell, symbolEntries } from './matrix-entries.ts';
 import type { MatrixPlace } from './matrix-keys.ts';
 import { columnsByRow, matrixLabel, rowsOf } from './matrix-layout.ts';
 import { PanelEmpty } from './PanelState.tsx';
@@ -22,6 +22,8 @@ export type PointedBy = 'hover' | 'pick';
 interface SystemMatrixProps {
   readonly model: StateSpace;
   readonly notation: Notation;
+  /** Entries in symbols, which then stand in place of the numbers. */
+  readonly symbols?: readonly (readonly SymbolCell[])[] | null;
   /** Rows are the states then the outputs, columns the states then the inputs. */
   readonly onPoint?: (row: number, column: number, by: PointedBy) => void;
   /** The pointer has left the entries, or Escape was pressed. */
@@ -35,10 +37,13 @@ const NONE: readonly MatrixPlace[] = [];
 
 /** A and B over C and D as one table with the names at its edges. */
 export function SystemMatrix(props: SystemMatrixProps) {
-  const { model, notation, onPoint, onPointEnd, pointed = null, lit = NONE } = props;
+  const { model, notation, symbols = null, onPoint, onPointEnd, pointed = null, lit = NONE } = props;
   const id = useId();
   const scroller = useRef<HTMLDivElement>(null);
-  const entryAt = useMemo(() => entriesOf(model, notation), [model, notation]);
+  const entryAt = useMemo(
+    () => (symbols === null ? entriesOf(model, notation) : symbolEntries(symbols)),
+    [model, notation, symbols],
+  );
   const rows = useMemo(() => rowsOf(model), [model]);
   const litColumns = useMemo(() => columnsByRow(lit), [lit]);
   const states = model.states.length;

@@ -22,6 +22,8 @@ export interface MatrixEntry {
   readonly isRounded: boolean;
   /** The whole value, where `text` does not say it. */
   readonly whole: string | null;
+  /** The same as one MathML element, where it is a formula. */
+  readonly mathml?: string;
 }
 
 /** The entry in `row` (0 … n + p − 1) and `column` (0 … n + m − 1). */
@@ -38,6 +40,21 @@ export function entriesOf(model: StateSpace, notation: Notation): EntryAt {
   if (exact === null) return partitioned(model.numeric, model.states.length, 0, value => decimalEntry(value));
   const write = notation === 'fractions' ? fractionEntry : (value: Rational) => decimalEntry(value, value);
   return partitioned(exact, model.states.length, ZERO, write);
+}
+
+/** An entry in symbols of the parameters. */
+export interface SymbolCell {
+  readonly text: string;
+  readonly mathml: string;
+}
+
+/** Entries in symbols, rows and columns as in the table. */
+export function symbolEntries(rows: readonly (readonly SymbolCell[])[]): EntryAt {
+  return (row, column) => {
+    const cell = rows[row]?.[column];
+    if (cell === undefined || cell.text === '0') return NOTHING;
+    return { text: cell.text, isZero: false, isRounded: false, whole: cell.text, mathml: cell.mathml };
+  };
 }
 
 /** Why `model` has decimals only, or null where its entries are exact. */

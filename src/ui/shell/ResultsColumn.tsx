@@ -1,9 +1,10 @@
 /** The results beside the sheet: the system matrix always in view, then time response, poles and zeros, transfer function. */
 
-import { Panel, PanelPending, ProblemList, ShortChoice, SystemMatrix } from '../results/index.ts';
+import { Panel, PanelPending, ProblemList, ShortChoice } from '../results/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
 import { AnswerPanels } from './AnswerPanels.tsx';
 import { goTo } from './go-to.ts';
+import { MatrixView } from './MatrixView.tsx';
 
 const derivation = (state: State) => state.results.derivation;
 const poles = (state: State) => state.results.poles;
@@ -14,6 +15,7 @@ const notation = (state: State) => state.view.notation;
 const NOTATIONS = [
   { id: 'fractions', label: 'exact' },
   { id: 'decimals', label: 'decimals' },
+  { id: 'symbols', label: 'symbols' },
 ] as const;
 
 export function ResultsColumn() {
@@ -43,7 +45,7 @@ function MatrixPanel() {
   const choice = <ShortChoice label="Entries as" choices={NOTATIONS} selected={shown} onSelect={actions.setNotation} />;
   return (
     <Panel title="System matrix" aside={choice}>
-      {known === null ? <PanelPending label="System matrix" /> : <SystemMatrix model={known.model} notation={shown} />}
+      {known === null ? <PanelPending label="System matrix" /> : <MatrixView model={known.model} notation={shown} />}
     </Panel>
   );
 }

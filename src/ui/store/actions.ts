@@ -181,6 +181,11 @@ export function setNotation(notation: Notation): void {
   changeView({ notation });
 }
 
+/** Writes derived parameters out in symbols, or lets them keep their names. */
+export function setExpanded(expanded: boolean): void {
+  changeView({ expanded });
+}
+
 export function setTheme(theme: ViewSlice['theme']): void {
   changeView({ theme });
 }

@@ -5,6 +5,8 @@ import type { Notation } from '../../worker/index.ts';
 
 export interface ViewSlice {
   readonly notation: Notation;
+  /** Whether symbols write derived parameters out. */
+  readonly expanded: boolean;
   /** Names of the input and output whose transfer function and step response are shown; null: the first there is. */
   readonly input: string | null;
   readonly output: string | null;
@@ -42,6 +44,7 @@ export interface Notice {
 
 export const FIRST_VIEW: ViewSlice = {
   notation: 'fractions',
+  expanded: false,
   input: null,
   output: null,
   resultTab: null,

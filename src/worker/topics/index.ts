@@ -1,5 +1,6 @@
 /** What is asked of the model on demand, a topic a file. */
 
+export type { SymbolEntry, Symbols } from './symbols.ts';
 export type { Patience, Subject, Topic, TopicModule } from './topic.ts';
 export { TOPIC_MODULES } from './topic-modules.ts';
 export type { TopicAnswer, TopicName, TopicQuestion, Topics } from './topics.ts';

@@ -1,9 +1,11 @@
 /** The table of topics: their types for both ends of the line. Where each is loaded from stands in topic-modules.ts. */
 
 import type { RequirementsTopic } from './requirements.ts';
+import type { SymbolsTopic } from './symbols.ts';
 import type { TransferMatrixTopic } from './transfer-matrix.ts';
 
 export interface Topics {
+  readonly symbols: SymbolsTopic;
   readonly requirements: RequirementsTopic;
   readonly 'transfer-matrix': TransferMatrixTopic;
 }
