@@ -38,7 +38,11 @@ const ALL_IN_PAGE = 300;
 /** Below this zoom what is written beside blocks cannot be read and is left out. */
 const FAR = 0.35;
 
-const isFar = (flow: ReactFlowState) => flow.transform[2] < FAR;
+/** Below this one nothing that is written can be read. */
+const FARTHER = 0.14;
+
+const farness = ({ transform: [, , zoom] }: ReactFlowState) =>
+  zoom < FARTHER ? ' sheet-far sheet-farther' : zoom < FAR ? ' sheet-far' : '';
 
 const hasCuts = (state: State) => state.document.diagram.cuts !== undefined;
 
@@ -52,7 +56,7 @@ export function Sheet() {
   const drop = useDropPart();
   const isCut = useDocument(hasCuts);
   const isAnnotated = useDocument(hasAnnotations);
-  const far = useStore(isFar) ? ' sheet-far' : '';
+  const far = useStore(farness);
   useFitOnOpening();
   useSheetView();
   return (
@@ -70,7 +74,7 @@ export function Sheet() {
         nodeTypes={NODE_TYPES}
         edgeTypes={EDGE_TYPES}
         nodeOrigin={CENTRE}
-        minZoom={0.1}
+        minZoom={0.03}
         maxZoom={4}
         connectionMode={ConnectionMode.Strict}
         connectionLineComponent={DrawnWire}

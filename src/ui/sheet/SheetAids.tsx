@@ -3,6 +3,8 @@
  * pointed at. Loaded right after the drawing, with the commands behind them.
  */
 
+import './far.css';
+import '../theme/contrast.css';
 import { useEffect } from 'react';
 import { useNewText } from '../annotations/useNewText.ts';
 import { followPrinting } from '../printing/printed-sheet.ts';

@@ -7,7 +7,8 @@ import { routeWires } from '../../diagram/routing/index.ts';
 import { store } from '../store/index.ts';
 import { type FitLimits, fitPlacement } from './fit-drawing.ts';
 
-const LIMITS: FitLimits = { largestZoom: 1.2, smallestZoom: 0.1, margin: 26 };
+/** As small as a thousand blocks need, which take up to some 30,000 units. */
+const LIMITS: FitLimits = { largestZoom: 1.2, smallestZoom: 0.03, margin: 26 };
 
 const MILLISECONDS = 200;
 
