@@ -4,7 +4,7 @@ import { readFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import type AxeCore from 'axe-core';
 import { expect, type Page, test } from 'playwright/test';
-import { openWorkedDrawing } from './sheet-page.ts';
+import { block, openWorkedDrawing, writeBlocks } from './sheet-page.ts';
 
 const AXE = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
 
@@ -58,3 +58,21 @@ test('a sheet with a refused model', async ({ page }) => {
   await expect(page.getByRole('list', { name: 'Problems' })).toBeVisible();
   expect(await findings(page)).toEqual([]);
 });
+
+for (const colorScheme of ['light', 'dark'] as const) {
+  test(`texts and frames, one of them being written, and what is selected to be exported, ${colorScheme}`, async ({
+    page,
+  }) => {
+    await page.emulateMedia({ colorScheme });
+    await openWorkedDrawing(page);
+    await writeBlocks(page, '"a text"');
+    await block(page, 'gain K_p').click();
+    await page.keyboard.press('b');
+    await expect(page.getByLabel('Title of the frame')).toBeFocused();
+    expect(await findings(page)).toEqual([]);
+    await page.keyboard.press('Enter');
+    await page.getByRole('button', { name: 'Export…' }).click();
+    await expect(page.getByRole('radio', { name: 'what is selected' })).toBeVisible();
+    expect(await findings(page)).toEqual([]);
+  });
+}

@@ -178,3 +178,73 @@ test('texts and frames leave the matrices alone and stand in the picture and in 
   await page.reload();
   await expect(annotation(page, 'text kept with the drawing')).toBeVisible();
 });
+
+test('a selecting frame takes texts along with blocks, and dragging one of the blocks takes all of it', async ({
+  page,
+}) => {
+  await openEmptySheet(page);
+  await writeBlocks(page, 'u>', '2', '>y', '"beside"');
+  await sheet(page).focus();
+  await page.keyboard.press('z');
+  await page.waitForTimeout(400);
+  const text = annotation(page, 'text beside');
+  const [first, last, note] = [
+    await boxOf(block(page, 'input u')),
+    await boxOf(block(page, 'output y')),
+    await boxOf(text),
+  ];
+  const left = Math.min(first.x, note.x) - 40;
+  const right = Math.max(last.x + last.width, note.x + note.width) + 40;
+  const bottom = Math.max(last.y, note.y + note.height) + 60;
+  await page.keyboard.down('Shift');
+  await page.mouse.move(left, Math.min(first.y, note.y) - 40);
+  await page.mouse.down();
+  await page.mouse.move(right, bottom, { steps: 6 });
+  await page.mouse.up();
+  await page.keyboard.up('Shift');
+  await expect(text).toHaveClass(/annotation-selected/);
+  await expect(page.locator('.react-flow__node.selected')).toHaveCount(3);
+  const nodePlace = () =>
+    block(page, 'input u').evaluate(node => (node instanceof HTMLElement ? node.style.transform : ''));
+  const [before, blockBefore] = [await placeOf(text), await nodePlace()];
+  await page.keyboard.press('ArrowDown');
+  await expect(notice(page)).toContainText('Moved 3 blocks and 1 annotation.');
+  expect((await placeOf(text))[1]).toBe((before[1] ?? 0) + 20);
+  await page.keyboard.press('Control+z');
+  expect([await placeOf(text), await nodePlace()]).toEqual([before, blockBefore]);
+  await dragBy(block(page, 'gain 2'), 0, 80);
+  await expect.poll(async () => (await placeOf(text))[1] ?? 0).toBeGreaterThan((before[1] ?? 0) + 39);
+  expect(await nodePlace()).not.toBe(blockBefore);
+  await page.keyboard.press('Control+z');
+  expect([await placeOf(text), await nodePlace()]).toEqual([before, blockBefore]);
+});
+
+test('by touch, a frame is dragged by its title edge with its block', async ({ browser, baseURL }) => {
+  const context = await browser.newContext({
+    viewport: { width: 390, height: 844 },
+    hasTouch: true,
+    isMobile: true,
+    ...(baseURL === undefined ? {} : { baseURL }),
+  });
+  const page = await context.newPage();
+  await openEmptySheet(page);
+  await writeBlocks(page, '2');
+  await block(page, 'gain 2').tap();
+  await page.getByRole('button', { name: 'Frame', exact: true }).tap();
+  await page.getByLabel('Title of the frame').fill('touched');
+  await page.keyboard.press('Enter');
+  const frame = annotation(page, /^frame touched/);
+  const [before, gain, grip] = [await placeOf(frame), await boxOf(block(page, 'gain 2')), await boxOf(hold(frame))];
+  const touch = await context.newCDPSession(page);
+  const at = (dx: number, dy: number) => [{ x: grip.x + grip.width / 2 + dx, y: grip.y + grip.height / 2 + dy }];
+  await touch.send('Input.dispatchTouchEvent', { type: 'touchStart', touchPoints: at(0, 0) });
+  for (const step of [10, 25, 40, 60]) {
+    await touch.send('Input.dispatchTouchEvent', { type: 'touchMove', touchPoints: at(step, step / 2) });
+  }
+  await touch.send('Input.dispatchTouchEvent', { type: 'touchEnd', touchPoints: [] });
+  await expect.poll(() => placeOf(frame)).not.toEqual(before);
+  const [left = 0] = await placeOf(frame);
+  expect(left).toBeGreaterThan(before[0] ?? 0);
+  expect((await boxOf(block(page, 'gain 2'))).x).toBeGreaterThan(gain.x + 20);
+  await context.close();
+});

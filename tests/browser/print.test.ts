@@ -1,31 +1,11 @@
 /** The sheet on paper and as a picture: one page with its title block, nothing of the page's own, black on white. */
 
 import { readFile } from 'node:fs/promises';
-import { inflateSync } from 'node:zlib';
 import { expect, type Page, test } from 'playwright/test';
-import { block, openWorkedDrawing } from './sheet-page.ts';
+import { readPdf } from './read-pdf.ts';
+import { block, openEmptySheet, openWorkedDrawing } from './sheet-page.ts';
 
 const exporting = (page: Page) => page.getByRole('dialog', { name: 'Export' });
-
-/** Pages of a PDF file (ISO 32000-1, 7.7.3.3: one dictionary of type Page each), in streams of objects too. */
-function pagesOf(pdf: Buffer): number {
-  const plain = [pdf.toString('latin1')];
-  for (const { index } of plain[0]?.matchAll(/stream\r?\n/g) ?? []) {
-    const start = pdf.indexOf('\n', index) + 1;
-    try {
-      plain.push(inflateSync(pdf.subarray(start, pdf.indexOf('endstream', start))).toString('latin1'));
-    } catch {
-      // a stream of another coding holds no objects
-    }
-  }
-  return plain.join('\n').match(/\/Type\s*\/Page\b(?!s)/g)?.length ?? 0;
-}
-
-/** Width and height of a PDF's first page, points. */
-function mediaOf(pdf: Buffer): readonly number[] {
-  const [, box = ''] = /\/MediaBox\s*\[([^\]]*)\]/.exec(pdf.toString('latin1')) ?? [];
-  return box.trim().split(/\s+/).map(Number).slice(2);
-}
 
 test('the browser prints the sheet on one page that lies across, and afterwards the page is as it was', async ({
   page,
@@ -35,9 +15,14 @@ test('the browser prints the sheet on one page that lies across, and afterwards 
   await openWorkedDrawing(page);
   const pdf = await page.pdf({ preferCSSPageSize: true });
   expect(complaints).toEqual([]);
-  expect(pagesOf(pdf)).toBe(1);
-  const [width = 0, height = 0] = mediaOf(pdf);
+  const { pages, width, height, texts } = readPdf(pdf);
+  expect(pages).toBe(1);
   expect(width / height).toBeGreaterThan(1.2);
+  for (const text of ['Survey winch, line tension', 'Block diagram', 'Revision', 'Date of issue', 'drum and rotor']) {
+    expect(texts).toContain(text);
+  }
+  // Nothing of the page itself.
+  expect(texts.join(' ')).not.toMatch(/POLEWARD|Export|System matrix/i);
   await expect(page.locator('.printed-sheet')).toHaveCount(0);
   await expect(block(page, 'gain K_p')).toBeVisible();
 });
@@ -103,4 +88,22 @@ test('a picture of what is selected holds that alone, and both kinds go to the c
   await expect(page.locator('.notice')).toContainText('Copied the picture.');
   const kinds = await page.evaluate(async () => (await navigator.clipboard.read()).flatMap(({ types }) => types));
   expect(kinds).toContain('image/png');
+});
+
+test('a drawing that is higher than wide is printed upright', async ({ page }) => {
+  await openEmptySheet(page);
+  const blocks = Array.from({ length: 24 }, (_, i) => ({ id: `g${i}`, kind: 'gain', gain: '2', at: [0, 120 * i] }));
+  const file = { format: 'poleward-diagram', version: 1, title: 'Column', parameters: [], blocks, wires: [] };
+  await page.evaluate(text => {
+    const dataTransfer = new DataTransfer();
+    dataTransfer.items.add(new File([text], 'column.poleward.json', { type: 'application/json' }));
+    document
+      .querySelector('.page')
+      ?.dispatchEvent(new DragEvent('drop', { bubbles: true, cancelable: true, dataTransfer }));
+  }, JSON.stringify(file));
+  await expect(page.locator('.react-flow__node')).toHaveCount(24);
+  const { pages, width, height, texts } = readPdf(await page.pdf({ preferCSSPageSize: true }));
+  expect(pages).toBe(1);
+  expect(height).toBeGreaterThan(1.2 * width);
+  expect(texts).toContain('Column');
 });

@@ -39,6 +39,7 @@ export default function AnnotationLayer() {
     [annotations, sheet],
   );
   useEffect(letGoElsewhere, []);
+  useEffect(chooseInFrame, []);
 
   const drag = (id: string, by: Point) => {
     const { ids, blocks } = inHand(sheet, id);
@@ -103,10 +104,29 @@ function letGoElsewhere(): () => void {
     const { selection } = store.getState();
     if (!selection.annotations?.size || shiftKey || ctrlKey || metaKey) return;
     if (!(target instanceof Element) || target.closest('.sheet') === null) return;
-    if (target.closest('.annotation, .react-flow__node.selected') === null) {
+    if (target.closest('.annotation, .react-flow__node.selected, .react-flow__nodesselection') === null) {
       actions.select({ blocks: selection.blocks, wires: selection.wires });
     }
   };
   window.addEventListener('pointerdown', onPress, { capture: true });
   return () => window.removeEventListener('pointerdown', onPress, { capture: true });
+}
+
+/** A selecting frame takes the annotations that lie wholly in it along with the blocks. */
+function chooseInFrame(): () => void {
+  const onRelease = () => {
+    const frame = document.querySelector('.react-flow__selection')?.getBoundingClientRect();
+    if (frame === undefined || frame.width === 0) return;
+    const isInside = (element: Element) => {
+      const { left, top, right, bottom } = element.getBoundingClientRect();
+      return left >= frame.left && right <= frame.right && top >= frame.top && bottom <= frame.bottom;
+    };
+    const found = [...document.querySelectorAll<HTMLElement>('.annotation')].filter(isInside);
+    const ids = found.flatMap(({ dataset }) => dataset['annotation'] ?? []);
+    const { selection } = store.getState();
+    if (ids.length > 0)
+      actions.select({ ...selection, annotations: new Set([...(selection.annotations ?? []), ...ids]) });
+  };
+  window.addEventListener('pointerup', onRelease, { capture: true });
+  return () => window.removeEventListener('pointerup', onRelease, { capture: true });
 }
