@@ -1,6 +1,7 @@
 /** Diagram to state space: flatten, equations, loops, eliminate, derivatives, self-check. */
 
 export { type CompileOptions, compile } from './compile.ts';
+export { type OpenedDelay, type OpenedLimiter, type OpenedModel, openedModel } from './opened/index.ts';
 export { type DirectResponse, directResponse } from './self-check/index.ts';
 export type { AlgebraicLoop, Derivation, SelfCheck, SignalName, StateSpace, SystemMatrices } from './state-space.ts';
 export { deriveSymbolic, type SymbolicModel } from './symbolic/index.ts';
