@@ -1,3 +1,4 @@
 /** The symbolic view of a drawing. */
 
 export { deriveSymbolic, type SymbolicModel } from './derive-symbolic.ts';
+export { symbolicReader } from './symbolic-reader.ts';
