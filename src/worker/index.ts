@@ -18,4 +18,13 @@ export type {
   Question,
   RevisionAnswer,
 } from './protocol.ts';
-export type { SymbolEntry, Symbols, TopicAnswer, TopicName, TopicQuestion, TransferMatrix } from './topics/index.ts';
+export type {
+  SymbolEntry,
+  Symbols,
+  TopicAnswer,
+  TopicName,
+  TopicQuestion,
+  TraceAnswer,
+  TraceQuestion,
+  TransferMatrix,
+} from './topics/index.ts';

@@ -19,10 +19,18 @@ export interface TracedValue {
   readonly symbols: string | null;
 }
 
+/** A block on a path, in the words of the screen. */
+export interface TracedStep {
+  /** `summing point`, `integrator`; empty for a gain, which is called by what is written in it. */
+  readonly word: string;
+  /** A name or an expression: `omega`, `1/J`; empty where the word says it all. */
+  readonly math: string;
+}
+
 /** A path or a loop along the drawing. */
 export interface TracedWalk {
-  /** The blocks it passes, in order, in the words of the screen: `summing point e`, `1/J`, `integrator omega`. */
-  readonly steps: readonly string[];
+  /** The blocks it passes, in order, without the boundaries of groups. */
+  readonly steps: readonly TracedStep[];
   /** The same blocks as `outer.inner.id`. */
   readonly blocks: readonly string[];
   readonly wires: readonly WireEnd[];

@@ -3,6 +3,7 @@
 import { portCounts } from '../../diagram/index.ts';
 import { type FlatBlock, type FlatDrawing, titleOf } from '../flatten/index.ts';
 import type { Branch } from './action-graph.ts';
+import type { TracedStep } from './trace.ts';
 
 /** The wire that ends at an input port: the sheet it is on by the ids of the groups around, '' for the top sheet, and the port. */
 export interface WireEnd {
@@ -17,7 +18,7 @@ export interface DrawingParts {
   /** The wire into a port of the flat drawing that some wire feeds. */
   wireInto(port: number): WireEnd;
   /** The block as a step of a path: a gain by what is written in it. */
-  stepOf(block: number): string;
+  stepOf(block: number): TracedStep;
 }
 
 /** The parts of one drawing. */
@@ -33,7 +34,7 @@ export function drawingParts(drawing: FlatDrawing): DrawingParts {
       if (groupPort !== undefined) return { sheet: aroundOf(around), block: lastOf(around), port: groupPort };
       return { sheet: around, block: block.id, port: port - drawing.inputStart[b]! };
     },
-    stepOf: b => stepText(drawing.blocks[b]!),
+    stepOf: b => stepFrom(drawing.blocks[b]!),
   };
 }
 
@@ -48,11 +49,13 @@ export function partsOfWalk(branches: readonly Branch[]): { readonly blocks: num
   return { blocks, ports };
 }
 
-function stepText(flat: FlatBlock): string {
-  const { block } = flat;
-  if (block.kind === 'gain' && block.name === undefined) return block.gain;
-  if (block.kind === 'summer' && block.name === undefined) return 'summing point';
-  return titleOf(flat);
+function stepFrom(flat: FlatBlock): TracedStep {
+  const { block, name } = flat;
+  if (block.kind === 'gain' && block.name === undefined) return { word: '', math: block.gain };
+  if (block.kind === 'summer' && block.name === undefined) return { word: 'summing point', math: '' };
+  const title = titleOf(flat);
+  if (name === '' || !title.endsWith(` ${name}`)) return { word: title, math: '' };
+  return { word: title.slice(0, -name.length - 1), math: name };
 }
 
 function ownersOfPorts({ blocks, inputStart }: FlatDrawing): Int32Array {

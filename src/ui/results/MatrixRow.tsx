@@ -75,7 +75,7 @@ function dottedClass(letter: string): string {
 }
 
 /** ω̇ for a letter, its dot drawn since few faces carry it over every one; d/dt in front of a word. */
-function Derivative({ name }: { readonly name: string }) {
+export function Derivative({ name }: { readonly name: string }) {
   const letter = singleLetter(name);
   return (
     <>

@@ -16,8 +16,8 @@ import { PanelEmpty } from './PanelState.tsx';
 import { useMatrixKeys } from './useMatrixKeys.ts';
 import { useMatrixWindow } from './useMatrixWindow.ts';
 
-/** `hover` follows the pointer; `pick` is a click, a touch or a key. */
-export type PointedBy = 'hover' | 'pick';
+/** `hover` follows the pointer, `walk` the arrow keys; `keep` is a click, a touch or Enter. */
+export type PointedBy = 'hover' | 'walk' | 'keep';
 
 interface SystemMatrixProps {
   readonly model: StateSpace;
@@ -26,8 +26,8 @@ interface SystemMatrixProps {
   readonly symbols?: readonly (readonly SymbolCell[])[] | null;
   /** Rows are the states then the outputs, columns the states then the inputs. */
   readonly onPoint?: (row: number, column: number, by: PointedBy) => void;
-  /** The pointer has left the entries, or Escape was pressed. */
-  readonly onPointEnd?: () => void;
+  /** The pointer or the keyboard's focus has left the entries, or Escape was pressed. */
+  readonly onPointEnd?: (by: 'hover' | 'walk' | 'escape') => void;
   readonly pointed?: MatrixPlace | null;
   /** Entries that take part in what is pointed at elsewhere. */
   readonly lit?: readonly MatrixPlace[];
@@ -81,9 +81,10 @@ export function SystemMatrix(props: SystemMatrixProps) {
           aria-rowcount={rows.length + 1}
           aria-colcount={columnCount + 1}
           onKeyDown={onKeyDown}
-          onClick={event => pointAt(event, 'pick')}
+          onClick={event => pointAt(event, 'keep')}
           onPointerOver={event => pointAt(event, 'hover')}
-          onPointerLeave={onPointEnd}
+          onPointerLeave={() => onPointEnd?.('hover')}
+          onBlur={() => onPointEnd?.('walk')}
         >
           <caption className="visually-hidden">{matrixLabel(model)}</caption>
           <MatrixHead model={model} columns={window.columns} isPartial={window.isPartial} />

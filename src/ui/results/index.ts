@@ -8,6 +8,7 @@ import './system-matrix.css';
 
 export type { Channel } from './ChannelPicker.tsx';
 export { ChannelPicker } from './ChannelPicker.tsx';
+export { Derivative } from './MatrixRow.tsx';
 export type { MatrixPlace } from './matrix-keys.ts';
 export { Panel } from './Panel.tsx';
 export { PanelEmpty, PanelPending } from './PanelState.tsx';

@@ -9,21 +9,26 @@ interface MatrixKeys {
   readonly rows: number;
   readonly columns: number;
   readonly window: MatrixWindow;
-  readonly onPoint: ((row: number, column: number, by: 'pick') => void) | undefined;
-  readonly onPointEnd: (() => void) | undefined;
+  readonly onPoint: ((row: number, column: number, by: 'walk' | 'keep') => void) | undefined;
+  readonly onPointEnd: ((by: 'escape') => void) | undefined;
 }
 
-/** Answers keys over the matrix: moving points at the next entry and brings it into view, Escape lets go. */
+/** Answers keys over the matrix: moving points at the next entry and brings it into view, Enter keeps it, Escape lets go. */
 export function useMatrixKeys(keys: MatrixKeys): (event: KeyboardEvent) => void {
   const { scroller, pointed, rows, columns, window, onPoint, onPointEnd } = keys;
   return event => {
     if (onPoint === undefined || event.altKey || event.ctrlKey || event.metaKey) return;
-    if (event.key === 'Escape') onPointEnd?.();
+    if (event.key === 'Escape') onPointEnd?.('escape');
+    if ((event.key === 'Enter' || event.key === ' ') && pointed !== null) {
+      event.preventDefault();
+      onPoint(pointed.row, pointed.column, 'keep');
+      return;
+    }
     const place = placeAfter(event.key, pointed, rows, columns);
     if (place === null) return;
     event.preventDefault();
     if (scroller.current !== null) bringIntoView(scroller.current, place, window.isPartial);
-    onPoint(place.row, place.column, 'pick');
+    onPoint(place.row, place.column, 'walk');
   };
 }
 

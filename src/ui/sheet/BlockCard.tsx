@@ -1,31 +1,50 @@
-/** What is known of the block that is pointed at or has the focus: value, unit, signal, and the states it takes part in. */
+/**
+ * What is known of the block or wire that is pointed at or has the focus: value, unit, signal, the states and entries it takes
+ * part in.
+ */
 
-import { useMemo } from 'react';
+import { useEffect, useMemo } from 'react';
 import { useViewport } from 'reactflow';
 import { blockRectangle, sheetGeometry } from '../../diagram/geometry/index.ts';
 import { type Block, displayName, type Sheet } from '../../diagram/index.ts';
 import { statesOfBlock } from '../commands/states-of-block.ts';
-import { type State, useStore } from '../store/index.ts';
+import { actions, type PointedPart, type State, useStore } from '../store/index.ts';
 import { formatValue } from '../title-block/format-value.ts';
 import { shownTitle } from './block-sentence.ts';
-import { usePointedBlock } from './usePointedBlock.ts';
+import { type PartOnSheet, usePointedPart } from './usePointedPart.ts';
 
 const diagram = (state: State) => state.document.diagram;
 const isBusy = (state: State) => state.held !== null || state.view.editing !== null || state.view.dialog !== null;
 
 export function BlockCard() {
-  const id = usePointedBlock();
+  const pointed = usePointedPart();
   const sheet = useStore(diagram);
   const busy = useStore(isBusy);
-  const block = id === null ? undefined : sheet.blocks.find(candidate => candidate.id === id);
-  return block === undefined || busy ? null : <ShownCard block={block} sheet={sheet} />;
+  const part = busy ? null : pointed;
+  useEffect(() => actions.pointAtPart(part === null ? null : inDrawing(part)), [part]);
+  const block = part === null || 'wire' in part ? undefined : sheet.blocks.find(({ id }) => id === part.block);
+  return block === undefined ? null : <ShownCard block={block} sheet={sheet} />;
 }
+
+/** The part of the sheet that is shown as part of the whole drawing. */
+function inDrawing(part: PartOnSheet): PointedPart {
+  if ('block' in part) return part;
+  const at = part.wire.lastIndexOf(':');
+  return { wire: { sheet: '', block: part.wire.slice(0, at), port: Number(part.wire.slice(at + 1)) } };
+}
+
+/** How many of the entries that the block takes part in, once that is known. */
+const entryCount = ({ pointing: { part, answer } }: State): number | null =>
+  part !== null && answer?.kind === 'part' && JSON.stringify(answer.part) === JSON.stringify(part)
+    ? answer.entries.length
+    : null;
 
 /** Pixels between the block, its labels and the card. */
 const UNDERNEATH = 26;
 
 function ShownCard({ block, sheet }: { readonly block: Block; readonly sheet: Sheet }) {
   const value = useStore((state: State) => state.results.values.blocks[block.id]);
+  const entries = useStore(entryCount);
   const { x, y, zoom } = useViewport();
   const frame = useMemo(() => {
     const placed = sheetGeometry(sheet).get(block.id);
@@ -44,6 +63,7 @@ function ShownCard({ block, sheet }: { readonly block: Block; readonly sheet: Sh
         ))}
         {carries.length > 0 && <Fact name="carries" text={carries.join(', ')} />}
         {drives.length > 0 && <Fact name="drives" text={drives.map(name => `d${name}/dt`).join(', ')} />}
+        <Fact name="entries" text={entries === null ? '…' : `${entries} of the system matrix`} />
       </dl>
     </div>
   );

@@ -5,14 +5,28 @@
 
 import './far.css';
 import '../theme/contrast.css';
-import { useEffect } from 'react';
+import { lazy, Suspense, useEffect } from 'react';
 import { useNewText } from '../annotations/useNewText.ts';
 import { followPrinting } from '../printing/printed-sheet.ts';
+import { type State, useStore } from '../store/index.ts';
 import { BlockCard } from './BlockCard.tsx';
 import { FindField } from './FindField.tsx';
 import { SheetToolbar } from './SheetToolbar.tsx';
 import { useClipboard } from './useClipboard.ts';
 import { useSheetKeys } from './useSheetKeys.ts';
+
+/** Loaded once an entry is pointed at. */
+const TraceMarks = lazy(() => import('../trace/index.ts').then(room => ({ default: room.TraceMarks })));
+
+const hasEntry = (state: State) => state.pointing.entry !== null;
+
+function EntryMarks() {
+  return useStore(hasEntry) ? (
+    <Suspense>
+      <TraceMarks />
+    </Suspense>
+  ) : null;
+}
 
 export function SheetAids() {
   useSheetKeys();
@@ -24,6 +38,7 @@ export function SheetAids() {
       <SheetToolbar />
       <FindField />
       <BlockCard />
+      <EntryMarks />
     </>
   );
 }

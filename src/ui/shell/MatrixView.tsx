@@ -5,6 +5,8 @@ import { useAnswer } from '../answers/index.ts';
 import { PanelEmpty, SystemMatrix } from '../results/index.ts';
 import type { ViewSlice } from '../store/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
+import { TraceOfPointed } from './TraceOfPointed.tsx';
+import { useMatrixPointing } from './useMatrixPointing.ts';
 
 const expanded = (state: State) => state.view.expanded;
 const isMoving = (state: State) => state.live !== null;
@@ -18,12 +20,27 @@ interface MatrixViewProps {
 }
 
 export function MatrixView({ model, notation }: MatrixViewProps) {
-  if (notation !== 'symbols') return <SystemMatrix model={model} notation={notation} />;
-  return <SymbolMatrix model={model} />;
+  return (
+    <>
+      {notation === 'symbols' ? <SymbolMatrix model={model} /> : <NumberMatrix model={model} notation={notation} />}
+      <TraceOfPointed model={model} />
+    </>
+  );
+}
+
+function NumberMatrix({
+  model,
+  notation,
+}: {
+  readonly model: StateSpace;
+  readonly notation: 'fractions' | 'decimals';
+}) {
+  return <SystemMatrix model={model} notation={notation} {...useMatrixPointing(model)} />;
 }
 
 function SymbolMatrix({ model }: { readonly model: StateSpace }) {
   const isExpanded = useStore(expanded);
+  const pointing = useMatrixPointing(model);
   // Symbols are the same whatever value a parameter has: while one moves nothing is asked.
   const isStill = !useStore(isMoving);
   const { answer, isPending } = useAnswer('symbols', { expanded: isExpanded, channel: null }, isStill);
@@ -31,7 +48,7 @@ function SymbolMatrix({ model }: { readonly model: StateSpace }) {
   const fits = rows !== null && rows.length === model.states.length + model.outputs.length;
   return (
     <>
-      <SystemMatrix model={model} notation="fractions" symbols={fits ? rows : null} />
+      <SystemMatrix model={model} notation="fractions" symbols={fits ? rows : null} {...pointing} />
       {answer !== null && answer.note !== '' && <PanelEmpty>{answer.note}</PanelEmpty>}
       {answer === null && !isPending && <PanelEmpty>No symbols for this model.</PanelEmpty>}
       <ExpandChoice isExpanded={isExpanded} />

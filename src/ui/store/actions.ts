@@ -5,9 +5,10 @@
 
 import type { Diagram, Edit, Point, Sheet } from '../../diagram/index.ts';
 import type { Problem } from '../../problem/index.ts';
-import type { Notation, RevisionAnswer } from '../../worker/index.ts';
+import type { Notation, RevisionAnswer, TraceAnswer } from '../../worker/index.ts';
 import { advanced, type DocumentSlice, edited, opened, redone, undone } from './document.ts';
 import { moved } from './live.ts';
+import { entryLeft, entryPointed, type PointedPart, type PointingSlice } from './pointing.ts';
 import { answered } from './results.ts';
 import { NOTHING_SELECTED, type SelectionSlice, stillThere } from './selection.ts';
 import { store } from './store.ts';
@@ -229,6 +230,26 @@ export function takeAnswer(answer: RevisionAnswer): void {
 /** Says that no answer can be had. */
 export function stopResults(stopped: string): void {
   store.setState(({ results }) => ({ results: { ...results, stopped } }));
+}
+
+/** Points at an entry of the system matrix, or keeps it. */
+export function pointAtEntry(row: number, column: number, by: PointingSlice['by']): void {
+  store.setState(({ pointing }) => ({ pointing: entryPointed(pointing, row, column, by) }));
+}
+
+/** The pointer or the focus has left the entries, or Escape was pressed. */
+export function leaveEntry(by: 'hover' | 'walk' | 'escape'): void {
+  store.setState(({ pointing }) => ({ pointing: entryLeft(pointing, by) }));
+}
+
+/** Points at a block or wire, or at none. */
+export function pointAtPart(part: PointedPart | null): void {
+  store.setState(({ pointing }) => ({ pointing: { ...pointing, part } }));
+}
+
+/** Takes in what the worker said of what is pointed at. */
+export function showTrace(answer: TraceAnswer | null): void {
+  store.setState(({ pointing }) => ({ pointing: { ...pointing, answer } }));
 }
 
 /** Takes in how far a judgement over tolerances has come, or what it found. */

@@ -8,6 +8,7 @@ import { createStore } from 'zustand/vanilla';
 import { type Point, startingDrawing } from '../../diagram/index.ts';
 import type { DocumentSlice } from './document.ts';
 import type { LiveSlice } from './live.ts';
+import { NOTHING_POINTED, type PointingSlice } from './pointing.ts';
 import { NO_RESULTS, type ResultsSlice } from './results.ts';
 import { NOTHING_SELECTED, type SelectionSlice } from './selection.ts';
 import type { TolerancesSlice } from './tolerances.ts';
@@ -22,6 +23,7 @@ export interface State {
   readonly live: LiveSlice | null;
   readonly view: ViewSlice;
   readonly results: ResultsSlice;
+  readonly pointing: PointingSlice;
   /** Null before the first judgement. */
   readonly tolerances: TolerancesSlice | null;
 }
@@ -33,6 +35,7 @@ export const store = createStore<State>()(() => ({
   live: null,
   view: FIRST_VIEW,
   results: NO_RESULTS,
+  pointing: NOTHING_POINTED,
   tolerances: null,
 }));
 

@@ -6,5 +6,6 @@ import type { TopicName, Topics } from './topics.ts';
 export const TOPIC_MODULES: { readonly [T in TopicName]: () => Promise<TopicModule<Topics[T]>> } = {
   symbols: () => import('./symbols.ts'),
   requirements: () => import('./requirements.ts'),
+  trace: () => import('./trace.ts'),
   'transfer-matrix': () => import('./transfer-matrix.ts'),
 };

@@ -2,11 +2,13 @@
 
 import type { RequirementsTopic } from './requirements.ts';
 import type { SymbolsTopic } from './symbols.ts';
+import type { TraceTopic } from './trace.ts';
 import type { TransferMatrixTopic } from './transfer-matrix.ts';
 
 export interface Topics {
   readonly symbols: SymbolsTopic;
   readonly requirements: RequirementsTopic;
+  readonly trace: TraceTopic;
   readonly 'transfer-matrix': TransferMatrixTopic;
 }
 

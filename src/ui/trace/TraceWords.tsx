@@ -1,0 +1,111 @@
+/** The sentence of a trace: entry, value, and the paths and loops that make it. */
+
+import { Fragment } from 'react';
+import type { StateSpace } from '../../compile/index.ts';
+import type { Trace, TracedStep, TracedValue, TracedWalk } from '../../compile/trace/index.ts';
+import type { MatrixPlace } from '../results/index.ts';
+import { actions } from '../store/index.ts';
+import { EntryName } from './EntryName.tsx';
+import { FormulaLine } from './FormulaLine.tsx';
+import { numberText, spokenTrace, stepsOf, symbolsOf, waysText } from './trace-words.ts';
+
+interface TraceWordsProps {
+  readonly model: StateSpace;
+  readonly place: MatrixPlace;
+  readonly trace: Trace;
+  readonly isKept: boolean;
+}
+
+export function TraceWords({ model, place, trace, isKept }: TraceWordsProps) {
+  const isTraced = trace.outcome === 'traced';
+  return (
+    // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls has to be reached by key
+    <section className="trace-words" aria-label="Trace of the entry" tabIndex={0}>
+      <p className="visually-hidden" role="status">
+        {spokenTrace(trace)}
+      </p>
+      <p className="trace-sentence">
+        <strong className="trace-value">
+          <EntryName model={model} place={place} />
+          {isTraced && ' : '}
+          {isTraced && <Value value={trace.value} />}
+        </strong>{' '}
+        {isTraced ? waysText(trace) : trace.reason}
+        {isTraced && trace.paths.length === 1 && ': '}
+        {isTraced && trace.paths.length === 1 && <Steps steps={stepsOf(trace.from, trace.paths[0] as TracedWalk)} />}
+        {isKept && (
+          <button type="button" className="quiet trace-let-go" onClick={() => actions.leaveEntry('escape')}>
+            let go
+          </button>
+        )}
+      </p>
+      {isTraced && <Parts trace={trace} />}
+    </section>
+  );
+}
+
+/** The paths, where there is more than one, and the loops. */
+function Parts({ trace }: { readonly trace: Extract<Trace, { readonly outcome: 'traced' }> }) {
+  const { paths, loops, determinant, from } = trace;
+  return (
+    <>
+      {paths.length > 1 && (
+        <ol className="trace-parts" aria-label="Paths">
+          {paths.map((path, k) => (
+            // biome-ignore lint/suspicious/noArrayIndexKey: paths of one trace never move
+            <li key={k}>
+              <Value value={path.product} />
+              {!isOne(path.cofactor) && ' · cofactor '}
+              {!isOne(path.cofactor) && <Value value={path.cofactor} />}
+              {' along '}
+              <Steps steps={stepsOf(from, path)} />
+            </li>
+          ))}
+        </ol>
+      )}
+      {loops.length > 0 && paths.length > 0 && (
+        <p className="trace-determinant">
+          determinant <Value value={determinant} />; loop gains{' '}
+          {loops.map((loop, k) => (
+            // biome-ignore lint/suspicious/noArrayIndexKey: loops of one trace never move
+            <Fragment key={k}>
+              {k > 0 && '; '}
+              <Value value={loop.product} /> (<Steps steps={loop.steps} />)
+            </Fragment>
+          ))}
+        </p>
+      )}
+    </>
+  );
+}
+
+function isOne({ exact }: TracedValue): boolean {
+  return exact.n === 1n && exact.d === 1n;
+}
+
+function Value({ value }: { readonly value: TracedValue }) {
+  const symbols = symbolsOf(value);
+  return (
+    <span className="trace-figure">
+      {symbols !== null && <FormulaLine text={symbols} />}
+      {symbols !== null && ' = '}
+      {numberText(value)}
+    </span>
+  );
+}
+
+function Steps({ steps }: { readonly steps: readonly TracedStep[] }) {
+  return (
+    <span className="trace-steps">
+      {steps.map(({ word, math }, k) => (
+        // biome-ignore lint/suspicious/noArrayIndexKey: steps of one path never move
+        <Fragment key={k}>
+          {k > 0 && ' → '}
+          {word}
+          {word !== '' && math !== '' && ' '}
+          {math !== '' && <FormulaLine text={math} />}
+        </Fragment>
+      ))}
+    </span>
+  );
+}

@@ -1,0 +1,57 @@
+/** Why an entry is what it is: by mouse and by keyboard, from the matrix to the drawing and back. */
+
+import { expect, type Page, test } from 'playwright/test';
+import { block, matrixCell, openWorkedDrawing } from './sheet-page.ts';
+
+const sentence = (page: Page) => page.locator('.trace-sentence');
+const grid = (page: Page) => page.getByRole('grid');
+
+test('pointing at an entry lights its path and says its value; a click keeps it, Escape lets go', async ({ page }) => {
+  await openWorkedDrawing(page);
+  const panel = page.getByRole('region', { name: 'System matrix' });
+  const before = await panel.boundingBox();
+  await matrixCell(page, 1, 4).hover();
+  await expect(sentence(page)).toContainText('1/J = 5/4');
+  await expect(sentence(page)).toContainText('one path: T → summing point → 1/J → integrator ω');
+  await expect(page.locator('.trace-wire-path')).toHaveCount(3);
+  await expect(page.locator('.trace-block-end')).toHaveCount(2);
+  expect(await panel.boundingBox()).toEqual(before);
+  await page.mouse.move(5, 5);
+  await expect(sentence(page)).toHaveCount(0);
+  await expect(page.locator('.trace-wire')).toHaveCount(0);
+  await matrixCell(page, 1, 4).click();
+  await page.mouse.move(5, 5);
+  await expect(sentence(page)).toContainText('1/J = 5/4');
+  await page.keyboard.press('Escape');
+  await expect(sentence(page)).toHaveCount(0);
+});
+
+test('the arrow keys walk the entries, Enter keeps one, and each is said', async ({ page }) => {
+  await openWorkedDrawing(page);
+  await grid(page).focus();
+  await page.keyboard.press('ArrowRight');
+  await page.keyboard.press('ArrowRight');
+  const said = page.getByRole('region', { name: 'Trace of the entry' }).getByRole('status');
+  await expect(said).toHaveText(
+    'the derivative of omega from F: -R/J = −5/16, one path: F, then R, then summing point, then 1/J, then integrator omega.',
+  );
+  await page.keyboard.press('Enter');
+  await page.keyboard.press('Tab');
+  await expect(said).toContainText('-R/J');
+  await page.getByRole('button', { name: 'let go' }).click();
+  await expect(said).toHaveCount(0);
+});
+
+test('pointing at a block or a wire marks the entries it takes part in', async ({ page }) => {
+  await openWorkedDrawing(page);
+  await block(page, 'gain 1/J').hover();
+  await expect(sentence(page)).toContainText('Gain 1/J takes part in 3 entries');
+  await expect(page.locator('.system-matrix-lit')).toHaveCount(3);
+  await expect(page.getByRole('tooltip')).toContainText('3 of the system matrix');
+  await page.mouse.move(700, 5);
+  await expect(page.locator('.system-matrix-lit')).toHaveCount(0);
+  await block(page, 'integrator q').focus();
+  await page.keyboard.press('Tab');
+  await page.keyboard.press('Shift+Tab');
+  await expect(sentence(page)).toContainText('Integrator q takes part in 3 entries');
+});
