@@ -68,6 +68,14 @@ const KEYS: readonly { readonly group: string; readonly keys: readonly (readonly
     ],
   },
   {
+    group: 'In the system matrix',
+    keys: [
+      ['← → ↑ ↓  Home  End', 'go to an entry: its action paths light up and are said'],
+      ['Enter  click', 'keep it'],
+      ['Escape', 'let go of it'],
+    ],
+  },
+  {
     group: 'See',
     keys: [
       ['Z', 'fit the drawing to the sheet'],
