@@ -248,3 +248,28 @@ test('by touch, a frame is dragged by its title edge with its block', async ({ b
   expect((await boxOf(block(page, 'gain 2'))).x).toBeGreaterThan(gain.x + 20);
   await context.close();
 });
+
+test('the title block gives way to a text', async ({ page }) => {
+  await openEmptySheet(page);
+  const title = page.getByRole('region', { name: 'Title block' });
+  const pane = await boxOf(page.locator('.react-flow__pane'));
+  const before = await boxOf(title);
+  // Begun left of the title block, the text is moved under it by key.
+  await page.mouse.dblclick(before.x - 60, before.y + before.height / 2);
+  await page.getByLabel('Text on the sheet').fill('where the title block stood');
+  await page.keyboard.press('Enter');
+  for (let step = 0; step < 2; step += 1) await page.keyboard.press('Shift+ArrowRight');
+  const text = await boxOf(annotation(page, /^text where/));
+  expect(text.x + text.width).toBeLessThan(pane.x + pane.width);
+  const overlaps = async () => {
+    const box = await boxOf(title);
+    return (
+      box.x < text.x + text.width &&
+      text.x < box.x + box.width &&
+      box.y < text.y + text.height &&
+      text.y < box.y + box.height
+    );
+  };
+  await expect.poll(overlaps).toBe(false);
+  expect(await boxOf(title)).not.toEqual(before);
+});

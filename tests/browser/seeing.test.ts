@@ -94,3 +94,25 @@ test('from afar what is written goes step by step, and frames say what is in the
   await expect(symbol).toBeHidden();
   expect(await height()).toBeGreaterThan(8);
 });
+
+test('with reduced motion nothing glides when the drawing is arranged', async ({ page }) => {
+  await openWorkedDrawing(page);
+  await block(page, 'gain K_p').click();
+  await page.keyboard.press('b');
+  await page.getByLabel('Title of the frame').press('Enter');
+  await expect(page.locator('.annotation-frame')).toBeVisible();
+  const glides = () =>
+    page.evaluate(() => {
+      const sheet = document.querySelector('.sheet');
+      sheet?.classList.add('sheet-gliding');
+      const moving = ['.react-flow__node', '.annotation', '.react-flow__edges'].map(selector => {
+        const style = getComputedStyle(document.querySelector(selector) ?? document.body);
+        return style.transitionDuration !== '0s' || style.animationName !== 'none';
+      });
+      sheet?.classList.remove('sheet-gliding');
+      return moving;
+    });
+  expect(await glides()).toEqual([true, true, true]);
+  await page.emulateMedia({ reducedMotion: 'reduce' });
+  expect(await glides()).toEqual([false, false, false]);
+});

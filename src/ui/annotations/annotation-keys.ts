@@ -30,6 +30,11 @@ const SQUARE = GRID;
 /** Whether the key did something to annotations. */
 export function annotationKey({ key, altKey, shiftKey, ctrlKey, metaKey }: KeyboardEvent): boolean {
   const isPlain = !altKey && !ctrlKey && !metaKey;
+  // A field is about to open: what is typed meanwhile is meant for it and must not place blocks.
+  if (isPlain && (store.getState().view.annotating ?? null) !== null) {
+    if (key === 'Escape') actions.annotate(null);
+    return true;
+  }
   if (isPlain && key === 't') return beginText(null);
   if (isPlain && key === 'b') return beginFrame();
   const chosen = chosenAnnotations();
