@@ -1,6 +1,6 @@
 /**
  * As much of a PDF file as the tests ask for: its pages, their size and the text on them (ISO 32000-1: 7.3.8 streams, 9.4.3
- * showing text, 9.10.3 ToUnicode). For files whose objects stand in the open, as Chromium writes them.
+ * showing text, 9.10.3 ToUnicode; the numbers from memory). For files whose objects stand in the open, as Chromium writes them.
  */
 
 import { inflateSync } from 'node:zlib';

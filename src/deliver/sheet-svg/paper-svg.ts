@@ -24,7 +24,7 @@ interface PaperSvg {
 /** Width and height of A4 (ISO 216), mm. */
 const PAGE = { landscape: [297, 210], portrait: [210, 297] } as const;
 
-/** Paper outside the border, mm: 20 on the left for filing, 10 elsewhere (ISO 5457:1999). */
+/** Paper outside the border, mm: 20 on the left for filing, 10 elsewhere (ISO 5457:1999, from memory). */
 const BORDER = { left: 20, other: 10 } as const;
 
 /** Paper between border, drawing and title block, mm. */

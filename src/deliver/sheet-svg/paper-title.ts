@@ -1,6 +1,6 @@
 /**
  * The title block of a printed sheet: the data fields of ISO 7200:2004 that a drawing holds (title, document type, revision
- * index, date of issue, creator), its notes, and the parameter table above them.
+ * index, date of issue, creator; the list from memory), its notes, and the parameter table above them.
  */
 
 import { annotationDrawing, textHeight, textWidth } from '../../diagram/geometry/index.ts';
@@ -10,7 +10,7 @@ import { element } from './markup.ts';
 import { shapeMarkup, textMarkup } from './shape-markup.ts';
 import { parameterTable, type TitleBlock } from './title-block.ts';
 
-/** As wide as ISO 7200:2004 has it, 180 mm, at a quarter of a millimetre a unit. */
+/** As wide as ISO 7200:2004 has it, 180 mm (from memory), at a quarter of a millimetre a unit. */
 const PAPER_TITLE_WIDTH = 720;
 
 const ROW = 44;
