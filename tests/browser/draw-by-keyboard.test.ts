@@ -74,10 +74,3 @@ test('parts are placed by their letters and other characters begin the write-a-b
   await page.keyboard.press('Enter');
   await expect(block(page, 'gain 7/3')).toBeVisible();
 });
-
-test('every key has its line on the page of keys', async ({ page }) => {
-  await openEmptySheet(page);
-  await page.locator('.react-flow__pane').click();
-  await page.keyboard.press('?');
-  await expect(page.getByRole('dialog', { name: 'Keys' })).toContainText('wire the selected block');
-});

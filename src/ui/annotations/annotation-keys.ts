@@ -3,6 +3,7 @@
 import { GRID } from '../../diagram/geometry/index.ts';
 import type { Edit, Point } from '../../diagram/index.ts';
 import { wireKey } from '../../diagram/routing/index.ts';
+import type { KeyPress, KeyRow } from '../keys/index.ts';
 import { focusSheet } from '../sheet/focus-block.ts';
 import { actions, store } from '../store/index.ts';
 import {
@@ -27,38 +28,71 @@ const STEPS: Readonly<Record<string, Point>> = {
 const LONG_MOVE = 5;
 const SQUARE = GRID;
 
-/** Whether the key did something to annotations. */
-export function annotationKey({ key, altKey, shiftKey, ctrlKey, metaKey }: KeyboardEvent): boolean {
-  const isPlain = !altKey && !ctrlKey && !metaKey;
-  // A field is about to open: what is typed meanwhile is meant for it and must not place blocks.
-  if (isPlain && (store.getState().view.annotating ?? null) !== null) {
-    if (key === 'Escape') actions.annotate(null);
-    return true;
-  }
-  if (isPlain && key === 't') return beginText(null);
-  if (isPlain && key === 'b') return beginFrame();
-  const chosen = chosenAnnotations();
-  if (chosen.size === 0) return false;
-  const step = STEPS[key];
-  if (step !== undefined && altKey && !ctrlKey && !metaKey) return sizeChosen(step);
-  if (!isPlain) return false;
-  if (step !== undefined) return moveChosen(chosen, step, shiftKey ? LONG_MOVE : 1);
-  switch (key) {
-    case 'Enter': {
-      const [id] = chosen;
-      return id !== undefined && beginRewriting(focusedAnnotation() ?? id);
-    }
-    case ' ':
-      return toggleFocused();
-    case 'Delete':
-    case 'Backspace':
-      return removeChosen(chosen);
-    default:
-      return false;
-  }
+const TEXTS = { group: 'Texts and frames' } as const;
+
+const ARROWS = Object.keys(STEPS);
+
+/** Those of chosen annotations come before those of blocks and wires. */
+export const ANNOTATION_KEYS: readonly KeyRow[] = [
+  { ...TEXTS, keys: ['t'], does: 'write a text', act: () => beginText(null) },
+  { ...TEXTS, keys: ['b'], does: 'a frame around the selected blocks', act: () => beginFrame() },
+  { ...TEXTS, keys: ['Enter'], does: 'write the selected one anew', act: onChosen(rewrite) },
+  {
+    ...TEXTS,
+    keys: [' '],
+    does: 'add the one in focus to the selection, or take it out',
+    act: onChosen(toggleFocused),
+  },
+  {
+    ...TEXTS,
+    keys: ARROWS,
+    does: 'move it by one square; a frame with all that stands in it',
+    act: onChosen((chosen, { key }) => moveChosen(chosen, STEPS[key], 1)),
+  },
+  {
+    ...TEXTS,
+    keys: ARROWS.map(key => `Shift+${key}`),
+    does: 'move it by five squares',
+    act: onChosen((chosen, { key }) => moveChosen(chosen, STEPS[key], LONG_MOVE)),
+  },
+  {
+    ...TEXTS,
+    keys: ARROWS.map(key => `Alt+${key}`),
+    does: 'make it narrower, wider, lower, higher',
+    act: onChosen((_, { key }) => STEPS[key] !== undefined && sizeChosen(STEPS[key])),
+  },
+  {
+    ...TEXTS,
+    keys: ['Delete', 'Backspace', 'Shift+Delete', 'Shift+Backspace'],
+    does: 'remove it, with the blocks and wires selected beside it',
+    act: onChosen(removeChosen),
+  },
+];
+
+/** Takes every plain key while a text's field is about to open: what is typed meanwhile is meant for it and must not place blocks. */
+export function isForOpeningField({ key, altKey, ctrlKey, metaKey }: KeyPress): boolean {
+  if (altKey || ctrlKey || metaKey || (store.getState().view.annotating ?? null) === null) return false;
+  if (key === 'Escape') actions.annotate(null);
+  return true;
 }
 
-function moveChosen(chosen: ReadonlySet<string>, [x, y]: Point, squares: number): boolean {
+type OnChosen = (chosen: ReadonlySet<string>, press: KeyPress) => boolean;
+
+function onChosen(act: OnChosen): KeyRow['act'] {
+  return press => {
+    const chosen = chosenAnnotations();
+    return chosen.size > 0 && act(chosen, press);
+  };
+}
+
+function rewrite(chosen: ReadonlySet<string>): boolean {
+  const [id] = chosen;
+  return id !== undefined && beginRewriting(focusedAnnotation() ?? id);
+}
+
+function moveChosen(chosen: ReadonlySet<string>, step: Point | undefined, squares: number): boolean {
+  if (step === undefined) return false;
+  const [x, y] = step;
   moveTogether(chosen, store.getState().selection.blocks, [x * squares * SQUARE, y * squares * SQUARE]);
   return true;
 }

@@ -8,6 +8,7 @@ import '../theme/contrast.css';
 import { lazy, Suspense, useEffect } from 'react';
 import { useNewText } from '../annotations/useNewText.ts';
 import { followPrinting } from '../printing/printed-sheet.ts';
+import { usePageKeys } from '../shell/usePageKeys.ts';
 import { type State, useStore } from '../store/index.ts';
 import { BlockCard } from './BlockCard.tsx';
 import { FindField } from './FindField.tsx';
@@ -29,6 +30,7 @@ function EntryMarks() {
 }
 
 export function SheetAids() {
+  usePageKeys();
   useSheetKeys();
   useClipboard();
   useNewText();

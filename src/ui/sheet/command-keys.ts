@@ -8,68 +8,71 @@ import { chooseNextWire } from '../commands/choose-wire.ts';
 import { duplicateChosen } from '../commands/clipboard.ts';
 import { cutChosen } from '../commands/cut-chosen.ts';
 import { pullOutChosen } from '../commands/insert-in-wire.ts';
+import type { KeyRow } from '../keys/index.ts';
 import { actions, store } from '../store/index.ts';
 import { focusedBlock } from './focus-block.ts';
 
-/** Plain keys: whether one was a command's and did something. */
-export function commandKey({ key }: KeyboardEvent, fitDrawing: () => void): boolean {
-  switch (key) {
-    case 'c':
-      return cutChosen();
-    case 'h':
-      return pullOutChosen();
-    case 'l':
-      void arrangeChosen().then(isWhole => isWhole && fitDrawing());
-      return true;
-    case 'n':
-      return chooseNextWire(chosenBlock());
-    case 'r':
-      return straightenWires(chosenWires());
-    case 's':
-      return turnLastSign();
-    case '+':
-    case '-':
-      return setSignOfWires(key);
-    default:
-      return false;
-  }
+const ON_SHEET = { group: 'On the sheet' } as const;
+const ON_WIRE = { group: 'On a wire' } as const;
+
+export const COMMAND_KEYS: readonly KeyRow[] = [
+  { ...ON_WIRE, keys: ['n'], does: 'select the next wire at the selected block or wire', act: nextWire },
+  {
+    ...ON_WIRE,
+    keys: ['r'],
+    does: 'take the bends of the selected wire out',
+    act: () => straightenWires(chosenWires()),
+  },
+  {
+    ...ON_WIRE,
+    keys: ['+', '-'],
+    does: 'set its sign at the summing point it ends at',
+    act: ({ key }) => setSignOfWires(key === '-' ? '-' : '+'),
+  },
+  { ...ON_WIRE, keys: ['c'], does: 'cut it to measure margins there, or take the cut away', act: () => cutChosen() },
+  {
+    ...ON_SHEET,
+    keys: ['h'],
+    does: 'pull the selected blocks out of their wires, which close behind them',
+    act: () => pullOutChosen(),
+  },
+  {
+    ...ON_SHEET,
+    keys: ['s'],
+    does: 'turn the sign of the wire drawn last to a summing point',
+    act: () => turnLastSign(),
+  },
+  { ...ON_SHEET, keys: ['l'], does: 'arrange the selected blocks, or the whole drawing', act: arrange },
+  { ...ON_SHEET, keys: ['Ctrl+a'], does: 'select everything', act: selectAll },
+  { ...ON_SHEET, keys: ['Ctrl+d'], does: 'duplicate', act: () => duplicateChosen() },
+  {
+    ...ON_SHEET,
+    keys: ['Alt+ArrowLeft'],
+    does: 'align the selected blocks at their left edges',
+    act: () => alignChosen('left'),
+  },
+  { ...ON_SHEET, keys: ['Alt+ArrowRight'], does: 'at their right edges', act: () => alignChosen('right') },
+  { ...ON_SHEET, keys: ['Alt+ArrowUp'], does: 'at their upper edges', act: () => alignChosen('top') },
+  { ...ON_SHEET, keys: ['Alt+ArrowDown'], does: 'at their lower edges', act: () => alignChosen('bottom') },
+  { ...ON_SHEET, keys: ['Alt+c'], does: 'align their centres in a row', act: () => alignChosen('row') },
+  { ...ON_SHEET, keys: ['Alt+Shift+c'], does: 'align their centres in a column', act: () => alignChosen('column') },
+  { ...ON_SHEET, keys: ['Alt+s'], does: 'spread them evenly across', act: () => spreadChosen('across') },
+  { ...ON_SHEET, keys: ['Alt+Shift+s'], does: 'spread them evenly down', act: () => spreadChosen('down') },
+  { group: 'See', keys: ['Ctrl+f'], does: 'find a block by name, value or parameter', act: find },
+];
+
+function nextWire(): boolean {
+  return chooseNextWire(chosenBlock());
 }
 
-/** Keys with Ctrl, or Cmd. */
-export function controlKey({ key, shiftKey }: KeyboardEvent): boolean {
-  if (shiftKey) return false;
-  switch (key.toLowerCase()) {
-    case 'a':
-      return selectAll();
-    case 'd':
-      return duplicateChosen();
-    case 'f':
-      actions.openFinding(true);
-      return true;
-    default:
-      return false;
-  }
+function arrange(_: unknown, fitDrawing: () => void): boolean {
+  void arrangeChosen().then(isWhole => isWhole && fitDrawing());
+  return true;
 }
 
-/** Keys with Alt, by their place on the keyboard since Alt changes what some letters write. */
-export function altKey({ code, shiftKey, ctrlKey, metaKey }: KeyboardEvent): boolean {
-  if (ctrlKey || metaKey) return false;
-  switch (code) {
-    case 'ArrowLeft':
-      return alignChosen('left');
-    case 'ArrowRight':
-      return alignChosen('right');
-    case 'ArrowUp':
-      return alignChosen('top');
-    case 'ArrowDown':
-      return alignChosen('bottom');
-    case 'KeyC':
-      return alignChosen(shiftKey ? 'column' : 'row');
-    case 'KeyS':
-      return spreadChosen(shiftKey ? 'down' : 'across');
-    default:
-      return false;
-  }
+function find(): boolean {
+  actions.openFinding(true);
+  return true;
 }
 
 function selectAll(): boolean {

@@ -1,6 +1,6 @@
 /** Where the keyboard's focus is on the sheet, and taking it to a block or to the sheet itself. */
 
-import { isTextField } from '../shell/usePageKeys.ts';
+import { isTextField } from '../keys/index.ts';
 
 /** Keyboard focus on a block's element, after the next picture has put it there; a field opened meanwhile keeps it. */
 export function focusBlock(id: string): void {

@@ -2,7 +2,7 @@
 
 import { useEffect } from 'react';
 import { copyChosen, cutChosen, pasteText } from '../commands/clipboard.ts';
-import { isTextField } from '../shell/usePageKeys.ts';
+import { isTextField } from '../keys/index.ts';
 import { pointerPlace } from './pointer.ts';
 import { isOnSheet } from './useSheetKeys.ts';
 

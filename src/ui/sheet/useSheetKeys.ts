@@ -1,10 +1,9 @@
 /** Keys on the sheet: handed to the commands while the focus is on it, or nowhere in particular. */
 
 import { useEffect } from 'react';
-import { annotationKey } from '../annotations/annotation-keys.ts';
-import { isTextField } from '../shell/usePageKeys.ts';
-import { altKey, commandKey, controlKey } from './command-keys.ts';
-import { blockKey, viewKey, writingKey } from './sheet-keys.ts';
+import { isForOpeningField } from '../annotations/annotation-keys.ts';
+import { isDoneBy, isTextField } from '../keys/index.ts';
+import { SHEET_KEYS } from './all-sheet-keys.ts';
 import { useFit } from './useFit.ts';
 
 export function useSheetKeys(): void {
@@ -12,20 +11,11 @@ export function useSheetKeys(): void {
   useEffect(() => {
     const onKey = (event: KeyboardEvent) => {
       if (event.defaultPrevented || isTextField(event.target) || !isOnSheet(event.target)) return;
-      if (isDone(event, fitDrawing)) event.preventDefault();
+      if (isForOpeningField(event) || isDoneBy(SHEET_KEYS, event, () => fitDrawing(true))) event.preventDefault();
     };
     window.addEventListener('keydown', onKey);
     return () => window.removeEventListener('keydown', onKey);
   }, [fitDrawing]);
-}
-
-/** Whether the key did something. */
-function isDone(event: KeyboardEvent, fitDrawing: (glide: boolean) => void): boolean {
-  const fitGliding = () => fitDrawing(true);
-  if (annotationKey(event)) return true;
-  if (event.altKey) return altKey(event);
-  if (event.ctrlKey || event.metaKey) return controlKey(event);
-  return commandKey(event, fitGliding) || blockKey(event) || writingKey(event.key) || viewKey(event.key, fitGliding);
 }
 
 /** Whether keys and the clipboard are meant for the sheet. */

@@ -8,7 +8,6 @@ import { SheetArea } from '../sheet/SheetArea.tsx';
 import { Heading } from './Heading.tsx';
 import { NoticeLine } from './NoticeLine.tsx';
 import { useFileDrop } from './useFileDrop.ts';
-import { usePageKeys } from './usePageKeys.ts';
 import { useThemeAttribute } from './useThemeAttribute.ts';
 import { VerdictLine } from './VerdictLine.tsx';
 
@@ -19,7 +18,6 @@ const ResultsColumn = lazy(() =>
 
 export function App() {
   useThemeAttribute();
-  usePageKeys();
   const drop = useFileDrop();
   return (
     <div className="page" {...drop}>

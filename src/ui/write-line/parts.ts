@@ -30,7 +30,7 @@ export const PARTS: readonly Part[] = [
     block: { kind: 'transfer-function', numerator: '1', denominator: 's + 1' },
   },
   { id: 'delay', label: 'dead time', symbol: 'e⁻ˢᵀ', key: 'D', block: { kind: 'delay', time: '1' } },
-  { id: 'limiter', label: 'limiter', symbol: '−1..1', key: 'C', block: { kind: 'limiter', lower: '-1', upper: '1' } },
+  { id: 'limiter', label: 'limiter', symbol: '−1..1', key: 'E', block: { kind: 'limiter', lower: '-1', upper: '1' } },
 ];
 
 export function isPart(id: string): boolean {
