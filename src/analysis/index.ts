@@ -21,7 +21,17 @@ export { dampingRatio, naturalFrequency, timeConstant } from './pole-figures.ts'
 export type { PoleSet, Root } from './poles.ts';
 export { poles } from './poles.ts';
 export { type Assessment, assess } from './requirements/index.ts';
-export { type Simulation, type SimulationRequest, type Stimulus, sampled, simulate } from './simulation/index.ts';
+export {
+  type Clipping,
+  clippings,
+  type SimulatedFigures,
+  type Simulation,
+  type SimulationRequest,
+  type Stimulus,
+  sampled,
+  simulate,
+  simulatedFigures,
+} from './simulation/index.ts';
 export type { Stability } from './stability.ts';
 export { stability } from './stability.ts';
 export type { StepMetrics } from './step-metrics.ts';

@@ -1,5 +1,6 @@
 /** The messages between the tab and the analyses, the switch that answers them, and the tab's end of the line. */
 
+export type { Stimulus } from '../analysis/index.ts';
 export { type JudgeRequest, type Judging, judgePoints } from './judge-points.ts';
 export { type AnalysisLine, openLine } from './line.ts';
 export type {
@@ -19,6 +20,8 @@ export type {
   RevisionAnswer,
 } from './protocol.ts';
 export type {
+  Response,
+  ResponseQuestion,
   SymbolEntry,
   Symbols,
   TopicAnswer,

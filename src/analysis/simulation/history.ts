@@ -11,6 +11,8 @@ export interface Piece {
   readonly values: Float64Array;
   /** States at the start. */
   readonly states: Float64Array;
+  /** And at the end. */
+  readonly statesAfter: Float64Array;
   /** Of every limiter. */
   readonly clips: readonly ClipState[];
 }

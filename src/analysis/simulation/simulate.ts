@@ -297,13 +297,14 @@ function keepPiece(run: Run, length: number, { values, states }: TriedPiece): nu
   const end = run.t + length;
   // A piece that ends at a time that is known ends just there, whatever rounding its length has.
   const to = Math.abs(end - next) <= run.same ? next : end;
-  run.pieces.push({ from: run.t, to, values, states: run.states, clips: run.clips });
+  const statesAfter = states.slice(DEGREE * n, NODES * n);
+  run.pieces.push({ from: run.t, to, values, states: run.states, statesAfter, clips: run.clips });
   run.sizes.forEach((size, s) => {
     run.sizes[s] = values
       .subarray(s * NODES, (s + 1) * NODES)
       .reduce((most, value) => Math.max(most, Math.abs(value)), size);
   });
-  run.states = states.slice(DEGREE * n, NODES * n);
+  run.states = statesAfter;
   run.t = to;
   return length;
 }

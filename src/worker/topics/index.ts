@@ -1,5 +1,6 @@
 /** What is asked of the model on demand, a topic a file. */
 
+export type { Response, ResponseQuestion } from './response.ts';
 export type { SymbolEntry, Symbols } from './symbols.ts';
 export type { Patience, Subject, Topic, TopicModule } from './topic.ts';
 export { TOPIC_MODULES } from './topic-modules.ts';

@@ -4,6 +4,7 @@ import type { TopicModule } from './topic.ts';
 import type { TopicName, Topics } from './topics.ts';
 
 export const TOPIC_MODULES: { readonly [T in TopicName]: () => Promise<TopicModule<Topics[T]>> } = {
+  response: () => import('./response.ts'),
   symbols: () => import('./symbols.ts'),
   requirements: () => import('./requirements.ts'),
   trace: () => import('./trace.ts'),

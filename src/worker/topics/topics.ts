@@ -1,11 +1,13 @@
 /** The table of topics: their types for both ends of the line. Where each is loaded from stands in topic-modules.ts. */
 
 import type { RequirementsTopic } from './requirements.ts';
+import type { ResponseTopic } from './response.ts';
 import type { SymbolsTopic } from './symbols.ts';
 import type { TraceTopic } from './trace.ts';
 import type { TransferMatrixTopic } from './transfer-matrix.ts';
 
 export interface Topics {
+  readonly response: ResponseTopic;
   readonly symbols: SymbolsTopic;
   readonly requirements: RequirementsTopic;
   readonly trace: TraceTopic;
