@@ -20,7 +20,7 @@ test('a slider moves value, matrix and curve while it is dragged and makes one u
   const thumb = slider(page, 'k');
   const box = await thumb.boundingBox();
   if (box === null) throw new Error('no slider');
-  const curve = page.getByRole('region', { name: 'Step response' }).locator('svg').first();
+  const curve = page.getByRole('region', { name: 'Time response' }).locator('svg').first();
   const before = { value: await valueOf(page, 'k').inputValue(), curve: await curve.innerHTML() };
   const y = box.y + box.height / 2;
   await page.mouse.move(box.x + box.width / 2, y);

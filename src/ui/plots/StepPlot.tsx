@@ -6,10 +6,11 @@
 import { type KeyboardEvent, type PointerEvent, useId, useMemo, useState } from 'react';
 import { MathName, RaisedText, useContainerWidth } from '../figures/index.ts';
 import { plotFileName, type Size, svgFile } from './drawing.ts';
+import { HorizonGrip } from './HorizonGrip.tsx';
 import { PlotMarks } from './PlotMarks.tsx';
 import { FILE, SCREEN } from './palette.ts';
 import { StepTable } from './StepTable.tsx';
-import { peakOf, type StepContent, stepSummary, stepTitle } from './step-content.ts';
+import { contentSummary, peakOf, type StepContent, stepTitle } from './step-content.ts';
 import { stepDrawing } from './step-drawing.ts';
 import { stepFrame, stepSize } from './step-frame.ts';
 import { momentAfter, readOutLines, readOutMarks } from './step-read-out.ts';
@@ -28,10 +29,12 @@ const ANY_WIDTH = 480;
 interface StepPlotProps {
   readonly content: StepContent;
   readonly onSave?: (plot: SavedPlot) => void;
+  /** The hand has dragged the time axis: the plot is to end at this time, s. */
+  readonly onHorizon?: (seconds: number) => void;
 }
 
 /** The response to a unit step: the curve, its figures in words, a read-out and a table. */
-export function StepPlot({ content, onSave }: StepPlotProps) {
+export function StepPlot({ content, onSave, onHorizon }: StepPlotProps) {
   const summaryId = useId();
   const { ref, width } = useContainerWidth<HTMLDivElement>();
   const [moment, setMoment] = useState<number | null>(null);
@@ -76,10 +79,17 @@ export function StepPlot({ content, onSave }: StepPlotProps) {
             </svg>
           )}
         </div>
+        {onHorizon !== undefined && width > 0 && <HorizonGrip frame={frame} onHorizon={onHorizon} />}
       </div>
       <p className="step-plot-summary" id={summaryId}>
-        step in <MathName name={content.input} /> → <MathName name={content.output} />:{' '}
-        <RaisedText text={stepSummary(content.metrics)} />
+        {content.words === undefined ? (
+          <>
+            step in <MathName name={content.input} /> → <MathName name={content.output} />
+          </>
+        ) : (
+          content.words.title
+        )}
+        : <RaisedText text={contentSummary(content)} />
         {content.envelope !== undefined && ' · the band: over the tolerances'}
       </p>
       <div className="plot-more">

@@ -22,6 +22,8 @@ export interface StepContent {
   readonly curves: readonly StepCurve[];
   /** null: not computed. */
   readonly metrics: StepMetrics | null;
+  /** Words in place of those for a unit step from rest. */
+  readonly words?: { readonly title: string; readonly summary: string | null } | undefined;
   /** Where the response runs over the tolerances of the parameters; absent where that was not judged. */
   readonly envelope?: Band | undefined;
 }
@@ -58,8 +60,13 @@ export function peakOf(metrics: StepMetrics | null): { readonly time: number; re
 }
 
 /** `step in r, response of F`: the plot's title. */
-export function stepTitle({ input, output }: StepContent): string {
-  return `step in ${plainName(input)}, response of ${plainName(output)}`;
+export function stepTitle({ input, output, words }: StepContent): string {
+  return words?.title ?? `step in ${plainName(input)}, response of ${plainName(output)}`;
+}
+
+/** The summary of a plot, in its own words where it has some. */
+export function contentSummary({ metrics, words }: StepContent): string {
+  return words?.summary ?? stepSummary(metrics);
 }
 
 /** `F = 1.233 N`, with the curve's label where there are several. */

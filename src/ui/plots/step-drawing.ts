@@ -9,7 +9,7 @@ import { bandPath } from './band-path.ts';
 import { curvePath } from './curve-path.ts';
 import { type Drawing, line, namedText, round, type Size, text, tickStyle } from './drawing.ts';
 import type { Palette } from './palette.ts';
-import { peakOf, peakText, type StepContent, stepSummary, stepTitle } from './step-content.ts';
+import { contentSummary, peakOf, peakText, type StepContent, stepTitle } from './step-content.ts';
 import { type StepFrame, stepFrame } from './step-frame.ts';
 
 /** Half the width of the band that the settling time is about (± 2 %). */
@@ -21,7 +21,7 @@ export function stepDrawing(content: StepContent, size: Size, palette: Palette):
   return {
     ...size,
     title: stepTitle(content),
-    description: stepSummary(content.metrics),
+    description: contentSummary(content),
     paper: palette.paper,
     marks: [
       ...grid(frame, palette),

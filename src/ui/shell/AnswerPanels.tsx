@@ -3,9 +3,9 @@
 import { PoleMap } from '../plots/index.ts';
 import { Panel, PanelEmpty, PanelPending, PoleTable } from '../results/index.ts';
 import { type State, useStore } from '../store/index.ts';
+import { ChannelAbsent } from './ChannelAbsent.tsx';
 import { Picker } from './Picker.tsx';
 import { ResponsePanel } from './ResponsePanel.tsx';
-import { ChannelAbsent } from './StepView.tsx';
 import { savePlot } from './save-plot.ts';
 import { TransferView } from './TransferView.tsx';
 
@@ -60,11 +60,7 @@ function TransferPanel() {
   const shown = useStore(notation);
   return (
     <Panel title="Transfer function" aside={<Picker />}>
-      {answer === null ? (
-        <ChannelAbsent answer={null} />
-      ) : (
-        <TransferView answer={answer.transferFunction} notation={shown} />
-      )}
+      {answer === null ? <ChannelAbsent /> : <TransferView answer={answer.transferFunction} notation={shown} />}
     </Panel>
   );
 }

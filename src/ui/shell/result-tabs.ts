@@ -4,7 +4,7 @@
  */
 
 import { type ComponentType, type LazyExoticComponent, lazy } from 'react';
-import { StepView } from './StepView.tsx';
+import { TimeView } from './TimeView.tsx';
 
 export interface ResultTab {
   readonly id: string;
@@ -18,7 +18,7 @@ export interface ResultTab {
 }
 
 export const RESULT_TABS: readonly [ResultTab, ...ResultTab[]] = [
-  { id: 'time', label: 'Time', title: 'Step response', isOfChannel: true, View: StepView },
+  { id: 'time', label: 'Time', title: 'Time response', isOfChannel: true, View: TimeView },
   {
     id: 'frequency',
     label: 'Frequency',
