@@ -41,6 +41,7 @@ export { rationalFromDouble, toDouble } from './rational-double.ts';
 export { parseRational, toFraction } from './rational-text.ts';
 export type { CertifiedRoot } from './roots/index.ts';
 export { certifiedRoots, findCertifiedRoots } from './roots/index.ts';
+export { reduceRows } from './row-reduction.ts';
 export type { SparseMatrix } from './sparse-matrix.ts';
 export { entryAt, fromRows, toRows } from './sparse-matrix.ts';
 export type { SquareFreeFactor } from './square-free.ts';
