@@ -5,7 +5,7 @@
 
 import { version } from '../../package.json';
 import { compile } from '../compile/index.ts';
-import { modelWarnings, oneLine } from '../deliver/index.ts';
+import { minimalDerivation, modelWarnings, oneLine } from '../deliver/index.ts';
 import type { Diagram } from '../diagram/index.ts';
 import { exitStatus, fail, ok, type Problem, problem, type Result, type Warning } from '../problem/index.ts';
 import { encodeLink } from '../share/index.ts';
@@ -77,15 +77,22 @@ async function derive(request: Derive, io: Io): Promise<Result<number>> {
   return replaced.ok ? ok(DONE) : replaced;
 }
 
-function written(diagram: Diagram, { format, notation, expanded }: Derive, io: Io): Result<string | Uint8Array> {
+function written(
+  diagram: Diagram,
+  { format, notation, expanded, minimal }: Derive,
+  io: Io,
+): Result<string | Uint8Array> {
   if (format.scope === 'drawing') return ok(format.write(diagram));
   const derivation = compile(diagram);
   if (!derivation.ok) return derivation;
+  const whole = { diagram, derivation: derivation.value, expanded };
+  const derived = minimal ? minimalDerivation(whole) : ok(whole);
+  if (!derived.ok) return derived;
   // The model file holds its warnings; beside any other format they are said.
   if (format.id !== 'model') {
-    for (const line of modelWarnings(derivation.value).map(lineOf)) io.complain(line);
+    for (const line of modelWarnings(derived.value.derivation).map(lineOf)) io.complain(line);
   }
-  return ok(format.write({ diagram, derivation: derivation.value, notation, expanded }));
+  return ok(format.write({ ...derived.value, notation }));
 }
 
 /** Exit status where a requirement of the drawing is missed. */

@@ -28,6 +28,8 @@ export type Request =
       readonly notation: Notation;
       /** Whether symbols write derived parameters out. */
       readonly expanded: boolean;
+      /** Whether the model is reduced to the fewest states with the same transfer functions. */
+      readonly minimal: boolean;
       /** A path; null for standard output. */
       readonly out: string | null;
       /** Parameters to replace, in the order given; the last one of a name holds. */
@@ -41,11 +43,11 @@ export interface Setting {
 
 const COMMANDS = ['derive', 'check', 'link'] as const;
 const OPTIONS_OF = {
-  derive: ['--as', '--out', '--notation', '--expand', '--set'],
+  derive: ['--as', '--out', '--notation', '--expand', '--minimal', '--set'],
   check: ['--tolerances', '--samples', '--seed'],
   link: [],
 } as const;
-const WITHOUT_VALUE = ['--expand', '--tolerances', '--help', '--version'] as const;
+const WITHOUT_VALUE = ['--expand', '--minimal', '--tolerances', '--help', '--version'] as const;
 const OPTIONS = [...OPTIONS_OF.derive, ...OPTIONS_OF.check, '--help', '--version'] as const;
 const NOTATIONS: readonly Notation[] = ['symbols', 'fractions', 'decimals'];
 
@@ -165,7 +167,8 @@ function deriveRequest(source: string, options: Split['options']): Result<Reques
     settings.push({ name, value: expression });
   }
   const expanded = options.some(option => option.name === '--expand');
-  return ok({ command: 'derive', source, format, notation, expanded, out: last('--out') ?? null, settings });
+  const minimal = options.some(option => option.name === '--minimal');
+  return ok({ command: 'derive', source, format, notation, expanded, minimal, out: last('--out') ?? null, settings });
 }
 
 /** What stands before and after the first equals sign; the second is empty where there is none. */

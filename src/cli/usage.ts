@@ -10,7 +10,7 @@ export function usage(): string {
 }
 
 const HEAD = `Usage:
-  poleward derive FILE|LINK|-   [--as FORMAT] [--out PATH] [--notation NOTATION] [--expand]
+  poleward derive FILE|LINK|-   [--as FORMAT] [--out PATH] [--notation NOTATION] [--expand] [--minimal]
                                 [--set NAME=EXPR]...
   poleward check  FILE|LINK|-   [--tolerances] [--samples N] [--seed N]
   poleward link   FILE|-
@@ -27,6 +27,7 @@ const TAIL = `  --out PATH               writes a file instead of standard outpu
   --notation NOTATION      matrix entries of text, LaTeX and MathML: symbols (of the parameters), fractions (where none is
                            given) or decimals
   --expand                 writes derived parameters out in symbols, wn as sqrt(k/m), where else they keep their names
+  --minimal                reduces the model to the fewest states with the same transfer functions
   --set NAME=EXPR          gives a parameter another value; may be repeated
   --tolerances             check judges every requirement over the whole tolerance of the parameters: every corner, and points
                            drawn at random

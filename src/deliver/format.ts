@@ -1,5 +1,6 @@
 /** What an export format is, and what it is given to write. */
 
+import type { Rational } from '../algebra/index.ts';
 import type { Derivation } from '../compile/index.ts';
 import type { Diagram } from '../diagram/index.ts';
 
@@ -15,6 +16,8 @@ export interface Derived {
   readonly derivation: Derivation;
   /** Whether symbols write derived parameters out; otherwise they keep their names. */
   readonly expanded?: boolean;
+  /** Where the model is the minimal one: the states of the drawing's model, and z = `change` · x. */
+  readonly minimal?: { readonly of: readonly string[]; readonly change: readonly (readonly Rational[])[] };
 }
 
 /** What a format of scope `model` writes from. */

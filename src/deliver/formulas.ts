@@ -25,7 +25,9 @@ export interface Formulas {
  * The formulas of the drawing; none where the symbolic derivation was given up for its length, where its states are not those of
  * the numeric one, or where the drawing was too large to be derived exactly.
  */
-export function formulasOf({ diagram, derivation, expanded = false }: Derived): Formulas {
+export function formulasOf({ diagram, derivation, expanded = false, minimal }: Derived): Formulas {
+  if (minimal !== undefined && minimal.change.length < minimal.of.length)
+    return without('A minimal model is in numbers.');
   if (derivation.route === 'double') return without('The drawing is too large for formulas.');
   const outcome = deriveSymbolic(diagram, { expanded });
   if (!outcome.ok || !outcome.value.finished) return without('The formulas are too long to be of use.');

@@ -54,6 +54,8 @@ export interface ModelFile {
   readonly controllable: boolean | null;
   readonly observable: boolean | null;
   readonly shiftedStates: readonly string[];
+  /** Of a minimal model: the states of the drawing's, and the rows of the change of state z = `change` · x as fractions. */
+  readonly minimal?: { readonly of: readonly string[]; readonly change: readonly (readonly string[])[] };
   readonly warnings: readonly Warning[];
   readonly selfCheck: SelfCheck;
 }
@@ -101,6 +103,7 @@ export function modelFile(derived: Derived): ModelFile {
     controllable: isControllable(model, EFFORT).holds,
     observable: isObservable(model, EFFORT).holds,
     shiftedStates,
+    ...minimalPart(derived),
     warnings: [...modelWarnings(derivation), ...undefinedExpressions(formulas)],
     selfCheck,
   };
@@ -112,6 +115,11 @@ export function writeModelFile(derived: Derived): string {
 }
 
 const nameOf = ({ name }: SignalName) => name;
+
+function minimalPart({ minimal }: Derived): Pick<ModelFile, 'minimal'> {
+  if (minimal === undefined) return {};
+  return { minimal: { of: minimal.of, change: minimal.change.map(row => row.map(toFraction)) } };
+}
 
 function exactFractions(model: StateSpace): MatrixRows<string> | null {
   const exact = exactRows(model);

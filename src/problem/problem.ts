@@ -32,7 +32,8 @@ export type WarningCode =
   | 'hidden-mode'
   | 'nearly-singular-loop'
   | 'order-lowered'
-  | 'expression-undefined';
+  | 'expression-undefined'
+  | 'initial-state-lost';
 
 /** One refusal, ready for the screen. */
 export interface Problem {

@@ -1,6 +1,7 @@
 /** What is asked of a model: one channel's transfer function and step response, then poles, zeros and stability. */
 
 import {
+  hiddenModes,
   hiddenModeWarnings,
   poles,
   stability,
@@ -22,6 +23,7 @@ export function polesAnswer(revision: number, model: StateSpace): PolesAnswer {
     poles: poles(model),
     zeros: zeros(model),
     stability: stability(model),
+    hidden: hiddenModes(model),
     warnings: hiddenModeWarnings(model),
   };
 }

@@ -24,7 +24,8 @@ export interface AnalysisLine {
     topic: T,
     question: TopicQuestion<T>,
   ): Promise<Result<TopicAnswer<T>> | null>;
-  file(diagram: Diagram, format: string, notation: Notation): Promise<FileAnswer>;
+  /** @param minimal  whether the file is of the minimal model. */
+  file(diagram: Diagram, format: string, notation: Notation, minimal: boolean): Promise<FileAnswer>;
   close(): void;
 }
 
@@ -98,9 +99,9 @@ export function openLine(start: () => Worker, listener: Listener): AnalysisLine 
         ask({ kind: 'ask', id, revision, asker, topic, question });
       });
     },
-    file(diagram, format, notation) {
+    file(diagram, format, notation, minimal) {
       const id = nextId++;
-      const question: Question = { kind: 'file', id, diagram, format, notation };
+      const question: Question = { kind: 'file', id, diagram, format, notation, minimal };
       return new Promise(settle => {
         files.set(id, { question, settle });
         ask(question);

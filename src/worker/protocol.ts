@@ -7,6 +7,7 @@ import type {
   ChannelFrequency,
   EnvelopeRequest,
   FrequencyCurve,
+  HiddenMode,
   JudgedPoint,
   LoopTransfer,
   Margins,
@@ -49,6 +50,8 @@ export type Question =
       readonly diagram: Diagram;
       readonly format: string;
       readonly notation: Notation;
+      /** Whether the file is of the minimal model. */
+      readonly minimal: boolean;
     }
   | AskQuestion
   | JudgeQuestion;
@@ -95,7 +98,9 @@ export interface PolesAnswer {
   readonly poles: PoleSet;
   readonly zeros: ZeroSet;
   readonly stability: Stability;
-  /** Poles that no transfer function shows. */
+  /** Poles that no transfer function shows; null where the model is too large to tell. */
+  readonly hidden: readonly HiddenMode[] | null;
+  /** The same as warnings. */
   readonly warnings: readonly Warning[];
 }
 

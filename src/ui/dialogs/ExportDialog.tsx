@@ -13,16 +13,21 @@ const hasModel = (state: State) => state.results.derivation !== null;
 
 export function ExportDialog() {
   const [notation, setNotation] = useState<Notation>(useStore(notationOnScreen));
+  const [minimal, setMinimal] = useState(false);
   const isDerived = useStore(hasModel);
   return (
     <Dialog title="Export">
       <h3>The matrices</h3>
       {!isDerived && <p role="alert">The drawing has no model at present, so there are no matrices to export.</p>}
       <NotationChoice notation={notation} onChoose={setNotation} />
-      <FormatTable scope="model" notation={notation} isDisabled={!isDerived} />
+      <label className="dialog-minimal">
+        <input type="checkbox" checked={minimal} onChange={event => setMinimal(event.currentTarget.checked)} /> of the
+        minimal model: the fewest states with the same transfer functions
+      </label>
+      <FormatTable scope="model" notation={notation} minimal={minimal} isDisabled={!isDerived} />
       <p className="dialog-caution">{CAUTION}</p>
       <h3>The drawing</h3>
-      <FormatTable scope="drawing" notation={notation} isDisabled={false} />
+      <FormatTable scope="drawing" notation={notation} minimal={false} isDisabled={false} />
       <PictureTable />
     </Dialog>
   );
@@ -50,10 +55,11 @@ function NotationChoice({ notation, onChoose }: NotationChoiceProps) {
 interface FormatTableProps {
   readonly scope: Format['scope'];
   readonly notation: Notation;
+  readonly minimal: boolean;
   readonly isDisabled: boolean;
 }
 
-function FormatTable({ scope, notation, isDisabled }: FormatTableProps) {
+function FormatTable({ scope, notation, minimal, isDisabled }: FormatTableProps) {
   return (
     <table
       className="dialog-table dialog-formats"
@@ -71,7 +77,7 @@ function FormatTable({ scope, notation, isDisabled }: FormatTableProps) {
                   className="button"
                   disabled={isDisabled}
                   aria-label={`Copy ${format.label}`}
-                  onClick={() => void copyFormat(format, notation)}
+                  onClick={() => void copyFormat(format, notation, minimal)}
                 >
                   Copy
                 </button>
@@ -81,7 +87,7 @@ function FormatTable({ scope, notation, isDisabled }: FormatTableProps) {
                 className="button"
                 disabled={isDisabled}
                 aria-label={`Save ${format.label}`}
-                onClick={() => void saveFormat(format, notation)}
+                onClick={() => void saveFormat(format, notation, minimal)}
               >
                 Save
               </button>

@@ -11,11 +11,14 @@ export function fileName(title: string, extension: string): string {
   return `${stem || 'drawing'}.${extension}`;
 }
 
+/** The browser fetches the bytes after the click, on a busy machine noticeably later. */
+const MILLISECONDS_HELD = 10_000;
+
 export function saveFile(name: string, content: Blob): void {
   const address = URL.createObjectURL(content);
   const link = document.createElement('a');
   link.href = address;
   link.download = name;
   link.click();
-  setTimeout(() => URL.revokeObjectURL(address), 0);
+  setTimeout(() => URL.revokeObjectURL(address), MILLISECONDS_HELD);
 }

@@ -2,6 +2,12 @@
 
 import { type Motion, motionOf, RaisedText, type Root, type RootRow, rootRows, rootText } from '../figures/index.ts';
 
+/** A hidden pole and why it is one. */
+interface HiddenRoot extends Root {
+  readonly isUncontrollable: boolean;
+  readonly isUnobservable: boolean;
+}
+
 interface PoleTableProps {
   /** Both of each conjugate pair, as the model file lists them. */
   readonly poles: readonly Root[];
@@ -11,6 +17,8 @@ interface PoleTableProps {
   readonly route: 'certified' | 'floating';
   /** What is proved holds for doubles that stand in for irrational values. */
   readonly standsIn?: boolean;
+  /** Poles that no transfer function shows. */
+  readonly hidden?: readonly HiddenRoot[];
   /** For `aria-details` of the pole map beside it. */
   readonly id?: string;
 }
@@ -23,7 +31,7 @@ const KNOWN_BY: Readonly<Record<PoleTableProps['route'], string>> = {
 const FOR_STAND_INS = ', with doubles in place of irrational values';
 
 /** Poles with damping, frequency and time constant, zeros below them. */
-export function PoleTable({ poles, zeros, route, standsIn = false, id }: PoleTableProps) {
+export function PoleTable({ poles, zeros, route, standsIn = false, hidden = [], id }: PoleTableProps) {
   const hasMultiple = [...poles, ...(zeros ?? [])].some(({ multiplicity }) => multiplicity > 1);
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls has to be reached by key
@@ -36,7 +44,13 @@ export function PoleTable({ poles, zeros, route, standsIn = false, id }: PoleTab
         <PoleHead hasMultiple={hasMultiple} />
         <tbody>
           {rootRows(poles).map(row => (
-            <RootLine key={`${row.re} ${row.im}`} row={row} motion={motionOf(row)} hasMultiple={hasMultiple} />
+            <RootLine
+              key={`${row.re} ${row.im}`}
+              row={row}
+              motion={motionOf(row)}
+              hasMultiple={hasMultiple}
+              hidden={hidden.find(({ re, im }) => re === row.re && Math.abs(im) === Math.abs(row.im))}
+            />
           ))}
           {poles.length === 0 && <NoneLine what="no poles" />}
         </tbody>
@@ -84,16 +98,22 @@ interface RootLineProps {
   readonly row: RootRow;
   readonly motion: Motion | null;
   readonly hasMultiple: boolean;
+  readonly hidden?: HiddenRoot | undefined;
 }
 
 /** One root; a zero has no motion of its own. */
-function RootLine({ row, motion, hasMultiple }: RootLineProps) {
+function RootLine({ row, motion, hasMultiple, hidden }: RootLineProps) {
   const whole = row.isPair ? `${row.re} ± ${row.im}j` : `${row.re}`;
   return (
     <tr className={motion !== null && row.re > 0 ? 'pole-table-growing' : undefined}>
       <th scope="row" title={whole}>
         {motion === null && 'zero '}
         <RaisedText text={rootText(row)} />
+        {hidden !== undefined && (
+          <span className="pole-table-hidden" title={whyHidden(hidden)}>
+            {hidden.multiplicity < row.multiplicity ? `hidden ${hidden.multiplicity} times` : 'hidden'}
+          </span>
+        )}
       </th>
       <td>{motion?.damping}</td>
       <td>
@@ -105,6 +125,11 @@ function RootLine({ row, motion, hasMultiple }: RootLineProps) {
       {hasMultiple && <td>{row.multiplicity > 1 ? row.multiplicity : ''}</td>}
     </tr>
   );
+}
+
+function whyHidden({ isUncontrollable, isUnobservable }: HiddenRoot): string {
+  const why = [isUncontrollable ? 'no input reaches it' : '', isUnobservable ? 'no output shows it' : ''];
+  return `In no transfer function: ${why.filter(text => text !== '').join(' and ') || 'no input and output share it'}.`;
 }
 
 function NoneLine({ what }: { readonly what: string }) {

@@ -16,13 +16,13 @@ import { SheetToolbar } from './SheetToolbar.tsx';
 import { useClipboard } from './useClipboard.ts';
 import { useSheetKeys } from './useSheetKeys.ts';
 
-/** Loaded once an entry is pointed at. */
+/** Loaded once an entry is pointed at or a hidden mode is marked. */
 const TraceMarks = lazy(() => import('../trace/index.ts').then(room => ({ default: room.TraceMarks })));
 
-const hasEntry = (state: State) => state.pointing.entry !== null;
+const hasMarks = ({ pointing: { entry, hidden } }: State) => entry !== null || hidden.length > 0;
 
 function EntryMarks() {
-  return useStore(hasEntry) ? (
+  return useStore(hasMarks) ? (
     <Suspense>
       <TraceMarks />
     </Suspense>

@@ -32,7 +32,7 @@ function PolesPanel() {
       </Panel>
     );
   }
-  const { poles: found, zeros } = answer;
+  const { poles: found, zeros, hidden } = answer;
   const knownZeros = zeros.route === 'not-computed' ? null : zeros.zeros;
   return (
     <Panel title="Poles and zeros">
@@ -47,6 +47,7 @@ function PolesPanel() {
             zeros={knownZeros}
             route={found.route}
             standsIn={found.route === 'certified' && found.standsIn}
+            hidden={hidden ?? []}
           />
         </div>
       )}

@@ -34,6 +34,13 @@ export const RESULT_TABS: readonly [ResultTab, ...ResultTab[]] = [
     View: lazy(() => import('./TransferMatrixTab.tsx').then(file => ({ default: file.TransferMatrixTab }))),
   },
   {
+    id: 'structure',
+    label: 'Structure',
+    title: 'Structure',
+    isOfChannel: false,
+    View: lazy(() => import('../structure/index.ts').then(room => ({ default: room.StructureTab }))),
+  },
+  {
     id: 'requirements',
     label: 'Requirements',
     title: 'Requirements',

@@ -247,6 +247,11 @@ export function pointAtPart(part: PointedPart | null): void {
   store.setState(({ pointing }) => ({ pointing: { ...pointing, part } }));
 }
 
+/** Marks the blocks of hidden modes, or none. */
+export function markHidden(hidden: readonly string[]): void {
+  store.setState(({ pointing }) => ({ pointing: { ...pointing, hidden } }));
+}
+
 /** Takes in what the worker said of what is pointed at. */
 export function showTrace(answer: TraceAnswer | null): void {
   store.setState(({ pointing }) => ({ pointing: { ...pointing, answer } }));

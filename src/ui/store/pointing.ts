@@ -12,11 +12,13 @@ export interface PointingSlice {
   /** `hover` follows the pointer, `walk` the arrow keys; what is kept stays until it is let go. */
   readonly by: 'hover' | 'walk' | 'keep';
   readonly part: PointedPart | null;
+  /** Blocks, by path, with states of modes that are hidden: marked while the structure is looked at. */
+  readonly hidden: readonly string[];
   /** The last answer, perhaps of what was pointed at before. */
   readonly answer: TraceAnswer | null;
 }
 
-export const NOTHING_POINTED: PointingSlice = { entry: null, by: 'hover', part: null, answer: null };
+export const NOTHING_POINTED: PointingSlice = { entry: null, by: 'hover', part: null, hidden: [], answer: null };
 
 /** The slice after an entry is pointed at: the pointer passes by what is kept or walked to; keeping the kept one lets go of it. */
 export function entryPointed(

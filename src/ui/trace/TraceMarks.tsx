@@ -17,9 +17,39 @@ const traced = ({ pointing: { entry, answer } }: State): Trace | null =>
 const nodesOf = (flow: ReactFlowState) => flow.nodes;
 const edgesOf = (flow: ReactFlowState) => flow.edges;
 
+const hiddenBlocks = (state: State) => state.pointing.hidden;
+
 export function TraceMarks() {
   const trace = useStore(traced);
-  return trace === null ? null : <Marks trace={trace} />;
+  const hidden = useStore(hiddenBlocks);
+  return (
+    <>
+      {trace !== null && <Marks trace={trace} />}
+      {trace === null && hidden.length > 0 && <HiddenMarks paths={hidden} />}
+    </>
+  );
+}
+
+/** A dashed outline with a word over it, so that it is not told by its colour. */
+function HiddenMarks({ paths }: { readonly paths: readonly string[] }) {
+  const nodes = useFlow(nodesOf);
+  const marked = new Set(paths.map(path => path.split('.', 1)[0]));
+  return (
+    <ViewportPortal>
+      <svg className="trace-marks" aria-hidden="true">
+        {nodes
+          .filter(({ id }) => marked.has(id))
+          .map(({ id, position: { x, y }, width, height }) => (
+            <g key={id} className="trace-block trace-block-loop">
+              <Outline {...{ x, y, width: width ?? 0, height: height ?? 0 }} off={OFF} />
+              <text className="trace-hidden" x={x} y={y - (height ?? 0) / 2 - OFF - 5}>
+                hidden mode
+              </text>
+            </g>
+          ))}
+      </svg>
+    </ViewportPortal>
+  );
 }
 
 /** How far a mark stands off the block's box, sheet units; the ends' second line further. */

@@ -7,6 +7,7 @@ export const TOPIC_MODULES: { readonly [T in TopicName]: () => Promise<TopicModu
   response: () => import('./response.ts'),
   symbols: () => import('./symbols.ts'),
   requirements: () => import('./requirements.ts'),
+  structure: () => import('./structure.ts'),
   trace: () => import('./trace.ts'),
   'transfer-matrix': () => import('./transfer-matrix.ts'),
 };

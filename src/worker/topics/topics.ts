@@ -2,6 +2,7 @@
 
 import type { RequirementsTopic } from './requirements.ts';
 import type { ResponseTopic } from './response.ts';
+import type { StructureTopic } from './structure.ts';
 import type { SymbolsTopic } from './symbols.ts';
 import type { TraceTopic } from './trace.ts';
 import type { TransferMatrixTopic } from './transfer-matrix.ts';
@@ -10,6 +11,7 @@ export interface Topics {
   readonly response: ResponseTopic;
   readonly symbols: SymbolsTopic;
   readonly requirements: RequirementsTopic;
+  readonly structure: StructureTopic;
   readonly trace: TraceTopic;
   readonly 'transfer-matrix': TransferMatrixTopic;
 }

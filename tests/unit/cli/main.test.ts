@@ -39,6 +39,20 @@ describe('derive', () => {
     expect(json(await runOn(machine, 'derive', 'loop', '--expand'))).toMatchObject({ symbolic: { A: [['-k/m']] } });
   });
 
+  test('reduces to the fewest states with --minimal, and prints the change of state', async () => {
+    const lead = draw(
+      [input('u'), output('y'), integrator('x'), integrator('aside')],
+      ['u -> x', 'x -> y', 'x -> aside'],
+    );
+    const machine = { files: { lead: JSON.stringify(lead) } };
+    expect(json(await runOn(machine, 'derive', 'lead'))).toMatchObject({ states: ['x', 'aside'], observable: false });
+    expect(json(await runOn(machine, 'derive', 'lead', '--minimal'))).toMatchObject({
+      states: ['x'],
+      observable: true,
+      minimal: { of: ['x', 'aside'], change: [['1', '0']] },
+    });
+  });
+
   test('says where the general expression divides by zero', async () => {
     const lag = draw(
       [input('u'), sum('e', '+-'), output('y'), differentiator('d'), gain('g', 'L')],

@@ -23,6 +23,7 @@ const poles = (revision: number): RevisionAnswer => ({
   poles: { route: 'floating', poles: [] },
   zeros: { route: 'not-computed', zeros: [], reason: '' },
   stability: { verdict: 'stable', proved: false, standsIn: false },
+  hidden: null,
   warnings: [],
 });
 
