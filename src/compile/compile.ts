@@ -1,117 +1,22 @@
-/**
- * Diagram to state space, pass by pass: flatten, equations, loops, eliminate, check. Pure; the one entry to this folder
- * besides the symbolic view.
- */
+/** Diagram to state space, with its check: the one entry to this folder besides the symbolic view and the matrices alone. */
 
-import type { Rational } from '../algebra/index.ts';
-import { Effort, withinEffort } from '../algebra/symbolic/index.ts';
 import type { Diagram } from '../diagram/index.ts';
-import { evaluateParameters, type Scope } from '../expression/index.ts';
-import type { Result, Warning } from '../problem/index.ts';
-import { type DerivedModel, derive } from './derive.ts';
-import { type FlatDrawing, flatten, openPortWarnings } from './flatten/index.ts';
-import { numericMatrices, overflowProblems } from './numeric-matrices.ts';
-import {
-  doubleArithmetic,
-  type IrrationalFinding,
-  irrationalFindings,
-  meteredRationals,
-  type NumericArithmetic,
-  numericReader,
-  rationalArithmetic,
-} from './quantities/index.ts';
+import { evaluateParameters } from '../expression/index.ts';
+import type { Result } from '../problem/index.ts';
+import { type CompileOptions, deriveModel } from './derive-model.ts';
 import { selfCheck } from './self-check/index.ts';
-import type { Derivation, StateSpace, SystemMatrices } from './state-space.ts';
-import { inDocumentOrder } from './warning-order.ts';
+import type { Derivation, SelfCheck, StateSpace } from './state-space.ts';
 
-/** Which field the elimination runs over. */
-export interface CompileOptions {
-  /** `auto`, the default: rationals where they take less than about a second, doubles beyond. */
-  readonly field?: 'rational' | 'double' | 'auto';
-}
-
-/**
- * The state-space model of a diagram that `readDiagram` or an edit made, or every problem of the first stage that has one:
- * parameters, fields of blocks, names, algebraic loops, derivatives of inputs. An empty sheet gives empty matrices.
- */
-export function compile(diagram: Diagram, { field = 'auto' }: CompileOptions = {}): Result<Derivation> {
-  const parameters = evaluateParameters(diagram.parameters);
-  if (!parameters.ok) return parameters;
-  const drawing = flatten(diagram);
-  const task: Task = { diagram, drawing, scope: parameters.value };
-  switch (field) {
-    case 'rational':
-      return deriveRationals(task, rationalArithmetic);
-    case 'double':
-      return deriveDoubles(task);
-    case 'auto': {
-      const effort = new Effort({ maximumOperations: EXACT_EFFORT });
-      const exact = withinEffort(() => deriveRationals(task, meteredRationals(effort)));
-      return exact.finished ? exact.value : deriveDoubles(task);
-    }
-    default:
-      return field satisfies never;
-  }
-}
-
-/**
- * What an exact derivation may cost before doubles take over, in products of 64-bit words. Drawings of 5,000 blocks with
- * entries of 500 digits and rings of 200 gains of 16 digits come near it, at half a second to a second.
- */
-const EXACT_EFFORT = 20_000_000;
-
-interface Task {
-  readonly diagram: Diagram;
-  readonly drawing: FlatDrawing;
-  readonly scope: Scope;
-}
-
-function deriveRationals(task: Task, arithmetic: NumericArithmetic<Rational>): Result<Derivation> {
-  const derived = derive(task.drawing, numericReader(arithmetic, task.scope));
+/** What `deriveModel` says of the diagram, with its self-check. */
+export function compile(diagram: Diagram, options: CompileOptions = {}): Result<Derivation> {
+  const derived = deriveModel(diagram, options);
   if (!derived.ok) return derived;
-  return finish(task, derived.value, derived.value.matrices, arithmetic, 'rational');
+  return { ok: true, value: { ...derived.value, selfCheck: checkModel(diagram, derived.value.model) } };
 }
 
-function deriveDoubles(task: Task): Result<Derivation> {
-  const derived = derive(task.drawing, numericReader(doubleArithmetic, task.scope));
-  return derived.ok ? finish(task, derived.value, null, doubleArithmetic, 'double') : derived;
-}
-
-function finish<T>(
-  task: Task,
-  derived: DerivedModel<T>,
-  rational: SystemMatrices<Rational> | null,
-  arithmetic: NumericArithmetic<T>,
-  route: Derivation['route'],
-): Result<Derivation> {
-  const numeric = numericMatrices(derived.matrices, arithmetic.toDouble);
-  const overflow = overflowProblems(numeric, derived);
-  if (overflow.length > 0) return { ok: false, problems: overflow };
-  const irrational = irrationalFindings(task.diagram.parameters, task.scope, derived.irrational);
-  const model: StateSpace = {
-    title: task.diagram.title,
-    states: derived.states.map(({ initial: _, ...name }) => name),
-    inputs: derived.inputs,
-    outputs: derived.outputs,
-    numeric,
-    rational,
-    irrational: irrational.map(({ name }) => name),
-    initialState: derived.states.map(({ initial }) => initial),
-    shiftedStates: derived.shiftedStates,
-  };
-  const warnings = [...openPortWarnings(task.drawing), ...irrational.map(irrationalWarning), ...derived.warnings];
-  return {
-    ok: true,
-    value: {
-      model,
-      loops: derived.loops,
-      warnings: inDocumentOrder(task.drawing, warnings),
-      selfCheck: selfCheck(task.diagram, task.scope, model),
-      route,
-    },
-  };
-}
-
-function irrationalWarning({ blocks, message }: IrrationalFinding): Warning {
-  return { code: 'irrational-value', blocks, message };
+/** Checks the model that `deriveModel` made of the diagram; no other may be handed over. */
+export function checkModel(diagram: Diagram, model: StateSpace): SelfCheck {
+  const parameters = evaluateParameters(diagram.parameters);
+  if (!parameters.ok) throw new Error('a diagram without values has no model to check');
+  return selfCheck(diagram, parameters.value, model);
 }

@@ -1,7 +1,16 @@
 /** Diagram to state space: flatten, equations, loops, eliminate, derivatives, self-check. */
 
-export { type CompileOptions, compile } from './compile.ts';
+export { checkModel, compile } from './compile.ts';
+export { type CompileOptions, deriveModel } from './derive-model.ts';
 export { type OpenedDelay, type OpenedLimiter, type OpenedModel, openedModel } from './opened/index.ts';
 export { type DirectResponse, directResponse } from './self-check/index.ts';
-export type { AlgebraicLoop, Derivation, SelfCheck, SignalName, StateSpace, SystemMatrices } from './state-space.ts';
+export type {
+  AlgebraicLoop,
+  Derivation,
+  SelfCheck,
+  SignalName,
+  StateSpace,
+  SystemMatrices,
+  UncheckedDerivation,
+} from './state-space.ts';
 export { deriveSymbolic, type SymbolicModel } from './symbolic/index.ts';

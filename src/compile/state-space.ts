@@ -64,12 +64,16 @@ export interface SelfCheck {
   readonly vectors: number;
 }
 
-/** What compile hands on. */
-export interface Derivation {
+/** The model before its check. */
+export interface UncheckedDerivation {
   readonly model: StateSpace;
   readonly loops: readonly AlgebraicLoop[];
   readonly warnings: readonly Warning[];
-  readonly selfCheck: SelfCheck;
   /** The field the elimination ran over. */
   readonly route: 'rational' | 'double';
+}
+
+/** What compile hands on. */
+export interface Derivation extends UncheckedDerivation {
+  readonly selfCheck: SelfCheck;
 }

@@ -8,7 +8,7 @@ import {
   formulaOf,
   type RationalFunction,
 } from '../algebra/symbolic/index.ts';
-import { deriveSymbolic, type SignalName, type SymbolicModel } from '../compile/index.ts';
+import { deriveSymbolic, type SignalName, type SymbolicModel, type UncheckedDerivation } from '../compile/index.ts';
 import type { Derived } from './format.ts';
 import { type MatrixRows, mapMatrices } from './matrix-rows.ts';
 
@@ -21,11 +21,16 @@ export interface Formulas {
   readonly vanishing: readonly string[];
 }
 
+/** What formulas are made from; they do not wait for the check. */
+interface Formulated extends Omit<Derived, 'derivation'> {
+  readonly derivation: UncheckedDerivation;
+}
+
 /**
  * The formulas of the drawing; none where the symbolic derivation was given up for its length, where its states are not those of
  * the numeric one, or where the drawing was too large to be derived exactly.
  */
-export function formulasOf({ diagram, derivation, expanded = false, minimal }: Derived): Formulas {
+export function formulasOf({ diagram, derivation, expanded = false, minimal }: Formulated): Formulas {
   if (minimal !== undefined && minimal.change.length < minimal.of.length)
     return without('A minimal model is in numbers.');
   if (derivation.route === 'double') return without('The drawing is too large for formulas.');

@@ -1,6 +1,6 @@
-/** The first answer: the model itself, since the matrices are what is waited for. */
+/** The first answer: the model itself, since the matrices are what is waited for; its check follows. */
 
-import { type CompileOptions, compile } from '../compile/index.ts';
+import { type CompileOptions, deriveModel } from '../compile/index.ts';
 import type { ModelAnswer, Question } from './protocol.ts';
 import { quantityValues } from './quantity-values.ts';
 
@@ -10,6 +10,6 @@ export function modelAnswer(
   field: CompileOptions['field'] & string = 'auto',
 ): ModelAnswer {
   const start = performance.now();
-  const outcome = compile(diagram, { field });
+  const outcome = deriveModel(diagram, { field });
   return { kind: 'model', revision, outcome, values: quantityValues(diagram), elapsed: performance.now() - start };
 }

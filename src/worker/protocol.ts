@@ -20,7 +20,7 @@ import type {
   TransferFunction,
   ZeroSet,
 } from '../analysis/index.ts';
-import type { Derivation } from '../compile/index.ts';
+import type { SelfCheck, UncheckedDerivation } from '../compile/index.ts';
 import type { Notation } from '../deliver/index.ts';
 import type { Diagram, PortReference } from '../diagram/index.ts';
 import type { Result, Warning } from '../problem/index.ts';
@@ -86,10 +86,17 @@ export interface QuantityValues {
 export interface ModelAnswer {
   readonly kind: 'model';
   readonly revision: number;
-  readonly outcome: Result<Derivation>;
+  readonly outcome: Result<UncheckedDerivation>;
   readonly values: QuantityValues;
   /** Milliseconds the derivation took in the worker. */
   readonly elapsed: number;
+}
+
+/** While a value moves it comes last, and only where no newer question waits. */
+export interface CheckAnswer {
+  readonly kind: 'check';
+  readonly revision: number;
+  readonly selfCheck: SelfCheck;
 }
 
 export interface PolesAnswer {
@@ -166,6 +173,7 @@ export type RevisionAnswer = Exclude<Answer, FileAnswer | AskAnswer | JudgeAnswe
 
 export type Answer =
   | ModelAnswer
+  | CheckAnswer
   | PolesAnswer
   | ChannelAnswer
   | FrequencyAnswer

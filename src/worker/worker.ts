@@ -4,7 +4,7 @@
  * when they are first needed, after the first matrices. While a value moves, a drawing that takes long is derived in doubles.
  */
 
-import type { Derivation, StateSpace } from '../compile/index.ts';
+import type { StateSpace, UncheckedDerivation } from '../compile/index.ts';
 import type { Diagram } from '../diagram/index.ts';
 import { openAsks } from './asks.ts';
 import { modelAnswer } from './model-answer.ts';
@@ -19,7 +19,8 @@ let exactElapsed = 0;
 let newest: Extract<Question, { kind: 'derive' }> | null = null;
 /** The channel chosen since that question. */
 let chosen: Channel | null = null;
-let latest: { readonly revision: number; readonly diagram: Diagram; readonly derivation: Derivation } | null = null;
+let latest: { readonly revision: number; readonly diagram: Diagram; readonly derivation: UncheckedDerivation } | null =
+  null;
 
 const asks = openAsks(send, turn);
 
@@ -54,6 +55,7 @@ async function derive(question: Extract<Question, { kind: 'derive' }>): Promise<
   if (latest === null) return asks.settle(question.revision, null);
   const { derivation } = latest;
   const { model } = derivation;
+  if (!question.isLive) await check(question, model);
   const { channelAnswer, polesAnswer } = await import('./analysis-answers.ts');
   await turn();
   if (newest !== question) return;
@@ -61,9 +63,17 @@ async function derive(question: Extract<Question, { kind: 'derive' }>): Promise<
   await turn();
   if (newest !== question) return;
   send(polesAnswer(question.revision, model));
+  if (question.isLive) await check(question, model);
   await turn();
   if (newest === question) await frequencies(question, model);
   if (newest === question) asks.settle(question.revision, { diagram: question.diagram, derivation });
+}
+
+/** Waits its turn, and for its part of the program the first time. */
+async function check(question: Extract<Question, { kind: 'derive' }>, model: StateSpace): Promise<void> {
+  const { checkAnswer } = await import('./check-answer.ts');
+  await turn();
+  if (newest === question) send(checkAnswer(question.revision, question.diagram, model));
 }
 
 /** The answers over frequency, the cuts first since the verdict line shows one. */

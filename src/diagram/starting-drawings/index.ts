@@ -1,32 +1,11 @@
 /** Drawings to start from. */
 
 import type { Diagram } from '../types.ts';
-import { ACTIVE_SUSPENSION } from './active-suspension.ts';
-import { BUCK_CONVERTER } from './buck-converter.ts';
-import { HEADING_AUTOPILOT } from './heading-autopilot.ts';
-import { MIXING_TANK } from './mixing-tank.ts';
-import { STEERING_MIRROR } from './steering-mirror.ts';
 import { SURVEY_WINCH } from './survey-winch.ts';
+
+export { type WorkedDrawing, workedDrawings } from './worked-drawings.ts';
 
 /** The drawing that a first visit opens with: a survey winch with its tension loop, four states. */
 export function startingDrawing(): Diagram {
   return SURVEY_WINCH;
-}
-
-/** A worked drawing and the trade it comes from. */
-export interface WorkedDrawing {
-  readonly trade: string;
-  readonly diagram: Diagram;
-}
-
-/** Six worked drawings from six trades, the survey winch first. */
-export function workedDrawings(): readonly WorkedDrawing[] {
-  return [
-    { trade: 'drive', diagram: SURVEY_WINCH },
-    { trade: 'process', diagram: MIXING_TANK },
-    { trade: 'vehicle', diagram: ACTIVE_SUSPENSION },
-    { trade: 'power electronics', diagram: BUCK_CONVERTER },
-    { trade: 'precision motion', diagram: STEERING_MIRROR },
-    { trade: 'marine', diagram: HEADING_AUTOPILOT },
-  ];
 }

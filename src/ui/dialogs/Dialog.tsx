@@ -1,5 +1,6 @@
 /** A modal dialog on the platform's own element: focus held inside, Escape closes, focus returns to where it was. */
 
+import './dialogs.css';
 import { type ReactNode, useEffect, useRef } from 'react';
 import { actions } from '../store/index.ts';
 

@@ -1,6 +1,5 @@
 /** The dialog that is open, if one is; its code is loaded when it is first asked for. */
 
-import './dialogs.css';
 import { lazy, Suspense } from 'react';
 import { type State, useStore } from '../store/index.ts';
 

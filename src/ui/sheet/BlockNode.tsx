@@ -3,9 +3,10 @@
 import { memo } from 'react';
 import { Handle, type NodeProps } from 'reactflow';
 import { type BlockGeometry, blockDrawing, type PortPlace, type Side } from '../../diagram/geometry/index.ts';
+import type { Block } from '../../diagram/index.ts';
 import { type State, useStore } from '../store/index.ts';
 import { formatValue } from '../title-block/format-value.ts';
-import { BlockFields } from './BlockFields.tsx';
+import { useHand } from './load-hand.ts';
 import { ShapeView } from './ShapeView.tsx';
 import { useBlockMark } from './useBlockMark.ts';
 import { type BlockFlowNode, FLOW_SIDE } from './useSheetNodes.ts';
@@ -34,10 +35,15 @@ export const BlockNode = memo(function BlockNode({ id, data, selected }: NodePro
         </g>
       </svg>
       <Ports geometry={geometry} />
-      {isEditing && <BlockFields block={block} />}
+      {isEditing && <Fields block={block} />}
     </div>
   );
 });
+
+function Fields({ block }: { readonly block: Block }) {
+  const hand = useHand();
+  return hand === null ? null : <hand.BlockFields block={block} />;
+}
 
 /** A ring at an input port that no wire reaches: it reads zero. */
 function OpenPort({ place }: { readonly place: PortPlace | undefined }) {

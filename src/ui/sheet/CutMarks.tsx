@@ -1,5 +1,6 @@
 /** A cross on each wire that is cut, with the cut's name, in the middle of the wire's longest piece. */
 
+import './cut-marks.css';
 import { ViewportPortal } from 'reactflow';
 import type { Point } from '../../diagram/index.ts';
 import { wireKey } from '../../diagram/routing/index.ts';

@@ -4,15 +4,15 @@
  */
 
 import 'reactflow/dist/base.css';
-import { lazy, Suspense } from 'react';
+import { lazy, Suspense, useEffect } from 'react';
 import { Background, BackgroundVariant, ConnectionMode, ReactFlow, type ReactFlowState, useStore } from 'reactflow';
 import { GRID } from '../../diagram/geometry/index.ts';
 import { type State, useStore as useDocument } from '../store/index.ts';
-import { AlignmentLines } from './AlignmentLines.tsx';
 import { BlockNode } from './BlockNode.tsx';
 import { BranchDots } from './BranchDots.tsx';
 import { DrawnWire } from './DrawnWire.tsx';
-import { DropTarget } from './DropTarget.tsx';
+import { ZOOM_ENDS } from './glide-view.ts';
+import { loadHand, useHand } from './load-hand.ts';
 import { SHEET_EVENTS } from './sheet-events.ts';
 import { useDropPart } from './useDropPart.ts';
 import { useFitOnOpening } from './useFitOnOpening.ts';
@@ -57,8 +57,10 @@ export function Sheet() {
   const isCut = useDocument(hasCuts);
   const isAnnotated = useDocument(hasAnnotations);
   const far = useStore(farness);
+  const hand = useHand();
   useFitOnOpening();
   useSheetView();
+  useEffect(() => void loadHand(), []);
   return (
     <div
       className={`sheet${far}`}
@@ -74,8 +76,8 @@ export function Sheet() {
         nodeTypes={NODE_TYPES}
         edgeTypes={EDGE_TYPES}
         nodeOrigin={CENTRE}
-        minZoom={0.03}
-        maxZoom={4}
+        minZoom={ZOOM_ENDS.smallest}
+        maxZoom={ZOOM_ENDS.largest}
         connectionMode={ConnectionMode.Strict}
         connectionLineComponent={DrawnWire}
         connectionRadius={22}
@@ -94,8 +96,8 @@ export function Sheet() {
         <BranchDots dots={placed.routes.dots} />
         <Suspense>{isAnnotated && <AnnotationLayer />}</Suspense>
         <Suspense>{isCut && <CutMarks {...placed} />}</Suspense>
-        <AlignmentLines {...placed} />
-        <DropTarget />
+        {hand !== null && <hand.AlignmentLines {...placed} />}
+        {hand !== null && <hand.DropTarget />}
       </ReactFlow>
     </div>
   );

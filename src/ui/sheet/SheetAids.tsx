@@ -3,6 +3,7 @@
  * pointed at. Loaded right after the drawing, with the commands behind them.
  */
 
+import './sheet-tools.css';
 import './far.css';
 import '../theme/contrast.css';
 import { lazy, Suspense, useEffect } from 'react';

@@ -1,7 +1,6 @@
 /** The left of the page: the sheet with its commands, the title block in its corner, the write-a-block line below. */
 
 import './sheet.css';
-import './sheet-tools.css';
 import { lazy, Suspense } from 'react';
 import { ReactFlowProvider } from 'reactflow';
 import { Sheet } from './Sheet.tsx';

@@ -5,15 +5,20 @@ import { beginFrame, beginText } from '../annotations/annotation-commands.ts';
 import { arrangeChosen } from '../commands/arrange-chosen.ts';
 import { actions } from '../store/index.ts';
 import { focusSheet } from './focus-block.ts';
+import { glideView, zoomedAbout } from './glide-view.ts';
 import { useFit } from './useFit.ts';
 
 const MILLISECONDS = 160;
 
+const ZOOM_STEP = 1.2;
+
 export function SheetToolbar() {
   const flow = useReactFlow();
   const fitDrawing = useFit();
-  const still = () => window.matchMedia('(prefers-reduced-motion: reduce)').matches;
-  const glide = () => (still() ? {} : { duration: MILLISECONDS });
+  const zoomBy = (factor: number) => {
+    const { width, height } = document.querySelector('.sheet')?.getBoundingClientRect() ?? new DOMRect();
+    glideView(flow, zoomedAbout(flow.getViewport(), [width / 2, height / 2], factor), MILLISECONDS);
+  };
   const arrange = () => {
     void arrangeChosen().then(isWhole => isWhole && fitDrawing(true));
     focusSheet();
@@ -45,10 +50,10 @@ export function SheetToolbar() {
       <button type="button" aria-keyshortcuts="B" title="Frame the selected blocks: B" onClick={beginFrame}>
         Frame
       </button>
-      <button type="button" aria-label="Zoom out" title="Zoom out" onClick={() => void flow.zoomOut(glide())}>
+      <button type="button" aria-label="Zoom out" title="Zoom out" onClick={() => zoomBy(1 / ZOOM_STEP)}>
         −
       </button>
-      <button type="button" aria-label="Zoom in" title="Zoom in" onClick={() => void flow.zoomIn(glide())}>
+      <button type="button" aria-label="Zoom in" title="Zoom in" onClick={() => zoomBy(ZOOM_STEP)}>
         +
       </button>
     </div>

@@ -5,8 +5,8 @@
 
 import { memo } from 'react';
 import { BaseEdge, type EdgeProps } from 'reactflow';
-import { BendGrips } from './BendGrips.tsx';
-import { EndGrips } from './EndGrips.tsx';
+import type { Point } from '../../diagram/index.ts';
+import { useHand } from './load-hand.ts';
 import type { WireFlowEdge } from './useSheetWires.ts';
 import { type WireEnds, watchWire } from './wire-gesture.ts';
 import { arrowHead, wirePath } from './wire-path.ts';
@@ -35,8 +35,18 @@ export const WireEdge = memo(function WireEdge(edge: EdgeProps<WireFlowEdge>) {
         onPointerDown={event => watchWire(event, ends, points)}
       />
       <path className={`wire-head${state}`} d={arrowHead(points)} />
-      {selected === true && <BendGrips wire={id} points={points} />}
-      {selected === true && <EndGrips ends={ends} points={points} />}
+      {selected === true && <Grips ends={ends} points={points} />}
     </>
   );
 });
+
+function Grips({ ends, points }: { readonly ends: WireEnds; readonly points: readonly Point[] }) {
+  const hand = useHand();
+  if (hand === null) return null;
+  return (
+    <>
+      <hand.BendGrips wire={ends.wire} points={points} />
+      <hand.EndGrips ends={ends} points={points} />
+    </>
+  );
+}

@@ -3,13 +3,13 @@
 import type { Connection, FinalConnectionState } from 'reactflow';
 import { GRID, snap } from '../../diagram/geometry/index.ts';
 import type { Point, PortReference, Wire } from '../../diagram/index.ts';
-import { wireKey } from '../../diagram/routing/index.ts';
 import { wireAt } from '../commands/insert-in-wire.ts';
-import { actions, store } from '../store/index.ts';
+import { actions } from '../store/index.ts';
 import { beginWriting } from '../write-line/begin-writing.ts';
 import { connectBlocks, moveWireEnd, type WireTarget } from './connect-blocks.ts';
 import { placeOf } from './pointer.ts';
 import { endWireGesture, wireGesture } from './wire-gesture.ts';
+import { wireOf } from './wire-of.ts';
 
 /** Pixels from its start within which a wire that is let go counts as given up. */
 const GIVEN_UP = 24;
@@ -67,11 +67,6 @@ function dropOnPaper(here: PortReference, isFromOutput: boolean, at: Point): voi
 function movedWire(): Wire | undefined {
   const gesture = wireGesture();
   return gesture?.kind === 'end' ? wireOf({ id: gesture.wire }) : undefined;
-}
-
-/** The document's wire behind one of React Flow's. */
-export function wireOf({ id }: { readonly id: string }): Wire | undefined {
-  return store.getState().document.diagram.wires.find(wire => wireKey(wire) === id);
 }
 
 /** The port's number in a handle's id, `in:2`. */

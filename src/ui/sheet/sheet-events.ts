@@ -3,13 +3,12 @@
 import type { EdgeChange, NodeChange, ReactFlowProps } from 'reactflow';
 import { snap } from '../../diagram/geometry/index.ts';
 import type { Point } from '../../diagram/index.ts';
-import { straightenWires } from '../commands/bend-chosen.ts';
-import { dropBlock } from '../commands/insert-in-wire.ts';
 import { actions, store } from '../store/index.ts';
-import { connect, dropDrawnWire, wireOf } from './drop-wire.ts';
 import { focusSheet } from './focus-block.ts';
+import { withHand } from './load-hand.ts';
 import type { BlockFlowNode } from './useSheetNodes.ts';
 import type { WireFlowEdge } from './useSheetWires.ts';
+import { wireOf } from './wire-of.ts';
 
 type Events = Pick<
   ReactFlowProps<BlockFlowNode, WireFlowEdge>,
@@ -34,13 +33,13 @@ export const SHEET_EVENTS: Events = {
   onEdgesChange: (changes: EdgeChange<WireFlowEdge>[]) => takeSelection(changes, 'wires'),
   onNodeDragStop: (event, node) => dropHeld(node.id, event.altKey),
   onSelectionDragStop: (event, nodes) => dropHeld(nodes[0]?.id, event.altKey),
-  onConnect: connect,
-  onConnectEnd: dropDrawnWire,
+  onConnect: connection => withHand(hand => hand.connect(connection)),
+  onConnectEnd: (event, state) => withHand(hand => hand.dropDrawnWire(event, state)),
   onNodeDoubleClick: (_, node) => actions.editFields(node.id),
   onEdgeClick: () => focusSheet(),
   onEdgeDoubleClick: (_, edge) => {
     const wire = wireOf(edge);
-    if (wire !== undefined) straightenWires([wire]);
+    if (wire !== undefined) withHand(hand => hand.straightenWires([wire]));
   },
   onPaneClick: () => {
     actions.editFields(null);
@@ -107,8 +106,14 @@ function dropHeld(id: string | undefined, isPulled: boolean): void {
       void import('../annotations/annotation-commands.ts').then(({ moveTogether }) =>
         moveTogether(annotations, new Set(held.keys()), [dx, dy]),
       );
-    } else if (isMoved && held.size === 1) dropBlock(block, [dx, dy], isPulled);
-    else if (isMoved) actions.edit({ kind: 'moveBlocks', ids: [...held.keys()], dx, dy });
+    } else if (isMoved && held.size > 1) {
+      actions.edit({ kind: 'moveBlocks', ids: [...held.keys()], dx, dy });
+    } else if (isMoved) {
+      return withHand(hand => {
+        hand.dropBlock(block, [dx, dy], isPulled);
+        actions.hold(null);
+      });
+    }
   }
   actions.hold(null);
 }

@@ -2,8 +2,8 @@
 
 import type { DragEvent } from 'react';
 import { useReactFlow } from 'reactflow';
-import { placePartInWire } from '../commands/insert-in-wire.ts';
 import { isPart, PART_MIME } from '../write-line/parts.ts';
+import { withHand } from './load-hand.ts';
 
 interface DropPart {
   readonly onDragOver: (event: DragEvent) => void;
@@ -23,7 +23,7 @@ export function useDropPart(): DropPart {
       if (!isPart(part)) return;
       event.preventDefault();
       const { x, y } = flow.screenToFlowPosition({ x: event.clientX, y: event.clientY });
-      placePartInWire(part, [x, y]);
+      withHand(hand => hand.placePartInWire(part, [x, y]));
     },
   };
 }

@@ -6,6 +6,7 @@ import { enclosing, type Rectangle, sheetBounds } from '../../diagram/geometry/i
 import { routeWires } from '../../diagram/routing/index.ts';
 import { store } from '../store/index.ts';
 import { type FitLimits, fitPlacement } from './fit-drawing.ts';
+import { glideView } from './glide-view.ts';
 
 /** As small as a thousand blocks need, which take up to some 30,000 units. */
 const LIMITS: FitLimits = { largestZoom: 1.2, smallestZoom: 0.03, margin: 26 };
@@ -24,9 +25,8 @@ export function useFit(): (glide: boolean) => void {
       const tools = within(sheet, '.sheet-toolbar');
       const top = tools === null ? 0 : Math.max(0, tools.bottom - LIMITS.margin / 2);
       const area = { left: 0, top, right: sheet.width, bottom: line?.top ?? sheet.height };
-      const still = !glide || window.matchMedia('(prefers-reduced-motion: reduce)').matches;
       const placement = fitPlacement(drawing, area, within(sheet, '.title-block'), LIMITS);
-      void flow.setViewport(placement, still ? {} : { duration: MILLISECONDS });
+      glideView(flow, placement, glide ? MILLISECONDS : 0);
     },
     [flow],
   );

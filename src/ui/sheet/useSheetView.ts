@@ -3,6 +3,7 @@
 import { useEffect } from 'react';
 import { useReactFlow } from 'reactflow';
 import { setSheetView } from '../write-line/sheet-view.ts';
+import { glideView } from './glide-view.ts';
 import { setConverter, setPointer } from './pointer.ts';
 
 /** Pixels that a revealed block keeps from the edge: half a wide block and its label. */
@@ -32,8 +33,7 @@ export function useSheetView(): void {
         const dy = beyond(place.y, box.top + EDGE / 2, box.bottom - EDGE / 2);
         if (dx === 0 && dy === 0) return;
         const { x: left, y: top, zoom } = flow.getViewport();
-        const still = window.matchMedia('(prefers-reduced-motion: reduce)').matches;
-        void flow.setViewport({ x: left - dx, y: top - dy, zoom }, still ? {} : { duration: MILLISECONDS });
+        glideView(flow, { x: left - dx, y: top - dy, zoom }, MILLISECONDS);
       },
     });
     setConverter((x, y) => {

@@ -1,7 +1,7 @@
 /** The line at the bottom: stability, sizes, algebraic loops, the self-check, and the standing caution. */
 
 import { lazy, Suspense } from 'react';
-import type { Derivation } from '../../compile/index.ts';
+import type { SelfCheck, UncheckedDerivation } from '../../compile/index.ts';
 import type { Warning } from '../../problem/index.ts';
 import { actions, type State, useStore } from '../store/index.ts';
 import { selfCheckText, sizesText, stabilityText } from './verdict-texts.ts';
@@ -11,7 +11,7 @@ const results = (state: State) => state.results;
 const isRequiring = (state: State) => state.document.diagram.requirements !== undefined;
 
 export function VerdictLine() {
-  const { status, derivation, poles, cuts, problems, stopped } = useStore(results);
+  const { status, derivation, selfCheck, poles, cuts, problems, stopped } = useStore(results);
   return (
     <footer className="verdict">
       {stopped !== null && <span className="verdict-stability verdict-wrong">{stopped}</span>}
@@ -27,7 +27,7 @@ export function VerdictLine() {
           <FirstCut answer={cuts} />
           <RequirementCount />
           <WarningCount warnings={[...derivation.warnings, ...(poles?.warnings ?? [])]} />
-          <CheckFigure derivation={derivation} />
+          <CheckFigure selfCheck={selfCheck} />
         </>
       )}
       <ThemeChoice />
@@ -44,7 +44,7 @@ function StabilityWord({ answer }: { readonly answer: State['results']['poles'] 
   return <span className={`verdict-stability ${tone}`}>{stabilityText(answer.stability)}</span>;
 }
 
-function LoopCount({ derivation }: { readonly derivation: Derivation }) {
+function LoopCount({ derivation }: { readonly derivation: UncheckedDerivation }) {
   const { loops } = derivation;
   if (loops.length === 0) return <span>no algebraic loop</span>;
   const text = loops.length === 1 ? '1 algebraic loop, solved' : `${loops.length} algebraic loops, solved`;
@@ -100,8 +100,8 @@ function WarningCount({ warnings }: { readonly warnings: readonly Warning[] }) {
   );
 }
 
-function CheckFigure({ derivation }: { readonly derivation: Derivation }) {
-  const { selfCheck } = derivation;
+function CheckFigure({ selfCheck }: { readonly selfCheck: SelfCheck | null }) {
+  if (selfCheck === null) return <span className="verdict-check">being checked against the drawing…</span>;
   return <span className={`verdict-check ${selfCheck.passed ? '' : 'verdict-wrong'}`}>{selfCheckText(selfCheck)}</span>;
 }
 

@@ -7,14 +7,14 @@ import { readDiagram, startingDrawing } from '../../diagram/index.ts';
 import { lastOpened } from '../../storage/index.ts';
 import { actions } from '../store/index.ts';
 import { followDocument } from './derive-on-change.ts';
-import { keepOnChange } from './keep-on-change.ts';
 import { newKey } from './new-key.ts';
 import { openLinkInAddress, watchAddress } from './open-link.ts';
 
 export async function begin(): Promise<void> {
   if (!(await openLinkInAddress())) await reopen();
   followDocument();
-  keepOnChange();
+  // It begins with what is on the sheet then, whatever was done until it has come.
+  void import('./keep-on-change.ts').then(({ keepOnChange }) => keepOnChange());
   watchAddress();
 }
 

@@ -3,7 +3,7 @@
  * so that nothing flickers while the hand moves; `answered` says for which revision it holds.
  */
 
-import type { Derivation } from '../../compile/index.ts';
+import type { SelfCheck, UncheckedDerivation } from '../../compile/index.ts';
 import type { Problem } from '../../problem/index.ts';
 import type {
   ChannelAnswer,
@@ -18,7 +18,9 @@ export interface ResultsSlice {
   readonly status: 'pending' | 'failed' | 'derived';
   /** Revision of the document that `derivation` or `problems` belong to; −1 before the first answer. */
   readonly answered: number;
-  readonly derivation: Derivation | null;
+  readonly derivation: UncheckedDerivation | null;
+  /** Of `derivation`; null until it is there. */
+  readonly selfCheck: SelfCheck | null;
   readonly problems: readonly Problem[];
   readonly values: QuantityValues;
   readonly poles: PolesAnswer | null;
@@ -33,6 +35,7 @@ export const NO_RESULTS: ResultsSlice = {
   status: 'pending',
   answered: -1,
   derivation: null,
+  selfCheck: null,
   problems: [],
   values: { parameters: {}, blocks: {} },
   poles: null,
@@ -53,6 +56,7 @@ export function answered(slice: ResultsSlice, answer: RevisionAnswer): ResultsSl
             status: 'derived',
             answered: answer.revision,
             derivation: answer.outcome.value,
+            selfCheck: null,
             problems: [],
             values: answer.values,
             stopped: null,
@@ -64,6 +68,8 @@ export function answered(slice: ResultsSlice, answer: RevisionAnswer): ResultsSl
             problems: answer.outcome.problems,
             values: answer.values,
           };
+    case 'check':
+      return { ...slice, selfCheck: answer.selfCheck };
     case 'poles':
       return { ...slice, poles: answer };
     case 'channel':

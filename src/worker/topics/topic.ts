@@ -3,14 +3,14 @@
  * file beside this one with a pure `answer`, and one line in each table of topics.ts; it is loaded in the worker when it is first asked.
  */
 
-import type { Derivation } from '../../compile/index.ts';
+import type { UncheckedDerivation } from '../../compile/index.ts';
 import type { Diagram } from '../../diagram/index.ts';
 import type { Result } from '../../problem/index.ts';
 
 /** The drawing and what was derived from it, both of one revision. */
 export interface Subject {
   readonly diagram: Diagram;
-  readonly derivation: Derivation;
+  readonly derivation: UncheckedDerivation;
 }
 
 /** How a long answer gives way: it waits at `turn` now and then, and stops where it comes back false, since nobody waits for it any more. */

@@ -1,6 +1,6 @@
 /** Why an entry of the system matrix is what it is, and which entries a block or wire takes part in. */
 
-import type { Derivation } from '../../compile/index.ts';
+import type { UncheckedDerivation } from '../../compile/index.ts';
 import {
   type DrawingPart,
   type EntryPlace,
@@ -25,7 +25,7 @@ export type TraceAnswer =
   | { readonly kind: 'entry'; readonly place: EntryPlace; readonly trace: Trace | null }
   | { readonly kind: 'part'; readonly part: DrawingPart; readonly entries: readonly EntryPlace[] };
 
-const known = new WeakMap<Derivation, Result<TracedDrawing>>();
+const known = new WeakMap<UncheckedDerivation, Result<TracedDrawing>>();
 
 export function answer({ diagram, derivation }: Subject, question: TraceQuestion): Result<TraceAnswer> {
   const traced = known.get(derivation) ?? traceable(diagram, derivation.model);
