@@ -12,6 +12,9 @@ export class NetTree {
   /** Nodes of the tree, for the search to leave alone. */
   readonly nodes: Set<number> = new Set();
 
+  /** Distance from a node to the closest port of the net, for the nodes that were asked for: it does not change while wires are routed. */
+  private readonly portDistances = new Map<number, number>();
+
   get isEmpty(): boolean {
     return this.nodes.size === 0;
   }
@@ -32,6 +35,15 @@ export class NetTree {
     const way: number[] = [];
     for (let at = node; at >= 0; at = this.before.get(at) ?? -1) way.push(at);
     return way.reverse();
+  }
+
+  /** What `measured` says of a node, remembered. */
+  portDistance(node: number, measured: (node: number) => number): number {
+    const known = this.portDistances.get(node);
+    if (known !== undefined) return known;
+    const distance = measured(node);
+    this.portDistances.set(node, distance);
+    return distance;
   }
 
   /** The node before; −1 for the first. */

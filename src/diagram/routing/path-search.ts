@@ -49,7 +49,7 @@ export interface SearchQuestion {
   /** Number of the net that is routed. */
   readonly net: number;
   /** Nodes of the net itself, which a way leaves and never meets again. */
-  readonly own: ReadonlySet<number>;
+  readonly own: Pick<ReadonlySet<number>, 'has'>;
   /** Columns and rows between which the way is sought. */
   readonly window: { readonly left: number; readonly right: number; readonly top: number; readonly bottom: number };
   /** Where vertical pieces rather lie, where it makes no other difference; null for anywhere. */

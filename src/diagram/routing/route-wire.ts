@@ -75,16 +75,17 @@ function wayThrough(router: SheetRouter, wire: EndedWire, tree: NetTree): readon
   const target = into.at(-1);
   if (source === undefined || target === undefined) return null;
   const stops = [...(wire.wire.via ?? []).map(point => nodeAt(grid, point)), target];
-  const own = new Set([...tree.nodes, ...out, ...into.slice(0, -1)]);
+  const added = new Set([...out, ...into.slice(0, -1)]);
+  const own = { has: (node: number) => tree.nodes.has(node) || added.has(node) };
   let way: readonly number[] = tree.isEmpty ? out : [];
   let beginnings = tree.isEmpty
     ? [{ node: source, axis: axisOf(wire.from), cost: 0 }]
-    : branchings(tree, axisOf(wire.from), node => branchPrice(router, wire.net, node));
+    : branchings(tree, axisOf(wire.from), node => branchPrice(router, wire.net, tree, node));
   for (const [index, stop] of stops.entries()) {
     const goalAxis = index === stops.length - 1 ? axisOf(wire.to) : null;
     const piece = wayInWindows(router, wire, { beginnings, goal: stop, goalAxis, own });
     if (piece === null) return null;
-    for (const node of piece) own.add(node);
+    for (const node of piece) added.add(node);
     way = [...way, ...(way.length > 0 ? piece.slice(1) : piece)];
     beginnings = [{ node: stop, axis: arrivalAxis(way, axisOf(wire.from)), cost: 0 }];
   }
@@ -101,13 +102,16 @@ function arrivalAxis(way: readonly number[], otherwise: Axis): Axis {
 }
 
 /** What it costs to branch at a node; infinite where a dot would stand on a port's stub or on a crossing. */
-function branchPrice({ space, ends }: SheetRouter, net: number, node: number): number {
+function branchPrice({ space, ends }: SheetRouter, net: number, tree: NetTree, node: number): number {
   const { grid } = space;
   const owners = [grid.horizontalNet[node]!, grid.verticalNet[node]!];
   if (owners.some(owner => owner !== 0 && owner !== net)) return Number.POSITIVE_INFINITY;
-  const [x, y] = pointAt(grid, node);
-  let closest = FROM_PORT;
-  for (const end of ends.get(net) ?? []) closest = Math.min(closest, Math.abs(x - end.x) + Math.abs(y - end.y));
+  const closest = tree.portDistance(node, () => {
+    const [x, y] = pointAt(grid, node);
+    let least = FROM_PORT;
+    for (const end of ends.get(net) ?? []) least = Math.min(least, Math.abs(x - end.x) + Math.abs(y - end.y));
+    return least;
+  });
   if (closest < SHORT_STUB) return Number.POSITIVE_INFINITY;
   const there = grid.surroundings[node]!;
   let price = (FROM_PORT - closest) * BRANCH_PRICES.eachUnit;
@@ -120,7 +124,7 @@ interface Piece {
   readonly beginnings: readonly Beginning[];
   readonly goal: number;
   readonly goalAxis: Axis | null;
-  readonly own: ReadonlySet<number>;
+  readonly own: Pick<ReadonlySet<number>, 'has'>;
 }
 
 function wayInWindows(router: SheetRouter, { from, to, net }: EndedWire, piece: Piece): readonly number[] | null {
