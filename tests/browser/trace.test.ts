@@ -6,6 +6,16 @@ import { block, matrixCell, openWorkedDrawing } from './sheet-page.ts';
 const sentence = (page: Page) => page.locator('.trace-sentence');
 const grid = (page: Page) => page.getByRole('grid');
 
+/** A point of the window halfway along a wire. */
+function middleOfWire(page: Page, key: string): Promise<{ x: number; y: number }> {
+  return page.locator(`.react-flow__edge[data-id="${key}"] path.wire-reach`).evaluate(path => {
+    if (!(path instanceof SVGPathElement)) throw new Error('no wire');
+    const { x, y } = path.getPointAtLength(path.getTotalLength() / 2);
+    const { a, d, e, f } = path.getScreenCTM() ?? new DOMMatrix();
+    return { x: a * x + e, y: d * y + f };
+  });
+}
+
 test('pointing at an entry lights its path and says its value; a click keeps it, Escape lets go', async ({ page }) => {
   await openWorkedDrawing(page);
   const panel = page.getByRole('region', { name: 'System matrix' });
@@ -50,6 +60,11 @@ test('pointing at a block or a wire marks the entries it takes part in', async (
   await expect(page.getByRole('tooltip')).toContainText('3 of the system matrix');
   await page.mouse.move(700, 5);
   await expect(page.locator('.system-matrix-lit')).toHaveCount(0);
+  const along = await middleOfWire(page, 'torque:1');
+  await page.mouse.move(along.x, along.y);
+  await expect(sentence(page)).toContainText('The wire from gain R to summing point torque takes part in 1 entry');
+  await expect(page.getByRole('tooltip')).toContainText('gain R → summing point torque');
+  await page.mouse.move(700, 5);
   await block(page, 'integrator q').focus();
   await page.keyboard.press('Tab');
   await page.keyboard.press('Shift+Tab');

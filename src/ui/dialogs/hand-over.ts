@@ -7,7 +7,10 @@ import { copyText } from '../shell/copy-text.ts';
 import { actions, store } from '../store/index.ts';
 import { fileName, saveFile } from './save-file.ts';
 
-export async function saveFormat(format: Format, notation: Notation, minimal = false): Promise<void> {
+/** What saving has to know of a format. */
+export type SavedFormat = Pick<Format, 'id' | 'label' | 'extension' | 'mime'>;
+
+export async function saveFormat(format: SavedFormat, notation: Notation, minimal = false): Promise<void> {
   const content = await contentOf(format, notation, minimal);
   if (content === null) return;
   const name = fileName(store.getState().document.diagram.title, format.extension);
@@ -24,7 +27,7 @@ export async function copyFormat(format: Format, notation: Notation, minimal = f
 }
 
 async function contentOf(
-  format: Format,
+  format: Pick<Format, 'id'>,
   notation: Notation,
   minimal: boolean,
 ): Promise<string | Uint8Array<ArrayBuffer> | null> {

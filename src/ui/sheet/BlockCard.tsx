@@ -11,7 +11,9 @@ import { statesOfBlock } from '../commands/states-of-block.ts';
 import { actions, type PointedPart, type State, useStore } from '../store/index.ts';
 import { formatValue } from '../title-block/format-value.ts';
 import { shownTitle } from './block-sentence.ts';
+import { Fact } from './Fact.tsx';
 import { type PartOnSheet, usePointedPart } from './usePointedPart.ts';
+import { WireCard } from './WireCard.tsx';
 
 const diagram = (state: State) => state.document.diagram;
 const isBusy = (state: State) => state.held !== null || state.view.editing !== null || state.view.dialog !== null;
@@ -23,7 +25,11 @@ export function BlockCard() {
   const part = busy ? null : pointed;
   useEffect(() => actions.pointAtPart(part === null ? null : inDrawing(part)), [part]);
   const block = part === null || 'wire' in part ? undefined : sheet.blocks.find(({ id }) => id === part.block);
-  return block === undefined ? null : <ShownCard block={block} sheet={sheet} />;
+  const entries = useStore(entryText);
+  if (part !== null && 'wire' in part) {
+    return part.isChosen ? null : <WireCard wire={part.wire} sheet={sheet} entries={entries} />;
+  }
+  return block === undefined ? null : <ShownCard block={block} sheet={sheet} entries={entries} />;
 }
 
 /** The part of the sheet that is shown as part of the whole drawing. */
@@ -34,17 +40,22 @@ function inDrawing(part: PartOnSheet): PointedPart {
 }
 
 /** How many of the entries that the block takes part in, once that is known. */
-const entryCount = ({ pointing: { part, answer } }: State): number | null =>
+const entryText = ({ pointing: { part, answer } }: State): string =>
   part !== null && answer?.kind === 'part' && JSON.stringify(answer.part) === JSON.stringify(part)
-    ? answer.entries.length
-    : null;
+    ? `${answer.entries.length} of the system matrix`
+    : '…';
 
 /** Pixels between the block, its labels and the card. */
 const UNDERNEATH = 26;
 
-function ShownCard({ block, sheet }: { readonly block: Block; readonly sheet: Sheet }) {
+interface ShownCardProps {
+  readonly block: Block;
+  readonly sheet: Sheet;
+  readonly entries: string;
+}
+
+function ShownCard({ block, sheet, entries }: ShownCardProps) {
   const value = useStore((state: State) => state.results.values.blocks[block.id]);
-  const entries = useStore(entryCount);
   const { x, y, zoom } = useViewport();
   const frame = useMemo(() => {
     const placed = sheetGeometry(sheet).get(block.id);
@@ -63,18 +74,9 @@ function ShownCard({ block, sheet }: { readonly block: Block; readonly sheet: Sh
         ))}
         {carries.length > 0 && <Fact name="carries" text={carries.join(', ')} />}
         {drives.length > 0 && <Fact name="drives" text={drives.map(name => `d${name}/dt`).join(', ')} />}
-        <Fact name="entries" text={entries === null ? '…' : `${entries} of the system matrix`} />
+        <Fact name="entries" text={entries} />
       </dl>
     </div>
-  );
-}
-
-function Fact({ name, text }: { readonly name: string; readonly text: string }) {
-  return (
-    <>
-      <dt>{name}</dt>
-      <dd>{text}</dd>
-    </>
   );
 }
 

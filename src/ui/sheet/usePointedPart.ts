@@ -7,7 +7,10 @@ import { useEffect, useState } from 'react';
 import { type State, useStore } from '../store/index.ts';
 
 /** A block by its id, or a wire by its key, on the sheet that is shown. */
-export type PartOnSheet = { readonly block: string } | { readonly wire: string };
+export type PartOnSheet =
+  | { readonly block: string }
+  /** `isChosen`: it is not pointed at but selected, so that its grips lie open. */
+  | { readonly wire: string; readonly isChosen: boolean };
 
 /** Long enough that moving across the drawing shows nothing (common practice for tips). */
 const MILLISECONDS = 350;
@@ -19,7 +22,7 @@ const chosenWire = ({ selection: { wires, blocks } }: State): string | null =>
 export function usePointedPart(): PartOnSheet | null {
   const [pointed, setPointed] = useState<PartOnSheet | null>(null);
   const chosen = useStore(chosenWire);
-  useEffect(() => setPointed(chosen === null ? null : { wire: chosen }), [chosen]);
+  useEffect(() => setPointed(chosen === null ? null : { wire: chosen, isChosen: true }), [chosen]);
   useEffect(() => {
     let timer: ReturnType<typeof setTimeout> | undefined;
     let next = '';
@@ -61,5 +64,5 @@ function partAround(target: EventTarget | null): PartOnSheet | null {
   const node = target.closest<HTMLElement>('.react-flow__node')?.dataset['id'];
   if (node !== undefined) return { block: node };
   const wire = target.closest<SVGElement>('.react-flow__edge')?.dataset['id'];
-  return wire === undefined ? null : { wire };
+  return wire === undefined ? null : { wire, isChosen: false };
 }

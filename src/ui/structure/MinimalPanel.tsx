@@ -3,8 +3,7 @@
 import { useId, useState } from 'react';
 import type { MinimalModel } from '../../analysis/minimal/index.ts';
 import type { StateSpace } from '../../compile/index.ts';
-import { FORMATS } from '../../deliver/index.ts';
-import { saveFormat } from '../dialogs/hand-over.ts';
+import { type SavedFormat, saveFormat } from '../dialogs/hand-over.ts';
 import { MathName } from '../figures/index.ts';
 import { SystemMatrix } from '../results/index.ts';
 import { type State, useStore } from '../store/index.ts';
@@ -15,9 +14,11 @@ const notation = (state: State) => state.view.notation;
 interface MinimalPanelProps {
   readonly minimal: MinimalModel;
   readonly whole: StateSpace;
+  readonly formats: readonly SavedFormat[];
 }
 
-export function MinimalPanel({ minimal: { model, change, losesInitialState }, whole }: MinimalPanelProps) {
+export function MinimalPanel({ minimal, whole, formats }: MinimalPanelProps) {
+  const { model, change, losesInitialState } = minimal;
   const chosen = useStore(notation);
   const heading = useId();
   return (
@@ -50,23 +51,21 @@ export function MinimalPanel({ minimal: { model, change, losesInitialState }, wh
           The initial state holds something that no input reaches: the answer of this model to it is another one.
         </p>
       )}
-      <SaveChoice />
+      <SaveChoice formats={formats} />
     </section>
   );
 }
 
-const MODEL_FORMATS = FORMATS.filter(({ scope }) => scope === 'model');
-
-function SaveChoice() {
-  const [id, setId] = useState(MODEL_FORMATS[0]?.id ?? '');
+function SaveChoice({ formats }: { readonly formats: readonly SavedFormat[] }) {
+  const [id, setId] = useState(formats[0]?.id ?? '');
   const chosen = useStore(notation);
-  const format = MODEL_FORMATS.find(each => each.id === id);
+  const format = formats.find(each => each.id === id);
   return (
     <p className="structure-save">
       <label>
         Format{' '}
         <select value={id} onChange={event => setId(event.currentTarget.value)}>
-          {MODEL_FORMATS.map(each => (
+          {formats.map(each => (
             <option key={each.id} value={each.id}>
               {each.label}
             </option>

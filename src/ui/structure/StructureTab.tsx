@@ -23,7 +23,7 @@ export function StructureTab() {
   if (problem !== undefined) return <PanelEmpty>{problem.message}</PanelEmpty>;
   // An answer of a drawing with other states than those on screen is about to be replaced.
   if (answer === null || shown?.states.length !== answer.report.states) return <PanelPending label="Structure" />;
-  const { report, minimal } = answer;
+  const { report, minimal, formats } = answer;
   return (
     <div className="structure">
       <p className="structure-sentence">
@@ -37,7 +37,9 @@ export function StructureTab() {
           Show the minimal model
         </button>
       )}
-      {minimal !== null && report.minimal < report.states && <MinimalPanel minimal={minimal} whole={shown} />}
+      {minimal !== null && report.minimal < report.states && (
+        <MinimalPanel minimal={minimal} whole={shown} formats={formats} />
+      )}
     </div>
   );
 }
