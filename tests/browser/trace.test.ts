@@ -41,7 +41,7 @@ test('the arrow keys walk the entries, Enter keeps one, and each is said', async
   await grid(page).focus();
   await page.keyboard.press('ArrowRight');
   await page.keyboard.press('ArrowRight');
-  const said = page.getByRole('region', { name: 'Trace of the entry' }).getByRole('status');
+  const said = page.locator('.trace-line').getByRole('status');
   await expect(said).toHaveText(
     'the derivative of omega from F: -R/J = −5/16, one path: F, then R, then summing point, then 1/J, then integrator omega.',
   );
@@ -49,13 +49,16 @@ test('the arrow keys walk the entries, Enter keeps one, and each is said', async
   await page.keyboard.press('Tab');
   await expect(said).toContainText('-R/J');
   await page.getByRole('button', { name: 'let go' }).click();
-  await expect(said).toHaveCount(0);
+  await expect(said).toBeEmpty();
 });
 
 test('pointing at a block or a wire marks the entries it takes part in', async ({ page }) => {
   await openWorkedDrawing(page);
   await block(page, 'gain 1/J').hover();
   await expect(sentence(page)).toContainText('Gain 1/J takes part in 3 entries');
+  await expect(page.locator('.trace-line').getByRole('status')).toHaveText(
+    'Gain 1/J takes part in 3 entries: the derivative of omega from omega, the derivative of omega from F, the derivative of omega from T.',
+  );
   await expect(page.locator('.system-matrix-lit')).toHaveCount(3);
   await expect(page.getByRole('tooltip')).toContainText('3 of the system matrix');
   await page.mouse.move(700, 5);

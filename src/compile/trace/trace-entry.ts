@@ -22,6 +22,9 @@ import { partsOfWalk, type WireEnd } from './traced-parts.ts';
 /** A tenth of a second or less: an entry is traced while the pointer moves. */
 const SYMBOL_LIMITS: EffortLimits = { maximumTerms: 1_000, maximumOperations: 200_000 };
 
+/** Characters that are still read in a sentence: some two lines of the results column. */
+const LONGEST_FORMULA = 160;
+
 /**
  * Why the entry is what it is. Exact: the value is the model's entry, by the gain formula and not by the elimination that gave
  * the model. Where there are more paths or loops than the limits allow, or where the drawing differentiates in a way that no
@@ -47,7 +50,7 @@ export function traceEntry(traced: TracedDrawing, place: EntryPlace, limits: Lis
     return { outcome: 'not-traced', reason: tooMany('loops', entry, limits), ...ends };
   const symbols = symbolsFor(traced, paths, loops);
   const write = (exact: Rational, text: string | null | undefined): TracedValue => ({ exact, symbols: text ?? null });
-  const walk = (list: BranchList, product: Rational, text: string | undefined): TracedWalk => ({
+  const walk = (list: BranchList, product: Rational, text: string | null | undefined): TracedWalk => ({
     ...describedWalk(traced, list),
     product: write(product, text),
   });
@@ -110,8 +113,8 @@ function formulaFor<T>(
 interface SymbolTexts {
   readonly value: string | null;
   readonly determinant: string | null;
-  readonly paths: readonly string[];
-  readonly loops: readonly string[];
+  readonly paths: readonly (string | null)[];
+  readonly loops: readonly (string | null)[];
   readonly cofactors: readonly (string | null)[];
 }
 
@@ -123,7 +126,10 @@ function symbolsFor(
 ): SymbolTexts | null {
   const field = createSymbolicField(SYMBOL_LIMITS);
   const declared = traced.diagram.parameters.map(({ name }) => name);
-  const written = (f: RationalFunction): string => formulaText(formulaOf(f, { declared, effort: field.effort }));
+  const written = (f: RationalFunction): string | null => {
+    const text = formulaText(formulaOf(f, { declared, effort: field.effort }));
+    return text.length > LONGEST_FORMULA ? null : text;
+  };
   const optional = (f: RationalFunction | null): string | null => (f === null ? null : written(f));
   const outcome = withinEffort((): SymbolTexts => {
     const formula = formulaFor(field, symbolicGains(traced, field), traced.graph, paths, loops);

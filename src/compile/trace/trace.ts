@@ -15,7 +15,7 @@ export interface EntryPlace {
 /** A number with the expression in the parameters that it comes of. */
 export interface TracedValue {
   readonly exact: Rational;
-  /** Null where writing it out would take more effort than allowed. */
+  /** Null where it takes more effort than allowed, or is longer than a sentence can hold. */
   readonly symbols: string | null;
 }
 

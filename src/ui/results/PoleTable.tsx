@@ -111,7 +111,7 @@ function RootLine({ row, motion, hasMultiple, hidden }: RootLineProps) {
         <RaisedText text={rootText(row)} />
         {hidden !== undefined && (
           <span className="pole-table-hidden" title={whyHidden(hidden)}>
-            {hidden.multiplicity < row.multiplicity ? `hidden ${hidden.multiplicity} times` : 'hidden'}
+            {hidden.multiplicity < row.multiplicity ? `hidden ${hidden.multiplicity} of ${row.multiplicity}` : 'hidden'}
           </span>
         )}
       </th>

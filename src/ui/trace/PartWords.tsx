@@ -6,9 +6,7 @@ import type { MatrixPlace } from '../results/index.ts';
 import type { PointedPart } from '../store/index.ts';
 import { EntryName } from './EntryName.tsx';
 import { partTitle } from './part-title.ts';
-
-/** Entries that are listed; of more, the number is told. */
-const MOST_LISTED = 12;
+import { entryCount, MOST_LISTED } from './trace-words.ts';
 
 interface PartWordsProps {
   readonly model: StateSpace;
@@ -17,13 +15,12 @@ interface PartWordsProps {
 }
 
 export function PartWords({ model, entries, part }: PartWordsProps) {
-  const count = entries.length === 1 ? '1 entry' : `${entries.length === 0 ? 'no' : entries.length} entries`;
   const listed = entries.slice(0, MOST_LISTED);
   const more = entries.length - listed.length;
   return (
     <div className="trace-words">
-      <p className="trace-sentence" role="status">
-        {partTitle(part)} takes part in {count}
+      <p className="trace-sentence" aria-hidden="true">
+        {partTitle(part)} takes part in {entryCount(entries.length)}
         {listed.length > 0 && ': '}
         {listed.map((place, k) => (
           <Fragment key={`${place.row} ${place.column}`}>

@@ -7,7 +7,7 @@ import type { MatrixPlace } from '../results/index.ts';
 import { actions } from '../store/index.ts';
 import { EntryName } from './EntryName.tsx';
 import { FormulaLine } from './FormulaLine.tsx';
-import { numberText, spokenTrace, stepsOf, symbolsOf, waysText } from './trace-words.ts';
+import { numberText, stepsOf, symbolsOf, waysText } from './trace-words.ts';
 
 interface TraceWordsProps {
   readonly model: StateSpace;
@@ -21,9 +21,6 @@ export function TraceWords({ model, place, trace, isKept }: TraceWordsProps) {
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls has to be reached by key
     <section className="trace-words" aria-label="Trace of the entry" tabIndex={0}>
-      <p className="visually-hidden" role="status">
-        {spokenTrace(trace)}
-      </p>
       <p className="trace-sentence">
         <strong className="trace-value">
           <EntryName model={model} place={place} />

@@ -1,6 +1,7 @@
 /** What is said of a trace, as text: for the line under the matrix, where names are then set as mathematics, and for the ear. */
 
-import type { EntryEnd, Trace, TracedStep, TracedValue, TracedWalk } from '../../compile/trace/index.ts';
+import type { StateSpace } from '../../compile/index.ts';
+import type { EntryEnd, EntryPlace, Trace, TracedStep, TracedValue, TracedWalk } from '../../compile/trace/index.ts';
 import { formatFraction, formatNumber, isWritableFraction } from '../figures/index.ts';
 
 type Traced = Extract<Trace, { readonly outcome: 'traced' }>;
@@ -65,4 +66,30 @@ export function spokenTrace(trace: Trace): string {
   const steps = first === undefined ? '' : `: ${stepsOf(trace.from, first).map(stepText).join(', then ')}`;
   const more = others.length === 0 ? '' : `, and ${others.length} more`;
   return `${entry}: ${valueText(trace.value)}, ${waysText(trace)}${steps}${more}.`;
+}
+
+/** Entries that are listed for a block or wire; of more, the number is told. */
+export const MOST_LISTED = 12;
+
+/** `no entries`, `1 entry`, `3 entries`. */
+export function entryCount(count: number): string {
+  return count === 1 ? '1 entry' : `${count === 0 ? 'no' : count} entries`;
+}
+
+/** What a block or wire takes part in, as a screen reader is to say it; `title` begins the sentence. */
+export function spokenPart(
+  title: string,
+  { states, inputs, outputs }: StateSpace,
+  entries: readonly EntryPlace[],
+): string {
+  const start = `${title} takes part in ${entryCount(entries.length)}`;
+  if (entries.length === 0) return `${start}.`;
+  const rows = [...states, ...outputs];
+  const columns = [...states, ...inputs];
+  const listed = entries.slice(0, MOST_LISTED).map(({ row, column }) => {
+    const to = rows[row]?.name ?? '';
+    return `${row < states.length ? `the derivative of ${to}` : `output ${to}`} from ${columns[column]?.name ?? ''}`;
+  });
+  const more = entries.length - listed.length;
+  return `${start}: ${listed.join(', ')}${more > 0 ? ` and ${more} more` : ''}.`;
 }

@@ -35,6 +35,23 @@ describe('the system matrix', () => {
     expect(html(createElement(SystemMatrix, { model: winch, notation: 'fractions' }))).not.toContain('≈');
   });
 
+  test('of poles says which are hidden and why', () => {
+    const poles = [
+      { re: -1, im: 0, multiplicity: 2 },
+      { re: -2, im: 3, multiplicity: 1 },
+      { re: -2, im: -3, multiplicity: 1 },
+    ];
+    const why = { isUncontrollable: true, isUnobservable: false };
+    const hidden = [
+      { re: -1, im: 0, multiplicity: 1, ...why },
+      { re: -2, im: 3, multiplicity: 1, isUncontrollable: true, isUnobservable: true },
+    ];
+    const table = html(createElement(PoleTable, { poles, zeros: [], route: 'certified', hidden }));
+    expect(table).toContain('title="In no transfer function: no input reaches it.">hidden 1 of 2<');
+    expect(table).toContain('title="In no transfer function: no input reaches it and no output shows it.">hidden<');
+    expect(html(createElement(PoleTable, { poles, zeros: [], route: 'certified' }))).not.toContain('hidden');
+  });
+
   test('becomes a grid that names its entry when it can be pointed at', () => {
     const onPoint = () => undefined;
     const pointed = { row: 0, column: 3 };

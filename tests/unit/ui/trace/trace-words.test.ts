@@ -3,7 +3,7 @@ import { compile } from '../../../../src/compile/index.ts';
 import { type Trace, traceable, traceEntry } from '../../../../src/compile/trace/index.ts';
 import { startingDrawing } from '../../../../src/diagram/index.ts';
 import { marksOf } from '../../../../src/ui/trace/trace-marks.ts';
-import { spokenTrace } from '../../../../src/ui/trace/trace-words.ts';
+import { spokenPart, spokenTrace } from '../../../../src/ui/trace/trace-words.ts';
 
 /** Of the winch: states omega, F, q, T; inputs r, v; output F. */
 function winchTrace(row: number, column: number): Trace {
@@ -32,6 +32,23 @@ describe('a trace as a sentence', () => {
   test('says why an entry is not traced', () => {
     const trace: Trace = { ...winchTrace(0, 3), outcome: 'not-traced', reason: 'Too many.' };
     expect(spokenTrace(trace)).toBe('the derivative of omega from T: Too many.');
+  });
+});
+
+describe('a part as a sentence', () => {
+  const model = (() => {
+    const derived = compile(startingDrawing());
+    if (!derived.ok) throw new Error('no model');
+    return derived.value.model;
+  })();
+
+  test('lists its entries, of more than twelve the number', () => {
+    expect(spokenPart('Gain k', model, [{ row: 4, column: 1 }])).toBe('Gain k takes part in 1 entry: output F from F.');
+    expect(spokenPart('Gain k', model, [])).toBe('Gain k takes part in no entries.');
+    const many = Array.from({ length: 14 }, () => ({ row: 0, column: 0 }));
+    expect(spokenPart('Gain k', model, many)).toMatch(
+      /^Gain k takes part in 14 entries: the derivative of omega from omega, .* and 2 more\.$/,
+    );
   });
 });
 
