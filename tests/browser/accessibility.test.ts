@@ -4,7 +4,7 @@ import { readFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import type AxeCore from 'axe-core';
 import { expect, type Page, test } from 'playwright/test';
-import { block, openWorkedDrawing, writeBlocks } from './sheet-page.ts';
+import { block, matrixCell, openEmptySheet, openWorkedDrawing, writeBlocks } from './sheet-page.ts';
 
 const AXE = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
 
@@ -73,6 +73,22 @@ for (const colorScheme of ['light', 'dark'] as const) {
     await page.keyboard.press('Enter');
     await page.getByRole('button', { name: 'Export…' }).click();
     await expect(page.getByRole('radio', { name: 'what is selected' })).toBeVisible();
+    expect(await findings(page)).toEqual([]);
+  });
+}
+
+for (const colorScheme of ['light', 'dark'] as const) {
+  test(`a kept trace, and the structure with a hidden mode and the minimal model, ${colorScheme}`, async ({ page }) => {
+    await page.emulateMedia({ colorScheme });
+    await openWorkedDrawing(page);
+    await matrixCell(page, 1, 4).click();
+    await expect(page.getByRole('button', { name: 'let go' })).toBeVisible();
+    expect(await findings(page)).toEqual([]);
+    await openEmptySheet(page);
+    await writeBlocks(page, 'r>', '(s+1)/((s+1)*(s+2))', '>y');
+    await page.getByRole('tab', { name: 'Structure' }).click();
+    await page.getByRole('button', { name: 'Show the minimal model' }).click();
+    await expect(page.getByLabel('Change of state')).toBeVisible();
     expect(await findings(page)).toEqual([]);
   });
 }

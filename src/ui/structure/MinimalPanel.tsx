@@ -64,7 +64,7 @@ function SaveChoice({ formats }: { readonly formats: readonly SavedFormat[] }) {
     <p className="structure-save">
       <label>
         Format{' '}
-        <select value={id} onChange={event => setId(event.currentTarget.value)}>
+        <select className="channel-picker-select" value={id} onChange={event => setId(event.currentTarget.value)}>
           {formats.map(each => (
             <option key={each.id} value={each.id}>
               {each.label}

@@ -86,6 +86,21 @@ const LOOP = drawing(
   ],
 );
 
+test('a value that is too long for a sentence stands as a number alone', () => {
+  const names = Array.from({ length: 20 }, (_, i) => `constant_${i}`);
+  const chain = drawing(
+    [
+      { id: 'r', kind: 'input' },
+      ...names.map((gain, i): Block => ({ id: `g${i}`, kind: 'gain', gain })),
+      { id: 'y', kind: 'output' },
+    ],
+    ['r g0', ...names.slice(1).map((_, i) => `g${i} g${i + 1}`), 'g19 y'],
+    names.map(name => ({ name, value: '2' })),
+  );
+  const { value } = done(entry(chain, '>y', 'r'));
+  expect([toFraction(value.exact), value.symbols]).toEqual(['1048576', null]);
+});
+
 describe('an algebraic loop', () => {
   // Negative feedback: forward K1 K2, loop −K1 K2 K3 (any textbook; Mason 1956 for the general case).
   test('gives the forward product over one plus the loop’s', () => {
