@@ -23,6 +23,17 @@ test('a cancelled pole is found, marked and left out of the minimal model, which
   await expect(page.locator('.trace-hidden')).toHaveCount(0);
 });
 
+test('the export dialog saves the minimal model where that is ticked', async ({ page }) => {
+  await openEmptySheet(page);
+  await writeBlocks(page, 'r>', '(s+1)/((s+1)*(s+2))', '>y');
+  await expect(page.locator('.pole-table-hidden')).toHaveText('hidden');
+  await page.getByRole('button', { name: 'Export…' }).click();
+  await page.getByRole('checkbox', { name: 'of the minimal model' }).check();
+  const saved = page.waitForEvent('download');
+  await page.getByRole('button', { name: 'Save Model file' }).click();
+  expect(JSON.parse(await readFile(await (await saved).path(), 'utf8'))).toMatchObject({ A: [[-2]], observable: true });
+});
+
 test('a minimal model is said to be one, and each channel names its states', async ({ page }) => {
   await openWorkedDrawing(page);
   await page.getByRole('tab', { name: 'Structure' }).click();

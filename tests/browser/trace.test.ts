@@ -1,7 +1,15 @@
 /** Why an entry is what it is: by mouse and by keyboard, from the matrix to the drawing and back. */
 
 import { expect, type Page, test } from 'playwright/test';
-import { block, matrixCell, openWorkedDrawing } from './sheet-page.ts';
+import {
+  block,
+  drawWire,
+  expectMatrix,
+  matrixCell,
+  openEmptySheet,
+  openWorkedDrawing,
+  writeBlocks,
+} from './sheet-page.ts';
 
 const sentence = (page: Page) => page.locator('.trace-sentence');
 const grid = (page: Page) => page.getByRole('grid');
@@ -34,6 +42,26 @@ test('pointing at an entry lights its path and says its value; a click keeps it,
   await expect(sentence(page)).toContainText('1/J = 5/4');
   await page.keyboard.press('Escape');
   await expect(sentence(page)).toHaveCount(0);
+});
+
+test('a kept entry lists each path and loop without moving what stands below', async ({ page }) => {
+  await openEmptySheet(page);
+  await writeBlocks(page, 'r>', '+-', '3', '1/s', '>y');
+  await drawWire(block(page, 'gain 3'), 0, block(page, 'summing point sum'), 1);
+  await expectMatrix(page, [
+    ['0', '3/4'],
+    ['1', '0'],
+  ]);
+  const tabs = page.getByRole('tablist');
+  const before = await tabs.boundingBox();
+  await matrixCell(page, 1, 2).hover();
+  await expect(sentence(page)).toContainText(
+    'one path over the determinant of one loop (click or Enter: each of them)',
+  );
+  await matrixCell(page, 1, 2).click();
+  await expect(page.locator('.trace-determinant')).toHaveText(/^determinant 4; loop gains −3 \(/);
+  await expect(page.locator('.trace-wire-loop')).toHaveCount(1);
+  expect(await tabs.boundingBox()).toEqual(before);
 });
 
 test('the arrow keys walk the entries, Enter keeps one, and each is said', async ({ page }) => {

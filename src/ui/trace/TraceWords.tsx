@@ -2,12 +2,14 @@
 
 import { Fragment } from 'react';
 import type { StateSpace } from '../../compile/index.ts';
-import type { Trace, TracedStep, TracedValue, TracedWalk } from '../../compile/trace/index.ts';
+import type { Trace, TracedStep, TracedValue } from '../../compile/trace/index.ts';
 import type { MatrixPlace } from '../results/index.ts';
 import { actions } from '../store/index.ts';
 import { EntryName } from './EntryName.tsx';
 import { FormulaLine } from './FormulaLine.tsx';
 import { numberText, stepsOf, symbolsOf, waysText } from './trace-words.ts';
+
+type Traced = Extract<Trace, { readonly outcome: 'traced' }>;
 
 interface TraceWordsProps {
   readonly model: StateSpace;
@@ -19,8 +21,12 @@ interface TraceWordsProps {
 export function TraceWords({ model, place, trace, isKept }: TraceWordsProps) {
   const isTraced = trace.outcome === 'traced';
   return (
-    // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls has to be reached by key
-    <section className="trace-words" aria-label="Trace of the entry" tabIndex={0}>
+    <section
+      className={isKept ? 'trace-words trace-words-kept' : 'trace-words'}
+      aria-label="Trace of the entry"
+      // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls has to be reached by key
+      tabIndex={0}
+    >
       <p className="trace-sentence">
         <strong className="trace-value">
           <EntryName model={model} place={place} />
@@ -28,21 +34,37 @@ export function TraceWords({ model, place, trace, isKept }: TraceWordsProps) {
           {isTraced && <Value value={trace.value} />}
         </strong>{' '}
         {isTraced ? waysText(trace) : trace.reason}
-        {isTraced && trace.paths.length === 1 && ': '}
-        {isTraced && trace.paths.length === 1 && <Steps steps={stepsOf(trace.from, trace.paths[0] as TracedWalk)} />}
+        {isTraced && !isKept && hasParts(trace) && ' (click or Enter: each of them)'}
+        {isTraced && <OnlyPath trace={trace} />}
         {isKept && (
           <button type="button" className="quiet trace-let-go" onClick={() => actions.leaveEntry('escape')}>
             let go
           </button>
         )}
       </p>
-      {isTraced && <Parts trace={trace} />}
+      {isTraced && isKept && <Parts trace={trace} />}
     </section>
   );
 }
 
+/** The steps of the path where there is just one. */
+function OnlyPath({ trace: { paths, from } }: { readonly trace: Traced }) {
+  const [path, ...others] = paths;
+  if (path === undefined || others.length > 0) return null;
+  return (
+    <>
+      : <Steps steps={stepsOf(from, path)} />
+    </>
+  );
+}
+
+/** Whether there is more to list than one path. */
+function hasParts({ paths, loops }: Traced): boolean {
+  return paths.length > 1 || (paths.length > 0 && loops.length > 0);
+}
+
 /** The paths, where there is more than one, and the loops. */
-function Parts({ trace }: { readonly trace: Extract<Trace, { readonly outcome: 'traced' }> }) {
+function Parts({ trace }: { readonly trace: Traced }) {
   const { paths, loops, determinant, from } = trace;
   return (
     <>
