@@ -4,7 +4,7 @@ import { Fragment } from 'react';
 import type { StateSpace } from '../../compile/index.ts';
 import type { Trace, TracedStep, TracedValue } from '../../compile/trace/index.ts';
 import type { MatrixPlace } from '../results/index.ts';
-import { actions } from '../store/index.ts';
+import { actions, type State, useStore } from '../store/index.ts';
 import { EntryName } from './EntryName.tsx';
 import { FormulaLine } from './FormulaLine.tsx';
 import { numberText, stepsOf, symbolsOf, waysText } from './trace-words.ts';
@@ -102,13 +102,16 @@ function isOne({ exact }: TracedValue): boolean {
   return exact.n === 1n && exact.d === 1n;
 }
 
+const isDecimal = (state: State) => state.view.notation === 'decimals';
+
 function Value({ value }: { readonly value: TracedValue }) {
+  const inDecimals = useStore(isDecimal);
   const symbols = symbolsOf(value);
   return (
     <span className="trace-figure">
       {symbols !== null && <FormulaLine text={symbols} />}
       {symbols !== null && ' = '}
-      {numberText(value)}
+      {numberText(value, inDecimals)}
     </span>
   );
 }

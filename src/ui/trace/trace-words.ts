@@ -2,13 +2,15 @@
 
 import type { StateSpace } from '../../compile/index.ts';
 import type { EntryEnd, EntryPlace, Trace, TracedStep, TracedValue, TracedWalk } from '../../compile/trace/index.ts';
-import { formatFraction, formatNumber, isWritableFraction } from '../figures/index.ts';
+import { figureOf, figureText, formatFraction, isWritableFraction } from '../figures/index.ts';
 
 type Traced = Extract<Trace, { readonly outcome: 'traced' }>;
 
-/** `5/4`, or a decimal where the fraction is too long to be read. */
-export function numberText({ exact }: TracedValue): string {
-  return isWritableFraction(exact) ? formatFraction(exact) : `≈ ${formatNumber(exact)}`;
+/** `5/4`, or a decimal where the fraction is too long to be read or decimals are asked for. */
+export function numberText({ exact }: TracedValue, isDecimal = false): string {
+  if (!isDecimal && isWritableFraction(exact)) return formatFraction(exact);
+  const figure = figureOf(exact);
+  return `${figure.isRounded ? '≈ ' : ''}${figureText(figure)}`;
 }
 
 /** The expression where there is one that says more than the number; null else. */

@@ -3,7 +3,7 @@ import { compile } from '../../../../src/compile/index.ts';
 import { type Trace, traceable, traceEntry } from '../../../../src/compile/trace/index.ts';
 import { startingDrawing } from '../../../../src/diagram/index.ts';
 import { marksOf } from '../../../../src/ui/trace/trace-marks.ts';
-import { spokenPart, spokenTrace } from '../../../../src/ui/trace/trace-words.ts';
+import { numberText, spokenPart, spokenTrace } from '../../../../src/ui/trace/trace-words.ts';
 
 /** Of the winch: states omega, F, q, T; inputs r, v; output F. */
 function winchTrace(row: number, column: number): Trace {
@@ -32,6 +32,17 @@ describe('a trace as a sentence', () => {
   test('says why an entry is not traced', () => {
     const trace: Trace = { ...winchTrace(0, 3), outcome: 'not-traced', reason: 'Too many.' };
     expect(spokenTrace(trace)).toBe('the derivative of omega from T: Too many.');
+  });
+});
+
+describe('a traced number', () => {
+  const value = (n: bigint, d: bigint) => ({ exact: { n, d }, symbols: null });
+
+  test('is a fraction, a decimal where that is asked for or the fraction is too long, marked where it is rounded', () => {
+    expect(numberText(value(5n, 4n))).toBe('5/4');
+    expect(numberText(value(5n, 4n), true)).toBe('1.25');
+    expect(numberText(value(-1n, 3n), true)).toBe('≈ −0.333333');
+    expect(numberText(value(10n ** 40n + 1n, 3n))).toMatch(/^≈ /);
   });
 });
 
