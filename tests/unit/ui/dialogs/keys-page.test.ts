@@ -26,6 +26,7 @@ const LOCAL: Readonly<Record<string, string>> = {
   'title-block/ParameterSlider.tsx': 'On a slider',
   'write-line/WriteField.tsx': 'In the write-a-block line',
   'frequency/BodePlot.tsx': 'In tabs, in the matrix and on plots',
+  'plots/HorizonGrip.tsx': 'In tabs, in the matrix and on plots',
   'plots/PoleMap.tsx': 'In tabs, in the matrix and on plots',
   'plots/StepPlot.tsx': 'In tabs, in the matrix and on plots',
   'plots/pole-map-pointer.ts': 'In tabs, in the matrix and on plots',
@@ -34,6 +35,7 @@ const LOCAL: Readonly<Record<string, string>> = {
   'results/matrix-keys.ts': 'In tabs, in the matrix and on plots',
   'results/tab-keys.ts': 'In tabs, in the matrix and on plots',
   'sheet/usePointedPart.ts': 'In tabs, in the matrix and on plots',
+  'trace/TraceLine.tsx': 'In tabs, in the matrix and on plots',
 };
 
 /** Names of keys, as a handler writes them and as the page does. */
