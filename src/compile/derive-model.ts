@@ -8,10 +8,11 @@ import { Effort, withinEffort } from '../algebra/symbolic/index.ts';
 import type { Diagram } from '../diagram/index.ts';
 import { evaluateParameters, type Scope } from '../expression/index.ts';
 import type { Result, Warning } from '../problem/index.ts';
-import { type DerivedModel, derive } from './derive.ts';
+import { type DerivationMemory, type DerivedModel, derive, emptyMemory } from './derive.ts';
 import { type FlatDrawing, flatten, openPortWarnings } from './flatten/index.ts';
 import { numericMatrices, overflowProblems } from './numeric-matrices.ts';
 import {
+  type Account,
   doubleArithmetic,
   type IrrationalFinding,
   irrationalFindings,
@@ -29,28 +30,60 @@ export interface CompileOptions {
   readonly field?: 'rational' | 'double' | 'auto';
 }
 
+/** What a derivation leaves for the next one of nearly the same drawing; whoever derives again and again keeps one. */
+export interface ModelMemory {
+  /** The last drawing opened, and what it came to. */
+  drawing: { readonly blocks: Diagram['blocks']; readonly wires: Diagram['wires']; readonly flat: FlatDrawing } | null;
+  readonly account: Account;
+  readonly metered: NumericArithmetic<Rational>;
+  readonly exact: DerivationMemory<Rational>;
+  readonly doubles: DerivationMemory<number>;
+}
+
+/** A memory without anything in it: the first derivation with it is one like any other. */
+export function newModelMemory(): ModelMemory {
+  const account = { effort: new Effort({ maximumOperations: EXACT_EFFORT }) };
+  const metered = meteredRationals(account);
+  return { drawing: null, account, metered, exact: emptyMemory(), doubles: emptyMemory() };
+}
+
+export interface DeriveOptions extends CompileOptions {
+  /** From the derivations before: what a change does not reach is not derived again. The result is the same without. */
+  readonly memory?: ModelMemory;
+}
+
 /**
  * The state-space model of a diagram that `readDiagram` or an edit made, or every problem of the first stage that has one:
  * parameters, fields of blocks, names, algebraic loops, derivatives of inputs. An empty sheet gives empty matrices.
  */
-export function deriveModel(diagram: Diagram, { field = 'auto' }: CompileOptions = {}): Result<UncheckedDerivation> {
+export function deriveModel(
+  diagram: Diagram,
+  { field = 'auto', memory = newModelMemory() }: DeriveOptions = {},
+): Result<UncheckedDerivation> {
   const parameters = evaluateParameters(diagram.parameters);
   if (!parameters.ok) return parameters;
-  const drawing = flatten(diagram);
-  const task: Task = { diagram, drawing, scope: parameters.value };
+  const task: Task = { diagram, drawing: flattened(diagram, memory), scope: parameters.value, memory };
   switch (field) {
     case 'rational':
-      return deriveRationals(task, rationalArithmetic);
+      return deriveRationals(task, rationalArithmetic, emptyMemory());
     case 'double':
       return deriveDoubles(task);
     case 'auto': {
-      const effort = new Effort({ maximumOperations: EXACT_EFFORT });
-      const exact = withinEffort(() => deriveRationals(task, meteredRationals(effort)));
+      memory.account.effort = new Effort({ maximumOperations: EXACT_EFFORT });
+      const exact = withinEffort(() => deriveRationals(task, memory.metered, memory.exact));
       return exact.finished ? exact.value : deriveDoubles(task);
     }
     default:
       return field satisfies never;
   }
+}
+
+function flattened(diagram: Diagram, memory: ModelMemory): FlatDrawing {
+  const { blocks, wires } = diagram;
+  const { drawing } = memory;
+  const flat = drawing?.blocks === blocks && drawing.wires === wires ? drawing.flat : flatten(diagram);
+  memory.drawing = { blocks, wires, flat };
+  return flat;
 }
 
 /**
@@ -63,16 +96,21 @@ interface Task {
   readonly diagram: Diagram;
   readonly drawing: FlatDrawing;
   readonly scope: Scope;
+  readonly memory: ModelMemory;
 }
 
-function deriveRationals(task: Task, arithmetic: NumericArithmetic<Rational>): Result<UncheckedDerivation> {
-  const derived = derive(task.drawing, numericReader(arithmetic, task.scope));
+function deriveRationals(
+  task: Task,
+  arithmetic: NumericArithmetic<Rational>,
+  memory: DerivationMemory<Rational>,
+): Result<UncheckedDerivation> {
+  const derived = derive(task.drawing, numericReader(arithmetic, task.scope), memory);
   if (!derived.ok) return derived;
   return finish(task, derived.value, derived.value.matrices, arithmetic, 'rational');
 }
 
 function deriveDoubles(task: Task): Result<UncheckedDerivation> {
-  const derived = derive(task.drawing, numericReader(doubleArithmetic, task.scope));
+  const derived = derive(task.drawing, numericReader(doubleArithmetic, task.scope), task.memory.doubles);
   return derived.ok ? finish(task, derived.value, null, doubleArithmetic, 'double') : derived;
 }
 

@@ -5,11 +5,11 @@
 
 import type { Result, Warning } from '../problem/index.ts';
 import { type ReducedModel, reduceDerivatives } from './derivatives/index.ts';
-import { eliminate, type SolvedLoop } from './eliminate/index.ts';
+import { type Elimination, eliminate, type KeptElimination, mayStartFrom, type SolvedLoop } from './eliminate/index.ts';
 import { cutMatrix, type Equations, type ModelState, type RowStore, writeEquations } from './equations/index.ts';
 import { blockOfSignals, type FlatDrawing } from './flatten/index.ts';
 import { readContributions } from './kinds/index.ts';
-import { loopWithoutSolution, nearlySingularLoop, orderSignals, pathsOf } from './loops/index.ts';
+import { loopWithoutSolution, nearlySingularLoop, orderSignals, pathsOf, type SignalOrder } from './loops/index.ts';
 import { nameProblems } from './names.ts';
 import type { IrrationalBlock, QuantityReader } from './quantities/index.ts';
 import type { AlgebraicLoop, SignalName, SystemMatrices } from './state-space.ts';
@@ -33,17 +33,32 @@ export interface DerivedModel<T> {
  */
 const NEARLY_SINGULAR = 2 ** -26;
 
-/** Derives a drawing's model. Every stage reports all its problems, then the next is not entered. */
+/** What one derivation leaves for the next over the same arithmetic. */
+export interface DerivationMemory<T> {
+  order: SignalOrder | null;
+  kept: KeptElimination<T> | null;
+}
+
+/** A memory without a derivation. */
+export function emptyMemory<T>(): DerivationMemory<T> {
+  return { order: null, kept: null };
+}
+
+/**
+ * Derives a drawing's model. Every stage reports all its problems, then the next is not entered.
+ *
+ * @param memory  Of the derivation before: what has not changed since is not eliminated again. The result is the same without.
+ */
 export function derive<T>(
   drawing: FlatDrawing,
   reader: QuantityReader<T> & { takeIrrational?(): readonly string[] },
+  memory: DerivationMemory<T> = emptyMemory(),
 ): Result<DerivedModel<T>> {
   const readings = readContributions(drawing.blocks, reader);
   if (!readings.ok) return readings;
   const { contributions, warnings, irrational } = readings.value;
   const equations = writeEquations(reader.arithmetic, drawing, contributions);
-  const measureLoops = reader.arithmetic.field.name !== 'symbolic';
-  const { loops, reduced } = eliminate(equations, orderSignals(equations), { measureLoops });
+  const { loops, reduced } = eliminated(equations, memory);
   const located = locateLoops(drawing, loops);
   const refusals = located
     .filter(({ loop }) => loop.isSingular)
@@ -68,6 +83,19 @@ export function derive<T>(
       irrational,
     },
   };
+}
+
+/** Eliminates the signals, from what the memory holds where it fits, and leaves there what the next may start from. */
+function eliminated<T>(equations: Equations<T>, memory: DerivationMemory<T>): Elimination<T> {
+  const former = memory.kept !== null && mayStartFrom(memory.kept, equations) ? memory.kept : null;
+  const order = former === null || memory.order === null ? orderSignals(equations) : memory.order;
+  // Where the effort ends half way, what is kept is half done: it is taken out first.
+  memory.kept = null;
+  const measureLoops = equations.arithmetic.field.name !== 'symbolic';
+  const elimination = eliminate(equations, order, { measureLoops, former });
+  memory.order = order;
+  memory.kept = elimination.kept;
+  return elimination;
 }
 
 /** The rows as they are where nothing is differentiated. */

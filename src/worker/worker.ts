@@ -4,7 +4,7 @@
  * when they are first needed, after the first matrices. While a value moves, a drawing that takes long is derived in doubles.
  */
 
-import type { StateSpace, UncheckedDerivation } from '../compile/index.ts';
+import { newModelMemory, type StateSpace, type UncheckedDerivation } from '../compile/index.ts';
 import type { Diagram } from '../diagram/index.ts';
 import { openAsks } from './asks.ts';
 import { modelAnswer } from './model-answer.ts';
@@ -12,6 +12,9 @@ import type { Answer, Channel, Question } from './protocol.ts';
 
 /** Milliseconds beyond which an exact derivation is too slow to follow a moving value: half a frame. */
 const LIVE_LIMIT = 8;
+
+/** What the last derivation left for the next. */
+const memory = newModelMemory();
 
 /** Milliseconds that the last exact derivation took. */
 let exactElapsed = 0;
@@ -48,7 +51,7 @@ async function derive(question: Extract<Question, { kind: 'derive' }>): Promise<
   await turn();
   if (newest !== question) return;
   const field = question.isLive && exactElapsed > LIVE_LIMIT ? 'double' : 'auto';
-  const answer = modelAnswer(question, field);
+  const answer = modelAnswer(question, field, memory);
   if (field === 'auto') exactElapsed = answer.elapsed;
   latest = answer.outcome.ok ? { ...question, derivation: answer.outcome.value } : null;
   send(answer);

@@ -3,7 +3,7 @@
  * alone. A signal outside loops is substituted, a loop solved as one linear system. Runs over whatever field it is given.
  */
 
-import { type Equations, RowAccumulator, RowStore } from '../equations/index.ts';
+import { copyRow, type Equations, isSameRow, RowAccumulator, RowStore } from '../equations/index.ts';
 import {
   inDoubles,
   type LoopSolver,
@@ -12,6 +12,17 @@ import {
   relativeDistanceToSingular,
   type SignalOrder,
 } from '../loops/index.ts';
+import {
+  type Changes,
+  changesSince,
+  charged,
+  type EliminationRecord,
+  hasChangedEquation,
+  isReached,
+  type KeptElimination,
+  newRecord,
+  spentSoFar,
+} from './kept-elimination.ts';
 
 /** An algebraic loop as elimination found it. */
 export interface SolvedLoop {
@@ -28,11 +39,18 @@ export interface Elimination<T> {
   readonly loops: readonly SolvedLoop[];
   /** Rows over the knowns: state derivatives, differentiated signals, outputs, in this order. Null where a loop is singular. */
   readonly reduced: RowStore<T> | null;
+  /** What the elimination of equations with the same places may start from, once; null where a loop is singular. */
+  readonly kept: KeptElimination<T> | null;
 }
 
-export interface EliminationOptions {
+export interface EliminationOptions<T> {
   /** Whether the distance of each loop to a singular one is measured. */
   readonly measureLoops: boolean;
+  /**
+   * An earlier elimination over the same arithmetic and order, of equations with the same places. Only what its changed
+   * equations reach is done again, with the same result and the same effort counted; it is used up.
+   */
+  readonly former?: KeptElimination<T> | null;
 }
 
 /**
@@ -43,9 +61,9 @@ export interface EliminationOptions {
 export function eliminate<T>(
   equations: Equations<T>,
   order: SignalOrder,
-  { measureLoops }: EliminationOptions,
+  { measureLoops, former = null }: EliminationOptions<T>,
 ): Elimination<T> {
-  const work = newWork(equations);
+  const work = newWork(equations, order, former);
   const loops: SolvedLoop[] = [];
   let anySingular = false;
   const { components, isLoop, isNeeded } = order;
@@ -53,14 +71,16 @@ export function eliminate<T>(
     const members = components.member.subarray(components.start[c], components.start[c + 1]);
     const wanted = isNeeded[c] === 1 && !anySingular;
     if (isLoop[c] === 1) {
-      const { distance, solver } = examineLoop(work, members, measureLoops);
-      const isSolved = solver !== null && (!wanted || resolveLoop(work, members, solver));
+      const { distance, solver } = examined(work, c, members, measureLoops);
+      const isSolved = solver !== null && (!wanted || resolved(work, c, members, solver));
       loops.push({ signals: members, isSingular: !isSolved, distance });
       if (!isSolved) anySingular = true;
-    } else if (wanted) resolveSignal(work, members[0]!);
+    } else if (wanted) resolved(work, c, members, null);
   }
   loops.sort((a, b) => a.signals[0]! - b.signals[0]!);
-  return { loops, reduced: anySingular ? null : reducedRows(work) };
+  if (anySingular) return { loops, reduced: null, kept: null };
+  const reduced = reducedRows(work);
+  return { loops, reduced, kept: { ...work.record, equations, reduced } };
 }
 
 interface Work<T> {
@@ -72,17 +92,59 @@ interface Work<T> {
   readonly row: RowAccumulator<T>;
   /** For each signal its place in the loop in hand, −1 outside it. */
   readonly place: Int32Array;
+  readonly record: EliminationRecord<T>;
+  readonly changes: Changes<T> | null;
 }
 
-function newWork<T>(equations: Equations<T>): Work<T> {
-  const { arithmetic, signals, known } = equations;
+function newWork<T>(equations: Equations<T>, order: SignalOrder, former: KeptElimination<T> | null): Work<T> {
+  const { arithmetic, signals, known, rows } = equations;
+  const record = former ?? newRecord(arithmetic, signals, order.components.count, rows.rows);
   return {
     equations,
-    resolved: new RowStore(arithmetic, signals, 4 * signals + 16),
-    rowOf: new Int32Array(signals).fill(-1),
+    resolved: record.resolved,
+    rowOf: record.rowOf,
     row: new RowAccumulator(arithmetic, known),
     place: new Int32Array(signals).fill(-1),
+    record,
+    changes: former === null ? null : changesSince(former, equations),
   };
+}
+
+/** The loop's examination, kept where none of its equations has changed. */
+function examined<T>(work: Work<T>, c: number, members: Int32Array, measure: boolean) {
+  const { record, changes } = work;
+  const before = record.examinations.get(c);
+  const isKept = before !== undefined && changes !== null && !hasChangedEquation(changes, members);
+  const { arithmetic } = work.equations;
+  if (isKept) {
+    charged(arithmetic, before.cost);
+    return before.value;
+  }
+  const spent = spentSoFar(arithmetic);
+  const value = examineLoop(work, members, measure);
+  record.examinations.set(c, { value, cost: spentSoFar(arithmetic) - spent });
+  return value;
+}
+
+/** Gives the members of a component their rows, or leaves them those that they have; false where its loop is singular. */
+function resolved<T>(work: Work<T>, c: number, members: Int32Array, solver: LoopSolver<T> | null): boolean {
+  const { equations, record, changes, rowOf } = work;
+  const { arithmetic } = equations;
+  if (changes !== null && !isReached(changes, equations, members)) {
+    charged(arithmetic, record.costs[c]!);
+    return true;
+  }
+  const before = changes === null ? null : Int32Array.from(members, signal => rowOf[signal]!);
+  const spent = spentSoFar(arithmetic);
+  let value = true;
+  if (solver === null) resolveSignal(work, members[0]!);
+  else value = resolveLoop(work, members, solver);
+  record.costs[c] = spentSoFar(arithmetic) - spent;
+  before?.forEach((row, i) => {
+    const signal = members[i]!;
+    if (changes !== null && !isSameRow(arithmetic, work.resolved, row, rowOf[signal]!)) changes.signal[signal] = 1;
+  });
+  return value;
 }
 
 /** Adds the equation's terms up with every signal outside the loop in hand replaced by what it is in knowns. */
@@ -166,11 +228,19 @@ function writtenOut<T>({ equations }: Work<T>, rows: RowStore<T>, columns: Int32
 
 /** The rows behind the signals, over the knowns. */
 function reducedRows<T>(work: Work<T>): RowStore<T> {
+  const { record, changes } = work;
   const { arithmetic, rows, signals } = work.equations;
   const reduced = new RowStore(arithmetic, rows.rows - signals + 1, work.resolved.length + 16);
   for (let equation = signals; equation < rows.rows; equation++) {
+    if (changes !== null && !isReached(changes, work.equations, [equation])) {
+      copyRow(changes.reduced, equation - signals, reduced);
+      charged(arithmetic, record.rowCosts[equation]!);
+      continue;
+    }
+    const spent = spentSoFar(arithmetic);
     addResolved(work, equation);
     work.row.finishRow(reduced);
+    record.rowCosts[equation] = spentSoFar(arithmetic) - spent;
   }
   return reduced;
 }

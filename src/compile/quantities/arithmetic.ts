@@ -33,11 +33,19 @@ export interface Arithmetic<T> {
    * element is as good as another.
    */
   magnitude(value: T): number;
+  /** Where operations are counted: whoever keeps an earlier result counts what it would cost again. */
+  readonly meter?: Meter;
   /**
    * A way of its own to solve an n × n system for several right-hand sides, all row-major, where elimination in field
    * operations is not the best; null where the system is singular.
    */
   solveDense?(matrix: Numbers<T>, rightSides: Numbers<T>, n: number, width: number): Numbers<T> | null;
+}
+
+/** What operations have cost. */
+export interface Meter {
+  readonly spent: number;
+  spend(operations: number): void;
 }
 
 /** An arithmetic whose elements are made from the values of expressions. */

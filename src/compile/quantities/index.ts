@@ -8,7 +8,7 @@ export {
   rationalArithmetic,
 } from './arithmetic.ts';
 export { type IrrationalBlock, type IrrationalFinding, irrationalFindings } from './irrational.ts';
-export { meteredRationals } from './metered-rationals.ts';
+export { type Account, meteredRationals } from './metered-rationals.ts';
 export {
   type NumericReader,
   numericReader,

@@ -5,19 +5,24 @@
 
 import { type Field, type Rational, rationalField } from '../../algebra/index.ts';
 import type { Effort } from '../../algebra/symbolic/index.ts';
-import { type NumericArithmetic, rationalArithmetic } from './arithmetic.ts';
+import { type Meter, type NumericArithmetic, rationalArithmetic } from './arithmetic.ts';
 
 const WORD = 1n << 63n;
 
 /** What an operation on short numbers costs in the products of words that long ones are counted by (measured: 10 to 30). */
 const OPERATION = 15;
 
-/** Exact rationals whose operations spend an effort; run what uses them in `withinEffort`. */
-export function meteredRationals(effort: Effort): NumericArithmetic<Rational> {
+/** The effort that is being spent; another takes its place with each derivation. */
+export interface Account {
+  effort: Effort;
+}
+
+/** Exact rationals whose operations spend the account's effort; run what uses them in `withinEffort`. */
+export function meteredRationals(account: Account): NumericArithmetic<Rational> {
   const metered =
     (operation: (a: Rational, b: Rational) => Rational) =>
     (a: Rational, b: Rational): Rational => {
-      effort.spend(OPERATION + wordsOf(a) * wordsOf(b));
+      account.effort.spend(OPERATION + wordsOf(a) * wordsOf(b));
       return operation(a, b);
     };
   const field: Field<Rational> = {
@@ -27,7 +32,13 @@ export function meteredRationals(effort: Effort): NumericArithmetic<Rational> {
     multiply: metered(rationalField.multiply),
     divide: metered(rationalField.divide),
   };
-  return { ...rationalArithmetic, field, sum: field.add };
+  const meter: Meter = {
+    get spent() {
+      return account.effort.spent;
+    },
+    spend: operations => account.effort.spend(operations),
+  };
+  return { ...rationalArithmetic, field, sum: field.add, meter };
 }
 
 /** Length in 64-bit words, at least 1. */

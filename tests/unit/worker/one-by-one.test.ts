@@ -1,4 +1,5 @@
 import { describe, expect, test } from 'vitest';
+import { newModelMemory } from '../../../src/compile/index.ts';
 import { emptyDiagram } from '../../../src/diagram/index.ts';
 import { fail, problem } from '../../../src/problem/index.ts';
 import { modelAnswer } from '../../../src/worker/model-answer.ts';
@@ -15,7 +16,7 @@ const question = (revision: number, isLive = false): Derive => ({
   isLive,
 });
 
-const matrices = (revision: number) => modelAnswer(question(revision));
+const matrices = (revision: number) => modelAnswer(question(revision), 'auto', newModelMemory());
 
 const poles = (revision: number): RevisionAnswer => ({
   kind: 'poles',
