@@ -101,3 +101,25 @@ test('pointing at a block or a wire marks the entries it takes part in', async (
   await page.keyboard.press('Shift+Tab');
   await expect(sentence(page)).toContainText('Integrator q takes part in 3 entries');
 });
+
+test('a wire chosen by key marks the entries it takes part in', async ({ page }) => {
+  await openWorkedDrawing(page);
+  await block(page, 'gain K_i').click();
+  await page.mouse.move(700, 5);
+  await page.keyboard.press('n');
+  await expect(sentence(page)).toContainText('The wire from integrator q to gain K_i takes part in 1 entry: ');
+  await expect(page.locator('.system-matrix-lit')).toHaveText('8');
+  await page.keyboard.press('Escape');
+  await expect(page.locator('.system-matrix-lit')).toHaveCount(0);
+});
+
+test('by touch an entry is kept by a tap and let go by another', async ({ browser, baseURL }) => {
+  const context = await browser.newContext({ hasTouch: true, baseURL: baseURL ?? '' });
+  const page = await context.newPage();
+  await openWorkedDrawing(page);
+  await matrixCell(page, 1, 4).tap();
+  await expect(page.locator('.trace-wire-path')).toHaveCount(3);
+  await matrixCell(page, 1, 4).tap();
+  await expect(page.locator('.trace-wire-path')).toHaveCount(0);
+  await context.close();
+});
