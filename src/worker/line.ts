@@ -6,8 +6,18 @@
 
 import type { Diagram } from '../diagram/index.ts';
 import type { Result } from '../problem/index.ts';
+import { changeSince } from './diagram-change.ts';
 import { askOneByOne } from './one-by-one.ts';
-import type { Answer, AskAnswer, Channel, FileAnswer, Notation, Question, RevisionAnswer } from './protocol.ts';
+import type {
+  Answer,
+  AskAnswer,
+  Channel,
+  FileAnswer,
+  Notation,
+  PostedQuestion,
+  Question,
+  RevisionAnswer,
+} from './protocol.ts';
 import type { TopicAnswer, TopicName, TopicQuestion } from './topics/index.ts';
 
 export interface AnalysisLine {
@@ -41,10 +51,13 @@ export function openLine(start: () => Worker, listener: Listener): AnalysisLine 
   const asks = new Map<number, (answer: AskAnswer | null) => void>();
   let nextId = 0;
   let deaths = 0;
+  /** The drawing that the worker has. */
+  let posted: Diagram | null = null;
   let worker = connect();
 
   function connect(): Worker {
     const fresh = start();
+    posted = null;
     fresh.onmessage = ({ data }: MessageEvent<Answer>) => {
       deaths = 0;
       switch (data.kind) {
@@ -74,7 +87,7 @@ export function openLine(start: () => Worker, listener: Listener): AnalysisLine 
       }
       worker = connect();
       derivations.askAgain();
-      for (const { question } of files.values()) worker.postMessage(question);
+      for (const { question } of files.values()) post(question);
     };
     return fresh;
   }
@@ -84,7 +97,19 @@ export function openLine(start: () => Worker, listener: Listener): AnalysisLine 
       deaths = 0;
       worker = connect();
     }
-    worker.postMessage(question);
+    post(question);
+  }
+
+  function post(question: Question): void {
+    worker.postMessage(asPosted(question));
+  }
+
+  function asPosted(question: Question): PostedQuestion {
+    if (question.kind !== 'derive') return question;
+    const { diagram, ...rest } = question;
+    const change = changeSince(posted, diagram);
+    posted = diagram;
+    return { ...rest, change };
   }
 
   return {

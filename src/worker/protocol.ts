@@ -24,6 +24,7 @@ import type { SelfCheck, UncheckedDerivation } from '../compile/index.ts';
 import type { Notation } from '../deliver/index.ts';
 import type { Diagram, PortReference } from '../diagram/index.ts';
 import type { Result, Warning } from '../problem/index.ts';
+import type { DiagramChange } from './diagram-change.ts';
 import type { TopicName } from './topics/index.ts';
 
 /** Position of an input and an output in the model's lists. */
@@ -55,6 +56,11 @@ export type Question =
     }
   | AskQuestion
   | JudgeQuestion;
+
+/** A question as it crosses to the worker: a drawing to derive as what is new in it since the one posted before. */
+export type PostedQuestion =
+  | Exclude<Question, { kind: 'derive' }>
+  | (Omit<Extract<Question, { kind: 'derive' }>, 'diagram'> & { readonly change: DiagramChange });
 
 /** A question on demand about the drawing of a revision; its topic says what `question` holds. */
 export interface AskQuestion {

@@ -7,8 +7,9 @@
 import { newModelMemory, type StateSpace, type UncheckedDerivation } from '../compile/index.ts';
 import type { Diagram } from '../diagram/index.ts';
 import { openAsks } from './asks.ts';
+import { withChange } from './diagram-change.ts';
 import { modelAnswer } from './model-answer.ts';
-import type { Answer, Channel, Question } from './protocol.ts';
+import type { Answer, Channel, PostedQuestion, Question } from './protocol.ts';
 
 /** Milliseconds beyond which an exact derivation is too slow to follow a moving value: half a frame. */
 const LIVE_LIMIT = 8;
@@ -18,6 +19,8 @@ const memory = newModelMemory();
 
 /** Milliseconds that the last exact derivation took. */
 let exactElapsed = 0;
+/** The drawing posted last. */
+let posted: Diagram | null = null;
 /** The newest question for a derivation, and its model once it is derived. */
 let newest: Extract<Question, { kind: 'derive' }> | null = null;
 /** The channel chosen since that question. */
@@ -27,13 +30,16 @@ let latest: { readonly revision: number; readonly diagram: Diagram; readonly der
 
 const asks = openAsks(send, turn);
 
-self.onmessage = ({ data }: MessageEvent<Question>) => {
+self.onmessage = ({ data }: MessageEvent<PostedQuestion>) => {
   switch (data.kind) {
-    case 'derive':
-      newest = data;
+    case 'derive': {
+      const { change, ...question } = data;
+      posted = withChange(posted, change);
+      newest = { ...question, diagram: posted };
       chosen = null;
       asks.overtake(data.revision);
-      return void derive(data);
+      return void derive(newest);
+    }
     case 'channel':
       return void channel(data);
     case 'ask':

@@ -40,7 +40,19 @@ export function sheetGeometry(sheet: Sheet): SheetGeometry {
   return new Map(sheet.blocks.map(block => [block.id, placedGeometry(block, around)]));
 }
 
+/** Of blocks that turn no port towards their neighbours: the same for as long as the block is the same object. */
+const ownGeometry = new WeakMap<Block, BlockGeometry>();
+
 function placedGeometry(block: Block, around: Neighbours): BlockGeometry {
+  if (block.kind === 'input' || block.kind === 'summer') return geometryOf(block, around);
+  const before = ownGeometry.get(block);
+  if (before !== undefined) return before;
+  const geometry = geometryOf(block, around);
+  ownGeometry.set(block, geometry);
+  return geometry;
+}
+
+function geometryOf(block: Block, around: Neighbours): BlockGeometry {
   const box = blockBox(block);
   const outline = blockOutline(block);
   const ports = portPlaces(block, around);

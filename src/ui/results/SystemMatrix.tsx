@@ -6,10 +6,11 @@
 import { type MouseEvent, useCallback, useId, useMemo, useRef } from 'react';
 import type { StateSpace } from '../../compile/index.ts';
 import type { Notation } from '../figures/index.ts';
+import { type RowEntries, rowEntries } from './kept-entries.ts';
 import { MatrixHead } from './MatrixHead.tsx';
 import { MatrixNote } from './MatrixNote.tsx';
 import { MatrixRow } from './MatrixRow.tsx';
-import { entriesOf, type SymbolCell, symbolEntries } from './matrix-entries.ts';
+import { type EntryAt, NOTHING, type SymbolCell, symbolEntries } from './matrix-entries.ts';
 import type { MatrixPlace } from './matrix-keys.ts';
 import { columnsByRow, matrixLabel, rowsOf } from './matrix-layout.ts';
 import { PanelEmpty } from './PanelState.tsx';
@@ -34,16 +35,14 @@ interface SystemMatrixProps {
 }
 
 const NONE: readonly MatrixPlace[] = [];
+const nothing: EntryAt = () => NOTHING;
 
 /** A and B over C and D as one table with the names at its edges. */
 export function SystemMatrix(props: SystemMatrixProps) {
   const { model, notation, symbols = null, onPoint, onPointEnd, pointed = null, lit = NONE } = props;
   const id = useId();
   const scroller = useRef<HTMLDivElement>(null);
-  const entryAt = useMemo(
-    () => (symbols === null ? entriesOf(model, notation) : symbolEntries(symbols)),
-    [model, notation, symbols],
-  );
+  const entriesOfRow = useEntriesOfRows(model, notation, symbols);
   const rows = useMemo(() => rowsOf(model), [model]);
   const litColumns = useMemo(() => columnsByRow(lit), [lit]);
   const states = model.states.length;
@@ -93,7 +92,8 @@ export function SystemMatrix(props: SystemMatrixProps) {
             {inView.map(({ name, isDerivative, isFirstOutput, row }) => (
               <MatrixRow
                 key={row}
-                {...{ row, name, isDerivative, isFirstOutput, entryAt, states, cellId }}
+                {...{ row, name, isDerivative, isFirstOutput, states, cellId }}
+                entryAt={entriesOfRow(row)}
                 columns={window.columns}
                 pointedColumn={pointed?.row === row ? pointed.column : null}
                 litColumns={litColumns.get(row)}
@@ -103,9 +103,27 @@ export function SystemMatrix(props: SystemMatrixProps) {
           </tbody>
         </table>
       </div>
-      <MatrixNote model={model} entryAt={entryAt} window={window} />
+      <MatrixNote model={model} entryAt={(row, column) => entriesOfRow(row)(row, column)} window={window} />
     </div>
   );
+}
+
+/** For each row its entries; a row of numbers keeps them while its numbers stay. */
+function useEntriesOfRows(
+  model: StateSpace,
+  notation: Notation,
+  symbols: readonly (readonly SymbolCell[])[] | null,
+): (row: number) => EntryAt {
+  const former = useRef<RowEntries | null>(null);
+  return useMemo(() => {
+    if (symbols !== null) {
+      const entryAt = symbolEntries(symbols);
+      return (_: number) => entryAt;
+    }
+    const { rows } = rowEntries(former.current, model, notation);
+    former.current = { model, notation, rows };
+    return (row: number) => rows[row] ?? nothing;
+  }, [model, notation, symbols]);
 }
 
 /** The room of the rows that are not in the page. */

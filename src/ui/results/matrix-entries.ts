@@ -32,7 +32,8 @@ export type EntryAt = (row: number, column: number) => MatrixEntry;
 /** Significant digits of a decimal entry. */
 export const ENTRY_DIGITS = 6;
 
-const NOTHING: MatrixEntry = { text: '0', isZero: true, isRounded: false, whole: null };
+/** A zero, as shown. */
+export const NOTHING: MatrixEntry = { text: '0', isZero: true, isRounded: false, whole: null };
 
 /** Entries of `model` in `notation`; decimals where there are no exact ones to show. */
 export function entriesOf(model: StateSpace, notation: Notation): EntryAt {

@@ -14,6 +14,8 @@ import { setShownSheet } from './shown-sheet.ts';
 
 export interface PlacedSheet {
   readonly sheet: Sheet;
+  /** The same with nothing in the hand: one object while blocks are dragged. */
+  readonly resting: Sheet;
   readonly geometry: SheetGeometry;
   readonly routes: Routes;
 }
@@ -32,17 +34,18 @@ export function usePlacedSheet(): PlacedSheet {
   const wires = useStore(wiresOf);
   const moved = useStore(held);
   const routed = useRef<PlacedSheet | null>(null);
+  const resting = useMemo(() => ({ blocks, wires }), [blocks, wires]);
   const placed = useMemo(() => {
-    const sheet = moved === null ? { blocks, wires } : withHeld({ blocks, wires }, moved);
+    const sheet = moved === null ? resting : withHeld(resting, moved);
     const former = routed.current;
     const geometry = keptGeometry(former?.geometry, sheetGeometry(sheet));
-    if (former === null) return { sheet, geometry, routes: routeWires(sheet, geometry) };
+    if (former === null) return { sheet, resting, geometry, routes: routeWires(sheet, geometry) };
     const isMuch = moved !== null && (moved.size > FEW_HELD || sheet.blocks.length > FEW_BLOCKS);
     const routes = isMuch
       ? heldRoutes(former, { sheet, geometry }, moved)
       : rerouteMoved(former.routes, former.sheet, sheet, geometry);
-    return { sheet, geometry, routes, isMuch };
-  }, [blocks, wires, moved]);
+    return { sheet, resting, geometry, routes, isMuch };
+  }, [resting, moved]);
   useLayoutEffect(() => {
     if (!('isMuch' in placed && placed.isMuch)) routed.current = placed;
     setShownSheet(placed);

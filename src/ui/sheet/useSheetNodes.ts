@@ -32,7 +32,7 @@ const selected = (state: State) => state.selection.blocks;
 /** Side of the square that takes a wire's end; twice the port's own size so that the hand finds it. */
 const HANDLE_SIZE = 16;
 
-export function useSheetNodes({ sheet, geometry }: PlacedSheet): BlockFlowNode[] {
+export function useSheetNodes({ sheet, resting, geometry }: PlacedSheet): BlockFlowNode[] {
   const selection = useStore(selected);
   const before = useRef(new Map<string, BlockFlowNode>());
   return useMemo(() => {
@@ -42,7 +42,7 @@ export function useSheetNodes({ sheet, geometry }: PlacedSheet): BlockFlowNode[]
       if (shape === undefined) throw new Error(`block ${block.id} has no geometry`);
       const isSelected = selection.has(block.id);
       const former = before.current.get(block.id);
-      const sentence = blockSentence(block, sheet);
+      const sentence = blockSentence(block, resting);
       const open = openPortsOf(block.id, shape, taken);
       if (
         former?.data.block === block &&
@@ -57,7 +57,7 @@ export function useSheetNodes({ sheet, geometry }: PlacedSheet): BlockFlowNode[]
     });
     before.current = new Map(nodes.map(node => [node.id, node]));
     return nodes;
-  }, [sheet, geometry, selection]);
+  }, [sheet, resting, geometry, selection]);
 }
 
 function openPortsOf(id: string, { inputs }: BlockGeometry, taken: ReadonlySet<string>): readonly number[] {
