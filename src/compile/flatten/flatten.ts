@@ -6,10 +6,8 @@
 import { type Diagram, type GroupBlock, type PortReference, portCounts, type Sheet } from '../../diagram/index.ts';
 import { type FlatBlock, type FlatDrawing, OPEN, type SimpleBlock } from './flat-drawing.ts';
 
-/** What stands at one id of one sheet: a block by its index, or a group by the boundary blocks of its sheet. */
-type Place =
-  | { readonly kind: 'block'; readonly index: number }
-  | { readonly kind: 'group'; readonly inputs: readonly number[]; readonly outputs: readonly number[] };
+/** What stands at one id of one sheet: a block's index, or a group by the boundary blocks of its sheet. */
+type Place = number | { readonly inputs: readonly number[]; readonly outputs: readonly number[] };
 
 interface OpenedSheet {
   readonly sheet: Sheet;
@@ -45,7 +43,7 @@ function openSheet(sheet: Sheet, around: Around, opening: Opening): ReadonlyMap<
     if (block.kind === 'group') {
       places.set(block.id, openGroup(block, { path: `${path}.`, name: `${name}.`, depth: around.depth + 1 }, opening));
     } else {
-      places.set(block.id, { kind: 'block', index: opening.blocks.length });
+      places.set(block.id, opening.blocks.length);
       opening.blocks.push({ block, path, name, role: roleOf(block, around.depth) });
     }
   }
@@ -57,13 +55,13 @@ function openGroup(group: GroupBlock, around: Around, opening: Opening): Place {
   const inside = openSheet(group.sheet, around, opening);
   const boundary = (kind: 'input' | 'output') =>
     group.sheet.blocks.filter(block => block.kind === kind).map(block => indexOf(inside, block.id));
-  return { kind: 'group', inputs: boundary('input'), outputs: boundary('output') };
+  return { inputs: boundary('input'), outputs: boundary('output') };
 }
 
 function indexOf(places: ReadonlyMap<string, Place>, id: string): number {
   const place = places.get(id);
-  if (place?.kind !== 'block') throw new Error(`no block ${id} on its own sheet`);
-  return place.index;
+  if (typeof place !== 'number') throw new Error(`no block ${id} on its own sheet`);
+  return place;
 }
 
 function roleOf(block: SimpleBlock, depth: number): FlatBlock['role'] {
@@ -101,10 +99,11 @@ function portAt(
   start: Int32Array,
 ): number {
   const place = places.get(id);
-  const block = place?.kind === 'group' ? place[side][port] : place?.index;
+  const isGroup = typeof place === 'object';
+  const block = isGroup ? place[side][port] : place;
   const at = block === undefined ? undefined : start[block];
   if (block === undefined || at === undefined) throw new Error(`a wire to ${id}, port ${port}, which is not there`);
-  if (place?.kind === 'group') return at;
+  if (isGroup) return at;
   if (at + port >= (start[block + 1] ?? 0)) throw new Error(`a wire to ${id}, port ${port}, which is not there`);
   return at + port;
 }
