@@ -181,6 +181,38 @@ describe('with differentiation', () => {
   });
 });
 
+describe('every kind at once, groups and dead time among them', () => {
+  const KINDS = [
+    'delay',
+    'differentiator',
+    'gain',
+    'group',
+    'input',
+    'integrator',
+    'limiter',
+    'output',
+    'state-model',
+    'summer',
+    'transfer-function',
+  ];
+
+  test('the model has exactly the transfer matrix of the drawing’s own equations', () => {
+    const compared = new Set<string>();
+    holdsFor(randomDrawings({ blocks: 8, depth: 2, differentiates: true }), 400, diagram => {
+      const derivation = derived(diagram);
+      if (derivation === null) return;
+      for (const s of POINTS) {
+        const own = transferMatrix(diagram, s);
+        const ofModel = modelTransfer(exact(derivation), s);
+        if (own === null || ofModel === null) continue;
+        expect(ofModel).toEqual(own);
+        if (own.flat().length > 0) for (const { kind } of diagram.blocks) compared.add(kind);
+      }
+    });
+    expect([...compared].sort()).toEqual(KINDS);
+  });
+});
+
 /** How many entries of the transfer matrix grow without bound: at s = 10⁴⁰ they are far above 10²⁰, others below. */
 function growingEntries(diagram: Diagram): number {
   const far = transferMatrix(diagram, rational(10n ** 40n));
