@@ -10,6 +10,7 @@ import { writeMatrixMarket } from './matrix-market.ts';
 import { writeModelFile } from './model-file.ts';
 import { writeNpz } from './npz.ts';
 import { writePlainText } from './plain-text.ts';
+import { writeReport, writeWorkingsLatex, writeWorkingsText } from './workings/index.ts';
 
 /** In the order in which they are offered. */
 export const FORMATS: readonly Format[] = [
@@ -93,6 +94,33 @@ export const FORMATS: readonly Format[] = [
     isBinary: false,
     scope: 'model',
     write: writePlainText,
+  },
+  {
+    id: 'workings',
+    label: 'Workings, plain text',
+    extension: 'workings.txt',
+    mime: 'text/plain;charset=utf-8',
+    isBinary: false,
+    scope: 'model',
+    write: writeWorkingsText,
+  },
+  {
+    id: 'workings-latex',
+    label: 'Workings, LaTeX',
+    extension: 'workings.tex',
+    mime: 'application/x-tex',
+    isBinary: false,
+    scope: 'model',
+    write: writeWorkingsLatex,
+  },
+  {
+    id: 'report',
+    label: 'Report (HTML)',
+    extension: 'report.html',
+    mime: 'text/html;charset=utf-8',
+    isBinary: false,
+    scope: 'model',
+    write: writeReport,
   },
   {
     id: 'diagram',

@@ -67,7 +67,7 @@ describe('arguments', () => {
 });
 
 describe('arguments are refused', () => {
-  const formats = 'model, csv, matrix-market, npz, python, c, latex, mathml, text';
+  const formats = 'model, csv, matrix-market, npz, python, c, latex, mathml, text, workings, workings-latex, report';
   test.each([
     [[], 'No command is given. Write derive, check or link; --help tells more.'],
     [['dervie', 'a'], 'There is no command "dervie". Did you mean derive?'],
