@@ -11,7 +11,8 @@ import { writeMathml } from '../mathml.ts';
 import { modelWarnings } from '../model-file.ts';
 import { oneLine } from '../one-line.ts';
 import { escaped, sheetSvg } from '../sheet-svg/index.ts';
-import { type WrittenLine, type WrittenTerm, writtenWorkings } from './written-workings.ts';
+import { linesMathml } from './workings-mathml.ts';
+import { writtenWorkings } from './written-workings.ts';
 
 const STYLE = `body{font-family:serif;max-width:60rem;margin:2rem auto;padding:0 1rem;color:#000;background:#fff}
 svg{max-width:100%;height:auto}table{border-collapse:collapse}th,td{padding:.2rem .8rem;text-align:left}
@@ -90,28 +91,9 @@ function checkOf({ derivation: { selfCheck } }: ModelContext): string {
 function workingsOf(context: ModelContext): string {
   const { sections, note } = writtenWorkings(context);
   const written = sections.map(({ title, remarks, lines }) => {
-    const equations = lines.map(line => `<mtr>${lineCells(line)}</mtr>`).join('');
     const said = remarks.map(remark => `<p>${escaped(remark)}</p>`).join('');
-    const math = lines.length === 0 ? '' : mathElement(`<mtable displaystyle="true">${equations}</mtable>`, 'block');
+    const math = lines.length === 0 ? '' : linesMathml(lines);
     return `<h3>${escaped(title)}</h3>${said}<div class="wide">${math}</div>`;
   });
   return [...(note === '' ? [] : [`<p>${escaped(note)}</p>`]), ...written].join('\n');
-}
-
-const UPRIGHT_D = '<mi mathvariant="normal">d</mi>';
-const DERIVATIVE = `<mfrac>${UPRIGHT_D}<mrow>${UPRIGHT_D}<mi>t</mi></mrow></mfrac>`;
-
-/** Left side, sign of equality, right side. */
-function lineCells({ left, isDerivative, terms }: WrittenLine): string {
-  const name = `${isDerivative ? DERIVATIVE : ''}${nameToMathML(left)}`;
-  const right = terms.length === 0 ? '<mn>0</mn>' : terms.map(mathTerm).join('');
-  return `<mtd><mrow>${name}</mrow></mtd><mtd><mo>=</mo></mtd><mtd><mrow>${right}</mrow></mtd>`;
-}
-
-function mathTerm({ isNegative, coefficient, of }: WrittenTerm, i: number): string {
-  const sign = isNegative ? '<mo>−</mo>' : i === 0 ? '' : '<mo>+</mo>';
-  if (coefficient === null) return sign + nameToMathML(of);
-  const { isSum, mathml } = coefficient;
-  const shown = isSum ? `<mrow><mo>(</mo>${mathml}<mo>)</mo></mrow>` : mathml;
-  return `${sign}${shown}<mo>⋅</mo>${nameToMathML(of)}`;
 }

@@ -2,14 +2,13 @@
 
 import { nameToLatex } from '../../expression/index.ts';
 import { CAUTION } from '../caution.ts';
-import type { ModelContext } from '../format.ts';
 import { oneLine, wrapped } from '../one-line.ts';
-import { type WrittenLine, type WrittenTerm, writtenWorkings } from './written-workings.ts';
+import { type WorkingsContext, type WrittenLine, type WrittenTerm, writtenWorkings } from './written-workings.ts';
 
 const WIDTH = 100;
 
 /** Title, then each section under its heading with a line for each equation, then the caution. */
-export function writeWorkingsText(context: ModelContext): string {
+export function writeWorkingsText(context: WorkingsContext): string {
   const { sections, note } = writtenWorkings(context);
   return [
     oneLine(context.diagram.title),
@@ -27,7 +26,8 @@ export function writeWorkingsText(context: ModelContext): string {
   ].join('\n');
 }
 
-function textLine({ left, isDerivative, terms }: WrittenLine): string {
+/** One line as plain text. */
+export function textLine({ left, isDerivative, terms }: WrittenLine): string {
   const name = oneLine(left);
   return `${isDerivative ? `d/dt ${name}` : name} = ${joined(terms, textTerm)}`;
 }
@@ -38,7 +38,7 @@ const textTerm = ({ coefficient, of }: WrittenTerm) => {
 };
 
 /** The same as LaTeX: a section under a comment, its equations aligned at their signs of equality. */
-export function writeWorkingsLatex(context: ModelContext): string {
+export function writeWorkingsLatex(context: WorkingsContext): string {
   const { sections, note } = writtenWorkings(context);
   const comments = [oneLine(context.diagram.title), note, CAUTION].filter(each => each !== '');
   return [

@@ -8,6 +8,7 @@ import {
   formulaText,
   type RationalFunction,
 } from '../../algebra/symbolic/index.ts';
+import type { UncheckedDerivation } from '../../compile/index.ts';
 import { exactWorkings, MOST_SIGNALS, symbolicWorkings, type WorkingSection } from '../../compile/workings/index.ts';
 import { toLatex, toMathML } from '../../expression/index.ts';
 import type { ModelContext } from '../format.ts';
@@ -47,6 +48,11 @@ export interface WrittenWorkings {
   readonly note: string;
 }
 
+/** What workings are written from; they do not wait for the check. */
+export interface WorkingsContext extends Omit<ModelContext, 'derivation'> {
+  readonly derivation: UncheckedDerivation;
+}
+
 /** In the notation of the context; numbers where formulas would be too long. */
 export function writtenWorkings({
   diagram,
@@ -54,7 +60,7 @@ export function writtenWorkings({
   notation,
   expanded = false,
   minimal,
-}: ModelContext): WrittenWorkings {
+}: WorkingsContext): WrittenWorkings {
   if (minimal !== undefined)
     return { sections: [], note: 'Workings are of the whole drawing, not of the minimal model.' };
   if (derivation.route === 'double') return { sections: [], note: TOO_LARGE };

@@ -47,4 +47,11 @@ export const RESULT_TABS: readonly [ResultTab, ...ResultTab[]] = [
     isOfChannel: false,
     View: lazy(() => import('../requirements/index.ts').then(room => ({ default: room.RequirementsTab }))),
   },
+  {
+    id: 'workings',
+    label: 'Workings',
+    title: 'Workings',
+    isOfChannel: false,
+    View: lazy(() => import('../workings/index.ts').then(room => ({ default: room.WorkingsTab }))),
+  },
 ];

@@ -9,5 +9,6 @@ export const TOPIC_MODULES: { readonly [T in TopicName]: () => Promise<TopicModu
   requirements: () => import('./requirements.ts'),
   structure: () => import('./structure.ts'),
   trace: () => import('./trace.ts'),
+  workings: () => import('./workings.ts'),
   'transfer-matrix': () => import('./transfer-matrix.ts'),
 };

@@ -6,6 +6,7 @@ import type { StructureTopic } from './structure.ts';
 import type { SymbolsTopic } from './symbols.ts';
 import type { TraceTopic } from './trace.ts';
 import type { TransferMatrixTopic } from './transfer-matrix.ts';
+import type { WorkingsTopic } from './workings.ts';
 
 export interface Topics {
   readonly response: ResponseTopic;
@@ -13,6 +14,7 @@ export interface Topics {
   readonly requirements: RequirementsTopic;
   readonly structure: StructureTopic;
   readonly trace: TraceTopic;
+  readonly workings: WorkingsTopic;
   readonly 'transfer-matrix': TransferMatrixTopic;
 }
 
