@@ -91,4 +91,11 @@ for (const colorScheme of ['light', 'dark'] as const) {
     await expect(page.getByLabel('Change of state')).toBeVisible();
     expect(await findings(page)).toEqual([]);
   });
+  test(`the workings, ${colorScheme}`, async ({ page }) => {
+    await page.emulateMedia({ colorScheme });
+    await openWorkedDrawing(page);
+    await page.getByRole('tab', { name: 'Workings' }).click();
+    await expect(page.getByRole('heading', { name: 'Result', exact: true })).toBeVisible();
+    expect(await findings(page)).toEqual([]);
+  });
 }

@@ -34,7 +34,7 @@ export function WorkingsTab() {
           <ul>
             {lines.map(line => (
               <li key={line.text}>
-                <FormulaView mathml={line.mathml} text={line.text} isBlock />
+                <FormulaView mathml={line.mathml} text={line.text} />
               </li>
             ))}
           </ul>
