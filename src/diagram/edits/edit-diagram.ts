@@ -22,6 +22,7 @@ import {
 import { addCut, removeCut, withCutsOnWires } from './cut-edits.ts';
 import type { Edit, SheetEdit } from './edit.ts';
 import { setField, setMatrices } from './field-edits.ts';
+import { foldBlocks, unfoldGroup } from './group-edits.ts';
 import {
   addParameter,
   removeParameter,
@@ -76,6 +77,8 @@ const CAN_CLASH: ReadonlySet<SheetEdit['kind']> = new Set([
   'addBlock',
   'addBlocks',
   'insertOnWire',
+  'foldBlocks',
+  'unfoldGroup',
   'renameBlock',
   'setField',
   'setMatrices',
@@ -142,6 +145,10 @@ function editSheet(sheet: Sheet, edit: SheetEdit): Result<Sheet> {
       return nameWire(sheet, edit);
     case 'insertOnWire':
       return insertOnWire(sheet, edit);
+    case 'foldBlocks':
+      return foldBlocks(sheet, edit);
+    case 'unfoldGroup':
+      return unfoldGroup(sheet, edit);
     case 'addAnnotations':
       return addAnnotations(sheet, edit);
     case 'removeAnnotations':

@@ -221,6 +221,18 @@ export interface RemoveRequirement {
   readonly index: number;
 }
 
+/** Blocks of a sheet into a group that stands where they stood; `group` with a number where it has no name. */
+export interface FoldBlocks extends OnSheet {
+  readonly kind: 'foldBlocks';
+  readonly ids: readonly string[];
+  readonly name?: string;
+}
+/** What a group holds back onto the sheet. */
+export interface UnfoldGroup extends OnSheet {
+  readonly kind: 'unfoldGroup';
+  readonly id: string;
+}
+
 /** An edit of what stands on one sheet. */
 export type SheetEdit =
   | AddBlock
@@ -240,6 +252,8 @@ export type SheetEdit =
   | SetVia
   | NameWire
   | InsertOnWire
+  | FoldBlocks
+  | UnfoldGroup
   | AddAnnotations
   | RemoveAnnotations
   | MoveAnnotations
