@@ -175,6 +175,10 @@ export function unfoldGroup(sheet: Sheet, { id }: UnfoldGroup): Result<Sheet> {
     const message = `${blockTitleAtStart(group)} is no group. Only a group can be unfolded.`;
     return fail(problem('bad-value', message, { blocks: [id] }));
   }
+  if (goesInCircle(sheet, group)) {
+    const message = `${blockTitleAtStart(group)}: a signal goes straight through it and back into it, which no wire can do. Break that loop first.`;
+    return fail(problem('bad-value', message, { blocks: [id] }));
+  }
   const inner = group.sheet;
   const held = inner.blocks.filter(({ kind }) => kind !== 'input' && kind !== 'output');
   const outside = sheet.blocks.filter(block => block !== group);
@@ -192,8 +196,27 @@ export function unfoldGroup(sheet: Sheet, { id }: UnfoldGroup): Result<Sheet> {
   });
 }
 
+/** Whether a signal that an input of the group hands straight to an output comes back to that input by wires alone. */
+function goesInCircle({ wires }: Sheet, { id, sheet }: GroupBlock): boolean {
+  const terminals = (kind: 'input' | 'output') =>
+    sheet.blocks.filter(block => block.kind === kind).map(block => block.id);
+  const [inputs, outputs] = [terminals('input'), terminals('output')];
+  // For each input the input whose signal it is given through the group itself; −1 where it is another signal.
+  const before = inputs.map((_, port) => {
+    const from = wires.find(({ to }) => to[0] === id && to[1] === port)?.from;
+    if (from?.[0] !== id) return -1;
+    const inner = sheet.wires.find(({ to }) => to[0] === outputs[from[1]])?.from[0];
+    return inner === undefined ? -1 : inputs.indexOf(inner);
+  });
+  return before.some((_, start) => {
+    let port = start;
+    for (let step = 0; step <= before.length && port >= 0; step++) port = before[port] ?? -1;
+    return port >= 0;
+  });
+}
+
 /** Ids on the outer sheet by those inside; an id that is taken there gets a number. */
-export function newIds(held: readonly Block[], outside: readonly Block[]): ReadonlyMap<string, string> {
+function newIds(held: readonly Block[], outside: readonly Block[]): ReadonlyMap<string, string> {
   const taken = new Set(outside.map(({ id }) => id));
   const ids = new Map<string, string>();
   for (const { id } of held) {
