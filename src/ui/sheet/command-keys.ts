@@ -7,6 +7,7 @@ import { setSignOfWires, turnLastSign } from '../commands/change-sign.ts';
 import { chooseNextWire } from '../commands/choose-wire.ts';
 import { duplicateChosen } from '../commands/clipboard.ts';
 import { cutChosen } from '../commands/cut-chosen.ts';
+import { foldChosen, unfoldChosen } from '../commands/fold-chosen.ts';
 import { pullOutChosen } from '../commands/insert-in-wire.ts';
 import type { KeyRow } from '../keys/index.ts';
 import { actions, store } from '../store/index.ts';
@@ -44,6 +45,8 @@ export const COMMAND_KEYS: readonly KeyRow[] = [
   },
   { ...ON_SHEET, keys: ['l'], does: 'arrange the selected blocks, or the whole drawing', act: arrange },
   { ...ON_SHEET, keys: ['Ctrl+a'], does: 'select everything', act: selectAll },
+  { ...ON_SHEET, keys: ['Alt+g'], does: 'fold the selected blocks into a group', act: () => foldChosen() },
+  { ...ON_SHEET, keys: ['Alt+Shift+g'], does: 'unfold the selected group', act: () => unfoldChosen() },
   { ...ON_SHEET, keys: ['Ctrl+d'], does: 'duplicate', act: () => duplicateChosen() },
   {
     ...ON_SHEET,

@@ -1,0 +1,42 @@
+/** Folds the selected blocks into a group, and unfolds the selected group, each one undo step; what came of it is selected. */
+
+import { type Diagram, displayName, type GroupBlock } from '../../diagram/index.ts';
+import { actions, store } from '../store/index.ts';
+
+/** True where there was something to fold, refused or not. */
+export function foldChosen(): boolean {
+  const { selection, document } = store.getState();
+  if (selection.blocks.size === 0) {
+    actions.notify('Select the blocks that are to be folded into a group.');
+    return true;
+  }
+  if (actions.edit({ kind: 'foldBlocks', ids: [...selection.blocks] }).length > 0) return true;
+  const [group] = blocksSince(document.diagram);
+  if (group === undefined) return true;
+  actions.selectBlocks([group.id]);
+  actions.notify(`Folded ${selection.blocks.size} blocks into group ${displayName(group)}.`);
+  return true;
+}
+
+/** Unfolds the one group that is selected. */
+export function unfoldChosen(): boolean {
+  const { selection, document } = store.getState();
+  const groups = document.diagram.blocks.filter(
+    (block): block is GroupBlock => block.kind === 'group' && selection.blocks.has(block.id),
+  );
+  const [group] = groups;
+  if (group === undefined || groups.length > 1) {
+    actions.notify('Select one group to unfold.');
+    return true;
+  }
+  if (actions.edit({ kind: 'unfoldGroup', id: group.id }).length > 0) return true;
+  actions.selectBlocks(blocksSince(document.diagram).map(({ id }) => id));
+  actions.notify(`Unfolded group ${displayName(group)}.`);
+  return true;
+}
+
+/** The blocks that stand on the sheet now and did not before. */
+function blocksSince({ blocks }: Diagram) {
+  const known = new Set(blocks.map(({ id }) => id));
+  return store.getState().document.diagram.blocks.filter(({ id }) => !known.has(id));
+}
