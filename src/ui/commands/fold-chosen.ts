@@ -1,5 +1,6 @@
 /** Folds the selected blocks into a group, and unfolds the selected group, each one undo step; what came of it is selected. */
 
+import { blockRectangle, sheetGeometry } from '../../diagram/geometry/index.ts';
 import { type Diagram, displayName, type GroupBlock } from '../../diagram/index.ts';
 import { actions, store } from '../store/index.ts';
 
@@ -10,12 +11,47 @@ export function foldChosen(): boolean {
     actions.notify('Select the blocks that are to be folded into a group.');
     return true;
   }
-  if (actions.edit({ kind: 'foldBlocks', ids: [...selection.blocks] }).length > 0) return true;
+  actions.asOneStep(() => {
+    const isRefused = actions.edit({ kind: 'foldBlocks', ids: [...selection.blocks] }).length > 0;
+    const [folded] = isRefused ? [] : blocksSince(document.diagram);
+    if (folded !== undefined) giveRoom(folded.id);
+  });
   const [group] = blocksSince(document.diagram);
   if (group === undefined) return true;
   actions.selectBlocks([group.id]);
   actions.notify(`Folded ${selection.blocks.size} blocks into group ${displayName(group)}.`);
   return true;
+}
+
+/** Sheet units between the places that are tried, and how many are. */
+const STEP = 20;
+const MOST_STEPS = 60;
+
+/** Moves a block down, or where that is shorter up, to where it covers no other one. */
+function giveRoom(id: string): void {
+  const sheet = store.getState().document.diagram;
+  const geometry = sheetGeometry(sheet);
+  const frames = sheet.blocks.flatMap(block => {
+    const placed = geometry.get(block.id);
+    return placed === undefined ? [] : [{ id: block.id, ...blockRectangle(block, placed) }];
+  });
+  const own = frames.find(frame => frame.id === id);
+  if (own === undefined) return;
+  const isFree = (dy: number) =>
+    frames.every(
+      other =>
+        other === own ||
+        other.left >= own.right + STEP ||
+        other.right <= own.left - STEP ||
+        other.top >= own.bottom + dy + STEP ||
+        other.bottom <= own.top + dy - STEP,
+    );
+  for (let step = 0; step <= MOST_STEPS; step++) {
+    const dy = [step * STEP, -step * STEP].find(isFree);
+    if (dy === undefined) continue;
+    if (dy !== 0) actions.edit({ kind: 'moveBlocks', ids: [id], dx: 0, dy });
+    return;
+  }
 }
 
 /** Unfolds the one group that is selected. */
