@@ -87,7 +87,7 @@ test('plain text is copied to the clipboard', async ({ page, context }) => {
   await context.grantPermissions(['clipboard-read', 'clipboard-write']);
   await openWorkedDrawing(page);
   await page.getByRole('button', { name: 'Export…' }).click();
-  await page.getByRole('button', { name: /^Copy .*text/i }).click();
+  await page.getByRole('button', { name: 'Copy Plain text table' }).click();
   await expect(page.getByRole('status').filter({ hasText: 'Copied' })).toBeVisible();
   const copied = await page.evaluate(() => navigator.clipboard.readText());
   expect(copied).toContain('-5/16');

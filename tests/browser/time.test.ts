@@ -19,6 +19,7 @@ test('a limiter acts, the linear answer stands beside it, and both are said', as
   await expect(panel(page)).toContainText('Dashed: the linear model: limiters as unity.');
   await expect(panel(page)).toContainText('at its upper limit from 0 s to 0.750 s');
   await panel(page).getByLabel('until / s').fill('2');
+  await expect(plot(page)).toHaveAttribute('aria-valuemax', '2');
   await plot(page).focus();
   await page.keyboard.press('Home');
   for (let k = 0; k < 25; k++) await page.keyboard.press('ArrowRight');
