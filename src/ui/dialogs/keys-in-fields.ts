@@ -48,8 +48,7 @@ export const OTHER_WAYS: Readonly<Record<string, readonly KeyLine[]>> = {
     { shown: 'Tab  Shift+Tab', does: 'into the sheet, then from block to block' },
     { shown: 'Ctrl+C  Ctrl+X  Ctrl+V', does: 'copy, cut, paste: as a drawing in text, from window to window' },
     { shown: 'Alt+drag', does: 'pull a block out of its wires' },
-    { shown: 'press, hold, drag', does: 'by touch on a block: pull it out of its wires; on paper: select by a frame' },
-    { shown: 'Shift+drag', does: 'select by a frame, beside what is selected already' },
+    { shown: 'Shift+drag', does: 'select by a frame' },
   ],
   'On a wire': [
     { shown: 'drag', does: 'draw a branch; from the arrowhead, move that end' },
